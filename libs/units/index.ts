@@ -1,1 +1,21 @@
 export * from './errors.js';
+export * from './brands.js';
+export {
+  compareRatios,
+  divide,
+  multiply,
+  parseDecimal,
+  ratio,
+  toRatio,
+  type Ratio,
+  type RatioInput,
+} from './ratio.js';
+export {
+  formatExactRatio,
+  formatRatio,
+  ratioErrorPercent,
+  ratioToFixed,
+  ratioToNumber,
+  withinTolerance,
+} from './ratio-figures.js';
+export { convergents, mediants, type Approximation, type ApproximationLimits } from './approximations.js';
