@@ -19,3 +19,7 @@ export {
   withinTolerance,
 } from './ratio-figures.js';
 export { convergents, mediants, type Approximation, type ApproximationLimits } from './approximations.js';
+export { CURRENCY_CODES, currencyDecimals } from './currencies.js';
+export { addMoney, formatMoney, money, multiplyMoney, parseMoney, type Money } from './money.js';
+export * from './format.js';
+export { parseQuantity, type QuantityKind } from './parse-quantity.js';
