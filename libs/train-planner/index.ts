@@ -1,0 +1,20 @@
+export type { Envelope, Objective, OptionRequest, PlannerShiftPolicy, WholeRange } from './option-request.js';
+export type {
+  Box,
+  OptionStage,
+  SearchControl,
+  SearchOutcome,
+  SearchProgress,
+  TrainOption,
+  WhyNot,
+} from './train-option.js';
+export type {
+  SpecGear,
+  SpecStage,
+  TrainCheck,
+  TrainFigures,
+  TrainShaft,
+  TrainSpec,
+  Verdict,
+} from './train-spec.js';
+export { trainStrip, type StripGear, type StripShape } from './train-strip.js';
