@@ -32,7 +32,7 @@ export function formatArcmin(arcmin: Figure): string {
 /** Signed per cent to 0.001 %: `+0.267 %`, `−0.133 %`, `0.000 %`. */
 export function formatErrorPercent(percent: Figure): string {
   const text = formatNumber(percent, 3);
-  const plus = typeof percent === 'number' && percent > 0 && Number(text) !== 0 ? '+' : '';
+  const plus = typeof percent === 'number' && percent > 0 && Number(text) > 0 ? '+' : '';
   return withUnit(plus + text, ' %');
 }
 

@@ -8,7 +8,10 @@ const PER_RADIAN = 180 / Math.PI;
 const POUND_FORCE = 4.4482216152605;
 const POUND_FOOT = POUND_FORCE * 0.3048;
 
-/** Unit spellings (compared after `plainUnit`) and their size in the kind's base unit, which stands first. */
+/**
+ * Unit spellings (compared after `plainUnit`) and their size in the kind's base unit, which stands first.
+ * Units that differ from another by case alone (mW and MW) are left out rather than guessed.
+ */
 const UNITS: Record<QuantityKind, { base: string; factors: Record<string, number> }> = {
   length: {
     base: 'mm',
@@ -30,12 +33,12 @@ const UNITS: Record<QuantityKind, { base: string; factors: Record<string, number
     base: 'rpm',
     factors: { rpm: 1, '1/min': 1, 'r/min': 1, 'min-1': 1, '1/s': 60, 'rad/s': 30 / Math.PI },
   },
-  power: { base: 'kW', factors: { kw: 1, w: 1e-3, mw: 1e3, hp: 0.55 * POUND_FOOT } },
+  power: { base: 'kW', factors: { kw: 1, w: 1e-3, hp: 0.55 * POUND_FOOT } },
   stress: {
     base: 'MPa',
     factors: { mpa: 1, 'n/mm2': 1, gpa: 1e3, kpa: 1e-3, bar: 0.1, psi: POUND_FORCE / 645.16 },
   },
-  mass: { base: 'kg', factors: { kg: 1, g: 1e-3, mg: 1e-6, t: 1e3, lb: 0.45359237 } },
+  mass: { base: 'kg', factors: { kg: 1, g: 1e-3, t: 1e3, lb: 0.45359237 } },
   module: { base: 'mm', factors: { mm: 1, m: 1 } },
   percent: { base: '%', factors: { '%': 1, '‰': 0.1, ppm: 1e-4 } },
 };
@@ -63,7 +66,8 @@ export function parseQuantity(text: string, kind: QuantityKind, field = 'value')
     throw fieldError(field, shown, `“${shown}” is not a figure. Write it like ${example(kind)}.`);
   }
   const [, sign = '', , , exponent = '', unitText = ''] = match;
-  const factor = unitText === '' ? 1 : factors[plainUnit(unitText, kind)];
+  const unit = plainUnit(unitText, kind);
+  const factor = unit === '' ? 1 : Object.hasOwn(factors, unit) ? factors[unit] : undefined;
   if (factor === undefined) {
     const message = `“${unitText}” is no unit for this figure. Write it in ${base}, like ${example(kind)}.`;
     throw fieldError(field, shown, message, base);
