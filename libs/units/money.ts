@@ -74,11 +74,12 @@ export function parseMoney(text: string, currency?: string, field = 'amount'): M
   if (found === undefined) {
     throw fieldError(field, shorten(text), 'The amount has no currency. Write it like 12.50 EUR.');
   }
+  const decimals = decimalsOf(found, field);
   if (currency !== undefined && found !== currency) {
+    decimalsOf(currency);
     const message = `The amount is in ${found}, but ${currency} is expected here.`;
     throw fieldError(field, shorten(text), message, currency);
   }
-  const decimals = decimalsOf(found, field);
   const figure = code === undefined ? trimmed : trimmed.replace(code, '').trim();
   const match = figure.length <= 40 ? AMOUNT.exec(figure) : null;
   if (!match) {

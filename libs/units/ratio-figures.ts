@@ -40,7 +40,8 @@ export function withinTolerance(
 ): boolean {
   const tolerance = toRatio(tolerancePercent, 'tolerancePercent');
   if (tolerance.numerator < 0n) {
-    throw fieldError('tolerancePercent', String(tolerancePercent), 'The tolerance must be 0 % or more.', 0);
+    const shown = ratioToFixed(tolerance, 3);
+    throw fieldError('tolerancePercent', shown, 'The tolerance must be 0 % or more.', 0);
   }
   const error = exactErrorPercent(toRatio(value, 'value'), positiveTarget(target));
   const size = error.numerator < 0n ? { ...error, numerator: -error.numerator } : error;
