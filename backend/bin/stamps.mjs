@@ -6,7 +6,7 @@ import { ROOT } from './process.mjs';
 
 // Inside node_modules: whoever removes that folder removes the stamps with it.
 const FOLDER = path.join(ROOT, 'node_modules/.stageyard');
-const LEFT_OUT = new Set(['node_modules', 'dist', 'data', 'test-results', 'playwright-report']);
+const LEFT_OUT = new Set(['node_modules', 'dist', 'test-results', 'playwright-report']);
 
 function* filesBelow(place) {
   if (!existsSync(place)) return;
