@@ -1,0 +1,36 @@
+import useSWR, { mutate } from 'swr';
+import { answer, api } from '../client';
+import type { Train, TrainPatch } from '../types';
+
+const keyOf = (code: string) => ['/api/trains/{code}', code] as const;
+
+/** One train with every figure; not read again on focus, so that a form never changes underfoot. */
+export function useTrain(code: string) {
+  return useSWR(
+    keyOf(code),
+    ([, trainCode]) => answer(api.GET('/api/trains/{code}', { params: { path: { code: trainCode } } })),
+    { revalidateOnFocus: false, revalidateOnReconnect: false },
+  );
+}
+
+/** Puts a train the server has sent in front of every screen that shows it. */
+export async function keepTrain(train: Train): Promise<Train> {
+  await mutate(keyOf(train.code), train, { revalidate: false });
+  const touched = ['/api/trains', '/api/trains/{code}/bom', '/api/trains/{code}/changes', '/api/overview'];
+  void mutate((key) => Array.isArray(key) && touched.includes(String(key[0])));
+  return train;
+}
+
+/** @throws Problem 400 naming the fields, 409 `changed-meanwhile` with the train as it stands now */
+export async function saveTrain(code: string, patch: TrainPatch): Promise<Train> {
+  return keepTrain(
+    await answer(api.PATCH('/api/trains/{code}', { params: { path: { code } }, body: patch })),
+  );
+}
+
+/** Who changed the train, when, and what; newest first. */
+export function useTrainChanges(code: string, page = 1) {
+  return useSWR(['/api/trains/{code}/changes', code, page], () =>
+    answer(api.GET('/api/trains/{code}/changes', { params: { path: { code }, query: { page, size: 50 } } })),
+  );
+}

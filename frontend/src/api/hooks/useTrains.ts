@@ -1,0 +1,22 @@
+import useSWR, { mutate } from 'swr';
+import { answer, api } from '../client';
+import type { paths } from '../schema';
+import type { Train, TrainInput } from '../types';
+import { refreshBrief } from './useBrief';
+
+export type TrainQuery = NonNullable<paths['/api/trains']['get']['parameters']['query']>;
+
+/** One page of trains; the page before stays on the screen while the next is read. */
+export function useTrains(query: TrainQuery) {
+  return useSWR(['/api/trains', query], () => answer(api.GET('/api/trains', { params: { query } })), {
+    keepPreviousData: true,
+  });
+}
+
+/** Makes a pinned or listed option a train of its own, revision A. */
+export async function adoptOption(input: TrainInput): Promise<Train> {
+  const train = await answer(api.POST('/api/trains', { body: input }));
+  void mutate((key) => Array.isArray(key) && (key[0] === '/api/trains' || key[0] === '/api/overview'));
+  void refreshBrief(input.briefId);
+  return train;
+}

@@ -1,0 +1,45 @@
+import type { components } from './schema';
+
+/** Short names for what the server sends and takes; the schema is generated from its OpenAPI document. */
+type Schemas = components['schemas'];
+
+export type Me = Schemas['Me'];
+export type Role = Me['roles'][number];
+export type Permission = Me['permissions'][number];
+export type Welcome = Schemas['Welcome'];
+export type User = Schemas['User'];
+export type Part = Schemas['Part'];
+export type PartKind = Part['kind'];
+export type PartStanding = Part['standing'];
+export type PartPage = Schemas['PartPage'];
+export type PartInput = Schemas['PartInput'];
+export type PartPatch = Schemas['PartPatch'];
+export type Facets = Schemas['Facets'];
+export type Change = Schemas['Change'];
+export type ChangePage = Schemas['ChangePage'];
+export type Requirement = Schemas['Requirement'];
+export type Brief = Schemas['Brief'];
+export type BriefSummary = Schemas['BriefSummary'];
+export type BriefPage = Schemas['BriefPage'];
+export type BriefInput = Schemas['BriefInput'];
+export type BriefPatch = Schemas['BriefPatch'];
+export type Search = Schemas['Search'];
+export type SearchSummary = Schemas['SearchSummary'];
+export type Pin = Schemas['Pin'];
+export type TrainOption = Schemas['TrainOption'];
+export type SearchOutcome = Schemas['SearchOutcome'];
+export type WhyNot = Schemas['WhyNot'];
+export type Train = Schemas['Train'];
+export type TrainSummary = Schemas['TrainSummary'];
+export type TrainPage = Schemas['TrainPage'];
+export type TrainInput = Schemas['TrainInput'];
+export type TrainPatch = Schemas['TrainPatch'];
+export type TrainFigures = Schemas['TrainFigures'];
+export type TrainSpec = Schemas['TrainSpec'];
+export type MeshGeometry = Schemas['MeshGeometry'];
+export type GearGeometry = Schemas['GearGeometry'];
+export type Finding = Schemas['Finding'];
+export type Bom = Schemas['Bom'];
+export type BomLine = Schemas['BomLine'];
+export type Overview = Schemas['Overview'];
+export type FinderResult = Schemas['FinderResult'];

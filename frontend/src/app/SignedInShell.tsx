@@ -1,0 +1,10 @@
+import { AppShell } from './AppShell';
+import { RequireSignIn } from './RequireSignIn';
+
+export function SignedInShell() {
+  return (
+    <RequireSignIn>
+      <AppShell />
+    </RequireSignIn>
+  );
+}

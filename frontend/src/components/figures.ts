@@ -1,0 +1,43 @@
+/** Figures as the screens write them: real minus sign, fixed decimals, a dash where nothing is known. */
+
+export const NOTHING = '–';
+
+const MINUS = '\u2212';
+
+/** Fixed decimals with a real minus sign; `–` for null, undefined or what is not a number. */
+export function formatFixed(value: number | null | undefined, decimals: number): string {
+  if (value === null || value === undefined || !Number.isFinite(value)) return NOTHING;
+  const text = value.toFixed(decimals);
+  // "-0.00" is a rounding artefact, not a sign a reader should wonder about.
+  return Number(text) === 0 ? text.replace('-', '') : text.replace('-', MINUS);
+}
+
+/** Like `formatFixed`, with a plus sign on positive values. */
+export function formatSigned(value: number | null | undefined, decimals: number): string {
+  const text = formatFixed(value, decimals);
+  return text === NOTHING || text.startsWith(MINUS) || Number(text) === 0 ? text : `+${text}`;
+}
+
+/** At most the given decimals, without trailing zeros: modules, angles, quantities. */
+export function formatPlain(value: number | null | undefined, decimals = 4): string {
+  if (value === null || value === undefined || !Number.isFinite(value)) return NOTHING;
+  return String(Number(value.toFixed(decimals))).replace('-', MINUS);
+}
+
+/** Whole numbers with thousands separators: 1,842. */
+export function formatCount(value: number): string {
+  return value.toLocaleString('en-GB');
+}
+
+const WHEN = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short' });
+const DAY = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium' });
+
+/** "1 Dec 2026, 14:05" in the reader's time zone. */
+export function formatWhen(iso: string): string {
+  return WHEN.format(new Date(iso));
+}
+
+/** "1 Dec 2026". */
+export function formatDay(iso: string): string {
+  return DAY.format(new Date(iso));
+}
