@@ -1,4 +1,4 @@
-import { useRef, type ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { Navigate, useLocation } from 'react-router-dom';
 import { useMe } from '../api/hooks/useMe';
 import { ErrorState } from '../components/ErrorState';
@@ -12,11 +12,8 @@ import { SignInAgain } from './SignInAgain';
 export function RequireSignIn({ children }: { children: ReactNode }) {
   const { me, problem, isLoading, mutate } = useMe();
   const location = useLocation();
-  const lastEmail = useRef<string | null>(null);
-  /* eslint-disable react-hooks/refs -- the ref only remembers who was here; it never decides on its own */
-  if (me) lastEmail.current = me.email;
-  const wasHere = lastEmail.current;
-  /* eslint-enable react-hooks/refs */
+  const [wasHere, setWasHere] = useState<string | null>(null);
+  if (me && me.email !== wasHere) setWasHere(me.email);
   if (me === undefined && problem !== null)
     return <ErrorState problem={problem} onRetry={() => void mutate()} />;
   if (me === undefined && isLoading) return <PageLoading />;

@@ -27,7 +27,13 @@ export function stageCountWords(count: number): string {
 export const ratioWords = (value: number): string => formatNumber(value, 3);
 
 /** `75/2 : 1`, or `36 : 1` for a whole ratio. */
-export function exactRatioWords({ numerator, denominator }: { numerator: string; denominator: string }): string {
+export function exactRatioWords({
+  numerator,
+  denominator,
+}: {
+  numerator: string;
+  denominator: string;
+}): string {
   return denominator === '1' ? `${numerator} : 1` : `${numerator}/${denominator} : 1`;
 }
 

@@ -4,7 +4,7 @@ import type { Components, Theme } from '@mui/material/styles';
 type Look = Components<Omit<Theme, 'components'>>;
 
 const focusRing = (theme: Omit<Theme, 'components'>) => ({
-  outline: `2px solid ${theme.vars!.palette.secondary.main}`,
+  outline: `2px solid ${theme.vars.palette.secondary.main}`,
   outlineOffset: 1,
 });
 
@@ -18,13 +18,13 @@ const controls: Look = {
     styleOverrides: {
       root: { minHeight: 34, paddingInline: 14, borderRadius: 3, whiteSpace: 'nowrap' },
       outlined: ({ theme }) => ({
-        borderColor: theme.vars!.palette.primary.main,
+        borderColor: theme.vars.palette.primary.main,
         backgroundColor: 'transparent',
-        '&:hover': { backgroundColor: theme.vars!.palette.wash.green },
+        '&:hover': { backgroundColor: theme.vars.palette.wash.green },
       }),
       text: ({ theme }) => ({
         paddingInline: 8,
-        '&:hover': { backgroundColor: theme.vars!.palette.wash.hover },
+        '&:hover': { backgroundColor: theme.vars.palette.wash.hover },
       }),
     },
   },
@@ -33,8 +33,8 @@ const controls: Look = {
     styleOverrides: {
       root: ({ theme }) => ({
         borderRadius: 3,
-        color: theme.vars!.palette.text.secondary,
-        '&:hover': { backgroundColor: theme.vars!.palette.wash.hover },
+        color: theme.vars.palette.text.secondary,
+        '&:hover': { backgroundColor: theme.vars.palette.wash.hover },
       }),
     },
   },
@@ -45,12 +45,12 @@ const controls: Look = {
       root: ({ theme }) => ({
         paddingBlock: 3,
         paddingInline: 10,
-        color: theme.vars!.palette.text.secondary,
-        borderColor: theme.vars!.palette.line.rule,
+        color: theme.vars.palette.text.secondary,
+        borderColor: theme.vars.palette.line.rule,
         '&.Mui-selected, &.Mui-selected:hover': {
-          color: theme.vars!.palette.text.primary,
-          backgroundColor: theme.vars!.palette.wash.brass,
-          boxShadow: `inset 0 -2px 0 ${theme.vars!.palette.secondary.main}`,
+          color: theme.vars.palette.text.primary,
+          backgroundColor: theme.vars.palette.wash.brass,
+          boxShadow: `inset 0 -2px 0 ${theme.vars.palette.secondary.main}`,
         },
       }),
     },
@@ -73,9 +73,9 @@ const fields: Look = {
         marginBottom: 3,
         maxWidth: '100%',
         whiteSpace: 'normal',
-        color: theme.vars!.palette.text.secondary,
-        '&.Mui-focused': { color: theme.vars!.palette.text.primary },
-        '&.Mui-error': { color: theme.vars!.palette.error.main },
+        color: theme.vars.palette.text.secondary,
+        '&.Mui-focused': { color: theme.vars.palette.text.primary },
+        '&.Mui-error': { color: theme.vars.palette.error.main },
       }),
     },
   },
@@ -83,12 +83,12 @@ const fields: Look = {
     defaultProps: { notched: false },
     styleOverrides: {
       root: ({ theme }) => ({
-        backgroundColor: theme.vars!.palette.background.paper,
+        backgroundColor: theme.vars.palette.background.paper,
         borderRadius: 3,
-        '& fieldset': { top: 0, borderColor: theme.vars!.palette.line.strong },
+        '& fieldset': { top: 0, borderColor: theme.vars.palette.line.strong },
         '& legend': { display: 'none' },
-        '&:hover:not(.Mui-error) fieldset': { borderColor: theme.vars!.palette.text.primary },
-        '&.Mui-focused fieldset': { borderColor: theme.vars!.palette.secondary.main, borderWidth: 2 },
+        '&:hover:not(.Mui-error) fieldset': { borderColor: theme.vars.palette.text.primary },
+        '&.Mui-focused fieldset': { borderColor: theme.vars.palette.secondary.main, borderWidth: 2 },
       }),
       input: {
         paddingBlock: 6.5,
@@ -112,7 +112,7 @@ const surfaces: Look = {
   MuiMenu: {
     styleOverrides: {
       paper: ({ theme }) => ({
-        border: `1px solid ${theme.vars!.palette.line.rule}`,
+        border: `1px solid ${theme.vars.palette.line.rule}`,
         boxShadow: '0 6px 20px rgb(0 0 0 / 0.16)',
       }),
       list: { paddingBlock: 4 },
@@ -124,14 +124,14 @@ const surfaces: Look = {
         minHeight: 32,
         fontSize: '0.875rem',
         paddingInline: 12,
-        '&.Mui-selected, &.Mui-selected:hover': { backgroundColor: theme.vars!.palette.wash.brass },
-        '&.Mui-focusVisible': { backgroundColor: theme.vars!.palette.wash.hover, outlineOffset: -2 },
+        '&.Mui-selected, &.Mui-selected:hover': { backgroundColor: theme.vars.palette.wash.brass },
+        '&.Mui-focusVisible': { backgroundColor: theme.vars.palette.wash.hover, outlineOffset: -2 },
       }),
     },
   },
   MuiDialog: {
     styleOverrides: {
-      paper: ({ theme }) => ({ border: `1px solid ${theme.vars!.palette.line.rule}`, borderRadius: 4 }),
+      paper: ({ theme }) => ({ border: `1px solid ${theme.vars.palette.line.rule}`, borderRadius: 4 }),
     },
   },
   MuiDialogTitle: {
@@ -145,8 +145,8 @@ const surfaces: Look = {
       root: ({ theme }) => ({
         borderRadius: 3,
         padding: '4px 12px',
-        color: theme.vars!.palette.text.primary,
-        backgroundColor: theme.vars!.palette.background.paper,
+        color: theme.vars.palette.text.primary,
+        backgroundColor: theme.vars.palette.background.paper,
       }),
     },
   },
@@ -155,14 +155,14 @@ const surfaces: Look = {
     styleOverrides: {
       tooltip: ({ theme }) => ({
         fontSize: '0.75rem',
-        backgroundColor: theme.vars!.palette.text.primary,
-        color: theme.vars!.palette.background.paper,
+        backgroundColor: theme.vars.palette.text.primary,
+        color: theme.vars.palette.background.paper,
       }),
     },
   },
   MuiSkeleton: {
     defaultProps: { animation: 'wave' },
-    styleOverrides: { root: ({ theme }) => ({ backgroundColor: theme.vars!.palette.wash.hover }) },
+    styleOverrides: { root: ({ theme }) => ({ backgroundColor: theme.vars.palette.wash.hover }) },
   },
   MuiChip: { styleOverrides: { root: { borderRadius: 3, height: 24 } } },
   MuiLink: {
@@ -180,14 +180,14 @@ const tables: Look = {
       root: ({ theme }) => ({
         fontVariantNumeric: 'tabular-nums',
         padding: '5px 10px',
-        borderBottom: `1px solid ${theme.vars!.palette.line.rule}`,
+        borderBottom: `1px solid ${theme.vars.palette.line.rule}`,
         fontSize: '0.875rem',
         lineHeight: 1.4,
       }),
       head: ({ theme }) => ({
         fontWeight: 500,
-        color: theme.vars!.palette.text.secondary,
-        borderBottom: `1px solid ${theme.vars!.palette.text.primary}`,
+        color: theme.vars.palette.text.secondary,
+        borderBottom: `1px solid ${theme.vars.palette.text.primary}`,
         verticalAlign: 'bottom',
       }),
     },
@@ -195,15 +195,15 @@ const tables: Look = {
   MuiTableRow: {
     styleOverrides: {
       root: ({ theme }) => ({
-        '&.Mui-selected, &.Mui-selected:hover': { backgroundColor: theme.vars!.palette.wash.brass },
-        '&.MuiTableRow-hover:hover': { backgroundColor: theme.vars!.palette.wash.hover },
+        '&.Mui-selected, &.Mui-selected:hover': { backgroundColor: theme.vars.palette.wash.brass },
+        '&.MuiTableRow-hover:hover': { backgroundColor: theme.vars.palette.wash.hover },
       }),
     },
   },
   MuiTabs: {
     styleOverrides: {
-      root: ({ theme }) => ({ minHeight: 36, borderBottom: `1px solid ${theme.vars!.palette.line.rule}` }),
-      indicator: ({ theme }) => ({ backgroundColor: theme.vars!.palette.secondary.main }),
+      root: ({ theme }) => ({ minHeight: 36, borderBottom: `1px solid ${theme.vars.palette.line.rule}` }),
+      indicator: ({ theme }) => ({ backgroundColor: theme.vars.palette.secondary.main }),
     },
   },
   MuiTab: {
@@ -214,8 +214,8 @@ const tables: Look = {
         padding: '6px 2px',
         marginRight: 24,
         fontWeight: 500,
-        color: theme.vars!.palette.text.secondary,
-        '&.Mui-selected': { color: theme.vars!.palette.text.primary, fontWeight: 600 },
+        color: theme.vars.palette.text.secondary,
+        '&.Mui-selected': { color: theme.vars.palette.text.primary, fontWeight: 600 },
       }),
     },
   },
@@ -231,26 +231,26 @@ const grid: Look = {
         borderRadius: 0,
         fontSize: '0.875rem',
         fontVariantNumeric: 'tabular-nums',
-        '--DataGrid-rowBorderColor': theme.vars!.palette.line.rule,
-        '& .MuiDataGrid-columnHeaders': { borderBottom: `1px solid ${theme.vars!.palette.text.primary}` },
-        '& .MuiDataGrid-columnHeaderTitle': { fontWeight: 500, color: theme.vars!.palette.text.secondary },
+        '--DataGrid-rowBorderColor': theme.vars.palette.line.rule,
+        '& .MuiDataGrid-columnHeaders': { borderBottom: `1px solid ${theme.vars.palette.text.primary}` },
+        '& .MuiDataGrid-columnHeaderTitle': { fontWeight: 500, color: theme.vars.palette.text.secondary },
         '& .MuiDataGrid-columnSeparator': { opacity: 0 },
         '& .MuiDataGrid-columnHeader:hover .MuiDataGrid-columnSeparator': { opacity: 1 },
         '& .MuiDataGrid-cell': { paddingInline: 10 },
         '& .MuiDataGrid-columnHeader': { paddingInline: 10 },
         '& .MuiDataGrid-cell:focus-visible, & .MuiDataGrid-columnHeader:focus-visible': {
-          outline: `2px solid ${theme.vars!.palette.secondary.main}`,
+          outline: `2px solid ${theme.vars.palette.secondary.main}`,
           outlineOffset: -2,
         },
         '& .MuiDataGrid-row': { cursor: 'pointer' },
-        '& .MuiDataGrid-row:hover': { backgroundColor: theme.vars!.palette.wash.hover },
+        '& .MuiDataGrid-row:hover': { backgroundColor: theme.vars.palette.wash.hover },
         '& .MuiDataGrid-row.Mui-selected, & .MuiDataGrid-row.Mui-selected:hover': {
-          backgroundColor: theme.vars!.palette.wash.brass,
-          boxShadow: `inset 3px 0 0 ${theme.vars!.palette.secondary.main}`,
+          backgroundColor: theme.vars.palette.wash.brass,
+          boxShadow: `inset 3px 0 0 ${theme.vars.palette.secondary.main}`,
         },
         '& .MuiDataGrid-footerContainer': {
           minHeight: 40,
-          borderTop: `1px solid ${theme.vars!.palette.line.rule}`,
+          borderTop: `1px solid ${theme.vars.palette.line.rule}`,
         },
       }),
     },

@@ -2,6 +2,7 @@ import { useEffect, useState } from 'react';
 import useSWR from 'swr';
 import { answer, api } from '../client';
 import { asProblem } from '../problem';
+import type { FinderResult } from '../types';
 
 const PAUSE_MS = 180;
 
@@ -12,9 +13,9 @@ export function useFinder(text: string) {
     const timer = setTimeout(() => setSettled(text.trim().slice(0, 200)), PAUSE_MS);
     return () => clearTimeout(timer);
   }, [text]);
-  const { data, error, isLoading } = useSWR(
+  const { data, error, isLoading } = useSWR<FinderResult, unknown>(
     settled === '' ? null : ['/api/finder', settled],
-    ([, wanted]) => answer(api.GET('/api/finder', { params: { query: { text: wanted } } })),
+    ([, wanted]: [string, string]) => answer(api.GET('/api/finder', { params: { query: { text: wanted } } })),
     { keepPreviousData: true, revalidateOnFocus: false },
   );
   return {

@@ -17,7 +17,9 @@ async function whoAmI(): Promise<Me | null> {
 
 /** Who is signed in (`null`: nobody, `undefined`: not known yet) and what they may do. */
 export function useMe() {
-  const { data, error, isLoading, mutate } = useSWR(ME_KEY, whoAmI, { shouldRetryOnError: false });
+  const { data, error, isLoading, mutate } = useSWR<Me | null, unknown>(ME_KEY, whoAmI, {
+    shouldRetryOnError: false,
+  });
   const can = (permission: Permission): boolean => data?.permissions.includes(permission) ?? false;
   return { me: data, can, problem: error === undefined ? null : asProblem(error), isLoading, mutate };
 }

@@ -1,0 +1,99 @@
+import Box from '@mui/material/Box';
+import {
+  DataGrid,
+  type GridColDef,
+  type GridRowId,
+  type GridRowSelectionModel,
+  type GridValidRowModel,
+} from '@mui/x-data-grid';
+import { useState, type ReactNode } from 'react';
+import type { Problem } from '../api/problem';
+import { ErrorState } from './ErrorState';
+import type { ListState } from './useListState';
+
+interface DataTableProps<Row extends GridValidRowModel> {
+  label: string;
+  columns: GridColDef<Row>[];
+  rows: readonly Row[] | undefined;
+  /** Rows in all, as the server counts; undefined while not known. */
+  total: number | undefined;
+  getRowId: (row: Row) => GridRowId;
+  state: Pick<ListState<string>, 'page' | 'size' | 'sort' | 'setPage' | 'setSort'>;
+  loading: boolean;
+  problem: Problem | null;
+  onRetry: () => void;
+  onOpen: (row: Row) => void;
+  /** Stands in place of rows when there are none. */
+  empty: ReactNode;
+  /** Tick boxes for copying rows; the parent holds the selection. */
+  selection?: GridRowSelectionModel;
+  onSelection?: (model: GridRowSelectionModel) => void;
+  hidden?: Record<string, boolean>;
+  height?: string;
+}
+
+/**
+ * A server-side table on the community data grid. Filters and the second sort key live outside (the grid has one of
+ * each); the address holds page and sort; the row count stays steady while the next page is on its way.
+ */
+export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<Row>) {
+  const { state, problem } = props;
+  // The last known count stands while a page loads; the grid would go back to its first page otherwise.
+  const [rowCount, setRowCount] = useState(0);
+  if (props.total !== undefined && props.total !== rowCount) setRowCount(props.total);
+  if (problem !== null && props.rows === undefined) {
+    return <ErrorState problem={problem} onRetry={props.onRetry} what={props.label.toLowerCase()} />;
+  }
+  const [first] = state.sort;
+  return (
+    <Box sx={{ height: props.height ?? 'calc(100dvh - 236px)', minHeight: 380, bgcolor: 'background.paper' }}>
+      <DataGrid<Row>
+        aria-label={props.label}
+        columns={props.columns}
+        rows={props.rows ?? []}
+        getRowId={props.getRowId}
+        loading={props.loading}
+        rowHeight={32}
+        columnHeaderHeight={34}
+        density="standard"
+        rowCount={rowCount}
+        paginationMode="server"
+        sortingMode="server"
+        filterMode="server"
+        paginationModel={{ page: state.page - 1, pageSize: state.size }}
+        pageSizeOptions={[25, 50, 100]}
+        onPaginationModelChange={({ page, pageSize }) => {
+          // The grid clamps to page 0 while the count is unknown; that is not the reader's wish.
+          if (props.total !== undefined) state.setPage(pageSize === state.size ? page + 1 : 1, pageSize);
+        }}
+        sortModel={first ? [{ field: first.field, sort: first.down ? 'desc' : 'asc' }] : []}
+        onSortModelChange={([key]) => {
+          const second = state.sort[1];
+          const main = key ? [{ field: key.field, down: key.sort === 'desc' }] : [];
+          state.setSort(second && key && second.field !== key.field ? [...main, second] : main);
+        }}
+        columnVisibilityModel={props.hidden ?? {}}
+        disableColumnFilter
+        disableColumnMenu
+        disableRowSelectionOnClick
+        checkboxSelection={props.selection !== undefined}
+        rowSelectionModel={props.selection}
+        onRowSelectionModelChange={props.onSelection}
+        onRowClick={({ row }) => props.onOpen(row as Row)}
+        onCellKeyDown={({ row, field }, event) => {
+          if (event.key === 'Enter' && field !== '__check__') props.onOpen(row as Row);
+        }}
+        slots={{ noRowsOverlay: EmptyOverlay, noResultsOverlay: EmptyOverlay }}
+        slotProps={{
+          noRowsOverlay: { children: props.empty },
+          loadingOverlay: { variant: 'skeleton', noRowsVariant: 'skeleton' },
+        }}
+      />
+    </Box>
+  );
+}
+
+/** The grid's own overlay centres one short line; ours says what to do next. */
+function EmptyOverlay({ children }: { children?: ReactNode }) {
+  return <Box sx={{ position: 'relative', zIndex: 1, whiteSpace: 'normal' }}>{children}</Box>;
+}
