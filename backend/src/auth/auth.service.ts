@@ -1,0 +1,120 @@
+import { Inject, Injectable } from '@nestjs/common';
+import { InjectRepository } from '@nestjs/typeorm';
+import { Repository } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
+import { ProblemError } from '../common/errors.js';
+import { WriteQueue } from '../database/write-queue.js';
+import { SETTINGS, type Settings } from '../settings/settings.js';
+import { UserEntity } from '../users/entities/user.entity.js';
+import { UsersService } from '../users/users.service.js';
+import { DEMO_PASSWORD, DEMO_PEOPLE } from './demo-people.js';
+import { type FirstAdminInput } from './dto/first-admin-input.js';
+import { type SignInInput } from './dto/sign-in-input.js';
+import { type Welcome } from './dto/welcome.js';
+import { InvitationsService } from './invitations.service.js';
+import { passwordMatches } from './passwords.js';
+import { SessionsService, toSignedInUser } from './sessions.service.js';
+import { SignInThrottle } from './sign-in-throttle.js';
+import { type SignedInUser } from './signed-in-user.js';
+
+/** Somebody who just signed in, and the cookie that proves it from now on. */
+export interface Arrival {
+  person: SignedInUser;
+  cookie: string;
+}
+
+@Injectable()
+export class AuthService {
+  constructor(
+    @InjectRepository(UserEntity) private readonly users: Repository<UserEntity>,
+    private readonly people: UsersService,
+    private readonly sessions: SessionsService,
+    private readonly invitations: InvitationsService,
+    private readonly throttle: SignInThrottle,
+    private readonly audit: AuditService,
+    private readonly queue: WriteQueue,
+    @Inject(SETTINGS) private readonly settings: Settings,
+  ) {}
+
+  welcome(): Welcome {
+    const { demo } = this.settings;
+    return {
+      demo,
+      accounts: demo ? DEMO_PEOPLE.map(({ email, name, role }) => ({ email, name, role })) : [],
+      password: demo ? DEMO_PASSWORD : null,
+    };
+  }
+
+  /**
+   * @param address where the request came from, for the throttle
+   * @throws ProblemError 401 for a wrong pair, whichever half is wrong; 429 after too many of them
+   */
+  async signIn({ email, password }: SignInInput, address: string): Promise<Arrival> {
+    const key = email.trim().toLowerCase();
+    this.throttle.attempt(address, key);
+    const user = await this.users.findOne({
+      where: { email: key },
+      select: {
+        id: true,
+        name: true,
+        email: true,
+        roles: true,
+        active: true,
+        demo: true,
+        passwordHash: true,
+      },
+    });
+    const matches = await passwordMatches(user?.passwordHash ?? null, password);
+    if (!user || !matches || !this.sessions.mayUse(user)) throw wrongPair();
+    this.throttle.succeeded(address, key);
+    return this.arrive(user);
+  }
+
+  async signOut(person: SignedInUser): Promise<void> {
+    await this.queue.run(async (manager) => {
+      await this.sessions.end(manager, person.sessionId);
+      await this.audit.record(manager, {
+        actor: person,
+        action: 'signed out',
+        entity: 'session',
+        entityId: person.id,
+        summary: `${person.name} signed out`,
+      });
+    });
+  }
+
+  /**
+   * Makes the first administrator and signs them in. The link works once.
+   * @throws ProblemError 403 when the link is unknown, used or too old
+   */
+  async firstAdmin({ token, ...input }: FirstAdminInput, address: string): Promise<Arrival> {
+    this.throttle.attempt(address, 'first-admin');
+    const details = { ...input, roles: ['admin' as const] };
+    const passwordHash = await this.people.hashFor(details);
+    const user = await this.queue.run(async (manager) => {
+      await this.invitations.redeem(manager, token);
+      return this.people.insert(manager, { ...details, passwordHash }, { id: null, name: 'First start' });
+    });
+    this.throttle.succeeded(address, 'first-admin');
+    return this.arrive(user);
+  }
+
+  private async arrive(user: UserEntity): Promise<Arrival> {
+    return this.queue.run(async (manager) => {
+      const { cookie, sessionId } = await this.sessions.start(manager, user.id);
+      await this.audit.record(manager, {
+        actor: user,
+        action: 'signed in',
+        entity: 'session',
+        entityId: user.id,
+        summary: `${user.name} signed in`,
+      });
+      return { cookie, person: toSignedInUser(user, sessionId) };
+    });
+  }
+}
+
+function wrongPair(): ProblemError {
+  const message = 'The e-mail address or the password is wrong. Check both, then try again.';
+  return new ProblemError(401, 'wrong-sign-in', message);
+}

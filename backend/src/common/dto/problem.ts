@@ -1,0 +1,44 @@
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+
+/** One field at fault. */
+export class ProblemField {
+  @ApiProperty({ type: String, description: 'Dotted path as in the request, such as pinion.teeth.' })
+  field!: string;
+
+  @ApiProperty({ description: 'The value sent; long text is cut, secrets are left out.', nullable: true })
+  value: unknown;
+
+  @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string' }] })
+  limit?: number | string;
+
+  @ApiProperty({ type: String })
+  message!: string;
+}
+
+/** The shape of every refusal. */
+export class Problem {
+  @ApiProperty({ type: 'integer' })
+  statusCode!: number;
+
+  @ApiProperty({ type: String, description: 'For programs; stable.' })
+  code!: string;
+
+  @ApiProperty({ type: String, description: 'For people: what, why, and what to do.' })
+  message!: string;
+
+  @ApiPropertyOptional({ type: [ProblemField] })
+  errors?: ProblemField[];
+
+  @ApiProperty({ type: String, description: 'Also in the server log, to find the request again.' })
+  requestId!: string;
+
+  @ApiPropertyOptional({
+    type: 'object',
+    additionalProperties: true,
+    description: 'Of a stale edit (code changed-meanwhile): the thing as it stands now.',
+  })
+  current?: Record<string, unknown>;
+
+  @ApiPropertyOptional({ type: String, description: 'Of a second search: the one that still runs.' })
+  searchId?: string;
+}

@@ -1,0 +1,60 @@
+import { AsyncLocalStorage } from 'node:async_hooks';
+import { Injectable, Logger, type OnApplicationShutdown } from '@nestjs/common';
+import { type DataSource, type EntityManager } from 'typeorm';
+
+interface RunningWrite {
+  open: boolean;
+}
+
+/** The driver is synchronous: a write that holds the queue this long is worth a line in the log. */
+const SLOW_MS = 250;
+
+/**
+ * The only way to change the database. Works are run one after the other, each in a transaction of its own:
+ * a work that throws is rolled back alone, and its error reaches the caller.
+ */
+@Injectable()
+export class WriteQueue implements OnApplicationShutdown {
+  readonly #source: DataSource;
+  readonly #running = new AsyncLocalStorage<RunningWrite>();
+  readonly #logger = new Logger(WriteQueue.name);
+  #tail: Promise<unknown> = Promise.resolve();
+  #closed = false;
+
+  constructor(source: DataSource) {
+    this.#source = source;
+  }
+
+  /**
+   * Runs the work in a transaction once everything queued before it is settled. Resolves after the commit.
+   * @param work changes the database only through the manager it is given
+   * @throws Error when called from inside another work: that would wait for itself for ever
+   */
+  async run<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
+    if (this.#running.getStore()?.open) {
+      throw new Error('WriteQueue.run was called inside a write. Pass the manager on instead.');
+    }
+    if (this.#closed) throw new Error('The database is closed.');
+    const result = this.#tail.then(() => this.#transaction(work));
+    this.#tail = result.catch(() => undefined);
+    return result;
+  }
+
+  async onApplicationShutdown(): Promise<void> {
+    this.#closed = true;
+    await this.#tail;
+    if (this.#source.isInitialized) await this.#source.destroy();
+  }
+
+  async #transaction<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
+    const write: RunningWrite = { open: true };
+    const start = performance.now();
+    try {
+      return await this.#running.run(write, () => this.#source.transaction(work));
+    } finally {
+      write.open = false;
+      const elapsed = performance.now() - start;
+      if (elapsed > SLOW_MS) this.#logger.warn(`A write held the queue for ${elapsed.toFixed(0)} ms`);
+    }
+  }
+}

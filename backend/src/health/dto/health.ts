@@ -1,0 +1,6 @@
+import { ApiProperty } from '@nestjs/swagger';
+
+export class Health {
+  @ApiProperty({ enum: ['ok'] })
+  status!: 'ok';
+}
