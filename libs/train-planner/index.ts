@@ -18,3 +18,5 @@ export type {
   Verdict,
 } from './train-spec.js';
 export { trainStrip, type StripGear, type StripShape } from './train-strip.js';
+export { REQUEST_BOUNDS, validateOptionRequest } from './validate-request.js';
+export { searchOptions } from './search-options.js';

@@ -1,5 +1,3 @@
-import { type RatioInput } from '../units/index.js';
-
 /** Whole numbers, both ends allowed. */
 export interface WholeRange {
   min: number;
@@ -45,8 +43,8 @@ export interface OptionRequest {
   limit?: number;
 }
 
-/** A request whose defaults are filled in and whose fields are known to be good. */
+/** A request whose defaults are filled in and whose fields are known to be good. Still a valid request itself. */
 export interface CheckedRequest extends Required<Omit<OptionRequest, 'envelope' | 'stageRatio'>> {
-  stageRatio: { min: RatioInput; max?: RatioInput };
+  stageRatio: { min: string | number; max?: string | number };
   envelope?: Envelope;
 }

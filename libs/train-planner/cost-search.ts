@@ -1,0 +1,147 @@
+import { type BestList } from './best-list.js';
+import { RatioBounds } from './ratio-bounds.js';
+import { countTrains, distanceLimit, TrainIntake, type SearchSpace } from './search-space.js';
+import { firstAbove, firstNotBelow, RangeLeast } from './sorted-search.js';
+import { type WorkWatch } from './work-watch.js';
+
+/** Widens float windows so that a ratio on the limit is always looked at; the exact check follows. */
+const WIDER = 1 + 1e-14;
+
+/**
+ * Best trains by an additive whole-number cost. Depth first over falling ratios; a branch is left when its cost
+ * plus the least cost of the ratio still missing exceeds the worst train kept, or when it can no longer fit the
+ * length. Ties are always followed, so the outcome is exact.
+ */
+export function searchByCost(space: SearchSpace, best: BestList, watch: WorkWatch): void {
+  if (space.pool.length > 0) new CostSearch(space, best, watch).run();
+}
+
+class CostSearch {
+  readonly #space: SearchSpace;
+  readonly #best: BestList;
+  readonly #watch: WorkWatch;
+  readonly #intake: TrainIntake;
+  readonly #cost: Float64Array;
+  readonly #least: RangeLeast;
+  readonly #costBounds: RatioBounds;
+  readonly #distanceBounds: RatioBounds | null;
+  readonly #distanceLimit: number;
+  readonly #logs: Float64Array;
+  readonly #logLow: number;
+  /** Rows chosen so far, by level. */
+  readonly #chosen: number[] = [];
+  /** Ranges still to visit, one stack for each level, as pairs of ends. */
+  readonly #pending: number[][];
+
+  constructor(space: SearchSpace, best: BestList, watch: WorkWatch) {
+    const { pool, window, stages } = space;
+    this.#space = space;
+    this.#best = best;
+    this.#watch = watch;
+    this.#intake = new TrainIntake(space, best);
+    this.#cost = space.objective === 'mass' ? pool.mass : pool.distance;
+    this.#least = new RangeLeast(this.#cost);
+    this.#costBounds = new RatioBounds(pool.ratio, this.#cost, window.low, window.high);
+    this.#distanceLimit = distanceLimit(space);
+    this.#distanceBounds =
+      this.#distanceLimit === Infinity
+        ? null
+        : new RatioBounds(pool.ratio, pool.distance, window.low, window.high);
+    this.#logs = pool.ratio.map(Math.log);
+    this.#logLow = Math.log(window.low);
+    this.#pending = Array.from({ length: stages }, () => []);
+  }
+
+  run(): void {
+    const { pool, stages, ordered } = this.#space;
+    if (stages === 1) {
+      this.#visitLast(0, pool.length, 0, 0, 1, 1);
+    } else {
+      for (const { row, bound } of this.#firstStages()) {
+        if (bound > this.#best.costLimit) break;
+        this.#choose(0, row, 0, 0, 1, 1);
+        const before = countTrains(row, stages, ordered);
+        this.#watch.settled += countTrains(row + 1, stages, ordered) - before;
+      }
+    }
+  }
+
+  /** First stages that may lead to a train, the most promising first. */
+  #firstStages(): { row: number; bound: number }[] {
+    const { stages, window } = this.#space;
+    const rest = stages - 1 === 1 ? 1 : 2;
+    const found: { row: number; bound: number }[] = [];
+    for (let row = 0; row < this.#logs.length; row++) {
+      const ratio = this.#space.pool.ratio[row] as number;
+      // No later stage has a larger ratio than the first.
+      if (ratio ** stages * WIDER < window.low) continue;
+      const missing = this.#logLow - (this.#logs[row] as number);
+      const bound = (this.#cost[row] as number) + this.#costBounds.least(rest, missing);
+      if (bound < Infinity) found.push({ row, bound });
+    }
+    return found.sort((a, b) => a.bound - b.bound || b.row - a.row);
+  }
+
+  /** Takes `row` as stage `level` and goes on to the stages after it. */
+  #choose(level: number, row: number, cost: number, distance: number, n: number, d: number): void {
+    const { pool, stages, window } = this.#space;
+    this.#watch.step();
+    const nextCost = cost + (this.#cost[row] as number);
+    const nextDistance = distance + (pool.distance[row] as number);
+    const nextN = n * (pool.wheel[row] as number);
+    const nextD = d * (pool.pinion[row] as number);
+    const rest = stages - level - 1 === 1 ? 1 : 2;
+    const missing = this.#logLow - Math.log(nextN / nextD);
+    if (nextCost + this.#costBounds.least(rest, missing) > this.#best.costLimit) return;
+    if (this.#distanceBounds) {
+      if (nextDistance + this.#distanceBounds.least(rest, missing) > this.#distanceLimit) return;
+    }
+    this.#chosen[level] = row;
+    if (rest === 1) {
+      this.#visitLast(0, row + 1, nextCost, nextDistance, nextN, nextD);
+      return;
+    }
+    const low = (window.low * nextD) / nextN;
+    const high = (window.high * nextD) / nextN;
+    // The next of two stages has the larger ratio of them, and leaves at least the smallest for the last.
+    const from = firstNotBelow(pool.ratio, Math.sqrt(low) / WIDER, 0, row + 1);
+    const to = firstAbove(pool.ratio, (high / (pool.ratio[0] as number)) * WIDER, from, row + 1);
+    const stack = this.#pending[level + 1] as number[];
+    stack.push(from, to);
+    while (stack.length > 0) {
+      const end = stack.pop() as number;
+      const start = stack.pop() as number;
+      if (start >= end) continue;
+      const cheapest = this.#least.at(start, end);
+      if (nextCost + (this.#cost[cheapest] as number) > this.#best.costLimit) continue;
+      stack.push(cheapest + 1, end, start, cheapest);
+      this.#choose(level + 1, cheapest, nextCost, nextDistance, nextN, nextD);
+    }
+  }
+
+  /** Settles every row in [from, to) as the last stage, cheapest first. */
+  #visitLast(from: number, to: number, cost: number, distance: number, n: number, d: number): void {
+    const { pool, stages, window } = this.#space;
+    const start = firstNotBelow(pool.ratio, (window.low * d) / n / WIDER, from, to);
+    const end = firstAbove(pool.ratio, ((window.high * d) / n) * WIDER, start, to);
+    const stack = this.#pending[stages - 1] as number[];
+    stack.push(start, end);
+    while (stack.length > 0) {
+      const right = stack.pop() as number;
+      const left = stack.pop() as number;
+      if (left >= right) continue;
+      this.#watch.step();
+      const row = this.#least.at(left, right);
+      const total = cost + (this.#cost[row] as number);
+      if (total > this.#best.costLimit) continue;
+      stack.push(row + 1, right, left, row);
+      const sum = distance + (pool.distance[row] as number);
+      if (sum > this.#distanceLimit) continue;
+      const trainN = n * (pool.wheel[row] as number);
+      const trainD = d * (pool.pinion[row] as number);
+      if (!window.contains(trainN, trainD)) continue;
+      this.#chosen[stages - 1] = row;
+      this.#intake.take(this.#chosen, total, sum, trainN, trainD);
+    }
+  }
+}

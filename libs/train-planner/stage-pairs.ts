@@ -1,0 +1,160 @@
+import {
+  gearRadii,
+  HOUSE_LIMITS,
+  meshInterferes,
+  meshKernel,
+  zeroBacklashDistance,
+  type GearFigures,
+} from '../gear-geometry/index.js';
+import { leastClearShift } from '../gear-geometry/shift.js';
+import { degToRad } from '../units/index.js';
+import { type CheckedRequest } from './option-request.js';
+import { PairPoolBuilder, type PairPool } from './pair-pool.js';
+import { compareFraction } from './ratio-window.js';
+import { type ExactLimit, type StageLimits } from './stage-limits.js';
+import { toNm } from './train-box.js';
+import { type WorkWatch } from './work-watch.js';
+
+/** kg/m³, solid steel discs: without a material every gear counts as steel. */
+export const DEFAULT_DENSITY = 7850;
+
+/** One gear of the request's module and shift policy. */
+export interface StageGear extends GearFigures {
+  shift: number;
+  tipDiameterNm: number;
+  /** mg, a solid disc at the reference diameter. */
+  discMass: number;
+}
+
+/** Makes the pairs a request allows as stages. Gears and the dear interference checks are kept between calls. */
+export class StagePairs {
+  readonly module: number;
+  /** Whole mm. */
+  readonly faceWidth: number;
+  readonly #request: CheckedRequest;
+  readonly #watch: WorkWatch;
+  readonly #gears = new Map<number, StageGear | null>();
+  readonly #interference = new Map<number, boolean>();
+
+  constructor(request: CheckedRequest, watch: WorkWatch) {
+    this.#request = request;
+    this.#watch = watch;
+    this.module = Math.min(...request.modules);
+    // The product of two decimals carries float noise: 10 × 1.1 is 11, not the next whole number.
+    this.faceWidth = Math.ceil(request.faceWidthFactor * this.module - 1e-9);
+  }
+
+  /** The gear, or null when its tip is pointed or thinner than the house allows. */
+  gear(teeth: number): StageGear | null {
+    let gear = this.#gears.get(teeth);
+    if (gear === undefined) {
+      gear = this.#makeGear(teeth);
+      this.#gears.set(teeth, gear);
+    }
+    return gear;
+  }
+
+  /** Every pair within the limits that has a sound tip and does not interfere. */
+  within(limits: StageLimits): PairPool {
+    const builder = new PairPoolBuilder();
+    const wheels = this.#gearsWithin(limits.wheel, limits);
+    for (const pinion of this.#gearsWithin(limits.pinion, limits)) {
+      for (const wheel of wheels) {
+        this.#watch.step();
+        this.#addPair(pinion, wheel, limits, builder);
+      }
+    }
+    return builder.build();
+  }
+
+  #gearsWithin({ min, max }: { min: number; max: number }, limits: StageLimits): StageGear[] {
+    const gears: StageGear[] = [];
+    for (let teeth = min; teeth <= max; teeth++) {
+      const gear = this.gear(teeth);
+      if (!gear || (gear.undercut && limits.refuseUndercut)) continue;
+      if (gear.tipDiameterNm <= limits.greatestTipDiameter) gears.push(gear);
+    }
+    return gears;
+  }
+
+  #addPair(pinion: StageGear, wheel: StageGear, limits: StageLimits, builder: PairPoolBuilder): void {
+    if (!ratioWithin(wheel.teeth, pinion.teeth, limits)) return;
+    const centreDistance = this.#distance(pinion, wheel);
+    if (!(centreDistance > pinion.base + wheel.base)) return;
+    const contactRatio = meshKernel(pinion, wheel, centreDistance, pinion.basePitch);
+    if (contactRatio < limits.leastContactRatio) return;
+    if (this.#interferes(pinion, wheel, centreDistance)) return;
+    builder.add({
+      pinion: pinion.teeth,
+      wheel: wheel.teeth,
+      ratio: wheel.teeth / pinion.teeth,
+      centreDistance,
+      distance: toNm(centreDistance),
+      mass: Math.round(pinion.discMass + wheel.discMass),
+      pinionTip: pinion.tip,
+      wheelTip: wheel.tip,
+      contactRatio,
+      undercut: pinion.undercut || wheel.undercut ? 1 : 0,
+    });
+  }
+
+  /** Operating distance: without backlash, plus the allowance. */
+  #distance(pinion: StageGear, wheel: StageGear): number {
+    const { pressureAngleDeg, helixAngleDeg, centreDistanceAllowance } = this.#request;
+    const zeroBacklash = zeroBacklashDistance(
+      pinion.teeth,
+      wheel.teeth,
+      pinion.shift,
+      wheel.shift,
+      this.module,
+      degToRad(pressureAngleDeg),
+      degToRad(helixAngleDeg),
+    );
+    return zeroBacklash + centreDistanceAllowance * this.module;
+  }
+
+  #interferes(pinion: StageGear, wheel: StageGear, centreDistance: number): boolean {
+    const key = pinion.teeth * 65536 + wheel.teeth;
+    let verdict = this.#interference.get(key);
+    if (verdict === undefined) {
+      verdict =
+        meshInterferes(pinion, wheel, centreDistance) ||
+        tipHitsRoot(pinion, wheel, centreDistance) ||
+        tipHitsRoot(wheel, pinion, centreDistance);
+      this.#interference.set(key, verdict);
+    }
+    return verdict;
+  }
+
+  #makeGear(teeth: number): StageGear | null {
+    const { pressureAngleDeg, helixAngleDeg, shiftPolicy } = this.#request;
+    const input = { teeth, module: this.module, pressureAngleDeg, helixAngleDeg };
+    let figures = gearRadii(input);
+    let shift = 0;
+    if (shiftPolicy === 'clear-undercut' && figures.leastShift > 0) {
+      shift = leastClearShift(input);
+      figures = gearRadii({ ...input, profileShift: shift });
+    }
+    if (figures.tipThickness < HOUSE_LIMITS.tipThickness * this.module) return null;
+    const discVolume = Math.PI * figures.reference ** 2 * this.faceWidth;
+    // 1 kg/m³ is 1e-3 mg/mm³.
+    const discMass = discVolume * DEFAULT_DENSITY * 1e-3;
+    return { ...figures, shift, tipDiameterNm: toNm(2 * figures.tip), discMass };
+  }
+}
+
+/** Teeth that run into the mate's root cannot turn, wherever their flanks would touch. */
+function tipHitsRoot(gear: StageGear, mate: StageGear, centreDistance: number): boolean {
+  return centreDistance - gear.tip - mate.root < -1e-9 * gear.module;
+}
+
+function ratioWithin(wheel: number, pinion: number, { ratioMin, ratioMax }: StageLimits): boolean {
+  if (compareStageRatio(wheel, pinion, ratioMin) < 0) return false;
+  return ratioMax === null || compareStageRatio(wheel, pinion, ratioMax) <= 0;
+}
+
+/** Sign of wheel/pinion − limit: by floats where they are clear, else exact. */
+function compareStageRatio(wheel: number, pinion: number, limit: ExactLimit): number {
+  const apart = wheel / pinion - limit.value;
+  return Math.abs(apart) > 1e-9 ? apart : compareFraction(wheel, pinion, limit.exact);
+}
