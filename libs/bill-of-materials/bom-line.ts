@@ -1,0 +1,54 @@
+import { type GearDataRow } from './gear-data.js';
+import { type BomKind } from './part-kinds.js';
+
+/** One line of a bill of materials. */
+export interface BomLine {
+  findNumber: number;
+  /** The library's number, or the number chosen although the library does not hold it; null when there is none. */
+  partNumber: string | null;
+  kind: BomKind;
+  description: string;
+  quantity: number;
+  unit: 'pcs' | 'l' | 'm';
+  material: string | null;
+  supply: 'made' | 'bought';
+  supplier: string | null;
+  /** kg for one unit of quantity; null when not known. */
+  mass: number | null;
+  /** Where it is used: `Stage 1 pinion`, `Shaft 2`. */
+  source: string[];
+  note: string;
+  /** What a person must look at before ordering; empty when there is nothing. */
+  flags: string[];
+  /** For a gear to be made: its data in the order of ISO 1340. */
+  gearData?: GearDataRow[];
+}
+
+/** A line before roll-up: no find number yet. */
+export type KitItem = Omit<BomLine, 'findNumber'>;
+
+export interface BomTotals {
+  lines: number;
+  /** Lines to be made, and lines to be bought. */
+  made: number;
+  bought: number;
+  /** Sum of quantity × mass over the lines with a known mass, kg. */
+  massKg: number;
+  /** Lines whose mass is not known and so not in `massKg`. */
+  linesWithoutMass: number;
+}
+
+export function bomTotals(lines: readonly BomLine[]): BomTotals {
+  return {
+    lines: lines.length,
+    made: lines.filter((line) => line.supply === 'made').length,
+    bought: lines.filter((line) => line.supply === 'bought').length,
+    massKg: lines.reduce((sum, line) => sum + line.quantity * (line.mass ?? 0), 0),
+    linesWithoutMass: lines.filter((line) => line.mass === null).length,
+  };
+}
+
+/** The part number as shown: `to be made` or `to be chosen` where there is none yet. */
+export function partNumberText(line: Pick<BomLine, 'partNumber' | 'supply'>): string {
+  return line.partNumber ?? (line.supply === 'made' ? 'to be made' : 'to be chosen');
+}

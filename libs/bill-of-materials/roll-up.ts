@@ -1,0 +1,56 @@
+import { type BomLine, type KitItem } from './bom-line.js';
+import { type GearDataRow } from './gear-data.js';
+import { BOM_KINDS } from './part-kinds.js';
+
+/**
+ * Merges equal parts and numbers the lines. Equal means the same number, make, material, supply, mass and gear data
+ * (the mate aside); quantities add up, sources, notes and flags are kept. Lines stand by kind in the declared order
+ * and, within a kind, in the order in which they first came.
+ */
+export function rollUp(items: readonly KitItem[]): BomLine[] {
+  const merged = new Map<string, KitItem>();
+  for (const item of items) {
+    const key = identity(item);
+    const line = merged.get(key);
+    merged.set(key, line ? joined(line, item) : item);
+  }
+  const lines = [...merged.values()];
+  return BOM_KINDS.flatMap((kind, block) =>
+    lines
+      .filter((line) => line.kind === kind)
+      .map((line, index) => ({ findNumber: (block + 1) * 100 + index + 1, ...line })),
+  );
+}
+
+function identity(item: KitItem): string {
+  const teeth = item.gearData?.filter((row) => row.group !== 'mate').map((row) => row.value);
+  const { kind, partNumber, description, unit, material, supply, supplier, mass } = item;
+  return JSON.stringify([kind, partNumber, description, unit, material, supply, supplier, mass, teeth]);
+}
+
+function joined(line: KitItem, item: KitItem): KitItem {
+  const whole: KitItem = {
+    ...line,
+    // Litres are held to 0.1; the sum of decimals must not grow a tail.
+    quantity: Number((line.quantity + item.quantity).toFixed(6)),
+    source: union(line.source, item.source),
+    note: union([line.note], [item.note]).filter(Boolean).join(' '),
+    flags: union(line.flags, item.flags),
+  };
+  if (!line.gearData || !item.gearData) return whole;
+  return { ...whole, gearData: joinedGearData(line.gearData, item.gearData) };
+}
+
+/** Rows that differ (the mate's only) show every value. */
+function joinedGearData(rows: GearDataRow[], others: GearDataRow[]): GearDataRow[] {
+  return rows.map((row, index) => {
+    const other = others[index]?.value ?? null;
+    if (other === row.value) return row;
+    const values = union(String(row.value ?? 'to be made').split('; '), [String(other ?? 'to be made')]);
+    return { ...row, value: values.join('; ') };
+  });
+}
+
+function union(first: readonly string[], second: readonly string[]): string[] {
+  return [...new Set([...first, ...second])];
+}
