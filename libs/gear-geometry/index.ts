@@ -7,7 +7,21 @@ export {
   type RackTip,
   type ThicknessAllowance,
 } from './types.js';
-export { involute, inverseInvolute } from './involute.js';
-export { gearRadii } from './gear-radii.js';
-export { meshKernel, zeroBacklashDistance } from './mesh-kernel.js';
 export { type Finding, type GearGeometry, type MeshGeometry, type Severity } from './results.js';
+export { involute, inverseInvolute } from './involute.js';
+export { gearGeometry } from './gear.js';
+export { gearRadii } from './gear-radii.js';
+export { meshGeometry, type MeshInput } from './mesh.js';
+export { meshKernel, zeroBacklashDistance } from './mesh-kernel.js';
+export { meshInterferes } from './tip-corner.js';
+export { assertMeshable, huntingTooth, type HuntingTooth } from './pair.js';
+export {
+  SHIFT_POLICIES,
+  shiftForPolicy,
+  type ShiftInput,
+  type ShiftPolicy,
+  type ShiftResult,
+} from './shift.js';
+export { spanMeasurement, type SpanMeasurement } from './span.js';
+export { overPins, type PinMeasurement } from './pins.js';
+export { toothOutline, type OutlinePoint } from './outline.js';

@@ -105,3 +105,18 @@ export interface GearFigures extends GearRadii {
   leastShift: number;
   rackTip: RackTip;
 }
+
+/** Limits on a pair that a brief may set apart from the house rules. */
+export interface PairLimits {
+  contactRatio: number;
+  /** Normal tip thickness, modules. */
+  tipThickness: number;
+}
+
+/** Two checked gears with their figures. */
+export interface Pair {
+  pinion: ResolvedGear;
+  wheel: ResolvedGear;
+  p: GearFigures;
+  w: GearFigures;
+}
