@@ -1,12 +1,17 @@
 import { type DynamicModule, Module } from '@nestjs/common';
 import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
+import { CalcModule } from './calc/calc.module.js';
+import { BriefsModule } from './briefs/briefs.module.js';
 import { ClockModule } from './common/clock.js';
 import { DatabaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
 import { HouseRulesModule } from './house-rules/house-rules.module.js';
+import { OptionSearchesModule } from './option-searches/option-searches.module.js';
+import { PartsModule } from './parts/parts.module.js';
 import { type Settings } from './settings/settings.js';
 import { SettingsModule } from './settings/settings.module.js';
+import { TrainsModule } from './trains/trains.module.js';
 import { UsersModule } from './users/users.module.js';
 
 /** The whole server, one module a room. */
@@ -19,6 +24,11 @@ import { UsersModule } from './users/users.module.js';
     UsersModule,
     HealthModule,
     HouseRulesModule,
+    PartsModule,
+    CalcModule,
+    BriefsModule,
+    OptionSearchesModule,
+    TrainsModule,
   ],
 })
 export class AppModule {

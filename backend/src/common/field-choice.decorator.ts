@@ -35,15 +35,13 @@ export function FieldChoice<T extends string | number>(options: ChoiceOptions<T>
           ? value !== undefined
           : true,
     ),
-    ValidateBy(
-      {
-        name: 'choice',
-        validator: {
-          validate: (value) => values.some((allowed) => allowed === value),
-          defaultMessage: (args) => `${args?.property ?? 'The field'} must be one of: ${list}.`,
-        },
+    ValidateBy({
+      name: 'choice',
+      constraints: [list],
+      validator: {
+        validate: (value) => values.some((allowed) => allowed === value),
+        defaultMessage: (args) => `${args?.property ?? 'The field'} must be one of: ${list}.`,
       },
-      { context: { limit: list } },
-    ),
+    }),
   );
 }

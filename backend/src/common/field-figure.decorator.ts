@@ -31,16 +31,15 @@ export function FieldFigure(options: FigureOptions): PropertyDecorator {
   const { min, max, above = false, whole = false } = options;
   const range = rangeText(options);
   const check = (name: string, limit: number | undefined, passes: (value: unknown) => boolean) =>
-    ValidateBy(
-      {
-        name,
-        validator: {
-          validate: passes,
-          defaultMessage: (args) => `${args?.property ?? 'The figure'} must be ${range}.`,
-        },
+    ValidateBy({
+      name,
+      // The refusal takes the limit it names from here.
+      constraints: limit === undefined ? [] : [limit],
+      validator: {
+        validate: passes,
+        defaultMessage: (args) => `${args?.property ?? 'The figure'} must be ${range}.`,
       },
-      limit === undefined ? {} : { context: { limit } },
-    );
+    });
   return applyDecorators(
     ApiProperty({
       type: whole ? 'integer' : 'number',

@@ -31,16 +31,15 @@ export function FieldText(options: TextOptions): PropertyDecorator {
     message: string,
     passes: (value: unknown) => boolean,
   ) =>
-    ValidateBy(
-      {
-        name,
-        validator: {
-          validate: passes,
-          defaultMessage: (args) => `${args?.property ?? 'The text'} ${message}`,
-        },
+    ValidateBy({
+      name,
+      // The refusal takes the limit it names from here.
+      constraints: limit === undefined ? [] : [limit],
+      validator: {
+        validate: passes,
+        defaultMessage: (args) => `${args?.property ?? 'The text'} ${message}`,
       },
-      limit === undefined ? {} : { context: { limit } },
-    );
+    });
   return applyDecorators(
     ApiProperty({
       type: 'string',

@@ -1,0 +1,2 @@
+/** Anything else: the description and the note say what it is. */
+export class OtherAttributes {}

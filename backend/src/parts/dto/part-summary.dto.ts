@@ -1,0 +1,86 @@
+import { ApiExtraModels, ApiProperty, ApiSchema, refs } from '@nestjs/swagger';
+import { type Part } from '../entities/part.entity.js';
+import {
+  PART_KINDS,
+  PART_STANDINGS,
+  PART_SUPPLIES,
+  type PartKind,
+  type PartStanding,
+  type PartSupply,
+} from '../part-kinds.js';
+import { ATTRIBUTE_CLASSES, type PartAttributes } from './attributes/part-attributes.js';
+
+/** One row of the library: everything that is stored about a part. */
+@ApiSchema({ name: 'PartSummary' })
+@ApiExtraModels(...ATTRIBUTE_CLASSES)
+export class PartSummaryDto {
+  @ApiProperty({ type: 'string', description: 'Stays for good, whatever happens to the part' })
+  id!: string;
+
+  @ApiProperty({ type: 'string', example: 'KW-00417' })
+  number!: string;
+
+  @ApiProperty({ enum: PART_KINDS, enumName: 'PartKind' })
+  kind!: PartKind;
+
+  @ApiProperty({ type: 'string' })
+  description!: string;
+
+  @ApiProperty({ enum: PART_STANDINGS, enumName: 'PartStanding' })
+  standing!: PartStanding;
+
+  @ApiProperty({ type: 'string', nullable: true, description: 'Part to use instead of a withdrawn one' })
+  successorNumber!: string | null;
+
+  @ApiProperty({ type: 'string', nullable: true })
+  material!: string | null;
+
+  @ApiProperty({ type: 'number', nullable: true, description: 'Mass of one (kg)' })
+  mass!: number | null;
+
+  @ApiProperty({ enum: PART_SUPPLIES, enumName: 'PartSupply' })
+  supply!: PartSupply;
+
+  @ApiProperty({ type: 'string', nullable: true })
+  supplier!: string | null;
+
+  @ApiProperty({ type: 'string' })
+  note!: string;
+
+  @ApiProperty({ anyOf: refs(...ATTRIBUTE_CLASSES), description: 'The attributes of the kind' })
+  attributes!: PartAttributes;
+
+  @ApiProperty({ type: 'integer', description: 'Send it back with an edit' })
+  version!: number;
+
+  @ApiProperty({ type: 'string', format: 'date-time' })
+  createdAt!: string;
+
+  @ApiProperty({ type: 'string', format: 'date-time' })
+  updatedAt!: string;
+
+  @ApiProperty({ type: 'string', description: 'Name of the person who changed it last' })
+  updatedBy!: string;
+}
+
+/** What people see of a stored part; the index columns stay inside. */
+export function toPartSummaryDto(part: Part): PartSummaryDto {
+  return {
+    id: String(part.id),
+    number: part.number,
+    kind: part.kind,
+    description: part.description,
+    standing: part.standing,
+    successorNumber: part.successorNumber,
+    material: part.material,
+    mass: part.mass,
+    supply: part.supply,
+    supplier: part.supplier,
+    note: part.note,
+    attributes: part.attributes,
+    version: part.version,
+    createdAt: part.createdAt,
+    updatedAt: part.updatedAt,
+    updatedBy: part.updatedBy,
+  };
+}

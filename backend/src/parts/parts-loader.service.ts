@@ -1,0 +1,69 @@
+import { setImmediate as nextTurn } from 'node:timers/promises';
+import { Injectable } from '@nestjs/common';
+import { plainToInstance } from 'class-transformer';
+import { validateSync } from 'class-validator';
+import { badInput, ProblemError } from '../common/errors.js';
+import { validationProblem } from '../common/validation.js';
+import { under } from './under.js';
+import { WriteQueue } from '../database/write-queue.js';
+import { DomainError } from '@stageyard/libs/units';
+import { checkAttributes } from './check-attributes.js';
+import { type PartAttributes } from './dto/attributes/part-attributes.js';
+import { PartInputDto } from './dto/part-input.dto.js';
+import { type Actor, PartsService } from './parts.service.js';
+
+/** Parts checked or written before others get their turn: keeps each hold of the event loop well under 50 ms. */
+const CHUNK = 25;
+
+interface CheckedPart {
+  input: PartInputDto;
+  attributes: PartAttributes;
+}
+
+/** Adds many parts by the same rules as one, without keeping anybody waiting. */
+@Injectable()
+export class PartsLoader {
+  constructor(
+    private readonly parts: PartsService,
+    private readonly queue: WriteQueue,
+  ) {}
+
+  /**
+   * Checks every input first, then adds them in chunks, each in its own transaction.
+   * @returns the numbers, in the order of the inputs
+   * @throws ProblemError naming `parts.<index>.…` before anything is added; 409 for a number that is taken, after the
+   * chunks before it
+   */
+  async createMany(actor: Actor, inputs: readonly PartInputDto[]): Promise<string[]> {
+    const checked: CheckedPart[] = [];
+    for (const [index, input] of inputs.entries()) {
+      checked.push(checkPart(input, index));
+      if (index % CHUNK === CHUNK - 1) await nextTurn();
+    }
+    const numbers: string[] = [];
+    for (let start = 0; start < checked.length; start += CHUNK) {
+      const chunk = checked.slice(start, start + CHUNK);
+      await this.queue.run(async (manager) => {
+        for (const { input, attributes } of chunk) {
+          numbers.push((await this.parts.insert(manager, actor, input, attributes)).number);
+        }
+      });
+      await nextTurn();
+    }
+    return numbers;
+  }
+}
+
+function checkPart(raw: PartInputDto, index: number): CheckedPart {
+  const input = plainToInstance(PartInputDto, raw);
+  const faults = validateSync(input, { whitelist: true, forbidNonWhitelisted: true });
+  if (faults.length > 0) throw validationProblem([under(`parts.${index}`, faults)]);
+  try {
+    return { input, attributes: checkAttributes(input.kind, input.attributes) };
+  } catch (error) {
+    if (!(error instanceof DomainError || error instanceof ProblemError)) throw error;
+    throw badInput(
+      (error.errors ?? []).map((issue) => ({ ...issue, field: `parts.${index}.${issue.field}` })),
+    );
+  }
+}

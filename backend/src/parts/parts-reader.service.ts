@@ -1,0 +1,137 @@
+import { Injectable } from '@nestjs/common';
+import { InjectRepository } from '@nestjs/typeorm';
+import { Repository, type SelectQueryBuilder } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
+import { type Change } from '../audit/dto/change.js';
+import { notFound } from '../common/errors.js';
+import { type ListQueryDto, type Page, pageOf, parseListQuery, type SortKey } from '../common/list-query.js';
+import { type PartFacetsDto } from './dto/part-facets.dto.js';
+import { PART_SORTS, type PartListQueryDto, type PartSort } from './dto/part-list-query.dto.js';
+import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js';
+import { type PartDto, toPartDto } from './dto/part.dto.js';
+import { Part } from './entities/part.entity.js';
+import { type PartStanding } from './part-kinds.js';
+import { matchText } from './part-text-search.js';
+
+/** Most materials offered in the filter bar. */
+const MOST_MATERIALS = 200;
+
+/** Columns that may be empty: parts without the figure come last whichever way the list is sorted. */
+const MAY_BE_EMPTY: ReadonlySet<PartSort> = new Set(['teeth', 'module', 'faceWidth', 'bore', 'mass']);
+
+/** Everything that reads the library. */
+@Injectable()
+export class PartsReader {
+  constructor(
+    @InjectRepository(Part) private readonly parts: Repository<Part>,
+    private readonly audit: AuditService,
+  ) {}
+
+  /** One page of the library; sorted by number when nothing else is asked for. */
+  async list(query: PartListQueryDto): Promise<Page<PartSummaryDto>> {
+    const list = parseListQuery(query, PART_SORTS);
+    const rows = this.filtered(query, list.text);
+    const total = await rows.getCount();
+    order(rows, list.sorts.length > 0 ? list.sorts : [{ field: 'number', direction: 'ASC' }]);
+    const items = await rows.offset(list.skip).limit(list.size).getMany();
+    return pageOf(items.map(toPartSummaryDto), total, list);
+  }
+
+  /** What the library holds, counted for the choices of the filter bar. */
+  async facets(): Promise<PartFacetsDto> {
+    const counts = <T>(column: string, limit?: number) =>
+      this.parts
+        .createQueryBuilder('part')
+        .select(`part.${column}`, 'value')
+        .addSelect('COUNT(*)', 'count')
+        .where(`part.${column} IS NOT NULL`)
+        .groupBy(`part.${column}`)
+        .orderBy(limit ? 'count' : 'value', limit ? 'DESC' : 'ASC')
+        .limit(limit)
+        .getRawMany<{ value: T; count: number }>();
+    const materials = await counts<string>('material', MOST_MATERIALS);
+    return {
+      kinds: await counts<string>('kind'),
+      standings: await counts<string>('standing'),
+      modules: await counts<number>('module'),
+      materials: materials.sort((a, b) => a.value.localeCompare(b.value, 'en')),
+    };
+  }
+
+  /** @throws ProblemError 404 */
+  async get(number: string): Promise<PartDto> {
+    return toPartDto(await this.entity(number));
+  }
+
+  /** @throws ProblemError 404 */
+  async changes(number: string, query: ListQueryDto): Promise<Page<Change>> {
+    const part = await this.entity(number);
+    return this.audit.changesOf('part', part.number, query);
+  }
+
+  /** Parts whose number or description holds the text, best known first: the number that begins with it. */
+  async find(text: string, limit: number): Promise<Pick<PartSummaryDto, 'number' | 'description'>[]> {
+    const rows = this.filtered({}, text)
+      .select(['part.id', 'part.number', 'part.description'])
+      .addSelect(`CASE WHEN part.number LIKE :start ESCAPE '\\' THEN 0 ELSE 1 END`, 'far')
+      .setParameter('start', `${text.replace(/[\\%_]/g, '\\$&')}%`)
+      .orderBy('far')
+      .addOrderBy('part.number')
+      .limit(limit);
+    return (await rows.getMany()).map(({ number, description }) => ({ number, description }));
+  }
+
+  count(standing?: PartStanding): Promise<number> {
+    return this.parts.countBy(standing ? { standing } : {});
+  }
+
+  /** Parts of one standing, the last changed first. */
+  async latest(standing: PartStanding, limit: number): Promise<PartSummaryDto[]> {
+    const rows = await this.parts.find({ where: { standing }, order: { updatedAt: 'DESC' }, take: limit });
+    return rows.map(toPartSummaryDto);
+  }
+
+  private async entity(number: string): Promise<Part> {
+    const part = await this.parts.findOneBy({ number: number.trim() });
+    if (!part) throw notFound('part', number);
+    return part;
+  }
+
+  private filtered(query: PartListQueryDto, text: string | null): SelectQueryBuilder<Part> {
+    const rows = this.parts.createQueryBuilder('part');
+    for (const [field, condition] of CONDITIONS) {
+      const value = query[field];
+      if (value !== undefined) rows.andWhere(`part.${condition} :${field}`, { [field]: value });
+    }
+    if (text) matchText(rows, text);
+    return rows;
+  }
+}
+
+/** Each filter with the column and comparison it stands for. */
+const CONDITIONS = [
+  ['kind', 'kind ='],
+  ['standing', 'standing ='],
+  ['teethMin', 'teeth >='],
+  ['teethMax', 'teeth <='],
+  ['module', 'module ='],
+  ['pressureAngleDeg', 'pressureAngleDeg ='],
+  ['helixAngleDeg', 'helixAngleDeg ='],
+  ['hand', 'hand ='],
+  ['material', 'material ='],
+  ['boreMin', 'bore >='],
+  ['boreMax', 'bore <='],
+  ['faceWidthMin', 'faceWidth >='],
+  ['faceWidthMax', 'faceWidth <='],
+] as const;
+
+/**
+ * Sorts, with the row id as the last key so that pages never overlap. It follows the direction of the key before it,
+ * so that one index serves both.
+ */
+function order(rows: SelectQueryBuilder<Part>, sorts: SortKey<PartSort>[]): void {
+  for (const { field, direction } of sorts) {
+    rows.addOrderBy(`part.${field}`, direction, MAY_BE_EMPTY.has(field) ? 'NULLS LAST' : undefined);
+  }
+  rows.addOrderBy('part.id', sorts.at(-1)?.direction ?? 'ASC');
+}
