@@ -16,7 +16,7 @@ export interface GearDataRow {
 export interface GearDataInput extends Omit<KitGear, 'stage' | 'role'> {
   /** mm; null for a pinion cut on its shaft. */
   bore: number | null;
-  mate: { teeth: number; partNumber: string | null; centreDistance: number | null };
+  mate: { teeth: number | null; partNumber: string | null; centreDistance: number | null };
 }
 
 /**

@@ -1,17 +1,22 @@
 import { formatTrimmed } from '../units/index.js';
 import { type KitItem } from './bom-line.js';
 import { FLAG } from './flags.js';
-import { gearDataRows } from './gear-data.js';
 import { type KitGear, type KitRequest } from './kit.js';
-import { gearMass, leastRim, partGear, rimUnderKeyway, shaftMass, type MountedGear } from './mounted-gear.js';
+import {
+  gearMass,
+  leastRim,
+  partGear,
+  rimUnderKeyway,
+  rootDiameter,
+  shaftMass,
+  type MountedGear,
+} from './mounted-gear.js';
 import { kitItem } from './part-lines.js';
+import { dataOf, mateOf } from './train-gear-data.js';
 
 /** One item per gear; a pinion cut on its shaft is one item for both. */
 export function gearItems(mounted: readonly MountedGear[], request: KitRequest): KitItem[] {
-  return mounted.map((own) => {
-    const mate = mounted.find((other) => other.gear.stage === own.gear.stage && other !== own);
-    return gearItem(own, mate, request);
-  });
+  return mounted.map((own) => gearItem(own, mateOf(own, mounted), request));
 }
 
 function gearItem(own: MountedGear, mate: MountedGear | undefined, request: KitRequest): KitItem {
@@ -25,20 +30,15 @@ function gearItem(own: MountedGear, mate: MountedGear | undefined, request: KitR
       quantity: 1,
       material: gear.material ?? null,
       supply: 'made',
-      mass: onShaft ? gearMass(gear, shaft.diameter) + shaftMass(shaft) : gearMass(gear, bore),
+      // A bore as large as the gear leaves nothing to weigh; the flags say so.
+      mass: onShaft ? gearMass(gear, shaft.diameter) + shaftMass(shaft) : gearMass(gear, bore) || null,
       source: onShaft ? `${own.source}, shaft ${shaft.index}` : own.source,
       note: onShaft ? `Cut on shaft ${shaft.index}; seats and shaft ends as drawn.` : '',
       flags: [...stockFlags(own), ...fitFlags(own), ...handFlags(own, mate)],
     },
     part,
   );
-  if (part) return item;
-  const mateData = {
-    teeth: mate?.gear.teeth ?? 0,
-    partNumber: mate?.part?.number ?? mate?.gear.partNumber ?? null,
-    centreDistance: request.centreDistances?.[gear.stage - 1] ?? null,
-  };
-  return { ...item, gearData: gearDataRows({ ...gear, bore, mate: mateData }) };
+  return part ? item : { ...item, gearData: dataOf(own, mate, request) };
 }
 
 /** `Spur gear z 16, m 1.25, 20°, x 0.3, face 12 mm, bore 15 mm`. */
@@ -83,7 +83,10 @@ function stockFlags(own: MountedGear): string[] {
 
 function fitFlags(own: MountedGear): string[] {
   const { gear, shaft, bore } = own;
-  if (bore === null) return [];
+  const root = rootDiameter(gear);
+  if (bore === null) {
+    return shaft.diameter > root ? [`shaft thicker than the root circle, ${formatTrimmed(root, 2)} mm`] : [];
+  }
   const flags: string[] = [];
   const stockBore = partGear(own)?.bore ?? null;
   const [held, seat] = [formatTrimmed(stockBore, 3), formatTrimmed(shaft.diameter, 3)];
@@ -91,7 +94,10 @@ function fitFlags(own: MountedGear): string[] {
   if (stockBore !== null && stockBore > shaft.diameter) {
     flags.push(`bore ${held} mm, shaft ${seat} mm: step the seat up`);
   }
-  if (rimUnderKeyway(gear, bore) < leastRim(gear)) flags.push(FLAG.thinRim);
+  if (bore >= root) {
+    const circle = formatTrimmed(root, 2);
+    flags.push(`bore ${formatTrimmed(bore, 3)} mm does not fit inside the root circle, ${circle} mm`);
+  } else if (rimUnderKeyway(gear, bore) < leastRim(gear)) flags.push(FLAG.thinRim);
   return flags;
 }
 

@@ -5,6 +5,7 @@ export type { KitBox, KitGear, KitGearFigures, KitRequest, KitShaft } from './ki
 export type * from './part-finder.js';
 export { FLAG } from './flags.js';
 export { gearDataRows, type GearDataInput, type GearDataRow } from './gear-data.js';
+export { trainGearData, type TrainGearData } from './train-gear-data.js';
 export {
   KEY_BORE_RANGE,
   keyLengthForHub,

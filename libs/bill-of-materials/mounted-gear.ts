@@ -103,7 +103,8 @@ function referenceDiameter(gear: KitGear): number {
   return gear.figures?.referenceDiameter ?? (gear.module * gear.teeth) / cosBeta;
 }
 
-function rootDiameter(gear: KitGear): number {
+/** d_f, mm: as computed, or from the rack when the figures are not given. */
+export function rootDiameter(gear: KitGear): number {
   const dedendum = gear.rack?.dedendum ?? 1.25;
   return (
     gear.figures?.rootDiameter ?? referenceDiameter(gear) - 2 * gear.module * (dedendum - gear.profileShift)

@@ -118,6 +118,9 @@ export interface PartRef {
 
 /** Looks parts up. It answers at once: the caller loads what it may need beforehand. */
 export interface PartFinder {
-  /** The best part that meets the need exactly, or null. A chosen gear or pinion shaft is returned by its number whatever its sizes. */
+  /**
+   * The best part that meets the need exactly, or null. A chosen gear or pinion shaft is returned by its number
+   * whatever its sizes.
+   */
   find(need: PartNeed): PartRef | null;
 }

@@ -1,0 +1,345 @@
+import { describe, expect, it } from 'vitest';
+import { InputError } from '../units/index.js';
+import { bomTotals, buildBom, FLAG, partNumberText, type BomLine, type KitRequest } from './index.js';
+import { emptyLibrary, libraryOf, newKitGear, newPartRef, twoStageKit } from './testing/kit-builder.js';
+
+const ofKind = (lines: BomLine[], kind: BomLine['kind']) => lines.filter((line) => line.kind === kind);
+
+function only(lines: BomLine[], kind: BomLine['kind']): BomLine {
+  const [line, ...more] = ofKind(lines, kind);
+  if (!line || more.length > 0)
+    throw new Error(`expected one line of ${kind}, got ${more.length + (line ? 1 : 0)}`);
+  return line;
+}
+
+describe('the kit of a two-stage train, counted by hand', () => {
+  const lines = buildBom(twoStageKit(), emptyLibrary);
+  const shown = (kind: BomLine['kind']) =>
+    ofKind(lines, kind).map((line) => `${line.findNumber} ${line.description} ${line.quantity}`);
+
+  it('lists four gears and three shafts in stage order', () => {
+    expect(shown('gear')).toEqual([
+      '101 Spur gear z 20, m 1.5, 20°, x 0, face 15 mm, bore 12 mm 1',
+      '102 Spur gear z 60, m 1.5, 20°, x 0, face 15 mm, bore 15 mm 1',
+      '103 Spur gear z 20, m 2, 20°, x 0, face 20 mm, bore 15 mm 1',
+      '104 Spur gear z 50, m 2, 20°, x 0, face 20 mm, bore 20 mm 1',
+    ]);
+    expect(shown('shaft')).toEqual([
+      '301 Shaft ⌀12 × 60 mm 1',
+      '302 Shaft ⌀15 × 60 mm 1',
+      '303 Shaft ⌀20 × 60 mm 1',
+    ]);
+    expect(shown('pinion-shaft')).toEqual([]);
+  });
+
+  it('gives each shaft two bearings, each keyed gear a key by its bore and a ring, each shaft one ring more', () => {
+    expect(shown('bearing')).toEqual([
+      '401 Bearing, bore 12 mm 2',
+      '402 Bearing, bore 15 mm 2',
+      '403 Bearing, bore 20 mm 2',
+    ]);
+    // DIN 6885-1: bore 12 → 4 × 4, 15 → 5 × 5, 20 → 6 × 6; longest standard length within the face width.
+    expect(shown('key')).toEqual([
+      '501 Parallel key DIN 6885-1 A 4 × 4 × 14 1',
+      '502 Parallel key DIN 6885-1 A 5 × 5 × 14 1',
+      '503 Parallel key DIN 6885-1 A 5 × 5 × 20 1',
+      '504 Parallel key DIN 6885-1 A 6 × 6 × 20 1',
+    ]);
+    expect(shown('retaining-ring')).toEqual([
+      '601 Retaining ring DIN 471 12 × 1 2',
+      '602 Retaining ring DIN 471 15 × 1 3',
+      '603 Retaining ring DIN 471 20 × 1.2 2',
+    ]);
+  });
+
+  it('closes with seals at input and output, housing and oil', () => {
+    expect(shown('seal')).toEqual([
+      '701 Rotary shaft seal, shaft ⌀12 mm 1',
+      '702 Rotary shaft seal, shaft ⌀20 mm 1',
+    ]);
+    expect(shown('housing')).toEqual(['801 Housing 200 × 80 × 120 mm, wall 6 mm 1']);
+    // Inside 188 × 68 × 108 mm = 1.381 l; a third is 0.460 l, rounded up to 0.5 l.
+    expect(shown('lubricant')).toEqual(['901 Gear oil ISO VG 220 0.5']);
+    expect(lines).toHaveLength(4 + 3 + 3 + 4 + 3 + 2 + 1 + 1);
+  });
+
+  it('joins the sources of equal parts', () => {
+    const ring = ofKind(lines, 'retaining-ring')[1];
+    expect(ring?.source).toEqual(['Stage 1 wheel', 'Stage 2 pinion', 'Shaft 1, locating bearing']);
+  });
+
+  it('weighs discs with bores, shafts and the closed box', () => {
+    // π/4 (90² − 15²) · 15 mm³ of steel at 7,850 kg/m³ = 0.7283 kg; π/4 · 12² · 60 mm³ = 0.05327 kg.
+    expect(ofKind(lines, 'gear')[1]?.mass).toBeCloseTo(0.7283, 4);
+    expect(ofKind(lines, 'shaft')[0]?.mass).toBeCloseTo(0.05327, 5);
+    // (200 · 80 · 120 − 188 · 68 · 108) mm³ of aluminium at 2,700 kg/m³ = 1.4562 kg.
+    expect(only(lines, 'housing').mass).toBeCloseTo(1.4562, 4);
+  });
+
+  it('flags what is not in the library and every bearing, and drops nothing', () => {
+    expect(lines.every((line) => line.flags.includes(FLAG.notInLibrary))).toBe(true);
+    expect(ofKind(lines, 'bearing').every((line) => line.flags.includes('size not checked'))).toBe(true);
+    expect(lines.map(partNumberText)).toEqual(
+      lines.map((line) => (['gear', 'shaft', 'housing'].includes(line.kind) ? 'to be made' : 'to be chosen')),
+    );
+  });
+
+  it('totals lines, makes and masses', () => {
+    const totals = bomTotals(lines);
+    expect(totals).toMatchObject({ lines: 21, made: 8, bought: 13 });
+    // Without a library the masses of bearings (3 lines), rings (3), seals (2) and oil (1) are not known.
+    expect(totals.linesWithoutMass).toBe(9);
+  });
+});
+
+describe('a pinion too thin for a keyway', () => {
+  // z 12, m 1.5 on a 12 mm shaft: d_f = 18 − 3.75 = 14.25 mm; the rim (14.25 − 12)/2 − 1.8 is below 2 · 1.5 mm.
+  const kit = twoStageKit();
+  const gears = kit.gears.map((gear, i) => (i === 0 ? { ...gear, teeth: 12 } : gear));
+  const lines = buildBom({ ...kit, gears }, emptyLibrary);
+
+  it('is cut on its shaft: one part for both, no key and no ring for it', () => {
+    const pinionShaft = only(lines, 'pinion-shaft');
+    expect(pinionShaft.findNumber).toBe(201);
+    expect(pinionShaft.source).toEqual(['Stage 1 pinion, shaft 0']);
+    expect(ofKind(lines, 'gear')).toHaveLength(3);
+    expect(ofKind(lines, 'shaft').map((line) => line.source)).toEqual([['Shaft 1'], ['Shaft 2']]);
+    expect(ofKind(lines, 'key')).toHaveLength(3);
+    const rings = ofKind(lines, 'retaining-ring').map((line) => [line.description, line.quantity]);
+    expect(rings).toContainEqual(['Retaining ring DIN 471 12 × 1', 1]);
+    // Shaft π/4 · 12² · 60 and what stands above it, π/4 (18² − 12²) · 15 mm³, at 7,850 kg/m³: 0.06992 kg.
+    expect(pinionShaft.mass).toBeCloseTo(0.06992, 4);
+  });
+
+  it('stands on the rim exactly at the limit', () => {
+    // Bore 20: t2 = 2.8, two modules = 4; d_f = 20 + 2 (4 + 2.8) = 33.6 keeps the key, a hair less does not.
+    const at = (rootDiameter: number) => {
+      const figures = { rootDiameter };
+      const withRoot = kit.gears.map((gear, i) => (i === 2 ? { ...gear, figures } : gear));
+      const shafts = kit.shafts.map((shaft) => (shaft.index === 1 ? { ...shaft, diameter: 20 } : shaft));
+      return ofKind(buildBom({ ...kit, gears: withRoot, shafts }, emptyLibrary), 'pinion-shaft').length;
+    };
+    expect(at(33.6 + 1e-9)).toBe(0);
+    expect(at(33.599)).toBe(1);
+  });
+
+  it('may be keyed all the same when the designer says so, flagged', () => {
+    const keyed = gears.map((gear, i) => (i === 0 ? { ...gear, mounting: 'keyed' as const } : gear));
+    const pinion = ofKind(buildBom({ ...kit, gears: keyed }, emptyLibrary), 'gear')[0];
+    expect(pinion?.flags).toContain(FLAG.thinRim);
+  });
+});
+
+describe('parts from the library', () => {
+  const stockGear = {
+    teeth: 20,
+    module: 1.5,
+    pressureAngleDeg: 20,
+    helixAngleDeg: 0,
+    hand: null,
+    profileShift: 0,
+    faceWidth: 15,
+    bore: 12,
+    thicknessAllowance: { upper: -0.05, lower: -0.1 },
+  };
+  const gearLibrary = (gear: Partial<typeof stockGear> | { profileShift: null; thicknessAllowance: null }) =>
+    libraryOf({
+      gear: (need) =>
+        need.teeth === 20 && need.module === 1.5
+          ? newPartRef({ number: 'KW-00417', kind: 'gear', gear: { ...stockGear, ...gear } })
+          : null,
+    });
+  const pinionOf = (lines: BomLine[]) => lines.find((line) => line.partNumber === 'KW-00417');
+
+  it('stands on the line with its number, maker and mass, unflagged and without gear data', () => {
+    const pinion = pinionOf(buildBom(twoStageKit(), gearLibrary({})));
+    expect(pinion).toMatchObject({ supplier: 'Harrow Point Gears', mass: 0.25, supply: 'bought', flags: [] });
+    expect(pinion).not.toHaveProperty('gearData');
+  });
+
+  it('counts an unknown shift or allowance as none, flagged', () => {
+    const pinion = pinionOf(
+      buildBom(twoStageKit(), gearLibrary({ profileShift: null, thicknessAllowance: null })),
+    );
+    expect(pinion?.flags).toEqual([FLAG.shiftUnknown, FLAG.allowanceUnknown]);
+    expect(FLAG.shiftUnknown).toContain('x = 0');
+  });
+
+  it('says so when the design counts with another shift than the stock gear has', () => {
+    const kit = twoStageKit();
+    const gears = kit.gears.map((gear, i) => (i === 0 ? { ...gear, profileShift: 0.3 } : gear));
+    const pinion = pinionOf(
+      buildBom({ ...kit, gears }, gearLibrary({ profileShift: null, thicknessAllowance: null })),
+    );
+    expect(pinion?.flags).toContain('shift x 0 in stock, 0.3 in the design');
+  });
+
+  it.each([
+    [10, 'bore 10 mm, bore out to 12 mm'],
+    [15, 'bore 15 mm, shaft 12 mm: step the seat up'],
+  ])('says what to do about a bore of %d mm', (bore, flag) => {
+    const lines = buildBom(twoStageKit(), gearLibrary({ bore }));
+    expect(pinionOf(lines)?.flags).toContain(flag);
+    const key = ofKind(lines, 'key').find((line) => line.source.includes('Stage 1 pinion'));
+    expect(key?.description).toContain(bore === 15 ? '5 × 5' : '4 × 4');
+  });
+
+  it('keeps a chosen number that the library does not hold, flagged', () => {
+    const kit = twoStageKit();
+    const gears = kit.gears.map((gear, i) => (i === 0 ? { ...gear, partNumber: 'KW-09999' } : gear));
+    const pinion = ofKind(buildBom({ ...kit, gears }, emptyLibrary), 'gear')[0];
+    expect(pinion).toMatchObject({ partNumber: 'KW-09999', source: ['Stage 1 pinion'] });
+    expect(pinion?.flags).toContain(FLAG.notInLibrary);
+  });
+
+  it.each([
+    ['draft', FLAG.draftPart],
+    ['withdrawn', FLAG.withdrawnPart],
+  ] as const)('flags a %s part', (standing, flag) => {
+    const library = libraryOf({
+      bearing: () => newPartRef({ number: 'KW-00501', kind: 'bearing', standing }),
+    });
+    expect(ofKind(buildBom(twoStageKit(), library), 'bearing')[0]?.flags).toContain(flag);
+  });
+
+  it('asks for bearings, keys, rings, seals by size and rolls one number up over the whole train', () => {
+    const asked: string[] = [];
+    const library = libraryOf({
+      bearing: (need) => newPartRef({ number: `B${need.bore}`, kind: 'bearing', mass: 0.04 }),
+      key: (need) => {
+        asked.push(`${need.width}×${need.height}×${need.length}`);
+        return newPartRef({ number: 'KEY', kind: 'key', mass: 0.002 });
+      },
+      'retaining-ring': (need) => newPartRef({ number: `R${need.shaftDiameter}`, kind: 'retaining-ring' }),
+      seal: (need) => newPartRef({ number: `S${need.shaftDiameter}`, kind: 'seal' }),
+      lubricant: () => newPartRef({ number: 'OIL', kind: 'lubricant', mass: 4.5, packVolume: 5 }),
+    });
+    const lines = buildBom(twoStageKit(), library);
+    expect(ofKind(lines, 'bearing').map((line) => line.partNumber)).toEqual(['B12', 'B15', 'B20']);
+    expect(asked).toEqual(['4×4×14', '5×5×14', '5×5×20', '6×6×20']);
+    expect(only(lines, 'key')).toMatchObject({ quantity: 4, partNumber: 'KEY' });
+    expect(ofKind(lines, 'seal').map((line) => line.partNumber)).toEqual(['S12', 'S20']);
+    // A pack of 5 l weighs 4.5 kg, so a litre weighs 0.9 kg.
+    expect(only(lines, 'lubricant')).toMatchObject({ unit: 'l', quantity: 0.5, mass: 0.9 });
+  });
+
+  it('cuts a longer stock shaft down and flags a shorter one', () => {
+    const library = (length: number) =>
+      libraryOf({ shaft: () => newPartRef({ number: 'KW-00600', kind: 'shaft', length }) });
+    expect(only(buildBom(twoStageKit(), library(500)), 'shaft')).toMatchObject({
+      note: 'Cut to 60 mm.',
+      flags: [],
+    });
+    expect(only(buildBom(twoStageKit(), library(50)), 'shaft').flags).toEqual([
+      '50 mm long in stock, 60 mm needed',
+    ]);
+  });
+});
+
+describe('a helical stage', () => {
+  const helical = (pinionHand: 'left' | 'right', wheelHand: 'left' | 'right'): KitRequest => {
+    const kit = twoStageKit();
+    const gears = [
+      newKitGear({ stage: 1, role: 'pinion', teeth: 20, helixAngleDeg: 15, hand: pinionHand }),
+      newKitGear({ stage: 1, role: 'wheel', teeth: 60, helixAngleDeg: 15, hand: wheelHand }),
+    ];
+    return { ...kit, gears, shafts: kit.shafts.slice(0, 2) };
+  };
+
+  it('names helix and hand, and asks the library for the hand', () => {
+    const hands: (string | null)[] = [];
+    const library = libraryOf({
+      gear: (need) => {
+        hands.push(need.hand);
+        return null;
+      },
+    });
+    const [pinion] = buildBom(helical('right', 'left'), library);
+    expect(hands).toEqual(['right', 'left']);
+    expect(pinion?.description).toBe(
+      'Helical gear z 20, m 1.5, 20°, β 15° right, x 0, face 15 mm, bore 12 mm',
+    );
+  });
+
+  it('needs both hands in stock', () => {
+    const library = libraryOf({
+      gear: (need) => (need.hand === 'left' ? newPartRef({ number: 'KW-00700', kind: 'gear' }) : null),
+    });
+    const gears = ofKind(buildBom(helical('right', 'left'), library), 'gear');
+    expect(gears.map((line) => line.flags.includes(FLAG.bothHandsNeeded))).toEqual([true, true]);
+    expect(ofKind(buildBom(helical('right', 'left'), emptyLibrary), 'gear')[0]?.flags).not.toContain(
+      FLAG.bothHandsNeeded,
+    );
+  });
+
+  it('flags two gears of one hand', () => {
+    expect(ofKind(buildBom(helical('left', 'left'), emptyLibrary), 'gear')[0]?.flags).toContain(
+      FLAG.sameHand,
+    );
+  });
+});
+
+describe('sizes without a standard part', () => {
+  it('keeps the line and says what to do', () => {
+    const kit = twoStageKit();
+    const sizes = [5, 23, 20];
+    const shafts = kit.shafts.map((shaft, i) => ({ ...shaft, diameter: sizes[i] ?? 20 }));
+    const lines = buildBom({ ...kit, shafts }, emptyLibrary);
+    expect(ofKind(lines, 'key')[0]?.flags[0]).toBe(
+      'no DIN 6885-1 key for bore 5 mm: choose another way to hold the gear',
+    );
+    const ring = ofKind(lines, 'retaining-ring').find((line) => line.description.includes('⌀23'));
+    // The pinion of stage 2 is too thin for a keyway at 23 mm: the wheel and the locating bearing are left.
+    expect(ring).toMatchObject({ quantity: 2 });
+    expect(ring?.flags[0]).toBe('DIN 471 has no ring for 23 mm: step the seat to 22 mm or use another way');
+    expect(ofKind(lines, 'bearing')[1]?.flags).toContain(
+      '23 mm is no bearing bore; the next bearing bore is 25 mm',
+    );
+  });
+});
+
+describe('a shaft too thick for its gears', () => {
+  it('keeps both gears on the list and says why they cannot be', () => {
+    const kit = twoStageKit();
+    // Root circles with the default rack: 30 − 3.75 = 26.25 mm and 90 − 3.75 = 86.25 mm.
+    const shafts = kit.shafts.map((shaft) => ({ ...shaft, diameter: 90 }));
+    const lines = buildBom({ ...kit, shafts }, emptyLibrary);
+    const pinion = lines.find((line) => line.source.includes('Stage 1 pinion, shaft 0'));
+    expect(pinion?.flags).toContain('shaft thicker than the root circle, 26.25 mm');
+    const wheel = lines.find((line) => line.source.includes('Stage 1 wheel'));
+    expect(wheel?.flags).toContain('bore 90 mm does not fit inside the root circle, 86.25 mm');
+    expect(wheel?.mass).toBeNull();
+  });
+});
+
+describe('a request without meaning', () => {
+  const kit = twoStageKit();
+  const refusal = (over: Partial<KitRequest>) => {
+    try {
+      buildBom({ ...kit, ...over }, emptyLibrary);
+    } catch (error) {
+      if (error instanceof InputError) return error.errors.map((issue) => issue.field);
+      throw error;
+    }
+    return [];
+  };
+  const withGear = (over: object) => ({
+    gears: kit.gears.map((gear, i) => (i === 0 ? { ...gear, ...over } : gear)),
+  });
+
+  it('is refused by field', () => {
+    expect(refusal({})).toEqual([]);
+    expect(refusal(withGear({ teeth: 3.5 }))).toEqual(['gears.0.teeth']);
+    expect(refusal(withGear({ module: 0, profileShift: Number.NaN }))).toEqual([
+      'gears.0.module',
+      'gears.0.profileShift',
+    ]);
+    expect(refusal(withGear({ helixAngleDeg: 60 }))).toEqual(['gears.0.helixAngleDeg']);
+    expect(refusal({ box: { ...kit.box, wall: 40 } })).toEqual(['box.wall']);
+    expect(refusal({ box: { ...kit.box, length: Number.POSITIVE_INFINITY } })).toEqual(['box.length']);
+    expect(refusal({ shafts: kit.shafts.slice(0, 2) })).toEqual(['gears']);
+    expect(refusal({ shafts: kit.shafts.slice(1) })).toEqual(['shafts']);
+    expect(refusal({ shafts: [] })).toEqual(['shafts']);
+    expect(refusal({ gears: kit.gears.slice(1) })).toEqual(['gears']);
+  });
+});
