@@ -4,7 +4,7 @@ import fastifyCookie from '@fastify/cookie';
 import fastifyHelmet from '@fastify/helmet';
 import { NestFactory } from '@nestjs/core';
 import { FastifyAdapter, type NestFastifyApplication } from '@nestjs/platform-fastify';
-import { type FastifyInstance, type FastifyReply, type FastifyRequest } from 'fastify';
+import { type FastifyInstance, type FastifyReply, type FastifyRequest, LogController } from 'fastify';
 import { AppModule } from './app.module.js';
 import { problemBody } from './common/problem-body.js';
 import { ProblemFilter, toProblem } from './common/problem.filter.js';
@@ -28,7 +28,7 @@ export async function createApp(settings: Settings): Promise<NestFastifyApplicat
   const log = createLogger(settings.logLevel);
   const adapter = new FastifyAdapter({
     loggerInstance: log,
-    disableRequestLogging: true,
+    logController: new LogController({ disableRequestLogging: true, requestIdLogLabel: 'requestId' }),
     bodyLimit: BODY_LIMIT,
     requestTimeout: REQUEST_TIMEOUT_MS,
     // Behind a proxy on this machine, the throttle must see who really asked.

@@ -51,22 +51,8 @@ export class AuthService {
    */
   async signIn({ email, password }: SignInInput, address: string): Promise<Arrival> {
     const key = email.trim().toLowerCase();
-    this.throttle.attempt(address, key);
-    const user = await this.users.findOne({
-      where: { email: key },
-      select: {
-        id: true,
-        name: true,
-        email: true,
-        roles: true,
-        active: true,
-        demo: true,
-        passwordHash: true,
-      },
-    });
-    const matches = await passwordMatches(user?.passwordHash ?? null, password);
-    if (!user || !matches || !this.sessions.mayUse(user)) throw wrongPair();
-    this.throttle.succeeded(address, key);
+    const user = await this.throttle.guard(address, key, () => this.matching(key, password));
+    if (!user) throw wrongPair();
     return this.arrive(user);
   }
 
@@ -88,15 +74,34 @@ export class AuthService {
    * @throws ProblemError 403 when the link is unknown, used or too old
    */
   async firstAdmin({ token, ...input }: FirstAdminInput, address: string): Promise<Arrival> {
-    this.throttle.attempt(address, 'first-admin');
     const details = { ...input, roles: ['admin' as const] };
-    const passwordHash = await this.people.hashFor(details);
-    const user = await this.queue.run(async (manager) => {
-      await this.invitations.redeem(manager, token);
-      return this.people.insert(manager, { ...details, passwordHash }, { id: null, name: 'First start' });
+    const user = await this.throttle.guard(address, 'first-admin', async () => {
+      const passwordHash = await this.people.hashFor(details);
+      return this.queue.run(async (manager) => {
+        await this.invitations.redeem(manager, token);
+        return this.people.insert(manager, { ...details, passwordHash }, { id: null, name: 'First start' });
+      });
     });
-    this.throttle.succeeded(address, 'first-admin');
+    if (!user) throw wrongPair();
     return this.arrive(user);
+  }
+
+  /** The active person with that address and password. */
+  private async matching(email: string, password: string): Promise<UserEntity | null> {
+    const user = await this.users.findOne({
+      where: { email },
+      select: {
+        id: true,
+        name: true,
+        email: true,
+        roles: true,
+        active: true,
+        demo: true,
+        passwordHash: true,
+      },
+    });
+    const matches = await passwordMatches(user?.passwordHash ?? null, password);
+    return user && matches && this.sessions.mayUse(user) ? user : null;
   }
 
   private async arrive(user: UserEntity): Promise<Arrival> {
