@@ -1,4 +1,4 @@
-import { BestList } from './best-list.js';
+import { type BestList } from './best-list.js';
 import { searchByCost } from './cost-search.js';
 import { searchByRatioError } from './ratio-search.js';
 import { type SearchSpace } from './search-space.js';

@@ -64,6 +64,7 @@ export interface TrainCheck {
   limit: number | null;
   unit: string;
   verdict: Verdict;
+  /** 0 for the first stage; left out when the check concerns the whole train. */
   stage?: number;
   message: string;
 }

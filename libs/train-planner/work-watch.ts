@@ -59,9 +59,9 @@ export class WorkWatch {
   look(): void {
     const now = this.#now();
     if (now - this.#lastReport >= REPORT_EVERY_MS) this.#report();
-    const { timeLimitMs, shouldStop } = this.#control;
+    const { timeLimitMs } = this.#control;
     if (timeLimitMs !== undefined && now - this.#start >= timeLimitMs) throw new SearchEnded();
-    if (shouldStop?.call(this.#control)) throw new SearchEnded();
+    if (this.#control.shouldStop?.()) throw new SearchEnded();
   }
 
   #report(): void {
