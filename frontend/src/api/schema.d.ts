@@ -175,9 +175,11 @@ interface OptionStage {
   faceWidth: number;
   pinionShift: number;
   wheelShift: number;
+  pinionTipDiameter: number;
+  wheelTipDiameter: number;
   centreDistance: number;
   contactRatio: number;
-  contactRatioWorst: number;
+  contactRatioWorst: number | null;
 }
 interface TrainOption {
   key: string;

@@ -30,6 +30,8 @@ interface DataTableProps<Row extends GridValidRowModel> {
   onSelection?: (model: GridRowSelectionModel) => void;
   hidden?: Record<string, boolean>;
   height?: string;
+  /** px; 32 unless the rows carry a drawing. */
+  rowHeight?: number;
 }
 
 /**
@@ -53,7 +55,7 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
         rows={props.rows ?? []}
         getRowId={props.getRowId}
         loading={props.loading}
-        rowHeight={32}
+        rowHeight={props.rowHeight ?? 32}
         columnHeaderHeight={34}
         density="standard"
         rowCount={rowCount}

@@ -3,10 +3,20 @@ import { useEffect } from 'react';
 import { useBlocker } from 'react-router-dom';
 import { ConfirmDialog } from './ConfirmDialog';
 
+interface UnsavedWarningProps {
+  dirty: boolean;
+  what?: string;
+  /** Where the form is opened by a search parameter of the address: losing that one leaves the form, too. */
+  openedBy?: string;
+}
+
 /** Asks before unsaved changes are left behind: on a link inside the app, on reload and on closing the tab. */
-export function UnsavedWarning({ dirty, what = 'this form' }: { dirty: boolean; what?: string }) {
+export function UnsavedWarning({ dirty, what = 'this form', openedBy }: UnsavedWarningProps) {
   const blocker = useBlocker(
-    ({ currentLocation, nextLocation }) => dirty && currentLocation.pathname !== nextLocation.pathname,
+    ({ currentLocation, nextLocation }) =>
+      dirty &&
+      (currentLocation.pathname !== nextLocation.pathname ||
+        (openedBy !== undefined && !new URLSearchParams(nextLocation.search).has(openedBy))),
   );
   useEffect(() => {
     if (!dirty) return undefined;
