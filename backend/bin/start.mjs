@@ -1,6 +1,6 @@
 // npm start: from a clean clone to a served product. See README.md for the settings.
 import { spawn } from 'node:child_process';
-import { existsSync, readdirSync } from 'node:fs';
+import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { prepare } from './prepare.mjs';
 import { ROOT, runNode, step } from './process.mjs';
@@ -8,15 +8,10 @@ import { ROOT, runNode, step } from './process.mjs';
 const dataFolder = path.resolve(ROOT, process.env.STAGEYARD_DATA || 'data');
 const env = { STAGEYARD_DATA: dataFolder };
 
-/** Hidden entries are leftovers of a seeding that was cut off; the loader clears them. */
-function isEmpty(folder) {
-  return !existsSync(folder) || readdirSync(folder).every((name) => name.startsWith('.'));
-}
-
 await prepare();
 
-// The loader does nothing where demo mode is off.
-if (isEmpty(dataFolder))
+// The loader books everything or nothing, the database last; it does nothing where demo mode is off.
+if (!existsSync(path.join(dataFolder, 'stageyard.db')))
   await step('Book the demo data into the empty data folder', () =>
     runNode('seed/dist/load.js', [], { env }),
   );
