@@ -24,7 +24,9 @@ export class RatioBounds {
     const first = Math.log(ratios[0] as number);
     const last = Math.log(ratios[ratios.length - 1] as number);
     const bins = Math.max(32, Math.min(1500, ratios.length >> 1));
-    const width = Math.max((last - first) / bins, 1e-6);
+    this.#unlimited = !(low > 0 && high < Infinity);
+    const windowLog = this.#unlimited ? 0 : Math.log(high / low);
+    const width = Math.max((last - first) / bins, windowLog / 256, 1e-6);
     this.#binWidth = width;
     this.#firstBin = Math.floor(first / width);
     this.#least = new Float64Array(Math.floor(last / width) - this.#firstBin + 1).fill(Infinity);
@@ -33,10 +35,8 @@ export class RatioBounds {
       this.#least[bin] = Math.min(this.#least[bin] as number, costs[index] as number);
     }
     this.#leastOfAll = Math.min(...this.#least);
-    this.#unlimited = !(low > 0 && high < Infinity);
     // A window that starts anywhere in a bin reaches at most `reach` bins further.
-    const windowLog = this.#unlimited ? 0 : Math.log(high / low);
-    const reach = Math.min(Math.floor((windowLog + 4 * LOG_SLACK) / width) + 1, this.#least.length);
+    const reach = Math.floor((windowLog + 4 * LOG_SLACK) / width) + 1;
     this.#oneStart = this.#firstBin - reach;
     this.#one = slidingLeast(this.#least, reach);
   }
