@@ -13,13 +13,18 @@ export class FieldChecks {
 
   /** Adds a refusal. `label` is what a designer calls the field, `mend` says what is allowed. */
   refuse(field: string, value: unknown, label: string, mend: string, limit?: string | number): void {
-    const message = `${label}: ${shown(value)} ${mend}`;
+    const given = shown(value);
+    const message = given === '' ? `${label} ${mend}` : `${label}: ${given} ${mend}`;
     this.issues.push(limit === undefined ? { field, value, message } : { field, value, limit, message });
   }
 
   /** True when the value is a finite number within the bounds; otherwise adds the refusal. */
   number(field: string, value: unknown, label: string, bounds: Bounds, unit = ''): value is number {
     const range = describeBounds(bounds, unit);
+    if (value === undefined || value === null || value === '') {
+      this.refuse(field, value, label, `is missing. Enter a number ${range}.`, range);
+      return false;
+    }
     if (typeof value !== 'number' || !Number.isFinite(value)) {
       this.refuse(field, value, label, `is not a number. Enter a number ${range}.`, range);
       return false;
@@ -54,7 +59,7 @@ export class FieldChecks {
 }
 
 function describeBounds(bounds: Bounds, unit: string): string {
-  const tail = unit === '' ? '' : ` ${unit}`;
+  const tail = unit === '' || unit === '°' ? unit : ` ${unit}`;
   const upTo = bounds.max === undefined ? '' : ` to ${plain(bounds.max)}${tail}`;
   if (bounds.min !== undefined)
     return upTo === '' ? `from ${plain(bounds.min)}${tail}` : `from ${plain(bounds.min)}${upTo}`;
@@ -71,7 +76,7 @@ export function plain(value: number): string {
 
 /** The refused value as a person recognises it, never longer than a line. */
 function shown(value: unknown): string {
-  if (value === undefined || value === null || value === '') return 'nothing';
+  if (value === undefined || value === null || value === '') return '';
   if (typeof value === 'number') return Number.isFinite(value) ? plain(value) : String(value);
   if (typeof value === 'boolean') return String(value);
   if (typeof value === 'string') return `“${value.length > 40 ? `${value.slice(0, 40)}…` : value}”`;

@@ -26,7 +26,7 @@ export class RackEnvelope {
   private readonly shift: number;
   private readonly rounding: { depth: number; offset: number; radius: number };
   /** Depths below the datum line where the straight flank and the whole rack end. */
-  private readonly flankEnd: number;
+  readonly flankEnd: number;
   private readonly deepest: number;
 
   constructor(gear: EnvelopeGear) {
@@ -53,22 +53,35 @@ export class RackEnvelope {
     return Math.max(this.reachOfFlank(radius), this.reachOfRounding(radius));
   }
 
-  /** Half the gap's angle left by the straight flank alone. */
-  reachOfFlank(radius: number): number {
-    // A sharp corner is the flank's end too: keep the two apart.
-    const end = this.rounding.radius === 0 ? this.flankEnd - this.m / 1000 : this.flankEnd;
-    return greatest(-this.m, end, (depth) => this.reachAt(radius, depth, this.flankWidth(depth))).value;
+  /** Half the gap's angle left by the straight flank alone, down to `keepOff` above its end. */
+  reachOfFlank(radius: number, keepOff = 0): number {
+    return this.bestOfFlank(radius, keepOff).value;
   }
 
-  /** The same for the tip rounding alone. */
+  /** Depth of the flank's point that shapes the tooth at a radius. */
+  flankDepthAt(radius: number): number {
+    return this.flankEnd - this.bestOfFlank(radius).at ** 3;
+  }
+
+  /** Half the gap's angle left by the tip rounding alone. */
   reachOfRounding(radius: number): number {
     const { depth: centre, offset, radius: round } = this.rounding;
-    // Steps of angle around the rounding, so that its steep end is followed too.
-    const from = Math.asin(Math.min(1, (this.flankEnd - centre) / (round || 1)));
     if (round === 0) return this.reachAt(radius, this.deepest, offset);
-    return greatest(from, Math.PI / 2, (angle) =>
-      this.reachAt(radius, centre + round * Math.sin(angle), offset + round * Math.cos(angle)),
-    ).value;
+    const from = Math.asin((this.flankEnd - centre) / round);
+    return greatest(0, Math.cbrt(Math.PI / 2 - from), (t) => {
+      const angle = from + t ** 3;
+      return this.reachAt(radius, centre + round * Math.sin(angle), offset + round * Math.cos(angle));
+    }).value;
+  }
+
+  /** Cubed steps crowd towards the flank's end, where the interesting part is tiny at the onset of undercut. */
+  private bestOfFlank(radius: number, keepOff = 0): { at: number; value: number } {
+    // A sharp corner is the flank's end too: keep the two apart.
+    const from = Math.max(keepOff, this.rounding.radius === 0 ? this.m / 1000 : 0);
+    return greatest(Math.cbrt(from), Math.cbrt(this.flankEnd + this.m), (t) => {
+      const depth = this.flankEnd - t ** 3;
+      return this.reachAt(radius, depth, this.flankWidth(depth));
+    });
   }
 
   /** Whether the flank's point `step` above its end reaches further into the tooth than its end does. */
@@ -96,38 +109,40 @@ export class RackEnvelope {
   }
 }
 
-/** Greatest value of a function that is smooth between a few hundred samples. */
+/** Greatest value of a function: samples, then golden section around every sample above its neighbours. */
 export function greatest(
   low: number,
   high: number,
   value: (at: number) => number,
-  samples = 160,
+  samples = 80,
 ): { at: number; value: number } {
-  let best = { at: low, value: value(low) };
   const step = (high - low) / samples;
-  for (let i = 1; i <= samples; i++) {
-    const at = low + i * step;
-    const found = value(at);
-    if (found > best.value) best = { at, value: found };
-  }
-  let left = Math.max(low, best.at - step);
-  let right = Math.min(high, best.at + step);
-  for (let i = 0; i < 70; i++) {
-    const third = (right - left) * 0.3819660112501051;
-    const a = { at: left + third, value: value(left + third) };
-    const b = { at: right - third, value: value(right - third) };
-    if (a.value > best.value) best = a;
-    if (b.value > best.value) best = b;
-    if (a.value > b.value) right = b.at;
-    else left = a.at;
-  }
+  const values = Array.from({ length: samples + 1 }, (_, i) => value(low + i * step));
+  let best = { at: low, value: Number.NEGATIVE_INFINITY };
+  values.forEach((here, i) => {
+    if (here < (values[i - 1] ?? here) || here < (values[i + 1] ?? here)) return;
+    const peak = refine(Math.max(low, low + (i - 1) * step), Math.min(high, low + (i + 1) * step), value);
+    for (const found of [{ at: low + i * step, value: here }, peak])
+      if (found.value > best.value) best = found;
+  });
   return best;
+}
+
+function refine(low: number, high: number, value: (at: number) => number): { at: number; value: number } {
+  let [left, right] = [low, high];
+  for (let i = 0; i < 45; i++) {
+    const third = (right - left) * 0.3819660112501051;
+    if (value(left + third) > value(right - third)) right -= third;
+    else left += third;
+  }
+  const at = (left + right) / 2;
+  return { at, value: value(at) };
 }
 
 /** Where a condition that holds at `low` stops holding on the way to `high`, by halving. */
 export function turningPoint(low: number, high: number, holds: (at: number) => boolean): number {
   let [a, b] = [low, high];
-  for (let i = 0; i < 60; i++) {
+  for (let i = 0; i < 48; i++) {
     const mid = (a + b) / 2;
     if (holds(mid)) a = mid;
     else b = mid;
