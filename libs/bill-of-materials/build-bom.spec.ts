@@ -1,6 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { InputError } from '../units/index.js';
-import { bomTotals, buildBom, FLAG, partNumberText, type BomLine, type KitRequest } from './index.js';
+import {
+  bomTotals,
+  buildBom,
+  FLAG,
+  partNumberText,
+  type BomLine,
+  type KitRequest,
+  type PartGear,
+} from './index.js';
 import { emptyLibrary, libraryOf, newKitGear, newPartRef, twoStageKit } from './testing/kit-builder.js';
 
 const ofKind = (lines: BomLine[], kind: BomLine['kind']) => lines.filter((line) => line.kind === kind);
@@ -142,7 +150,7 @@ describe('parts from the library', () => {
     bore: 12,
     thicknessAllowance: { upper: -0.05, lower: -0.1 },
   };
-  const gearLibrary = (gear: Partial<typeof stockGear> | { profileShift: null; thicknessAllowance: null }) =>
+  const gearLibrary = (gear: Partial<PartGear>) =>
     libraryOf({
       gear: (need) =>
         need.teeth === 20 && need.module === 1.5
@@ -172,6 +180,50 @@ describe('parts from the library', () => {
       buildBom({ ...kit, gears }, gearLibrary({ profileShift: null, thicknessAllowance: null })),
     );
     expect(pinion?.flags).toContain('shift x 0 in stock, 0.3 in the design');
+  });
+
+  it('names every other figure in which a chosen gear differs from the design', () => {
+    const kit = twoStageKit();
+    const chosen = {
+      ...stockGear,
+      teeth: 21,
+      module: 2,
+      faceWidth: 12,
+      helixAngleDeg: 15,
+      hand: 'left' as const,
+    };
+    const gears = kit.gears.map((gear, i) =>
+      i === 0 ? { ...gear, helixAngleDeg: 20, hand: 'right' as const } : gear,
+    );
+    const library = libraryOf({
+      gear: (need) =>
+        need.helixAngleDeg === 20 ? newPartRef({ number: 'KW-00417', kind: 'gear', gear: chosen }) : null,
+    });
+    expect(pinionOf(buildBom({ ...kit, gears }, library))?.flags).toEqual(
+      expect.arrayContaining([
+        'teeth 21 in stock, 20 in the design',
+        'module 2 in stock, 1.5 in the design',
+        'helix angle 15 in stock, 20 in the design',
+        'face width 12 in stock, 15 in the design',
+        'left hand in stock, right in the design',
+      ]),
+    );
+  });
+
+  it('does not mind a stock gear that is wider', () => {
+    expect(pinionOf(buildBom(twoStageKit(), gearLibrary({ faceWidth: 20 })))?.flags).toEqual([]);
+  });
+
+  it('lets the key fill the hub of a stock gear', () => {
+    const lines = buildBom(twoStageKit(), gearLibrary({ hubLength: 26 }));
+    const key = ofKind(lines, 'key').find((line) => line.source.includes('Stage 1 pinion'));
+    expect(key?.description).toBe('Parallel key DIN 6885-1 A 4 × 4 × 25');
+  });
+
+  it('computes the mass that the library does not know', () => {
+    const library = libraryOf({ gear: () => newPartRef({ number: 'KW-00001', kind: 'gear', mass: null }) });
+    // π/4 (30² − 12²) · 15 mm³ of steel at 7,850 kg/m³ = 0.06992 kg.
+    expect(ofKind(buildBom(twoStageKit(), library), 'gear')[0]?.mass).toBeCloseTo(0.069915, 6);
   });
 
   it.each([

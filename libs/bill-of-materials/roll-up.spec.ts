@@ -10,15 +10,16 @@ const quantityOf = (lines: readonly KitItem[], ...kinds: KitItem['kind'][]) =>
 const massOf = (lines: readonly KitItem[]) =>
   lines.reduce((sum, line) => sum + line.quantity * (line.mass ?? 0), 0);
 
+// Few choices for each field, so that equal and nearly equal parts are common.
 const item: fc.Arbitrary<KitItem> = fc.record({
-  kind: fc.constantFrom(...BOM_KINDS),
-  partNumber: fc.constantFrom(null, 'KW-00001', 'KW-00002'),
-  description: fc.constantFrom('one', 'two'),
+  kind: fc.constantFrom('key' as const, 'seal' as const),
+  partNumber: fc.constantFrom(null, 'KW-00001'),
+  description: fc.constant('one'),
   quantity: fc.integer({ min: 1, max: 9 }),
-  unit: fc.constantFrom('pcs' as const, 'l' as const),
+  unit: fc.constant('pcs' as const),
   material: fc.constantFrom(null, 'steel'),
   supply: fc.constantFrom('made' as const, 'bought' as const),
-  supplier: fc.constantFrom(null, 'Harrow Point Gears'),
+  supplier: fc.constant(null),
   mass: fc.constantFrom(null, 0.1, 2.5),
   source: fc.array(fc.string({ minLength: 1, maxLength: 3 }), { minLength: 1, maxLength: 2 }),
   note: fc.constantFrom('', 'Cut to length.', 'Deburr.'),

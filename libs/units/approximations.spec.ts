@@ -20,6 +20,10 @@ describe('mediants', () => {
 
   it('stops before a term exceeds the limit, and after so many', () => {
     expect(shown(mediants(ratio(191, 23), { maxTerm: 100 })).at(-1)).toBe('83/10');
+    expect(shown(mediants(ratio(191, 23), { maxTerm: 83 })).at(-1)).toBe('83/10');
+    expect(shown(mediants(ratio(191, 23), { maxTerm: 82 })).at(-1)).toBe('58/7');
+    expect(shown(convergents(ratio(191, 23), { maxTerm: 83 })).at(-1)).toBe('83/10');
+    expect(shown(convergents(ratio(191, 23), { maxTerm: 82 })).at(-1)).toBe('25/3');
     expect(mediants(ratio(191, 23), { limit: 2 })).toHaveLength(2);
   });
 

@@ -27,7 +27,7 @@ const UNITS: Record<QuantityKind, { base: string; factors: Record<string, number
   },
   torque: {
     base: 'N·m',
-    factors: { nm: 1, nmm: 1e-3, ncm: 1e-2, knm: 1e3, lbfft: POUND_FOOT, lbfin: POUND_FOOT / 12 },
+    factors: { nm: 1, nmm: 1e-3, ncm: 1e-2, cnm: 1e-2, knm: 1e3, lbfft: POUND_FOOT, lbfin: POUND_FOOT / 12 },
   },
   speed: {
     base: 'rpm',

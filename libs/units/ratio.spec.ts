@@ -172,6 +172,15 @@ describe('ratioToNumber', () => {
     );
   });
 
+  it('rounds once: a hair above half a step goes up, half a step exactly goes to even', () => {
+    // IEEE 754, round to nearest, ties to even: doubles near 1 stand 2⁻⁵² apart.
+    const one = 1n << 200n;
+    const halfStep = 1n << 147n;
+    expect(ratioToNumber(ratio(one + halfStep, one))).toBe(1);
+    expect(ratioToNumber(ratio(one + halfStep + 1n, one))).toBe(1 + 2 ** -52);
+    expect(ratioToNumber(ratio(one + halfStep - 1n, one))).toBe(1);
+  });
+
   it('survives terms beyond the range of doubles', () => {
     const huge = 10n ** 400n;
     expect(ratioToNumber({ numerator: 3n * huge, denominator: 2n * huge })).toBe(1.5);
