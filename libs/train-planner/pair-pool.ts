@@ -34,39 +34,38 @@ const COLUMNS = [
 type FloatColumn = (typeof COLUMNS)[number];
 export type PairRow = Record<FloatColumn, number> & { pinion: number; wheel: number; undercut: number };
 
-/** Collects rows in any order and hands them over sorted. */
+/** Collects rows in any order and hands them over sorted. Columns, not objects: pools can hold 100,000s of rows. */
 export class PairPoolBuilder {
-  readonly #rows: PairRow[] = [];
+  readonly #pinion: number[] = [];
+  readonly #wheel: number[] = [];
+  readonly #undercut: number[] = [];
+  readonly #floats = Object.fromEntries(COLUMNS.map((name) => [name, [] as number[]])) as Record<
+    FloatColumn,
+    number[]
+  >;
 
   add(row: PairRow): void {
-    this.#rows.push(row);
+    this.#pinion.push(row.pinion);
+    this.#wheel.push(row.wheel);
+    this.#undercut.push(row.undercut);
+    for (const name of COLUMNS) this.#floats[name].push(row[name]);
   }
 
   build(): PairPool {
-    const rows = this.#rows.sort((a, b) => a.wheel * b.pinion - b.wheel * a.pinion || b.pinion - a.pinion);
-    const float = (column: FloatColumn) => Float64Array.from(rows, (row) => row[column]);
-    const columns = Object.fromEntries(COLUMNS.map((column) => [column, float(column)]));
+    const pinion = this.#pinion;
+    const wheel = this.#wheel;
+    const order = Uint32Array.from(pinion, (_teeth, index) => index).sort((a, b) => {
+      const [pinionA, pinionB] = [pinion[a] as number, pinion[b] as number];
+      return (wheel[a] as number) * pinionB - (wheel[b] as number) * pinionA || pinionB - pinionA;
+    });
+    const sorted = (from: number[]) => Float64Array.from(order, (index) => from[index] as number);
+    const columns = COLUMNS.map((name) => [name, sorted(this.#floats[name])] as const);
     return {
-      length: rows.length,
-      pinion: Int32Array.from(rows, (row) => row.pinion),
-      wheel: Int32Array.from(rows, (row) => row.wheel),
-      undercut: Uint8Array.from(rows, (row) => row.undercut),
-      ...(columns as Record<FloatColumn, Float64Array>),
+      length: order.length,
+      pinion: Int32Array.from(order, (index) => pinion[index] as number),
+      wheel: Int32Array.from(order, (index) => wheel[index] as number),
+      undercut: Uint8Array.from(order, (index) => this.#undercut[index] as number),
+      ...(Object.fromEntries(columns) as Record<FloatColumn, Float64Array>),
     };
   }
-}
-
-/** The rows that `keep` accepts, in the same order. */
-export function selectPairs(pool: PairPool, keep: (index: number) => boolean): PairPool {
-  const kept: number[] = [];
-  for (let index = 0; index < pool.length; index++) if (keep(index)) kept.push(index);
-  const float = (from: Float64Array) => Float64Array.from(kept, (index) => from[index] as number);
-  const columns = Object.fromEntries(COLUMNS.map((column) => [column, float(pool[column])]));
-  return {
-    length: kept.length,
-    pinion: Int32Array.from(kept, (index) => pool.pinion[index] as number),
-    wheel: Int32Array.from(kept, (index) => pool.wheel[index] as number),
-    undercut: Uint8Array.from(kept, (index) => pool.undercut[index] as number),
-    ...(columns as Record<FloatColumn, Float64Array>),
-  };
 }

@@ -1,5 +1,6 @@
 import { ratioToNumber, toRatio, type Ratio, type RatioInput } from '../units/index.js';
 import { type CheckedRequest, type WholeRange } from './option-request.js';
+import { type RatioWindow } from './ratio-window.js';
 import { toNm } from './train-box.js';
 
 /** A limit with its nearest float beside it. */
@@ -30,6 +31,23 @@ export function stageLimits(request: CheckedRequest): StageLimits {
     leastContactRatio: request.leastContactRatio,
     refuseUndercut: request.undercut === 'refuse',
     greatestTipDiameter: roomNm(envelope?.height, envelope?.wall),
+  };
+}
+
+/**
+ * Ratios that one stage of a train can have when the others take their extremes; a little wide, since it only
+ * saves work. Empty (least above greatest) when the teeth as such cannot give the train ratio.
+ */
+export function usefulRatios(
+  { pinion, wheel, ratioMin, ratioMax }: StageLimits,
+  window: RatioWindow,
+  stages: number,
+): { least: number; greatest: number } {
+  const lowest = Math.max(ratioMin.value, wheel.min / pinion.max);
+  const highest = Math.min(ratioMax?.value ?? Infinity, wheel.max / pinion.min);
+  return {
+    least: (window.low / highest ** (stages - 1)) * (1 - 1e-9),
+    greatest: (window.high / lowest ** (stages - 1)) * (1 + 1e-9),
   };
 }
 

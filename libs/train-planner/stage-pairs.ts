@@ -18,6 +18,8 @@ import { type WorkWatch } from './work-watch.js';
 /** kg/m³, solid steel discs: without a material every gear counts as steel. */
 export const DEFAULT_DENSITY = 7850;
 
+const ANY_RATIO = { least: 0, greatest: Infinity };
+
 /** One gear of the request's module and shift policy. */
 export interface StageGear extends GearFigures {
   shift: number;
@@ -54,12 +56,18 @@ export class StagePairs {
     return gear;
   }
 
-  /** Every pair within the limits that has a sound tip and does not interfere. */
-  within(limits: StageLimits): PairPool {
+  /**
+   * Every pair within the limits that has a sound tip and does not interfere.
+   * @param band ratios wanted; it only saves work
+   */
+  within(limits: StageLimits, { least, greatest } = ANY_RATIO): PairPool {
     const builder = new PairPoolBuilder();
+    if (least > greatest) return builder.build();
     const wheels = this.#gearsWithin(limits.wheel, limits);
     for (const pinion of this.#gearsWithin(limits.pinion, limits)) {
       for (const wheel of wheels) {
+        const ratio = wheel.teeth / pinion.teeth;
+        if (ratio < least || ratio > greatest) continue;
         this.#watch.step();
         this.#addPair(pinion, wheel, limits, builder);
       }

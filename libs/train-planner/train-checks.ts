@@ -57,7 +57,7 @@ function boxChecks({ envelope }: TrainSpec, box: Box): TrainCheck[] {
   return (['length', 'width', 'height'] as const).flatMap((side): TrainCheck[] => {
     const limit = envelope[side];
     // A brief may leave a side open.
-    if (!Number.isFinite(limit)) return [];
+    if (limit === undefined || !Number.isFinite(limit)) return [];
     const value = box[side];
     const verdict: Verdict =
       toNm(value) > toNm(limit) ? 'fails' : value > limit * (1 - MARGINAL_SHARE) ? 'marginal' : 'passes';

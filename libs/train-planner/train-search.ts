@@ -4,7 +4,7 @@ import { type PairPool } from './pair-pool.js';
 import { RatioWindow } from './ratio-window.js';
 import { countTrains, type SearchSpace } from './search-space.js';
 import { solve } from './solve.js';
-import { roomNm, stageLimits } from './stage-limits.js';
+import { roomNm, stageLimits, usefulRatios } from './stage-limits.js';
 import { type StagePairs } from './stage-pairs.js';
 import { DEFAULT_GAP, toNm, widthOfPlanes } from './train-box.js';
 import { type WorkWatch } from './work-watch.js';
@@ -16,11 +16,14 @@ export class TrainSearch {
   readonly window: RatioWindow;
   readonly #stagePairs: StagePairs;
 
-  constructor(request: CheckedRequest, stagePairs: StagePairs) {
+  /** @param onlyStages leaves out pairs that no train of this many stages could use, which saves time */
+  constructor(request: CheckedRequest, stagePairs: StagePairs, onlyStages?: number) {
     this.request = request;
     this.#stagePairs = stagePairs;
     this.window = new RatioWindow(request.ratio.target, request.ratio.tolerancePercent);
-    this.pool = stagePairs.within(stageLimits(request));
+    const limits = stageLimits(request);
+    const band = onlyStages === undefined ? undefined : usefulRatios(limits, this.window, onlyStages);
+    this.pool = stagePairs.within(limits, band);
   }
 
   /** An empty list for this request's order. */
@@ -29,12 +32,12 @@ export class TrainSearch {
   }
 
   /** Adds the best trains of one stage count to the list. */
-  run(stages: number, best: BestList, watch: WorkWatch): void {
+  run(stages: number, best: BestList, watch: WorkWatch, phase = 'search'): void {
     const space = this.#space(stages, this.request.objective, this.window);
     if (!space) return;
     const before = watch.settled;
     const total = countTrains(this.pool.length, stages, space.ordered);
-    watch.beginPhase('search', stages, total);
+    watch.beginPhase(phase, stages, total);
     solve(space, best, watch);
     watch.settled = before + total;
   }

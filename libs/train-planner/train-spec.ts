@@ -1,4 +1,5 @@
 import { type Finding, type MeshGeometry } from '../gear-geometry/index.js';
+import { type Envelope } from './option-request.js';
 import { type Box } from './train-option.js';
 
 /** One gear of a train. Face width mm, density kg/m³ (7,850 when left out), shift in modules. */
@@ -31,7 +32,8 @@ export interface TrainSpec {
   /** Torque wanted at the output; divided by 0.98 for every mesh between a shaft and the output. */
   outputTorque?: number;
   applicationFactor?: number;
-  envelope?: { length: number; width: number; height: number; wall: number };
+  /** A side left out is not limited. */
+  envelope?: Envelope;
   /** Between the planes of neighbouring stages, mm; 5 when left out. */
   gap?: number;
   stages: SpecStage[];

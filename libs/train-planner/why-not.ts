@@ -48,7 +48,7 @@ export function explainStages(
 /** The stage count works, but its best train ranks behind the options returned. */
 function explainOutranked(stages: number, search: TrainSearch, watch: WorkWatch): WhyNot | null {
   const best = search.emptyList(1);
-  search.run(stages, best, watch);
+  search.run(stages, best, watch, 'why not');
   const train = best.trains[0];
   if (!train) return null;
   const { objective, limit } = search.request;
@@ -175,7 +175,8 @@ class Explanation {
 
   #searchWith(change: Partial<OptionRequest>): TrainSearch {
     // A change sets fields to figures of the same kind, so the request stays a checked one.
-    return new TrainSearch({ ...this.#request, ...change } as CheckedRequest, this.#stagePairs);
+    const request = { ...this.#request, ...change } as CheckedRequest;
+    return new TrainSearch(request, this.#stagePairs, this.#stages);
   }
 
   #reason(
