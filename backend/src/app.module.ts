@@ -5,9 +5,12 @@ import { CalcModule } from './calc/calc.module.js';
 import { BriefsModule } from './briefs/briefs.module.js';
 import { ClockModule } from './common/clock.js';
 import { DatabaseModule } from './database/database.module.js';
+import { ExportsModule } from './exports/exports.module.js';
+import { FinderModule } from './finder/finder.module.js';
 import { HealthModule } from './health/health.module.js';
 import { HouseRulesModule } from './house-rules/house-rules.module.js';
 import { OptionSearchesModule } from './option-searches/option-searches.module.js';
+import { OverviewModule } from './overview/overview.module.js';
 import { PartsModule } from './parts/parts.module.js';
 import { type Settings } from './settings/settings.js';
 import { SettingsModule } from './settings/settings.module.js';
@@ -29,6 +32,9 @@ import { UsersModule } from './users/users.module.js';
     BriefsModule,
     OptionSearchesModule,
     TrainsModule,
+    ExportsModule,
+    FinderModule,
+    OverviewModule,
   ],
 })
 export class AppModule {

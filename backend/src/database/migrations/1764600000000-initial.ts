@@ -1,4 +1,6 @@
 import { type MigrationInterface, type QueryRunner } from 'typeorm';
+import { PARTS, PARTS_TABLES } from './initial/parts.js';
+import { TRAINS, TRAINS_TABLES } from './initial/trains.js';
 
 const PEOPLE = [
   `CREATE TABLE "users" (
@@ -59,11 +61,18 @@ export class Initial1764600000000 implements MigrationInterface {
   name = 'Initial1764600000000';
 
   async up(runner: QueryRunner): Promise<void> {
-    for (const statement of [...PEOPLE, ...AUDIT]) await runner.query(statement);
+    for (const statement of [...PEOPLE, ...AUDIT, ...PARTS, ...TRAINS]) await runner.query(statement);
   }
 
   async down(runner: QueryRunner): Promise<void> {
-    for (const table of ['audit_entries', 'invitations', 'sessions', 'users']) {
+    for (const table of [
+      ...TRAINS_TABLES,
+      ...PARTS_TABLES,
+      'audit_entries',
+      'invitations',
+      'sessions',
+      'users',
+    ]) {
       await runner.query(`DROP TABLE "${table}"`);
     }
   }

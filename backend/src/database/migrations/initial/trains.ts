@@ -1,5 +1,5 @@
 /** Briefs, their searches and pins, and trains. */
-export const TRAINS_UP = [
+export const TRAINS = [
   `CREATE TABLE "brief" (
     "id" integer PRIMARY KEY AUTOINCREMENT NOT NULL,
     "code" text NOT NULL,
@@ -68,4 +68,5 @@ export const TRAINS_UP = [
   `CREATE INDEX "train_owner" ON "train" ("ownerId")`,
 ];
 
-export const TRAINS_DOWN = ['train', 'pin', 'option_search', 'brief'].map((table) => `DROP TABLE "${table}"`);
+/** Children first, as they are dropped. */
+export const TRAINS_TABLES = ['train', 'pin', 'option_search', 'brief'];

@@ -1,0 +1,92 @@
+import { partNumberText } from '@stageyard/libs/bill-of-materials';
+import { type CellValue, type Worksheet } from 'exceljs';
+import { type BomDto, type BomLineDto } from '../trains/dto/bom.dto.js';
+import { type Column, type PlacedTable, writeTable } from './table.js';
+import { HEAD_ROW } from './sheet-heading.js';
+import { COLOUR, dress, font, RULE_BELOW, TOTAL_ABOVE } from './workbook-style.js';
+
+const MONEY = '#,##0.00';
+const MASS = '0.000';
+
+/** Letters of the columns that formulas name. */
+const QUANTITY = 'D';
+const UNIT_PRICE = 'I';
+const LINE_TOTAL = 'J';
+const EACH_MASS = 'L';
+
+/** The columns of the bill of materials, in their order. */
+export const BOM_COLUMNS: readonly Column<BomLineDto>[] = [
+  { title: 'Find no.', width: 8, kind: 'figure', value: (line) => line.findNumber, numFmt: '0' },
+  {
+    title: 'Part number',
+    width: 14,
+    kind: 'label',
+    value: partNumberText,
+    look: ({ partNumber }) =>
+      partNumber === null
+        ? { font: font({ italic: true, color: { argb: COLOUR.brass } }), border: RULE_BELOW }
+        : {},
+  },
+  { title: 'Description', width: 40, kind: 'words', value: (line) => line.description },
+  { title: 'Quantity', width: 9, kind: 'figure', value: (line) => line.quantity, numFmt: '0.###' },
+  { title: 'Unit', width: 6, kind: 'words', value: (line) => line.unit },
+  { title: 'Material', width: 16, kind: 'words', value: (line) => line.material },
+  { title: 'Made or bought', width: 10, kind: 'words', value: (line) => line.supply },
+  { title: 'Supplier', width: 18, kind: 'words', value: (line) => line.supplier },
+  { title: 'Unit price', width: 10, kind: 'figure', value: () => null, numFmt: MONEY },
+  { title: 'Line total', width: 11, kind: 'figure', value: (_, row) => lineTotal(row), numFmt: MONEY },
+  { title: 'Lead time, days', width: 9, kind: 'figure', value: () => null, numFmt: '0' },
+  { title: 'Mass each, kg', width: 9, kind: 'figure', value: (line) => line.mass, numFmt: MASS },
+  { title: 'Source', width: 20, kind: 'words', value: (line) => line.source.join(', ') },
+  {
+    title: 'Note',
+    width: 34,
+    kind: 'words',
+    value: noteOf,
+    look: ({ flags }) =>
+      flags.length > 0 ? { font: font({ color: { argb: COLOUR.plum } }), border: RULE_BELOW } : {},
+  },
+];
+
+/** Writes the lines and below them the sums. */
+export function writeBomSheet(sheet: Worksheet, bom: BomDto): void {
+  BOM_COLUMNS.forEach(({ width }, index) => (sheet.getColumn(index + 1).width = width));
+  const table = writeTable(sheet, HEAD_ROW, BOM_COLUMNS, bom.lines);
+  sheet.autoFilter = {
+    from: { row: table.headRow, column: 1 },
+    to: { row: Math.max(table.headRow, table.lastRow), column: BOM_COLUMNS.length },
+  };
+  writeSums(sheet, bom, table);
+  sheet.pageSetup.printArea = `A1:N${table.lastRow + 1}`;
+}
+
+/** Shows nothing until a price is filled in; the stored result is what a reader without formulas sees. */
+function lineTotal(row: number): CellValue {
+  return { formula: `IF(${UNIT_PRICE}${row}="","",${QUANTITY}${row}*${UNIT_PRICE}${row})`, result: '' };
+}
+
+function writeSums(sheet: Worksheet, { lines, totals }: BomDto, { firstRow, lastRow }: PlacedTable): void {
+  const row = lastRow + 1;
+  const last = Math.max(firstRow, lastRow);
+  for (let column = 1; column <= BOM_COLUMNS.length; column += 1) {
+    dress(sheet.getCell(row, column), { font: font({ bold: true }), border: TOTAL_ABOVE });
+  }
+  const unknown = totals.linesWithoutMass;
+  const words = `${lines.length} lines, ${totals.made} made, ${totals.bought} bought`;
+  sheet.getCell(row, 3).value = words;
+  const totalPrice = sheet.getCell(`${LINE_TOTAL}${row}`);
+  const prices = `${LINE_TOTAL}${firstRow}:${LINE_TOTAL}${last}`;
+  totalPrice.value = { formula: `IF(COUNT(${prices})=0,"",SUM(${prices}))`, result: '' };
+  totalPrice.numFmt = MONEY;
+  const totalMass = sheet.getCell(`${EACH_MASS}${row}`);
+  const quantities = `${QUANTITY}${firstRow}:${QUANTITY}${last}`;
+  const masses = `${EACH_MASS}${firstRow}:${EACH_MASS}${last}`;
+  totalMass.value = { formula: `SUMPRODUCT(${quantities},${masses})`, result: totals.massKg };
+  totalMass.numFmt = MASS;
+  sheet.getCell(row, 13).value =
+    unknown === 0 ? 'kg in all' : `kg in all, without ${unknown} of unknown mass`;
+}
+
+function noteOf({ note, flags }: BomLineDto): string {
+  return [note, ...flags].filter((text) => text !== '').join('; ');
+}

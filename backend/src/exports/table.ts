@@ -1,0 +1,62 @@
+import { type CellValue, type Worksheet } from 'exceljs';
+import { type CellLook, dress, font, HEAD_LOOK, RULE_BELOW } from './workbook-style.js';
+
+/** One column of a table in a sheet. */
+export interface Column<Row> {
+  title: string;
+  /** Characters. */
+  width: number;
+  value: (row: Row, rowNumber: number) => CellValue;
+  /** Figures stand on the right, words on the left and wrap. */
+  kind: 'figure' | 'words' | 'label';
+  numFmt?: string;
+  look?: (row: Row) => CellLook;
+}
+
+/** Where a table came to stand: row numbers count from 1. */
+export interface PlacedTable {
+  headRow: number;
+  firstRow: number;
+  lastRow: number;
+}
+
+/**
+ * Writes a table with its head at `headRow` and one row an item.
+ * Text goes in as text: whatever it begins with, it never becomes a formula.
+ */
+export function writeTable<Row>(
+  sheet: Worksheet,
+  headRow: number,
+  columns: readonly Column<Row>[],
+  rows: readonly Row[],
+): PlacedTable {
+  columns.forEach(({ title, kind }, index) => {
+    const cell = sheet.getCell(headRow, index + 1);
+    cell.value = title;
+    const horizontal = kind === 'figure' ? 'right' : 'left';
+    dress(cell, { ...HEAD_LOOK, alignment: { ...HEAD_LOOK.alignment, horizontal } });
+  });
+  sheet.getRow(headRow).height = 30;
+  rows.forEach((row, offset) => {
+    const rowNumber = headRow + 1 + offset;
+    columns.forEach((column, index) => {
+      const cell = sheet.getCell(rowNumber, index + 1);
+      cell.value = column.value(row, rowNumber);
+      dress(cell, { ...plainLook(column), ...column.look?.(row) });
+    });
+  });
+  return { headRow, firstRow: headRow + 1, lastRow: headRow + rows.length };
+}
+
+function plainLook({ kind, numFmt }: Pick<Column<never>, 'kind' | 'numFmt'>): CellLook {
+  return {
+    font: font(kind === 'label' ? { bold: true } : {}),
+    border: RULE_BELOW,
+    alignment: {
+      vertical: 'top',
+      horizontal: kind === 'figure' ? 'right' : 'left',
+      wrapText: kind === 'words',
+    },
+    ...(numFmt ? { numFmt } : {}),
+  };
+}

@@ -1,0 +1,111 @@
+import { ApiProperty, ApiSchema } from '@nestjs/swagger';
+import {
+  BOM_KINDS,
+  type BomKind,
+  type BomLine,
+  bomTotals,
+  type GearDataRow,
+} from '@stageyard/libs/bill-of-materials';
+
+/** One row of the data for the gear maker. */
+@ApiSchema({ name: 'GearDataRow' })
+export class GearDataRowDto implements GearDataRow {
+  @ApiProperty({ type: 'string', enum: ['blank', 'teeth', 'mate'] })
+  group!: GearDataRow['group'];
+
+  @ApiProperty({ type: 'string' })
+  label!: string;
+
+  @ApiProperty({ type: 'string' })
+  symbol!: string;
+
+  @ApiProperty({ oneOf: [{ type: 'number' }, { type: 'string' }], nullable: true })
+  value!: number | string | null;
+
+  @ApiProperty({ type: 'string', enum: ['', 'mm', '°'] })
+  unit!: GearDataRow['unit'];
+
+  @ApiProperty({ type: 'integer', description: 'Decimals to show a number with' })
+  digits!: number;
+}
+
+/** One line of a bill of materials. */
+@ApiSchema({ name: 'BomLine' })
+export class BomLineDto implements BomLine {
+  @ApiProperty({ type: 'integer' })
+  findNumber!: number;
+
+  @ApiProperty({ type: 'string', nullable: true, description: 'Null: to be made, or to be chosen' })
+  partNumber!: string | null;
+
+  @ApiProperty({ enum: BOM_KINDS, enumName: 'BomKind' })
+  kind!: BomKind;
+
+  @ApiProperty({ type: 'string' })
+  description!: string;
+
+  @ApiProperty({ type: 'number' })
+  quantity!: number;
+
+  @ApiProperty({ type: 'string', enum: ['pcs', 'l', 'm'] })
+  unit!: BomLine['unit'];
+
+  @ApiProperty({ type: 'string', nullable: true })
+  material!: string | null;
+
+  @ApiProperty({ type: 'string', enum: ['made', 'bought'] })
+  supply!: BomLine['supply'];
+
+  @ApiProperty({ type: 'string', nullable: true })
+  supplier!: string | null;
+
+  @ApiProperty({ type: 'number', nullable: true, description: 'For one unit of quantity (kg)' })
+  mass!: number | null;
+
+  @ApiProperty({ type: [String], description: 'Where it is used: `Stage 1 pinion`, `Shaft 2`' })
+  source!: string[];
+
+  @ApiProperty({ type: 'string' })
+  note!: string;
+
+  @ApiProperty({ type: [String], description: 'What a person must look at before ordering' })
+  flags!: string[];
+
+  @ApiProperty({ type: [GearDataRowDto], required: false, description: 'For a gear to be made' })
+  gearData?: GearDataRowDto[];
+}
+
+@ApiSchema({ name: 'BomTotals' })
+export class BomTotalsDto {
+  @ApiProperty({ type: 'integer' })
+  lines!: number;
+
+  @ApiProperty({ type: 'integer', description: 'Lines to be made' })
+  made!: number;
+
+  @ApiProperty({ type: 'integer', description: 'Lines to be bought' })
+  bought!: number;
+
+  @ApiProperty({ type: 'number', description: 'Over the lines with a known mass (kg)' })
+  massKg!: number;
+
+  @ApiProperty({ type: 'integer' })
+  linesWithoutMass!: number;
+}
+
+/** The bill of materials of a train. */
+@ApiSchema({ name: 'Bom' })
+export class BomDto {
+  @ApiProperty({ type: [BomLineDto] })
+  lines!: BomLineDto[];
+
+  @ApiProperty({ type: BomTotalsDto })
+  totals!: BomTotalsDto;
+
+  @ApiProperty({ type: [String], description: 'Every flag that stands on a line, once' })
+  flags!: string[];
+}
+
+export function toBomDto(lines: BomLine[]): BomDto {
+  return { lines, totals: bomTotals(lines), flags: [...new Set(lines.flatMap((line) => line.flags))] };
+}
