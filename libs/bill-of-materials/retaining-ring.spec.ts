@@ -3,7 +3,7 @@ import { bearingBoreFor, isBearingBore, retainingRingBelow, retainingRingForShaf
 
 describe('retainingRingForShaft', () => {
   it.each([
-    // DIN 471 (seen in dealers' tables of the standard): shaft d1, thickness s, groove diameter d2, groove width m.
+    // DIN 471: shaft d1, thickness s (memory), groove diameter d2 (seen in dealers' tables), groove width m (memory).
     [3, 0.4, 2.8, 0.5],
     [6, 0.7, 5.7, 0.8],
     [8, 0.8, 7.6, 0.9],
@@ -17,7 +17,7 @@ describe('retainingRingForShaft', () => {
     [35, 1.5, 33, 1.6],
     [40, 1.75, 37.5, 1.85],
     [45, 1.75, 42.5, 1.85],
-    // The rest from memory of the standard.
+    // All of these from memory of the standard.
     [50, 2, 47, 2.15],
     [60, 2, 57, 2.15],
     [80, 2.5, 76.5, 2.65],

@@ -10,8 +10,8 @@ export interface RetainingRing {
   grooveWidth: number;
 }
 
-// DIN 471, normal type: d1 and d2, grouped by ring thickness s and groove width m. Up to 52 mm seen in dealers'
-// tables of the standard, the rest from memory.
+// DIN 471, normal type: d1 and d2, grouped by ring thickness s and groove width m. Groove
+// diameters up to 52 mm seen in dealers' tables of the standard; the rest, thickness and groove width from memory.
 const GROUPS: readonly { s: number; m: number; sizes: readonly (readonly [number, number])[] }[] = [
   {
     s: 0.4,
