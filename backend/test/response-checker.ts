@@ -78,6 +78,11 @@ const PROBLEM_RESPONSE = {
   content: { 'application/json': { schema: { $ref: '#/components/schemas/Problem' } } },
 };
 
+const EXCLUSIVE = [
+  ['exclusiveMinimum', 'minimum'],
+  ['exclusiveMaximum', 'maximum'],
+] as const;
+
 /** OpenAPI 3.0 as plain JSON Schema: `nullable` spelt out, references absolute, objects closed. */
 function jsonSchema(node: unknown): unknown {
   if (Array.isArray(node)) return node.map(jsonSchema);
@@ -85,6 +90,12 @@ function jsonSchema(node: unknown): unknown {
   const entries = Object.entries(node).filter(([key]) => key !== 'nullable' && key !== 'discriminator');
   const schema: Json = Object.fromEntries(entries.map(([key, value]) => [key, jsonSchema(value)]));
   if (typeof schema.$ref === 'string') schema.$ref = schema.$ref.replace(/^#/, 'api#');
+  // The older dialect marks the bound as exclusive; JSON Schema gives the bound itself.
+  for (const [flag, bound] of EXCLUSIVE) {
+    if (typeof schema[flag] !== 'boolean') continue;
+    if (schema[flag]) schema[flag] = schema[bound];
+    else delete schema[flag];
+  }
   const isClosed = schema.type === 'object' && schema.properties && schema.additionalProperties === undefined;
   if (isClosed) schema.additionalProperties = false;
   const isNullable = 'nullable' in node && node.nullable === true;

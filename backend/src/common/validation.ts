@@ -9,6 +9,8 @@ export function inputPipe(): ValidationPipe {
     forbidNonWhitelisted: true,
     forbidUnknownValues: true,
     transform: true,
+    // The checks' limits are looked up by the class of the input.
+    validationError: { target: true, value: true },
     transformOptions: { enableImplicitConversion: false, exposeUnsetFields: false },
     exceptionFactory: (errors) => validationProblem(errors),
   });

@@ -5,8 +5,12 @@ export class ProblemField {
   @ApiProperty({ type: String, description: 'Dotted path as in the request, such as pinion.teeth.' })
   field!: string;
 
-  @ApiProperty({ description: 'The value sent; long text is cut, secrets are left out.', nullable: true })
-  value: unknown;
+  @ApiProperty({
+    oneOf: [{ type: 'string' }, { type: 'number' }, { type: 'boolean' }],
+    nullable: true,
+    description: 'The value sent; long text is cut, lists and objects are shown as text, secrets are left out.',
+  })
+  value!: string | number | boolean | null;
 
   @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string' }] })
   limit?: number | string;

@@ -1,4 +1,4 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
 import { type Role } from '../../auth/permissions.js';
 
 /** A person who can sign in. Never deleted, since records name them; made inactive instead. */
@@ -8,7 +8,8 @@ export class UserEntity {
   id!: string;
 
   /** Lower case, compared without regard to case. */
-  @Column({ type: 'varchar', unique: true, collation: 'NOCASE' })
+  @Index('users_email', { unique: true })
+  @Column({ type: 'varchar', collation: 'NOCASE' })
   email!: string;
 
   @Column({ type: 'varchar' })
