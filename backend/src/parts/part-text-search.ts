@@ -8,14 +8,21 @@ const SHORTEST_INDEXED = 3;
 /**
  * Narrows a query over parts (alias `part`) to those whose number or description holds every word of the text,
  * wherever it stands and whatever its case. Long words use the trigram index, short ones the text itself.
+ * @param enough when the caller needs no more parts than this, in any order, and filters by nothing else
  */
-export function matchText<T extends ObjectLiteral>(query: SelectQueryBuilder<T>, text: string): void {
+export function matchText<T extends ObjectLiteral>(
+  query: SelectQueryBuilder<T>,
+  text: string,
+  enough?: number,
+): void {
   const words = text.split(/\s+/).filter(Boolean).slice(0, MOST_WORDS);
   const indexed = words.filter((word) => [...word].length >= SHORTEST_INDEXED);
+  const limit = enough !== undefined && indexed.length === words.length ? `LIMIT ${enough}` : '';
   if (indexed.length > 0) {
-    query.andWhere('part.id IN (SELECT "rowid" FROM "part_search" WHERE "part_search" MATCH :match)', {
-      match: indexed.map(quoted).join(' AND '),
-    });
+    query.andWhere(
+      `part.id IN (SELECT "rowid" FROM "part_search" WHERE "part_search" MATCH :match ${limit})`,
+      { match: indexed.map(quoted).join(' AND ') },
+    );
   }
   words
     .filter((word) => [...word].length < SHORTEST_INDEXED)

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { Repository, type SelectQueryBuilder } from 'typeorm';
+import { In, Repository, type SelectQueryBuilder } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import { type Change } from '../audit/dto/change.js';
 import { notFound } from '../common/errors.js';
@@ -15,6 +15,9 @@ import { matchText } from './part-text-search.js';
 
 /** Most materials offered in the filter bar. */
 const MOST_MATERIALS = 200;
+
+/** Sorts after every sign that a part number may hold. */
+const LAST_SIGN = '\uffff';
 
 /** Columns that may be empty: parts without the figure come last whichever way the list is sorted. */
 const MAY_BE_EMPTY: ReadonlySet<PartSort> = new Set(['teeth', 'module', 'faceWidth', 'bore', 'mass']);
@@ -33,8 +36,13 @@ export class PartsReader {
     const rows = this.filtered(query, list.text);
     const total = await rows.getCount();
     order(rows, list.sorts.length > 0 ? list.sorts : [{ field: 'number', direction: 'ASC' }]);
-    const items = await rows.offset(list.skip).limit(list.size).getMany();
-    return pageOf(items.map(toPartSummaryDto), total, list);
+    // Sorting ids alone keeps the sort small: whole rows are read for this page only.
+    const ids = await rows
+      .select('part.id', 'id')
+      .offset(list.skip)
+      .limit(list.size)
+      .getRawMany<{ id: number }>();
+    return pageOf((await this.byIds(ids.map(({ id }) => id))).map(toPartSummaryDto), total, list);
   }
 
   /** What the library holds, counted for the choices of the filter bar. */
@@ -69,16 +77,21 @@ export class PartsReader {
     return this.audit.changesOf('part', part.number, query);
   }
 
-  /** Parts whose number or description holds the text, best known first: the number that begins with it. */
+  /** Parts whose number begins with the text, then others whose number or description holds it; at most `limit`. */
   async find(text: string, limit: number): Promise<Pick<PartSummaryDto, 'number' | 'description'>[]> {
-    const rows = this.filtered({}, text)
-      .select(['part.id', 'part.number', 'part.description'])
-      .addSelect(`CASE WHEN part.number LIKE :start ESCAPE '\\' THEN 0 ELSE 1 END`, 'far')
-      .setParameter('start', `${text.replace(/[\\%_]/g, '\\$&')}%`)
-      .orderBy('far')
-      .addOrderBy('part.number')
-      .limit(limit);
-    return (await rows.getMany()).map(({ number, description }) => ({ number, description }));
+    const brief = (rows: SelectQueryBuilder<Part>) =>
+      rows.select(['part.id', 'part.number', 'part.description']).limit(limit).getMany();
+    const named = await brief(
+      this.parts
+        .createQueryBuilder('part')
+        .where('part.number >= :text AND part.number < :end', { text, end: `${text}${LAST_SIGN}` })
+        .orderBy('part.number'),
+    );
+    const anywhere = this.parts.createQueryBuilder('part');
+    matchText(anywhere, text, limit);
+    const others = named.length < limit ? await brief(anywhere) : [];
+    const found = new Map([...named, ...others].map((part) => [part.id, part]));
+    return [...found.values()].slice(0, limit).map(({ number, description }) => ({ number, description }));
   }
 
   count(standing?: PartStanding): Promise<number> {
@@ -89,6 +102,12 @@ export class PartsReader {
   async latest(standing: PartStanding, limit: number): Promise<PartSummaryDto[]> {
     const rows = await this.parts.find({ where: { standing }, order: { updatedAt: 'DESC' }, take: limit });
     return rows.map(toPartSummaryDto);
+  }
+
+  /** Parts in the order of the ids. */
+  private async byIds(ids: number[]): Promise<Part[]> {
+    const found = new Map((await this.parts.findBy({ id: In(ids) })).map((part) => [part.id, part]));
+    return ids.flatMap((id) => found.get(id) ?? []);
   }
 
   private async entity(number: string): Promise<Part> {

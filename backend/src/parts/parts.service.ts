@@ -111,7 +111,7 @@ export class PartsService {
   ): Promise<Partial<Part>> {
     const standing = patch.standing ?? before.standing;
     checkStandingStep(before.standing, standing);
-    const { attributes: raw, version: _seen, material, supplier, successorNumber, ...plain } = patch;
+    const { attributes: raw, version: _version, material, supplier, successorNumber, ...plain } = patch;
     const attributes = raw && checkAttributes(before.kind, raw);
     // A part in use again needs no successor any more.
     const kept = standing === 'withdrawn' ? before.successorNumber : null;

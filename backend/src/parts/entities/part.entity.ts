@@ -7,6 +7,7 @@ import type { Hand, PartKind, PartStanding, PartSupply } from '../part-kinds.js'
  * what kits look up, is copied into columns of its own (see `part-columns.ts`) so that indexes serve it.
  */
 @Entity('part')
+@Index('part_kind_number', ['kind', 'number'])
 @Index('part_kind_tooth', ['kind', 'module', 'teeth'])
 @Index('part_kind_bore', ['kind', 'bore'])
 @Index('part_kind_shaft', ['kind', 'shaftDiameter'])
