@@ -26,7 +26,7 @@ const requests: fc.Arbitrary<OptionRequest> = fc
     objective: fc.constantFrom('centre-distance' as const, 'ratio-error' as const, 'mass' as const),
     shiftPolicy: fc.constantFrom('none' as const, 'clear-undercut' as const),
     shape: mostly([20, 0], [25, 0], [14.5, 0], [20, 15]),
-    modules: fc.constantFrom([1], [2, 1.25], [0.8]),
+    modules: fc.constantFrom<number[]>([1], [2, 1.25], [0.8]),
     allowance: mostly(0, 0.05, 0.2),
     leastContactRatio: mostly(1, 1.2, 1.45, 0),
     undercut: mostly<'allow' | 'refuse'>('allow', 'refuse'),

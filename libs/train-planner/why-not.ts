@@ -85,7 +85,8 @@ class Explanation {
     const { target, tolerancePercent } = request.ratio;
     const percent = new RatioWindow(target, null).error(train.n, train.d) * 100;
     const decimals = Math.min(12, Math.max(3, 2 - Math.floor(Math.log10(percent))));
-    let units = Math.ceil(percent * 10 ** decimals);
+    // Start a hair low, where float noise cannot have jumped a step, and let the exact check decide.
+    let units = Math.ceil(percent * 10 ** decimals - 1e-6);
     const inside = () => new RatioWindow(target, decimal(units, decimals)).contains(train.n, train.d);
     while (!inside()) units++;
     const nearest = Number(decimal(units, decimals));
