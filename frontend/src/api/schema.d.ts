@@ -1,546 +1,4494 @@
-type Json<T> = { headers: Record<string, unknown>; content: { 'application/json': T } };
-type None = { headers: Record<string, unknown>; content?: never };
-type Params<Q, P> = ([Q] extends [never] ? { query?: never } : { query?: Q }) &
-  ([P] extends [never] ? { path?: never } : { path: P });
-type Failures = {
-  400: Json<Problem>;
-  401: Json<Problem>;
-  403: Json<Problem>;
-  404: Json<Problem>;
-  409: Json<Problem>;
-};
-type Get<R, Q = never, P = never> = {
-  parameters: Params<Q, P>;
-  requestBody?: never;
-  responses: { 200: Json<R> } & Failures;
-};
-type Send<R, B, P = never, S extends number = 200> = {
-  parameters: Params<never, P>;
-  requestBody: { content: { 'application/json': B } };
-  responses: { [K in S]: R extends null ? None : Json<R> } & Failures;
-};
-type Act<R, P = never, S extends number = 200> = {
-  parameters: Params<never, P>;
-  requestBody?: never;
-  responses: { [K in S]: R extends null ? None : Json<R> } & Failures;
-};
-
-interface FieldProblem {
-  field: string;
-  value?: unknown;
-  limit?: string | number;
-  message: string;
-}
-interface Problem {
-  statusCode: number;
-  code: string;
-  message: string;
-  errors?: FieldProblem[];
-  requestId: string;
-  current?: unknown;
-}
-type Role = 'admin' | 'designer' | 'librarian' | 'purchaser' | 'viewer';
-type Permission =
-  | 'parts.read'
-  | 'parts.edit'
-  | 'briefs.read'
-  | 'briefs.edit'
-  | 'trains.read'
-  | 'trains.edit'
-  | 'bom.export'
-  | 'calc.use'
-  | 'people.manage'
-  | 'audit.read'
-  | 'rules.read';
-interface Me {
-  id: string;
-  name: string;
-  email: string;
-  roles: Role[];
-  permissions: Permission[];
-}
-interface Welcome {
-  demo: boolean;
-  accounts: { email: string; name: string; role: string }[];
-  password: string | null;
-}
-interface User {
-  id: string;
-  name: string;
-  email: string;
-  roles: Role[];
-  active: boolean;
-  version: number;
-  createdAt: string;
-}
-type PartKind =
-  | 'gear'
-  | 'pinion-shaft'
-  | 'shaft'
-  | 'bearing'
-  | 'key'
-  | 'retaining-ring'
-  | 'seal'
-  | 'housing'
-  | 'fastener'
-  | 'lubricant'
-  | 'other';
-type PartStanding = 'draft' | 'cleared' | 'withdrawn';
-interface Part {
-  id: string;
-  number: string;
-  kind: PartKind;
-  description: string;
-  standing: PartStanding;
-  successorNumber: string | null;
-  material: string | null;
-  mass: number | null;
-  supply: 'made' | 'bought';
-  supplier: string | null;
-  note: string;
-  attributes: Record<string, unknown>;
-  computed: GearGeometry | null;
-  version: number;
-  createdAt: string;
-  updatedAt: string;
-  updatedBy: string;
-}
-interface PartInput {
-  number?: string;
-  kind: PartKind;
-  description: string;
-  material?: string | null;
-  mass?: number | null;
-  supply: 'made' | 'bought';
-  supplier?: string | null;
-  note?: string;
-  attributes: Record<string, unknown>;
-}
-type PartPatch = Partial<Omit<PartInput, 'number' | 'kind'>> & {
-  version: number;
-  standing?: PartStanding;
-  successorNumber?: string | null;
-};
-interface Facets {
-  kinds: { value: PartKind; count: number }[];
-  modules: { value: number; count: number }[];
-  materials: { value: string; count: number }[];
-}
-interface Page<T> {
-  items: T[];
-  total: number;
-  page: number;
-  size: number;
-}
-interface PartPage extends Page<Part> {}
-interface Change {
-  id: string;
-  at: string;
-  by: string;
-  action: string;
-  entity: string;
-  entityId: string;
-  summary: string;
-  before: Record<string, unknown> | null;
-  after: Record<string, unknown> | null;
-}
-interface ChangePage extends Page<Change> {}
-interface Range {
-  min: number;
-  max: number;
-}
-interface Requirement {
-  ratio: { target: string; tolerancePercent: number };
-  stages: Range;
-  teeth: { pinion: Range; wheel: Range };
-  modules: number[];
-  pressureAngleDeg?: number;
-  helixAngleDeg?: number;
-  faceWidthFactor?: number;
-  shiftPolicy?: 'none' | 'clear-undercut';
-  leastContactRatio?: number;
-  centreDistanceAllowance?: number;
-  undercut?: 'allow' | 'refuse';
-  stageRatio?: { min?: number; max?: number };
-  envelope?: { length: number; width: number; height: number; wall: number };
-  direction?: 'same' | 'opposite' | 'any';
-  objective: 'centre-distance' | 'ratio-error' | 'mass';
-  limit?: number;
-  duty?: { inputSpeed?: number; outputTorque?: number; applicationFactor?: number };
-}
-interface OptionStage {
-  pinionTeeth: number;
-  wheelTeeth: number;
-  module: number;
-  faceWidth: number;
-  pinionShift: number;
-  wheelShift: number;
-  pinionTipDiameter: number;
-  wheelTipDiameter: number;
-  centreDistance: number;
-  contactRatio: number;
-  contactRatioWorst: number | null;
-}
-interface TrainOption {
-  key: string;
-  stages: OptionStage[];
-  ratio: { numerator: string; denominator: string; value: number; errorPercent: number };
-  centreDistanceSum: number;
-  mass: number;
-  box: { length: number; width: number; height: number };
-  backlashArcmin: number;
-  lossPercent: number | null;
-  cost: number | null;
-  newParts: number | null;
-}
-interface WhyNot {
-  stages: number;
-  limit: string;
-  message: string;
-  nearest: number | string | null;
-  relaxed?: Partial<Requirement>;
-}
-interface SearchOutcome {
-  options: TrainOption[];
-  search: { complete: boolean; combinations: number; elapsedMs: number };
-  whyNot: WhyNot[];
-}
-type SearchState = 'queued' | 'running' | 'done' | 'stopped' | 'failed';
-interface SearchProgress {
-  phase: string;
-  stages: number;
-  settled: number;
-  total: number;
-  found: number;
-}
-interface SearchSummary {
-  id: string;
-  briefId: string;
-  state: SearchState;
-  startedAt: string;
-  finishedAt: string | null;
-  progress: SearchProgress | null;
-  message: string | null;
-  by: string;
-}
-interface Search extends SearchSummary {
-  request: Requirement;
-  outcome: SearchOutcome | null;
-}
-interface Pin {
-  key: string;
-  searchId: string;
-  option: TrainOption;
-  pinnedAt: string;
-  by: string;
-}
-interface BriefSummary {
-  id: string;
-  code: string;
-  title: string;
-  owner: string;
-  version: number;
-  createdAt: string;
-  updatedAt: string;
-  latestSearch: SearchSummary | null;
-}
-interface Brief extends BriefSummary {
-  note: string;
-  requirement: Requirement;
-  pins: Pin[];
-}
-interface BriefPage extends Page<BriefSummary> {}
-interface BriefInput {
-  title: string;
-  note?: string;
-  requirement: Requirement;
-}
-type BriefPatch = Partial<BriefInput> & { version: number };
-interface GearGeometry {
-  referenceDiameter: number;
-  baseDiameter: number;
-  tipDiameter: number;
-  rootDiameter: number;
-  formDiameter: number;
-  undercut: boolean;
-  leastShiftWithoutUndercut: number;
-  tipThickness: number;
-  toothThickness: number;
-  basePitch: number;
-  spanTeeth: number;
-  spanLength: number;
-}
-interface Finding {
-  code: string;
-  severity: 'fail' | 'marginal' | 'note';
-  message: string;
-  value?: number;
-  limit?: number;
-  stage?: number;
-}
-interface MeshGeometry {
-  ratio: number;
-  zeroBacklashCentreDistance: number;
-  referenceCentreDistance: number;
-  centreDistance: number;
-  operatingPressureAngleDeg: number;
-  tangentPointDistance: number;
-  approachLength: number;
-  recessLength: number;
-  pathOfContact: number;
-  basePitch: number;
-  contactRatio: number;
-  contactRatioIgnoringUndercut: number;
-  overlapRatio: number;
-  totalContactRatio: number;
-  normalBacklash: number;
-  circumferentialBacklash: number;
-  angularBacklashArcmin: number;
-  tipClearancePinion: number;
-  tipClearanceWheel: number;
-  allowanceAtContactRatioOne: number | null;
-  allowanceAtLeastContactRatio: number | null;
-  gear: { pinion: GearGeometry; wheel: GearGeometry };
-  findings: Finding[];
-}
-interface SpecGear {
-  teeth: number;
-  profileShift: number;
-  faceWidth: number;
-  hand?: 'left' | 'right';
-  density?: number;
-  partNumber?: string | null;
-}
-interface TrainSpec {
-  pressureAngleDeg: number;
-  helixAngleDeg: number;
-  target?: { ratio: string; tolerancePercent: number | string };
-  leastContactRatio: number;
-  inputSpeed?: number;
-  inputTorque?: number;
-  outputTorque?: number;
-  applicationFactor?: number;
-  envelope?: { length: number; width: number; height: number; wall: number };
-  gap?: number;
-  stages: { module: number; centreDistance: number; pinion: SpecGear; wheel: SpecGear }[];
-  shafts: { diameter: number | null }[];
-}
-interface TrainFigures {
-  ratio: { numerator: string; denominator: string; value: number; errorPercent: number | null };
-  centreDistanceSum: number;
-  mass: number;
-  box: { length: number; width: number; height: number };
-  backlashArcmin: number;
-  direction: 'same' | 'opposite';
-  shafts: {
-    index: number;
-    x: number;
-    y: number;
-    z1: number;
-    z2: number;
-    speed: number | null;
-    torque: number | null;
-    power: number | null;
-    direction: number;
-    leastDiameter: number | null;
-  }[];
-  meshes: MeshGeometry[];
-  findings: Finding[];
-  checks: {
-    code: string;
-    label: string;
-    value: number;
-    limit: number;
-    unit: string;
-    verdict: 'passes' | 'marginal' | 'fails';
-    stage?: number;
-    message: string;
-  }[];
-}
-interface TrainSummary {
-  code: string;
-  title: string;
-  revision: string;
-  state: string;
-  brief: { id: string; code: string; title: string } | null;
-  owner: string;
-  version: number;
-  createdAt: string;
-  updatedAt: string;
-  spec: TrainSpec;
-}
-interface Train extends TrainSummary {
-  note: string;
-  figures: TrainFigures;
-}
-interface TrainPage extends Page<TrainSummary> {}
-interface TrainInput {
-  briefId: string;
-  searchId: string;
-  optionKey: string;
-  title?: string;
-}
-interface TrainPatch {
-  version: number;
-  title?: string;
-  note?: string;
-  stages?: { pinion?: GearChoice; wheel?: GearChoice }[];
-  shaftDiameters?: (number | null)[];
-}
-interface GearChoice {
-  partNumber?: string | null;
-  hand?: 'left' | 'right';
-}
-interface BomLine {
-  findNumber: string;
-  partNumber: string | null;
-  kind: string;
-  description: string;
-  quantity: number;
-  unit: 'pcs' | 'l' | 'm';
-  material: string;
-  supply: 'made' | 'bought';
-  supplier: string | null;
-  mass: number | null;
-  source: string[];
-  note: string;
-  flags: string[];
-}
-interface Bom {
-  lines: BomLine[];
-  totals: { lines: number; made: number; bought: number; massKg: number };
-  flags: string[];
-}
-interface Overview {
-  counts: { briefs: number; trains: number; parts: number };
-  briefs: BriefSummary[];
-  trains: TrainSummary[];
-  draftParts: Part[];
-}
-interface FinderResult {
-  parts: { number: string; description: string }[];
-  briefs: { id: string; code: string; title: string }[];
-  trains: { code: string; title: string }[];
-}
-interface ListQuery {
-  page?: number;
-  size?: number;
-  sort?: string;
-  text?: string;
-}
-interface PartQuery extends ListQuery {
-  kind?: PartKind;
-  standing?: PartStanding;
-  teethMin?: number;
-  teethMax?: number;
-  module?: number;
-  pressureAngleDeg?: number;
-  helixAngleDeg?: number;
-  hand?: 'left' | 'right';
-  material?: string;
-  boreMin?: number;
-  boreMax?: number;
-  faceWidthMin?: number;
-  faceWidthMax?: number;
-}
+/**
+ * This file was auto-generated by openapi-typescript.
+ * Do not make direct changes to the file.
+ */
 
 export interface paths {
-  '/api/auth/me': { get: Get<Me> };
-  '/api/auth/welcome': { get: Get<Welcome> };
-  '/api/auth/sign-in': { post: Send<Me, { email: string; password: string }> };
-  '/api/auth/sign-out': { post: Act<null, never, 204> };
+  '/api/audit': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Audit_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/welcome': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Auth_welcome'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-in': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Auth_signIn'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/auth/first-admin': {
-    post: Send<Me, { token: string; name: string; email: string; password: string }>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Auth_firstAdmin'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-out': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Auth_signOut'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/me': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Auth_me'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
   '/api/users': {
-    get: Get<User[]>;
-    post: Send<User, { name: string; email: string; password: string; roles: Role[] }, never, 201>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Users_list'];
+    put?: never;
+    post: operations['Users_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
   '/api/users/{id}': {
-    patch: Send<
-      User,
-      { version: number; name?: string; roles?: Role[]; active?: boolean; password?: string },
-      { id: string }
-    >;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Users_change'];
+    trace?: never;
   };
-  '/api/finder': { get: Get<FinderResult, { text: string }> };
-  '/api/overview': { get: Get<Overview> };
-  '/api/parts': { get: Get<PartPage, PartQuery>; post: Send<Part, PartInput, never, 201> };
-  '/api/parts/facets': { get: Get<Facets> };
+  '/api/health': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Health_check'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/house-rules': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['HouseRules_read'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parts': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parts_list'];
+    put?: never;
+    post: operations['Parts_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parts/facets': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parts_facets'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/parts/{number}': {
-    get: Get<Part, never, { number: string }>;
-    patch: Send<Part, PartPatch, { number: string }>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parts_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Parts_update'];
+    trace?: never;
   };
-  '/api/parts/{number}/changes': { get: Get<ChangePage, ListQuery, { number: string }> };
+  '/api/parts/{number}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parts_changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/calc/gear': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Calc_gear'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/calc/mesh': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Calc_mesh'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/calc/shift': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Calc_shift'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/calc/options': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Calc_options'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/calc/fractions': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Calc_fractions'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/briefs': {
-    get: Get<BriefPage, ListQuery & { mine?: boolean }>;
-    post: Send<Brief, BriefInput, never, 201>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Briefs_list'];
+    put?: never;
+    post: operations['Briefs_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
   '/api/briefs/{id}': {
-    get: Get<Brief, never, { id: string }>;
-    patch: Send<Brief, BriefPatch, { id: string }>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Briefs_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Briefs_edit'];
+    trace?: never;
   };
-  '/api/briefs/{id}/changes': { get: Get<ChangePage, ListQuery, { id: string }> };
-  '/api/briefs/{id}/searches': {
-    get: Get<SearchSummary[], never, { id: string }>;
-    post: Act<Search, { id: string }, 201>;
+  '/api/briefs/{id}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Briefs_changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
   '/api/briefs/{id}/pins/{optionKey}': {
-    put: Send<Brief, { searchId: string }, { id: string; optionKey: string }>;
-    delete: Act<Brief, { id: string; optionKey: string }>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['Briefs_pin'];
+    post?: never;
+    delete: operations['Briefs_unpin'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
-  '/api/searches/{id}': { get: Get<Search, never, { id: string }> };
-  '/api/searches/{id}/stop': { post: Act<null, { id: string }, 202> };
+  '/api/briefs/{id}/searches': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OptionSearches_ofBrief'];
+    put?: never;
+    post: operations['OptionSearches_start'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/searches/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OptionSearches_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/searches/{id}/events': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OptionSearches_events'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/searches/{id}/stop': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['OptionSearches_stop'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/trains': {
-    get: Get<TrainPage, ListQuery & { mine?: boolean; revisionState?: string }>;
-    post: Send<Train, TrainInput, never, 201>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Trains_list'];
+    put?: never;
+    post: operations['Trains_adopt'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
   };
   '/api/trains/{code}': {
-    get: Get<Train, never, { code: string }>;
-    patch: Send<Train, TrainPatch, { code: string }>;
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Trains_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Trains_edit'];
+    trace?: never;
   };
-  '/api/trains/{code}/bom': { get: Get<Bom, never, { code: string }> };
-  '/api/trains/{code}/changes': { get: Get<ChangePage, ListQuery, { code: string }> };
+  '/api/trains/{code}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Trains_changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/bom': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Trains_bom'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/bom.xlsx': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Exports_bom'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/finder': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Finder_find'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/overview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Overview_read'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
 }
-
+export type webhooks = Record<string, never>;
 export interface components {
   schemas: {
-    Me: Me;
-    Welcome: Welcome;
-    User: User;
-    Part: Part;
-    PartPage: PartPage;
-    PartInput: PartInput;
-    PartPatch: PartPatch;
-    Facets: Facets;
-    Change: Change;
-    ChangePage: ChangePage;
-    Requirement: Requirement;
-    Brief: Brief;
-    BriefSummary: BriefSummary;
-    BriefPage: BriefPage;
-    BriefInput: BriefInput;
-    BriefPatch: BriefPatch;
-    Search: Search;
-    SearchSummary: SearchSummary;
-    Pin: Pin;
-    TrainOption: TrainOption;
-    SearchOutcome: SearchOutcome;
-    WhyNot: WhyNot;
-    Train: Train;
-    TrainSummary: TrainSummary;
-    TrainPage: TrainPage;
-    TrainInput: TrainInput;
-    TrainPatch: TrainPatch;
-    TrainFigures: TrainFigures;
-    TrainSpec: TrainSpec;
-    MeshGeometry: MeshGeometry;
-    GearGeometry: GearGeometry;
-    Finding: Finding;
-    Bom: Bom;
-    BomLine: BomLine;
-    Overview: Overview;
-    FinderResult: FinderResult;
-    Problem: Problem;
+    Change: {
+      id: number;
+      /** Format: date-time */
+      at: string;
+      /** @description The person's name at that time. */
+      by: string;
+      action: string;
+      entity: string;
+      entityId: string;
+      summary: string;
+      before: {
+        [key: string]: unknown;
+      } | null;
+      after: {
+        [key: string]: unknown;
+      } | null;
+    };
+    ChangePage: {
+      items: components['schemas']['Change'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    ProblemField: {
+      /** @description Dotted path as in the request, such as pinion.teeth. */
+      field: string;
+      /** @description The value sent; long text is cut, lists and objects are shown as text, secrets are left out. */
+      value: (string | number | boolean) | null;
+      limit?: number | string;
+      message: string;
+    };
+    Problem: {
+      statusCode: number;
+      /** @description For programs; stable. */
+      code: string;
+      /** @description For people: what, why, and what to do. */
+      message: string;
+      errors?: components['schemas']['ProblemField'][];
+      /** @description Also in the server log, to find the request again. */
+      requestId: string;
+      /** @description Of a stale edit (code changed-meanwhile): the thing as it stands now. */
+      current?: {
+        [key: string]: unknown;
+      };
+      /** @description Of a second search: the one that still runs. */
+      searchId?: string;
+      /** @description Of a second search: the brief that it searches for. */
+      briefId?: string;
+      /** @description Of a refusal that ends by itself: how long to wait, s. */
+      retryAfterSeconds?: number;
+    };
+    /** @enum {string} */
+    Role: 'admin' | 'designer' | 'librarian' | 'purchaser' | 'viewer';
+    WelcomeAccount: {
+      email: string;
+      name: string;
+      role: components['schemas']['Role'];
+    };
+    Welcome: {
+      demo: boolean;
+      /** @description Empty outside demo mode. */
+      accounts: components['schemas']['WelcomeAccount'][];
+      /** @description Of the demo accounts; null outside demo mode. */
+      password: string | null;
+    };
+    SignInInput: {
+      email: string;
+      /** Format: password */
+      password: string;
+    };
+    /** @enum {string} */
+    Permission:
+      | 'parts.read'
+      | 'parts.edit'
+      | 'briefs.read'
+      | 'briefs.edit'
+      | 'trains.read'
+      | 'trains.edit'
+      | 'bom.export'
+      | 'calc.use'
+      | 'people.manage'
+      | 'audit.read'
+      | 'rules.read';
+    Me: {
+      id: string;
+      name: string;
+      email: string;
+      roles: components['schemas']['Role'][];
+      permissions: components['schemas']['Permission'][];
+    };
+    FirstAdminInput: {
+      /** @description From the link that the first start prints. */
+      token: string;
+      name: string;
+      /** Format: email */
+      email: string;
+      /** Format: password */
+      password: string;
+    };
+    User: {
+      id: string;
+      name: string;
+      email: string;
+      roles: components['schemas']['Role'][];
+      active: boolean;
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+    };
+    UserPage: {
+      items: components['schemas']['User'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    UserInput: {
+      name: string;
+      /** Format: email */
+      email: string;
+      roles: components['schemas']['Role'][];
+      /** Format: password */
+      password: string;
+    };
+    UserPatch: {
+      name?: string;
+      /** Format: email */
+      email?: string;
+      roles?: components['schemas']['Role'][];
+      /** Format: password */
+      password?: string;
+      /** @description The version that was seen. */
+      version: number;
+      /** @description False ends every session of the person at once. */
+      active?: boolean;
+    };
+    Health: {
+      /** @enum {string} */
+      status: 'ok';
+    };
+    HouseRules: {
+      /** @description Transverse. */
+      leastContactRatio: number;
+      /** @description Normal, in modules. */
+      leastTipThickness: number;
+      /** @description Of case-hardened gears, in modules. */
+      leastTipThicknessHardened: number;
+      /** @description In modules. */
+      leastTipClearance: number;
+      /** @description A figure this close to its limit is marginal, %. */
+      marginalPercent: number;
+      /** @description Torsional, MPa. */
+      shaftStress: number;
+      /** @description Between the planes of neighbouring stages, mm. */
+      planeGap: number;
+      /** @description Between rotating parts that share a plane, mm. */
+      leastPartGap: number;
+      meshFriction: number;
+      /** @description kg/m³ */
+      steelDensity: number;
+      applicationFactor: number;
+      /** @description ms */
+      searchTimeLimitMs: number;
+      /** @description ms */
+      briefSearchTimeLimitMs: number;
+    };
+    GearAttributes: {
+      /**
+       * @description Number of teeth
+       * @example 24
+       */
+      teeth: number;
+      /**
+       * @description Normal module (mm)
+       * @example 2
+       */
+      module: number;
+      /**
+       * @description Normal pressure angle (degrees); 20 when left out
+       * @default 20
+       * @enum {number}
+       */
+      pressureAngleDeg: 14.5 | 15 | 17.5 | 20 | 22.5 | 25;
+      /**
+       * @description Helix angle; 0 is a spur gear (degrees)
+       * @default 0
+       */
+      helixAngleDeg: number;
+      /**
+       * @description Hand of the helix; null for spur
+       * @enum {string|null}
+       */
+      hand?: 'left' | 'right' | null;
+      /** @description Profile shift coefficient; null when the maker does not state it */
+      profileShift?: number | null;
+      /**
+       * @description Face width (mm)
+       * @example 20
+       */
+      faceWidth: number;
+      /** @description Upper tooth-thickness allowance, normal, at the reference diameter (mm) */
+      thicknessAllowanceUpper?: number | null;
+      /** @description Lower tooth-thickness allowance, normal, at the reference diameter (mm) */
+      thicknessAllowanceLower?: number | null;
+      /**
+       * @description Heat treatment
+       * @example case-hardened
+       */
+      heatTreatment?: string | null;
+      /**
+       * @description Hardness with its scale
+       * @example 58–62 HRC
+       */
+      hardness?: string | null;
+      /**
+       * @description Bore (mm)
+       * @example 12
+       */
+      bore: number;
+      /** @description Hub diameter (mm) */
+      hubDiameter?: number | null;
+      /** @description Hub length beyond the face (mm) */
+      hubLength?: number | null;
+    };
+    PinionShaftAttributes: {
+      /**
+       * @description Number of teeth
+       * @example 24
+       */
+      teeth: number;
+      /**
+       * @description Normal module (mm)
+       * @example 2
+       */
+      module: number;
+      /**
+       * @description Normal pressure angle (degrees); 20 when left out
+       * @default 20
+       * @enum {number}
+       */
+      pressureAngleDeg: 14.5 | 15 | 17.5 | 20 | 22.5 | 25;
+      /**
+       * @description Helix angle; 0 is a spur gear (degrees)
+       * @default 0
+       */
+      helixAngleDeg: number;
+      /**
+       * @description Hand of the helix; null for spur
+       * @enum {string|null}
+       */
+      hand?: 'left' | 'right' | null;
+      /** @description Profile shift coefficient; null when the maker does not state it */
+      profileShift?: number | null;
+      /**
+       * @description Face width (mm)
+       * @example 20
+       */
+      faceWidth: number;
+      /** @description Upper tooth-thickness allowance, normal, at the reference diameter (mm) */
+      thicknessAllowanceUpper?: number | null;
+      /** @description Lower tooth-thickness allowance, normal, at the reference diameter (mm) */
+      thicknessAllowanceLower?: number | null;
+      /**
+       * @description Heat treatment
+       * @example case-hardened
+       */
+      heatTreatment?: string | null;
+      /**
+       * @description Hardness with its scale
+       * @example 58–62 HRC
+       */
+      hardness?: string | null;
+      /**
+       * @description Shaft diameter (mm)
+       * @example 15
+       */
+      shaftDiameter: number;
+      /**
+       * @description Shaft length (mm)
+       * @example 120
+       */
+      shaftLength: number;
+    };
+    ShaftAttributes: {
+      /**
+       * @description Diameter (mm)
+       * @example 20
+       */
+      diameter: number;
+      /**
+       * @description Length (mm)
+       * @example 150
+       */
+      length: number;
+    };
+    BearingAttributes: {
+      /**
+       * @description Bore (mm)
+       * @example 20
+       */
+      bore: number;
+      /**
+       * @description Outer diameter (mm)
+       * @example 47
+       */
+      outerDiameter: number;
+      /**
+       * @description Width (mm)
+       * @example 14
+       */
+      width: number;
+      /** @description Basic dynamic load rating C (ISO 281) (kN) */
+      dynamicLoadRating?: number | null;
+      /** @description Basic static load rating C0 (ISO 76) (kN) */
+      staticLoadRating?: number | null;
+      /**
+       * @description Type
+       * @example deep groove ball
+       */
+      type: string;
+    };
+    KeyAttributes: {
+      /**
+       * @description Width b (mm)
+       * @example 6
+       */
+      width: number;
+      /**
+       * @description Height h (mm)
+       * @example 6
+       */
+      height: number;
+      /**
+       * @description Length (mm)
+       * @example 20
+       */
+      length: number;
+    };
+    RetainingRingAttributes: {
+      /**
+       * @description Shaft diameter it fits (mm)
+       * @example 20
+       */
+      shaftDiameter: number;
+      /**
+       * @description Thickness (mm)
+       * @example 1.2
+       */
+      thickness: number;
+      /**
+       * @description Diameter of the groove in the shaft (mm)
+       * @example 19
+       */
+      grooveDiameter: number;
+    };
+    SealAttributes: {
+      /**
+       * @description Shaft diameter it fits (mm)
+       * @example 20
+       */
+      shaftDiameter: number;
+      /**
+       * @description Outer diameter (mm)
+       * @example 35
+       */
+      outerDiameter: number;
+      /**
+       * @description Width (mm)
+       * @example 7
+       */
+      width: number;
+    };
+    HousingAttributes: {
+      /**
+       * @description Length outside (mm)
+       * @example 220
+       */
+      length: number;
+      /**
+       * @description Width outside (mm)
+       * @example 140
+       */
+      width: number;
+      /**
+       * @description Height outside (mm)
+       * @example 90
+       */
+      height: number;
+      /**
+       * @description Wall thickness (mm)
+       * @example 6
+       */
+      wall: number;
+    };
+    FastenerAttributes: {
+      /**
+       * @description Thread
+       * @example M6
+       */
+      thread: string;
+      /**
+       * @description Length (mm)
+       * @example 20
+       */
+      length: number;
+      /**
+       * @description Strength class
+       * @example 8.8
+       */
+      strengthClass: string;
+    };
+    LubricantAttributes: {
+      /**
+       * @description Viscosity grade
+       * @example ISO VG 220
+       */
+      viscosityGrade: string;
+      /**
+       * @description Pack volume (litres)
+       * @example 1
+       */
+      packVolume: number;
+    };
+    OtherAttributes: Record<string, never>;
+    /** @enum {string} */
+    PartKind:
+      | 'gear'
+      | 'pinion-shaft'
+      | 'shaft'
+      | 'bearing'
+      | 'key'
+      | 'retaining-ring'
+      | 'seal'
+      | 'housing'
+      | 'fastener'
+      | 'lubricant'
+      | 'other';
+    /** @enum {string} */
+    PartStanding: 'draft' | 'cleared' | 'withdrawn';
+    /** @enum {string} */
+    PartSupply: 'made' | 'bought';
+    PartSummary: {
+      /** @description Stays for good, whatever happens to the part */
+      id: string;
+      /** @example KW-00417 */
+      number: string;
+      kind: components['schemas']['PartKind'];
+      description: string;
+      standing: components['schemas']['PartStanding'];
+      /** @description Part to use instead of a withdrawn one */
+      successorNumber: string | null;
+      material: string | null;
+      /** @description Mass of one (kg) */
+      mass: number | null;
+      supply: components['schemas']['PartSupply'];
+      supplier: string | null;
+      note: string;
+      /** @description The attributes of the kind */
+      attributes:
+        | components['schemas']['GearAttributes']
+        | components['schemas']['PinionShaftAttributes']
+        | components['schemas']['ShaftAttributes']
+        | components['schemas']['BearingAttributes']
+        | components['schemas']['KeyAttributes']
+        | components['schemas']['RetainingRingAttributes']
+        | components['schemas']['SealAttributes']
+        | components['schemas']['HousingAttributes']
+        | components['schemas']['FastenerAttributes']
+        | components['schemas']['LubricantAttributes']
+        | components['schemas']['OtherAttributes'];
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+    };
+    PartPage: {
+      items: components['schemas']['PartSummary'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    TextCount: {
+      value: string;
+      count: number;
+    };
+    FigureCount: {
+      value: number;
+      count: number;
+    };
+    Facets: {
+      kinds: components['schemas']['TextCount'][];
+      standings: components['schemas']['TextCount'][];
+      /** @description Modules in mm, smallest first */
+      modules: components['schemas']['FigureCount'][];
+      /** @description The 200 most used materials, in alphabetical order */
+      materials: components['schemas']['TextCount'][];
+    };
+    GearGeometry: {
+      /** @description Reference diameter d (mm) */
+      referenceDiameter: number;
+      /** @description Base diameter d_b (mm) */
+      baseDiameter: number;
+      /** @description Tip diameter d_a (mm) */
+      tipDiameter: number;
+      /** @description Root diameter d_f, as cut (mm) */
+      rootDiameter: number;
+      /** @description Form diameter d_F, where the usable involute begins, as cut (mm) */
+      formDiameter: number;
+      /** @description Whether the cutter takes away involute near the root */
+      undercut: boolean;
+      /** @description Least profile shift without undercut x_min (modules) */
+      leastShiftWithoutUndercut: number;
+      /** @description Tooth thickness at the tip, normal, nominal (mm) */
+      tipThickness: number;
+      /** @description Tooth thickness at the reference circle, normal, nominal (mm) */
+      toothThickness: number;
+      /** @description Transverse base pitch p_bt (mm) */
+      basePitch: number;
+      /** @description Teeth spanned by the base tangent length */
+      spanTeeth: number;
+      /** @description Base tangent length W over the spanned teeth, nominal (mm) */
+      spanLength: number;
+      /** @description Generating profile shift x_E, at the mean thickness allowance (modules) */
+      effectiveShift: number;
+      /** @description Transverse module (mm) */
+      transverseModule: number;
+      /** @description Transverse pressure angle (degrees) */
+      transversePressureAngleDeg: number;
+      /** @description Helix angle at the base circle (degrees) */
+      baseHelixAngleDeg: number;
+      /** @description Axial pitch (mm); null for a spur gear */
+      axialPitch: number | null;
+      /** @description Tooth depth (mm) */
+      toothDepth: number;
+      /** @description Chordal tooth thickness, nominal (mm) */
+      chordalThickness: number;
+      /** @description Height of that chord below the tip circle (mm) */
+      chordalHeight: number;
+    };
+    Part: {
+      /** @description Stays for good, whatever happens to the part */
+      id: string;
+      /** @example KW-00417 */
+      number: string;
+      kind: components['schemas']['PartKind'];
+      description: string;
+      standing: components['schemas']['PartStanding'];
+      /** @description Part to use instead of a withdrawn one */
+      successorNumber: string | null;
+      material: string | null;
+      /** @description Mass of one (kg) */
+      mass: number | null;
+      supply: components['schemas']['PartSupply'];
+      supplier: string | null;
+      note: string;
+      /** @description The attributes of the kind */
+      attributes:
+        | components['schemas']['GearAttributes']
+        | components['schemas']['PinionShaftAttributes']
+        | components['schemas']['ShaftAttributes']
+        | components['schemas']['BearingAttributes']
+        | components['schemas']['KeyAttributes']
+        | components['schemas']['RetainingRingAttributes']
+        | components['schemas']['SealAttributes']
+        | components['schemas']['HousingAttributes']
+        | components['schemas']['FastenerAttributes']
+        | components['schemas']['LubricantAttributes']
+        | components['schemas']['OtherAttributes'];
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+      /** @description Computed from the attributes of a gear or pinion shaft; null for other kinds */
+      computed: components['schemas']['GearGeometry'] | null;
+    };
+    PartInput: {
+      /**
+       * @description Part number; blank or null for the next running number
+       * @example KW-00417
+       */
+      number?: string | null;
+      /** @description Kind; it decides the attributes */
+      kind: components['schemas']['PartKind'];
+      /**
+       * @description Description
+       * @example Spur gear m 2, 24 teeth
+       */
+      description: string;
+      /**
+       * @description Standing at the start; draft when left out
+       * @default draft
+       * @enum {string}
+       */
+      standing: 'draft' | 'cleared';
+      /**
+       * @description Material
+       * @example C45
+       */
+      material?: string | null;
+      /** @description Mass of one (kg) */
+      mass?: number | null;
+      /**
+       * @description Made by us or bought; bought when left out
+       * @default bought
+       */
+      supply: components['schemas']['PartSupply'];
+      /** @description Supplier */
+      supplier?: string | null;
+      /** @description Note */
+      note?: string;
+      /** @description The attributes of this kind, all of them checked */
+      attributes:
+        | components['schemas']['GearAttributes']
+        | components['schemas']['PinionShaftAttributes']
+        | components['schemas']['ShaftAttributes']
+        | components['schemas']['BearingAttributes']
+        | components['schemas']['KeyAttributes']
+        | components['schemas']['RetainingRingAttributes']
+        | components['schemas']['SealAttributes']
+        | components['schemas']['HousingAttributes']
+        | components['schemas']['FastenerAttributes']
+        | components['schemas']['LubricantAttributes']
+        | components['schemas']['OtherAttributes'];
+    };
+    PartPatch: {
+      /** @description Version that was seen before the edit */
+      version: number;
+      /** @description Description */
+      description?: string;
+      /** @description Standing: draft → cleared → withdrawn; a withdrawn part may be cleared again */
+      standing?: components['schemas']['PartStanding'];
+      /**
+       * @description Part to use instead of this withdrawn one; null for none
+       * @example KW-00417
+       */
+      successorNumber?: string | null;
+      /** @description Material */
+      material?: string | null;
+      /** @description Mass of one (kg) */
+      mass?: number | null;
+      /** @description Made by us or bought */
+      supply?: components['schemas']['PartSupply'];
+      /** @description Supplier */
+      supplier?: string | null;
+      /** @description Note */
+      note?: string;
+      /** @description All attributes of the kind, in place of the old ones */
+      attributes?:
+        | components['schemas']['GearAttributes']
+        | components['schemas']['PinionShaftAttributes']
+        | components['schemas']['ShaftAttributes']
+        | components['schemas']['BearingAttributes']
+        | components['schemas']['KeyAttributes']
+        | components['schemas']['RetainingRingAttributes']
+        | components['schemas']['SealAttributes']
+        | components['schemas']['HousingAttributes']
+        | components['schemas']['FastenerAttributes']
+        | components['schemas']['LubricantAttributes']
+        | components['schemas']['OtherAttributes'];
+    };
+    Rack: {
+      /**
+       * @description Addendum (modules)
+       * @default 1
+       */
+      addendum: number;
+      /**
+       * @description Dedendum (modules)
+       * @default 1.25
+       */
+      dedendum: number;
+      /** @description Tip radius; 0.38 or the largest that fits when left out (modules) */
+      tipRadius?: number;
+    };
+    ThicknessAllowance: {
+      /** @description Upper allowance (mm) */
+      upper: number;
+      /** @description Lower allowance, not above the upper (mm) */
+      lower: number;
+    };
+    GearInput: {
+      /**
+       * @description Number of teeth
+       * @example 24
+       */
+      teeth: number;
+      /**
+       * @description Normal module (mm)
+       * @example 3
+       */
+      module: number;
+      /**
+       * @description Normal pressure angle (degrees)
+       * @default 20
+       * @enum {number}
+       */
+      pressureAngleDeg: 14.5 | 15 | 17.5 | 20 | 22.5 | 25;
+      /**
+       * @description Helix angle at the reference circle; 0 is a spur gear (degrees)
+       * @default 0
+       */
+      helixAngleDeg: number;
+      /**
+       * @description Hand of the helix
+       * @enum {string}
+       */
+      hand?: 'left' | 'right';
+      /**
+       * @description Profile shift coefficient (modules)
+       * @default 0
+       */
+      profileShift: number;
+      /**
+       * @description Tip shortening coefficient; positive makes the tip circle smaller (modules)
+       * @default 0
+       */
+      tipShortening: number;
+      /** @description Face width (mm) */
+      faceWidth?: number;
+      /** @description Basic rack; ISO 53 profile A when left out */
+      rack?: components['schemas']['Rack'];
+      /** @description Tooth-thickness allowance; none when left out */
+      thicknessAllowance?: components['schemas']['ThicknessAllowance'];
+    };
+    MeshInput: {
+      /** @description The pinion: the gear with fewer teeth */
+      pinion: components['schemas']['GearInput'];
+      /** @description The wheel */
+      wheel: components['schemas']['GearInput'];
+      /** @description Operating centre distance; not together with an allowance (mm) */
+      centreDistance?: number;
+      /** @description Added to the zero-backlash distance; not together with a centre distance (modules) */
+      allowance?: number;
+      /**
+       * @description Least contact ratio that counts as enough
+       * @default 1.2
+       */
+      leastContactRatio: number;
+    };
+    SpecificSliding: {
+      /** @description At the pinion root; null when infinite */
+      pinionRoot: number | null;
+      /** @description At the wheel root; null when infinite */
+      wheelRoot: number | null;
+    };
+    MeshGears: {
+      pinion: components['schemas']['GearGeometry'];
+      wheel: components['schemas']['GearGeometry'];
+    };
+    /** @enum {string} */
+    FindingSeverity: 'fail' | 'marginal' | 'note';
+    Finding: {
+      /** @example interference */
+      code: string;
+      severity: components['schemas']['FindingSeverity'];
+      message: string;
+      /** @description The figure that was checked */
+      value?: number;
+      /** @description The limit it was checked against */
+      limit?: number;
+    };
+    MeshGeometry: {
+      /** @description Wheel teeth / pinion teeth */
+      ratio: number;
+      /** @description Centre distance without backlash (mm) */
+      zeroBacklashCentreDistance: number;
+      /** @description Reference centre distance (mm) */
+      referenceCentreDistance: number;
+      /** @description Operating centre distance (mm) */
+      centreDistance: number;
+      /** @description Operating transverse pressure angle (degrees) */
+      operatingPressureAngleDeg: number;
+      /** @description Length T1–T2 of the common tangent of the base circles (mm) */
+      tangentPointDistance: number;
+      /** @description A–C on the path of contact (mm); may be negative */
+      approachLength: number;
+      /** @description C–E on the path of contact (mm); may be negative */
+      recessLength: number;
+      /** @description Length of the path of contact (mm) */
+      pathOfContact: number;
+      /** @description Transverse base pitch (mm) */
+      basePitch: number;
+      /** @description Transverse contact ratio, undercut included; 0 without contact */
+      contactRatio: number;
+      /** @description Textbook contact ratio from the tip circles alone */
+      contactRatioIgnoringUndercut: number;
+      /** @description Why the textbook value does not hold; null where it does */
+      contactRatioLimitedBy: string | null;
+      /** @description Overlap ratio; null for a helical pair without a face width */
+      overlapRatio: number | null;
+      /** @description Total contact ratio; null where the overlap ratio is */
+      totalContactRatio: number | null;
+      /** @description Normal backlash (mm); negative means the teeth jam */
+      normalBacklash: number;
+      /** @description Circumferential backlash at the operating pitch circles (mm) */
+      circumferentialBacklash: number;
+      /** @description Angular backlash at the wheel, the pinion held (arcmin) */
+      angularBacklashArcmin: number;
+      /** @description Pinion's tip clearance a − r_a1 − r_f2 (mm) */
+      tipClearancePinion: number;
+      /** @description Wheel's tip clearance a − r_a2 − r_f1 (mm) */
+      tipClearanceWheel: number;
+      /** @description Largest allowance at which the contact ratio is still 1 (modules) */
+      allowanceAtContactRatioOne: number | null;
+      /** @description Largest allowance at which the contact ratio is still the least allowed (modules) */
+      allowanceAtLeastContactRatio: number | null;
+      /** @description Specific sliding; null while it is not computed */
+      specificSliding: components['schemas']['SpecificSliding'] | null;
+      /** @description Mesh loss factor; null while it is not computed */
+      meshLossFactor: number | null;
+      gear: components['schemas']['MeshGears'];
+      findings: components['schemas']['Finding'][];
+    };
+    ShiftInput: {
+      /** @description The pinion; its own shift is replaced */
+      pinion: components['schemas']['GearInput'];
+      /** @description The wheel; its own shift is replaced */
+      wheel: components['schemas']['GearInput'];
+      /**
+       * @description How the shifts are chosen
+       * @enum {string}
+       */
+      policy: 'none' | 'clear-undercut';
+      /**
+       * @description Keep the reference centre distance: the wheel takes the opposite shift
+       * @default false
+       */
+      keepReferenceDistance: boolean;
+      /**
+       * @description Least tip thickness (modules)
+       * @default 0.2
+       */
+      leastTipThickness: number;
+    };
+    ShiftResult: {
+      /** @description Profile shift coefficient of the pinion */
+      pinionShift: number;
+      /** @description Profile shift coefficient of the wheel */
+      wheelShift: number;
+      /** @description The pair at its zero-backlash distance */
+      mesh: components['schemas']['MeshGeometry'];
+    };
+    RatioTarget: {
+      /**
+       * @description Target ratio, input speed to output speed
+       * @example 37.5
+       */
+      target: string | number;
+      /**
+       * @description Tolerance either side (per cent)
+       * @example 1
+       */
+      tolerancePercent: string | number;
+    };
+    WholeRange: {
+      /** @description Least */
+      min: number;
+      /** @description Greatest, not below the least */
+      max: number;
+    };
+    TeethRanges: {
+      /** @description Pinion teeth, 4 to 1000 */
+      pinion: components['schemas']['WholeRange'];
+      /** @description Wheel teeth, 4 to 1000 */
+      wheel: components['schemas']['WholeRange'];
+    };
+    StageRatioLimits: {
+      /** @description Least; 1 when left out. Below 1 allows a speed-up */
+      min?: string | number;
+      /** @description Greatest; no limit when left out */
+      max?: string | number;
+    };
+    Envelope: {
+      /** @description Length, across the shafts (mm) */
+      length?: number;
+      /** @description Width, along the shafts (mm) */
+      width?: number;
+      /** @description Height, across the shafts (mm) */
+      height?: number;
+      /**
+       * @description Wall thickness (mm)
+       * @default 0
+       */
+      wall: number;
+    };
+    OptionRequest: {
+      /** @description Ratio and tolerance */
+      ratio: components['schemas']['RatioTarget'];
+      /** @description Number of stages, 1 to 3 */
+      stages: components['schemas']['WholeRange'];
+      /** @description Tooth numbers */
+      teeth: components['schemas']['TeethRanges'];
+      /**
+       * @description Normal modules (mm); without a load the smallest is used
+       * @example [
+       *       1,
+       *       1.25
+       *     ]
+       */
+      modules: number[];
+      /**
+       * @description Normal pressure angle (degrees)
+       * @default 20
+       * @enum {number}
+       */
+      pressureAngleDeg: 14.5 | 15 | 17.5 | 20 | 22.5 | 25;
+      /**
+       * @description Helix angle (degrees)
+       * @default 0
+       */
+      helixAngleDeg: number;
+      /**
+       * @description Face width (modules)
+       * @default 10
+       */
+      faceWidthFactor: number;
+      /**
+       * @default none
+       * @enum {string}
+       */
+      shiftPolicy: 'none' | 'clear-undercut';
+      /**
+       * @description Least contact ratio of every stage
+       * @default 1.2
+       */
+      leastContactRatio: number;
+      /**
+       * @description Added to the zero-backlash distance of every stage (modules)
+       * @default 0
+       */
+      centreDistanceAllowance: number;
+      /**
+       * @default allow
+       * @enum {string}
+       */
+      undercut: 'allow' | 'refuse';
+      /** @description Limits on the ratio of every stage */
+      stageRatio?: components['schemas']['StageRatioLimits'];
+      /** @description Space for the box */
+      envelope?: components['schemas']['Envelope'];
+      /**
+       * @default in-line
+       * @enum {string}
+       */
+      arrangement: 'in-line';
+      /**
+       * @description Sense of rotation of the output against the input
+       * @default any
+       * @enum {string}
+       */
+      direction: 'same' | 'opposite' | 'any';
+      /**
+       * @default any
+       * @enum {string}
+       */
+      source: 'any';
+      /**
+       * @description What ranks the options
+       * @enum {string}
+       */
+      objective: 'centre-distance' | 'ratio-error' | 'mass';
+      /**
+       * @description Most options returned
+       * @default 50
+       */
+      limit: number;
+    };
+    TrainStage: {
+      pinionTeeth: number;
+      wheelTeeth: number;
+      /** @description Normal module (mm) */
+      module: number;
+      /** @description Face width (mm) */
+      faceWidth: number;
+      /** @description Profile shift coefficient of the pinion (modules) */
+      pinionShift: number;
+      /** @description Profile shift coefficient of the wheel (modules) */
+      wheelShift: number;
+      /** @description mm */
+      pinionTipDiameter: number;
+      /** @description mm */
+      wheelTipDiameter: number;
+      /** @description Operating centre distance, allowance included (mm) */
+      centreDistance: number;
+      /** @description Contact ratio at the operating distance */
+      contactRatio: number;
+      /** @description Contact ratio at the worse end of the distance band; null while no grade is given */
+      contactRatioWorst: number | null;
+    };
+    OptionRatio: {
+      /** @description Digits, lowest terms */
+      numerator: string;
+      /** @description Digits, lowest terms */
+      denominator: string;
+      value: number;
+      /** @description Signed: (value / target − 1) × 100 */
+      errorPercent: number;
+    };
+    Box: {
+      length: number;
+      width: number;
+      height: number;
+    };
+    TrainOption: {
+      /**
+       * @description The same train always has the same key
+       * @example 12/50m1+16/64m1
+       */
+      key: string;
+      stages: components['schemas']['TrainStage'][];
+      ratio: components['schemas']['OptionRatio'];
+      /** @description Sum of the operating centre distances (mm) */
+      centreDistanceSum: number;
+      /** @description kg, solid discs */
+      mass: number;
+      box: components['schemas']['Box'];
+      /** @description At the output, input held (arcmin) */
+      backlashArcmin: number;
+      /** @description Not computed yet: null */
+      lossPercent: number | null;
+      /** @description Not computed without offers: null */
+      cost: number | null;
+      /** @description Not computed yet: null */
+      newParts: number | null;
+    };
+    SearchTally: {
+      /** @description True when nothing in the space outranks what is returned */
+      complete: boolean;
+      /** @description Trains settled, looked at or ruled out by a bound */
+      combinations: number;
+      /** @description ms */
+      elapsedMs: number;
+    };
+    WhyNot: {
+      stages: number;
+      /** @description The limit in the way, such as `teeth.wheel.max` */
+      limit: string;
+      message: string;
+      /** @description The least change of that limit that works, in its own unit */
+      nearest: (number | string) | null;
+      /** @description Merged over the request, this makes an option of this stage count appear */
+      relaxed?: {
+        [key: string]: unknown;
+      };
+    };
+    SearchOutcome: {
+      options: components['schemas']['TrainOption'][];
+      search: components['schemas']['SearchTally'];
+      whyNot: components['schemas']['WhyNot'][];
+    };
+    FractionsInput: {
+      /**
+       * @description Target ratio, read exactly; above 0
+       * @example 8.3043478
+       */
+      target: string | number;
+      /** @description Marks each fraction as inside or outside this tolerance (per cent); it does not filter */
+      tolerancePercent?: string | number;
+      /**
+       * @description Largest numerator or denominator
+       * @default 200
+       */
+      maxTeeth: number;
+      /**
+       * @description Most fractions of each kind
+       * @default 20
+       */
+      limit: number;
+    };
+    Fraction: {
+      /** @example 191 */
+      numerator: string;
+      /** @example 23 */
+      denominator: string;
+      /** @description Signed error against the target (per cent) */
+      errorPercent: number;
+      /** @description Present when a tolerance was given */
+      withinTolerance?: boolean;
+    };
+    Fractions: {
+      /** @description Successive mediants (A. Brocot) */
+      mediants: components['schemas']['Fraction'][];
+      /** @description Convergents of the continued fraction */
+      convergents: components['schemas']['Fraction'][];
+    };
+    /** @enum {string} */
+    BriefStanding: 'open' | 'searched' | 'adopted';
+    StageCounts: {
+      min: number;
+      max: number;
+    };
+    /** @enum {string} */
+    SearchState: 'queued' | 'running' | 'done' | 'stopped' | 'failed';
+    SearchSummary: {
+      id: string;
+      briefId: string;
+      /** @description Version of the brief that was searched; another than the brief has now means it changed since */
+      briefVersion: number;
+      state: components['schemas']['SearchState'];
+      /** Format: date-time */
+      startedAt: string;
+      /** Format: date-time */
+      finishedAt: string | null;
+      /** @description Options found; null while it runs */
+      optionCount: number | null;
+      /** @description True when nothing outranks what was found */
+      complete: boolean | null;
+      /** @description Why it failed or stopped, in words */
+      message: string | null;
+      /** @description Name of the person who started it */
+      by: string;
+    };
+    BriefSummary: {
+      id: string;
+      /** @example B-0001 */
+      code: string;
+      title: string;
+      /** @description open: not searched as it stands; searched; adopted: a train was taken from it */
+      standing: components['schemas']['BriefStanding'];
+      /** @description Decimal */
+      ratioTarget: string;
+      /** @description Decimal, per cent */
+      tolerancePercent: string;
+      /** @enum {string} */
+      objective: 'centre-distance' | 'ratio-error' | 'mass';
+      stages: components['schemas']['StageCounts'];
+      /** @description Name of the person it belongs to */
+      owner: string;
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      latestSearch: components['schemas']['SearchSummary'] | null;
+      /** @description Options pinned */
+      pinCount: number;
+    };
+    BriefPage: {
+      items: components['schemas']['BriefSummary'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    Duty: {
+      /** @description At the motor (rpm) */
+      inputSpeed?: number;
+      /** @description At the last shaft (N·m) */
+      outputTorque?: number;
+      /**
+       * @description K_A, how rough drive and load are
+       * @default 1.25
+       */
+      applicationFactor: number;
+    };
+    Requirement: {
+      /** @description Ratio and tolerance */
+      ratio: components['schemas']['RatioTarget'];
+      /** @description Number of stages, 1 to 3 */
+      stages: components['schemas']['WholeRange'];
+      /** @description Tooth numbers */
+      teeth: components['schemas']['TeethRanges'];
+      /**
+       * @description Normal modules (mm); without a load the smallest is used
+       * @example [
+       *       1,
+       *       1.25
+       *     ]
+       */
+      modules: number[];
+      /**
+       * @description Normal pressure angle (degrees)
+       * @default 20
+       * @enum {number}
+       */
+      pressureAngleDeg: 14.5 | 15 | 17.5 | 20 | 22.5 | 25;
+      /**
+       * @description Helix angle (degrees)
+       * @default 0
+       */
+      helixAngleDeg: number;
+      /**
+       * @description Face width (modules)
+       * @default 10
+       */
+      faceWidthFactor: number;
+      /**
+       * @default none
+       * @enum {string}
+       */
+      shiftPolicy: 'none' | 'clear-undercut';
+      /**
+       * @description Least contact ratio of every stage
+       * @default 1.2
+       */
+      leastContactRatio: number;
+      /**
+       * @description Added to the zero-backlash distance of every stage (modules)
+       * @default 0
+       */
+      centreDistanceAllowance: number;
+      /**
+       * @default allow
+       * @enum {string}
+       */
+      undercut: 'allow' | 'refuse';
+      /** @description Limits on the ratio of every stage */
+      stageRatio?: components['schemas']['StageRatioLimits'];
+      /** @description Space for the box */
+      envelope?: components['schemas']['Envelope'];
+      /**
+       * @default in-line
+       * @enum {string}
+       */
+      arrangement: 'in-line';
+      /**
+       * @description Sense of rotation of the output against the input
+       * @default any
+       * @enum {string}
+       */
+      direction: 'same' | 'opposite' | 'any';
+      /**
+       * @default any
+       * @enum {string}
+       */
+      source: 'any';
+      /**
+       * @description What ranks the options
+       * @enum {string}
+       */
+      objective: 'centre-distance' | 'ratio-error' | 'mass';
+      /**
+       * @description Most options returned
+       * @default 50
+       */
+      limit: number;
+      /** @description Recorded; used for shaft speeds and sizes. Strength is not rated from it yet. */
+      duty?: components['schemas']['Duty'];
+    };
+    BriefInput: {
+      /**
+       * @description What the train is for
+       * @example Kelp-line winch
+       */
+      title: string;
+      /** @description Anything worth knowing */
+      note?: string;
+      requirement: components['schemas']['Requirement'];
+    };
+    Pin: {
+      /** @description The option's key */
+      key: string;
+      /** @description The search that found it */
+      searchId: string;
+      /** @description A copy, so that a later search does not lose it */
+      option: components['schemas']['TrainOption'];
+      /** Format: date-time */
+      pinnedAt: string;
+      /** @description Name of the person who pinned it */
+      by: string;
+    };
+    TrainRef: {
+      /** @example T-0001 */
+      code: string;
+      title: string;
+    };
+    Brief: {
+      id: string;
+      /** @example B-0001 */
+      code: string;
+      title: string;
+      note: string;
+      requirement: components['schemas']['Requirement'];
+      standing: components['schemas']['BriefStanding'];
+      /** @description Name of the person it belongs to */
+      owner: string;
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      latestSearch: components['schemas']['SearchSummary'] | null;
+      /** @description In the order they were pinned */
+      pins: components['schemas']['Pin'][];
+      /** @description Trains taken from this brief */
+      trains: components['schemas']['TrainRef'][];
+    };
+    BriefPatch: {
+      /** @description The version that was seen */
+      version: number;
+      /** @description What the train is for */
+      title?: string;
+      /** @description Anything worth knowing */
+      note?: string;
+      /** @description Replaces the whole requirement */
+      requirement?: components['schemas']['Requirement'];
+    };
+    PinInput: {
+      /** @description Id of a search of this brief */
+      searchId: string;
+    };
+    SearchProgress: {
+      /** @description What it does at present, in words */
+      phase: string;
+      /** @description Stage count looked at */
+      stages: number;
+      /** @description Combinations settled in this phase */
+      settled: number;
+      /** @description Combinations of this phase */
+      total: number;
+      /** @description Options found so far */
+      found: number;
+    };
+    Search: {
+      id: string;
+      briefId: string;
+      /** @description Version of the brief that was searched; another than the brief has now means it changed since */
+      briefVersion: number;
+      state: components['schemas']['SearchState'];
+      /** Format: date-time */
+      startedAt: string;
+      /** Format: date-time */
+      finishedAt: string | null;
+      /** @description Options found; null while it runs */
+      optionCount: number | null;
+      /** @description True when nothing outranks what was found */
+      complete: boolean | null;
+      /** @description Why it failed or stopped, in words */
+      message: string | null;
+      /** @description Name of the person who started it */
+      by: string;
+      /** @description The requirement as it was searched */
+      request: components['schemas']['Requirement'];
+      /** @description Null before it runs and after it ended */
+      progress: components['schemas']['SearchProgress'] | null;
+      /** @description Null until it ended */
+      outcome: components['schemas']['SearchOutcome'] | null;
+    };
+    /** @enum {string} */
+    RevisionState: 'working';
+    BriefRef: {
+      id: string;
+      /** @example B-0001 */
+      code: string;
+      title: string;
+    };
+    SpecTarget: {
+      /** @description Decimal */
+      ratio: string;
+      /** @description Per cent */
+      tolerancePercent: string | number;
+    };
+    /**
+     * @description Helical gears only
+     * @enum {string}
+     */
+    Hand: 'left' | 'right';
+    SpecGear: {
+      teeth: number;
+      /** @description Profile shift coefficient (modules) */
+      profileShift: number;
+      /** @description mm */
+      faceWidth: number;
+      /** @description Helical gears only */
+      hand?: components['schemas']['Hand'];
+      /** @description kg/m³; steel when left out */
+      density?: number;
+      /** @description The stock part that it is; null: made to order */
+      partNumber: string | null;
+    };
+    SpecStage: {
+      /** @description Normal module (mm) */
+      module: number;
+      /** @description Operating centre distance (mm) */
+      centreDistance: number;
+      pinion: components['schemas']['SpecGear'];
+      wheel: components['schemas']['SpecGear'];
+    };
+    /**
+     * @description Where the diameter comes from: torque, a stock bore, the starting figure, or a person
+     * @enum {string}
+     */
+    DiameterBasis: 'torque' | 'bore' | 'start' | 'typed';
+    SpecShaft: {
+      /** @description mm */
+      diameter: number;
+      /** @description Where the diameter comes from: torque, a stock bore, the starting figure, or a person */
+      basis: components['schemas']['DiameterBasis'];
+    };
+    TrainSpec: {
+      pressureAngleDeg: number;
+      helixAngleDeg: number;
+      target?: components['schemas']['SpecTarget'];
+      leastContactRatio: number;
+      /** @description rpm */
+      inputSpeed?: number;
+      /** @description N·m */
+      inputTorque?: number;
+      /** @description N·m */
+      outputTorque?: number;
+      applicationFactor?: number;
+      envelope?: components['schemas']['Envelope'];
+      /** @description Between the planes of neighbouring stages (mm) */
+      gap?: number;
+      stages: components['schemas']['SpecStage'][];
+      /** @description Shaft 0 is the input; one more than there are stages */
+      shafts: components['schemas']['SpecShaft'][];
+    };
+    ExactRatio: {
+      /** @description Digits, lowest terms */
+      numerator: string;
+      /** @description Digits, lowest terms */
+      denominator: string;
+      value: number;
+      /** @description Signed: (value / target − 1) × 100; null without a target */
+      errorPercent: number | null;
+    };
+    TrainSummary: {
+      /** @example T-0001 */
+      code: string;
+      title: string;
+      /** @example A */
+      revision: string;
+      state: components['schemas']['RevisionState'];
+      brief: components['schemas']['BriefRef'] | null;
+      /** @description Name of the person it belongs to */
+      owner: string;
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      spec: components['schemas']['TrainSpec'];
+      ratio: components['schemas']['ExactRatio'];
+      stageCount: number;
+      /** @description mm */
+      centreDistanceSum: number;
+      /** @description kg, solid discs */
+      mass: number;
+      box: components['schemas']['Box'];
+      /** @description Checks that fail */
+      fails: number;
+      /** @description Checks that are marginal */
+      marginals: number;
+    };
+    TrainPage: {
+      items: components['schemas']['TrainSummary'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    TrainInput: {
+      /** @description Id of the brief */
+      briefId: string;
+      /** @description Id of the search that found the option */
+      searchId: string;
+      /**
+       * @description Key of the option
+       * @example 12/50m1+16/64m1
+       */
+      optionKey: string;
+      /** @description The brief's title when left out */
+      title?: string;
+    };
+    TrainShaft: {
+      /** @description 0 is the input */
+      index: number;
+      /** @description Axis, seen along the shafts (mm) */
+      x: number;
+      /** @description Axis, seen along the shafts (mm) */
+      y: number;
+      /** @description Where the shaft begins along the axis (mm) */
+      z1: number;
+      /** @description Where the shaft ends along the axis (mm) */
+      z2: number;
+      /** @description rpm */
+      speed: number | null;
+      /** @description N·m */
+      torque: number | null;
+      /** @description kW */
+      power: number | null;
+      /**
+       * @description 1 turns like the input
+       * @enum {integer}
+       */
+      direction: 1 | -1;
+      /** @description Least diameter for torsion (mm) */
+      leastDiameter: number | null;
+    };
+    TrainFinding: {
+      /** @example interference */
+      code: string;
+      severity: components['schemas']['FindingSeverity'];
+      message: string;
+      /** @description The figure that was checked */
+      value?: number;
+      /** @description The limit it was checked against */
+      limit?: number;
+      stage?: number;
+    };
+    /** @enum {string} */
+    Verdict: 'passes' | 'marginal' | 'fails';
+    TrainCheck: {
+      code: string;
+      label: string;
+      value: number | null;
+      limit: number | null;
+      unit: string;
+      verdict: components['schemas']['Verdict'];
+      stage?: number;
+      message: string;
+    };
+    TrainFigures: {
+      ratio: components['schemas']['ExactRatio'];
+      /** @description mm */
+      centreDistanceSum: number;
+      /** @description kg, solid discs */
+      mass: number;
+      box: components['schemas']['Box'];
+      /** @description At the output, input held (arcmin) */
+      backlashArcmin: number;
+      /** @enum {string} */
+      direction: 'same' | 'opposite';
+      shafts: components['schemas']['TrainShaft'][];
+      meshes: components['schemas']['MeshGeometry'][];
+      findings: components['schemas']['TrainFinding'][];
+      checks: components['schemas']['TrainCheck'][];
+    };
+    Train: {
+      /** @example T-0001 */
+      code: string;
+      title: string;
+      /** @example A */
+      revision: string;
+      state: components['schemas']['RevisionState'];
+      brief: components['schemas']['BriefRef'] | null;
+      /** @description Name of the person it belongs to */
+      owner: string;
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      spec: components['schemas']['TrainSpec'];
+      ratio: components['schemas']['ExactRatio'];
+      stageCount: number;
+      /** @description mm */
+      centreDistanceSum: number;
+      /** @description kg, solid discs */
+      mass: number;
+      box: components['schemas']['Box'];
+      /** @description Checks that fail */
+      fails: number;
+      /** @description Checks that are marginal */
+      marginals: number;
+      note: string;
+      /** @description Key of the option it was taken from */
+      optionKey: string;
+      figures: components['schemas']['TrainFigures'];
+    };
+    GearChoice: {
+      /** @description A cleared stock gear with the same data; null: made to order */
+      partNumber?: string | null;
+      /** @description Helical gears only */
+      hand?: components['schemas']['Hand'];
+    };
+    StageChoice: {
+      pinion?: components['schemas']['GearChoice'];
+      wheel?: components['schemas']['GearChoice'];
+    };
+    TrainPatch: {
+      /** @description The version that was seen */
+      version: number;
+      /** @description What the train is for */
+      title?: string;
+      /** @description Anything worth knowing */
+      note?: string;
+      /** @description One a stage, in order */
+      stages?: components['schemas']['StageChoice'][];
+      /** @description One a shaft, in order (mm); null leaves that shaft as it is */
+      shaftDiameters?: (number | null)[];
+    };
+    /** @enum {string} */
+    BomKind:
+      | 'gear'
+      | 'pinion-shaft'
+      | 'shaft'
+      | 'bearing'
+      | 'key'
+      | 'retaining-ring'
+      | 'seal'
+      | 'housing'
+      | 'lubricant';
+    GearDataRow: {
+      /** @enum {string} */
+      group: 'blank' | 'teeth' | 'mate';
+      label: string;
+      symbol: string;
+      value: (number | string) | null;
+      /** @enum {string} */
+      unit: '' | 'mm' | '°';
+      /** @description Decimals to show a number with */
+      digits: number;
+    };
+    BomLine: {
+      findNumber: number;
+      /** @description Null: to be made, or to be chosen */
+      partNumber: string | null;
+      kind: components['schemas']['BomKind'];
+      description: string;
+      quantity: number;
+      /** @enum {string} */
+      unit: 'pcs' | 'l' | 'm';
+      material: string | null;
+      /** @enum {string} */
+      supply: 'made' | 'bought';
+      supplier: string | null;
+      /** @description For one unit of quantity (kg) */
+      mass: number | null;
+      /** @description Where it is used: `Stage 1 pinion`, `Shaft 2` */
+      source: string[];
+      note: string;
+      /** @description What a person must look at before ordering */
+      flags: string[];
+      /** @description For a gear to be made */
+      gearData?: components['schemas']['GearDataRow'][];
+    };
+    BomTotals: {
+      lines: number;
+      /** @description Lines to be made */
+      made: number;
+      /** @description Lines to be bought */
+      bought: number;
+      /** @description Over the lines with a known mass (kg) */
+      massKg: number;
+      linesWithoutMass: number;
+    };
+    Bom: {
+      lines: components['schemas']['BomLine'][];
+      totals: components['schemas']['BomTotals'];
+      /** @description Every flag that stands on a line, once */
+      flags: string[];
+    };
+    FoundPart: {
+      number: string;
+      description: string;
+    };
+    FoundBrief: {
+      id: string;
+      code: string;
+      title: string;
+    };
+    FoundTrain: {
+      code: string;
+      title: string;
+    };
+    FinderResult: {
+      parts: components['schemas']['FoundPart'][];
+      briefs: components['schemas']['FoundBrief'][];
+      trains: components['schemas']['FoundTrain'][];
+    };
+    OverviewCounts: {
+      briefs: number;
+      trains: number;
+      parts: number;
+    };
+    Overview: {
+      counts: components['schemas']['OverviewCounts'];
+      /** @description Briefs that this person owns */
+      briefs: components['schemas']['BriefSummary'][];
+      /** @description Trains that this person owns */
+      trains: components['schemas']['TrainSummary'][];
+      /** @description Drafts to clear, for people who may change parts */
+      draftParts: components['schemas']['PartSummary'][];
+    };
+  };
+  responses: never;
+  parameters: never;
+  requestBodies: never;
+  headers: never;
+  pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+  Audit_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Kind of thing, such as part. */
+        entity?: string;
+        /** @description Number, code or id of the thing. */
+        entityId?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Auth_welcome: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Welcome'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Auth_signIn: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SignInInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Auth_firstAdmin: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['FirstAdminInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Auth_signOut: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Auth_me: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Users_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['UserPage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Users_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['UserInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['User'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Users_change: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['UserPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['User'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Health_check: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Health'];
+        };
+      };
+      503: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  HouseRules_read: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['HouseRules'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Kind */
+        kind?:
+          | 'gear'
+          | 'pinion-shaft'
+          | 'shaft'
+          | 'bearing'
+          | 'key'
+          | 'retaining-ring'
+          | 'seal'
+          | 'housing'
+          | 'fastener'
+          | 'lubricant'
+          | 'other';
+        /** @description Standing */
+        standing?: 'draft' | 'cleared' | 'withdrawn';
+        /** @description Least number of teeth */
+        teethMin?: number;
+        /** @description Greatest number of teeth */
+        teethMax?: number;
+        /** @description Normal module (mm) */
+        module?: number;
+        /** @description Normal pressure angle (degrees) */
+        pressureAngleDeg?: number;
+        /** @description Helix angle (degrees); 0 finds spur gears */
+        helixAngleDeg?: number;
+        /** @description Hand of the helix */
+        hand?: 'left' | 'right';
+        /** @description Material, whole */
+        material?: string;
+        /** @description Least bore (mm) */
+        boreMin?: number;
+        /** @description Greatest bore (mm) */
+        boreMax?: number;
+        /** @description Least face width (mm) */
+        faceWidthMin?: number;
+        /** @description Greatest face width (mm) */
+        faceWidthMax?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Part'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The number belongs to another part. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_facets: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Facets'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Part'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_update: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Part'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Somebody else changed it meanwhile. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Parts_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Calc_gear: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['GearInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['GearGeometry'];
+        };
+      };
+      /** @description Names every field at fault, its value and the limit. */
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Calc_mesh: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MeshInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MeshGeometry'];
+        };
+      };
+      /** @description Names every field at fault, its value and the limit. */
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Calc_shift: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ShiftInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShiftResult'];
+        };
+      };
+      /** @description Names every field at fault, its value and the limit. */
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Calc_options: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OptionRequest'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SearchOutcome'];
+        };
+      };
+      /** @description Names every field at fault, its value and the limit. */
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Other searches kept the threads busy. */
+      503: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Calc_fractions: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['FractionsInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Fractions'];
+        };
+      };
+      /** @description Names every field at fault, its value and the limit. */
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Only those of the person who asks */
+        mine?: boolean;
+        standing?: components['schemas']['BriefStanding'];
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BriefPage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BriefInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Brief'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Brief'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BriefPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Brief'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description It changed since; `current` is how it stands now. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_pin: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+        optionKey: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PinInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Brief'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description As many as there can be are pinned. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Briefs_unpin: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+        optionKey: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Brief'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSearches_ofBrief: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SearchSummary'][];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSearches_start: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Search'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A search of the same person still runs. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSearches_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Search'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSearches_events: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      /** @description Events `state` (a SearchSummary) and `progress` (a SearchProgress); ends when the search has ended */
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'text/event-stream': string;
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSearches_stop: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      202: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Search'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Only those of the person who asks */
+        mine?: boolean;
+        revisionState?: components['schemas']['RevisionState'];
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TrainPage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_adopt: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['TrainInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Train'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Train'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['TrainPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Train'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description It changed since; `current` is how it stands now. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Trains_bom: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Bom'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Exports_bom: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      /** @description The bill of materials as a workbook */
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet': string;
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Finder_find: {
+    parameters: {
+      query: {
+        /** @description Part of a number, code, title or description */
+        text: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FinderResult'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Overview_read: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Overview'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
   };
 }

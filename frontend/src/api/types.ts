@@ -9,6 +9,7 @@ export type Permission = Me['permissions'][number];
 export type Welcome = Schemas['Welcome'];
 export type User = Schemas['User'];
 export type Part = Schemas['Part'];
+export type PartSummary = Schemas['PartSummary'];
 export type PartKind = Part['kind'];
 export type PartStanding = Part['standing'];
 export type PartPage = Schemas['PartPage'];

@@ -28,6 +28,8 @@ export const router = createBrowserRouter([
         children: [
           page(undefined, () => import('../features/home/HomePage')),
           page('parts', () => import('../features/parts/PartsPage')),
+          // Not under /parts, where every word may be a part's number.
+          page('add-part', () => import('../features/parts/AddPartPage')),
           page('parts/:number', () => import('../features/parts/PartPage')),
           page('briefs', () => import('../features/briefs/BriefsPage')),
           page('briefs/:id', () => import('../features/briefs/BriefPage')),

@@ -6,7 +6,7 @@ import { ConfirmDialog } from './ConfirmDialog';
 interface UnsavedWarningProps {
   dirty: boolean;
   what?: string;
-  /** Where the form is opened by a search parameter of the address: losing that one leaves the form, too. */
+  /** The search parameter of the address that opens the form, if one does: changing it leaves the form, too. */
   openedBy?: string;
 }
 
@@ -16,7 +16,8 @@ export function UnsavedWarning({ dirty, what = 'this form', openedBy }: UnsavedW
     ({ currentLocation, nextLocation }) =>
       dirty &&
       (currentLocation.pathname !== nextLocation.pathname ||
-        (openedBy !== undefined && !new URLSearchParams(nextLocation.search).has(openedBy))),
+        (openedBy !== undefined &&
+          parameter(currentLocation.search, openedBy) !== parameter(nextLocation.search, openedBy))),
   );
   useEffect(() => {
     if (!dirty) return undefined;
@@ -38,3 +39,5 @@ export function UnsavedWarning({ dirty, what = 'this form', openedBy }: UnsavedW
     </ConfirmDialog>
   );
 }
+
+const parameter = (search: string, name: string): string | null => new URLSearchParams(search).get(name);

@@ -1,3 +1,134 @@
+import Button from '@mui/material/Button';
+import { useTheme } from '@mui/material/styles';
+import useMediaQuery from '@mui/material/useMediaQuery';
+import type { GridRowSelectionModel } from '@mui/x-data-grid';
+import { useMemo, useState } from 'react';
+import { Link, useNavigate } from 'react-router-dom';
+import { useMe } from '../../api/hooks/useMe';
+import { useParts } from '../../api/hooks/useParts';
+import type { PartSummary } from '../../api/types';
+import { copyTsv } from '../../components/copyTsv';
+import { DataTable } from '../../components/DataTable';
+import { EmptyState } from '../../components/EmptyState';
+import { formatCount } from '../../components/figures';
+import { useNotices } from '../../components/Notices';
+import { PageHeader } from '../../components/PageHeader';
+import { useListState } from '../../components/useListState';
+import { attributeOf, figureOf } from './attributes';
+import { hiddenColumns, PART_COLUMNS } from './partColumns';
+import { PART_FILTERS, PART_SORTS, partQuery } from './partFilters';
+import { PartsFilterBar } from './PartsFilterBar';
+
+const NONE: GridRowSelectionModel = { type: 'include', ids: new Set() };
+const COPY_HEAD = [
+  'Number',
+  'Description',
+  'Kind',
+  'Teeth',
+  'Module mm',
+  'Helix deg',
+  'Hand',
+  'Face mm',
+  'Bore mm',
+];
+
+/** A copied figure keeps a plain point and minus, so that a spreadsheet reads it as a number. */
+function copyRow(part: PartSummary): (string | number | null)[] {
+  const hand = attributeOf(part, 'hand');
+  return [
+    part.number,
+    part.description,
+    part.kind,
+    ...['teeth', 'module', 'helixAngleDeg'].map((name) => figureOf(part, name)),
+    typeof hand === 'string' ? hand : null,
+    ...['faceWidth', 'bore'].map((name) => figureOf(part, name)),
+    part.material,
+    part.mass,
+    part.standing,
+  ];
+}
+
 export default function PartsPage() {
-  return null;
+  const navigate = useNavigate();
+  const theme = useTheme();
+  const narrow = useMediaQuery(theme.breakpoints.down('sm'));
+  const wide = useMediaQuery('(min-width: 1400px)');
+  const { can } = useMe();
+  const { tell } = useNotices();
+  const state = useListState(PART_FILTERS, PART_SORTS);
+  const query = useMemo(() => partQuery(state), [state]);
+  const { page, problem, isLoading, mutate } = useParts(query);
+  const [selection, setSelection] = useState(NONE);
+  const chosen = (page?.items ?? []).filter((part) =>
+    selection.type === 'include' ? selection.ids.has(part.id) : !selection.ids.has(part.id),
+  );
+
+  const copy = async () => {
+    const done = await copyTsv([[...COPY_HEAD, 'Material', 'Mass kg', 'Standing'], ...chosen.map(copyRow)]);
+    tell(
+      done
+        ? `${chosen.length === 1 ? 'One row' : `${chosen.length} rows`} copied; paste into a spreadsheet.`
+        : 'The browser does not let this page use the clipboard.',
+    );
+  };
+
+  const add = can('parts.edit') ? (
+    <Button variant="contained" component={Link} to="/add-part">
+      Add part
+    </Button>
+  ) : undefined;
+  const filtered = state.filterCount > 0;
+  return (
+    <>
+      <PageHeader title="Parts" actions={add} />
+      <PartsFilterBar
+        state={state}
+        result={
+          page === undefined ? undefined : `${formatCount(page.total)} ${page.total === 1 ? 'part' : 'parts'}`
+        }
+        aside={
+          chosen.length > 0 && (
+            <Button variant="outlined" onClick={() => void copy()}>
+              Copy {chosen.length}
+            </Button>
+          )
+        }
+      />
+      <DataTable<PartSummary>
+        label="Parts"
+        columns={PART_COLUMNS}
+        rows={page?.items}
+        total={page?.total}
+        getRowId={(part) => part.id}
+        state={state}
+        loading={isLoading}
+        problem={problem}
+        onRetry={() => void mutate()}
+        onOpen={(part) => void navigate(`/parts/${encodeURIComponent(part.number)}`)}
+        selection={narrow ? undefined : selection}
+        onSelection={setSelection}
+        hidden={hiddenColumns(narrow ? 'narrow' : wide ? 'wide' : 'middle')}
+        empty={
+          filtered ? (
+            <EmptyState
+              title="No part meets these filters"
+              action={
+                <Button variant="outlined" onClick={state.clearFilters}>
+                  Clear the filters
+                </Button>
+              }
+            >
+              Loosen one of them, or clear them all.
+            </EmptyState>
+          ) : (
+            <EmptyState title="The library is empty" action={add}>
+              {can('parts.edit')
+                ? 'Add the gears, bearings and other parts that you hold or can buy.'
+                : 'A librarian adds the gears, bearings and other parts.'}
+            </EmptyState>
+          )
+        }
+      />
+    </>
+  );
 }

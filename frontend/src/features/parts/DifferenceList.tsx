@@ -1,0 +1,19 @@
+import Box from '@mui/material/Box';
+import type { Difference } from './differences';
+
+/** "Mass, kg: 0.18 → 0.21", one line a field. */
+export function DifferenceList({ differences }: { differences: readonly Difference[] }) {
+  if (differences.length === 0) return null;
+  return (
+    <Box component="ul" sx={{ m: 0, p: 0, listStyle: 'none', fontSize: '0.8125rem' }}>
+      {differences.map(({ field, before, after }) => (
+        <li key={field}>
+          <Box component="span" sx={{ color: 'text.secondary' }}>
+            {field}:{' '}
+          </Box>
+          {before} <span aria-label="became">→</span> <b>{after}</b>
+        </li>
+      ))}
+    </Box>
+  );
+}

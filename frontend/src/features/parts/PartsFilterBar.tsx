@@ -1,0 +1,109 @@
+import Tune from '@mui/icons-material/Tune';
+import Button from '@mui/material/Button';
+import type { ReactNode } from 'react';
+import { useState } from 'react';
+import { usePartFacets } from '../../api/hooks/usePartFacets';
+import type { PartKind } from '../../api/types';
+import { formatPlain } from '../../components/figures';
+import { FilterBar } from '../../components/FilterBar';
+import type { ListState } from '../../components/useListState';
+import { ChoiceFilter, TypedFilter } from './FilterFields';
+import type { PartFilter } from './partFilters';
+import { KIND_NAMES, PART_KINDS, STANDINGS } from './partKinds';
+import { SecondSort } from './SecondSort';
+
+interface PartsFilterBarProps {
+  state: ListState<PartFilter>;
+  result: ReactNode;
+  aside: ReactNode;
+}
+
+const MORE: readonly PartFilter[] = [
+  'pressureAngleDeg',
+  'helixAngleDeg',
+  'hand',
+  'boreMin',
+  'boreMax',
+  'faceWidthMin',
+  'faceWidthMax',
+];
+
+/** The library's filters; the rarer ones fold away until one of them is set. */
+export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
+  const { facets } = usePartFacets();
+  const rareSet = MORE.some((name) => state.filters[name] !== undefined);
+  const [open, setOpen] = useState(false);
+  const bind = (name: PartFilter) => ({
+    value: state.filters[name] ?? '',
+    onSet: (value: string) => {
+      if (value !== (state.filters[name] ?? '')) state.setFilters({ [name]: value });
+    },
+  });
+  const count = (list: { value: string; count: number }[] | undefined, value: string) => {
+    const found = list?.find((each) => each.value === value)?.count;
+    return found === undefined ? {} : { count: found };
+  };
+  const kinds = PART_KINDS.map((kind: PartKind) => ({
+    value: kind,
+    name: KIND_NAMES[kind],
+    ...count(facets?.kinds, kind),
+  }));
+  const standings = STANDINGS.map((each) => ({ value: each, name: each, ...count(facets?.standings, each) }));
+  const modules = (facets?.modules ?? []).map(({ value, count: many }) => ({
+    value: String(value),
+    name: formatPlain(value),
+    count: many,
+  }));
+  const materials = (facets?.materials ?? []).map(({ value, count: many }) => ({
+    value,
+    name: value,
+    count: many,
+  }));
+  const shown = open || rareSet;
+  return (
+    <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result} aside={aside}>
+      <TypedFilter label="Number or words" width={180} {...bind('text')} />
+      <ChoiceFilter label="Kind" width={128} choices={kinds} {...bind('kind')} />
+      <ChoiceFilter label="Module, mm" width={92} choices={modules} {...bind('module')} />
+      <TypedFilter figure label="Teeth, least" width={84} {...bind('teethMin')} />
+      <TypedFilter figure label="most" width={72} {...bind('teethMax')} />
+      <ChoiceFilter label="Material" width={128} choices={materials} {...bind('material')} />
+      <ChoiceFilter label="Standing" width={108} choices={standings} {...bind('standing')} />
+      {shown && (
+        <>
+          <ChoiceFilter
+            label="Helix"
+            width={92}
+            choices={[
+              { value: '0', name: 'spur' },
+              ...[15, 20, 30].map((angle) => ({ value: String(angle), name: `${angle}°` })),
+            ]}
+            {...bind('helixAngleDeg')}
+          />
+          <ChoiceFilter
+            label="Hand"
+            width={84}
+            choices={['left', 'right'].map((hand) => ({ value: hand, name: hand }))}
+            {...bind('hand')}
+          />
+          <ChoiceFilter
+            label="Pressure angle"
+            width={112}
+            choices={['14.5', '20', '25'].map((angle) => ({ value: angle, name: `${angle}°` }))}
+            {...bind('pressureAngleDeg')}
+          />
+          <TypedFilter figure label="Bore mm, least" width={104} {...bind('boreMin')} />
+          <TypedFilter figure label="most" width={72} {...bind('boreMax')} />
+          <TypedFilter figure label="Face mm, least" width={104} {...bind('faceWidthMin')} />
+          <TypedFilter figure label="most" width={72} {...bind('faceWidthMax')} />
+          <SecondSort state={state} />
+        </>
+      )}
+      {!rareSet && (
+        <Button startIcon={<Tune />} aria-expanded={shown} onClick={() => setOpen(!open)}>
+          {open ? 'Fewer' : 'More'}
+        </Button>
+      )}
+    </FilterBar>
+  );
+}

@@ -1,0 +1,51 @@
+import Box from '@mui/material/Box';
+import Typography from '@mui/material/Typography';
+import { useEffect, type ReactNode } from 'react';
+import { GearPairFigure } from './GearPairFigure';
+
+/** The frame of the pages before sign-in: the form on a sheet, and a train at work beside it. */
+export function OpeningPage({ title, children }: { title: string; children: ReactNode }) {
+  useEffect(() => {
+    document.title = `${title} · Stageyard`;
+  }, [title]);
+  return (
+    <Box sx={{ minHeight: '100dvh', display: 'grid', gridTemplateColumns: { xs: '1fr', md: '460px 1fr' } }}>
+      <Box
+        component="main"
+        sx={{
+          bgcolor: 'background.paper',
+          borderRight: { md: '1px solid' },
+          borderColor: { md: 'line.rule' },
+          px: { xs: 3, sm: 6 },
+          py: { xs: 4, md: 8 },
+        }}
+      >
+        <Box sx={{ maxWidth: 372, mx: 'auto' }}>
+          <Typography component="p" sx={{ fontSize: 22, fontWeight: 600, color: 'primary.main', mb: 4 }}>
+            Stageyard
+          </Typography>
+          <Typography variant="h1">{title}</Typography>
+          {children}
+        </Box>
+      </Box>
+      <Box
+        sx={{
+          display: { xs: 'none', md: 'flex' },
+          flexDirection: 'column',
+          justifyContent: 'center',
+          px: 6,
+          py: 4,
+        }}
+      >
+        <GearPairFigure />
+        <Typography sx={{ mt: 3, maxWidth: 470, fontSize: 17, lineHeight: 1.45, fontWeight: 500 }}>
+          From a brief to a train that runs, fits and can be bought.
+        </Typography>
+        <Typography color="text.secondary" sx={{ mt: 0.5, maxWidth: 470 }}>
+          State the ratio, the room and the duty. See every sensible train to scale, one stage against
+          several, and take the bill of materials to purchasing.
+        </Typography>
+      </Box>
+    </Box>
+  );
+}
