@@ -1,3 +1,90 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import Tab from '@mui/material/Tab';
+import Tabs from '@mui/material/Tabs';
+import { Link, useParams, useSearchParams } from 'react-router-dom';
+import { useMe } from '../../api/hooks/useMe';
+import { useTrain } from '../../api/hooks/useTrain';
+import { bomWorkbookUrl } from '../../api/hooks/useTrainBom';
+import { asProblem } from '../../api/problem';
+import type { Train } from '../../api/types';
+import { Cautions } from '../../components/Cautions';
+import { ErrorState } from '../../components/ErrorState';
+import { LoadingRows } from '../../components/LoadingRows';
+import { PageHeader } from '../../components/PageHeader';
+import { TrainStrip } from '../../drawings/TrainStrip';
+import { BomTab } from './bom/BomTab';
+import { DrawingTab } from './drawing/DrawingTab';
+import { RecordTab } from './record/RecordTab';
+import { StagesTab } from './stages/StagesTab';
+import { TallyWords } from './TallyWords';
+import { readTab, tallyOf, TRAIN_TABS, trainFacts, type TrainTab } from './trainWords';
+
+/** `/trains/:code`: one train in four pages, the page held in the address. */
 export default function TrainPage() {
-  return null;
+  const { code = '' } = useParams();
+  const { data: train, error, mutate } = useTrain(code);
+  if (train) return <TrainInTabs train={train} />;
+  if (error === undefined) return <LoadingRows rows={14} label="Loading the train" />;
+  return <ErrorState problem={asProblem(error)} what="the train" onRetry={() => void mutate()} />;
+}
+
+function TrainInTabs({ train }: { train: Train }) {
+  const [params, setParams] = useSearchParams();
+  const { can } = useMe();
+  const tab = readTab(params.get('tab'));
+  const show = (next: TrainTab) =>
+    setParams(next === 'drawing' ? {} : { tab: next }, { preventScrollReset: true });
+  return (
+    <>
+      <PageHeader
+        code={train.code}
+        title={train.title}
+        figure={<TrainStrip train={train.spec} height={56} />}
+        facts={
+          <>
+            {trainFacts(train).join(' · ')} · <TallyWords tally={tallyOf(train.figures.checks)} />
+            {train.brief && (
+              <>
+                {' · from '}
+                <Link to={`/briefs/${encodeURIComponent(train.brief.id)}`} style={{ color: 'inherit' }}>
+                  {train.brief.code}
+                </Link>
+              </>
+            )}
+          </>
+        }
+        actions={
+          can('bom.export') && (
+            <Button
+              variant={tab === 'bom' ? 'contained' : 'outlined'}
+              component="a"
+              href={bomWorkbookUrl(train.code)}
+              download
+            >
+              Download BOM (.xlsx)
+            </Button>
+          )
+        }
+      />
+      <Tabs
+        value={tab}
+        onChange={(_, next: TrainTab) => show(next)}
+        aria-label="Pages of this train"
+        variant="scrollable"
+        scrollButtons={false}
+      >
+        {TRAIN_TABS.map(({ value, name }) => (
+          <Tab key={value} value={value} label={name} id={`tab-${value}`} aria-controls="train-tab" />
+        ))}
+      </Tabs>
+      <Box role="tabpanel" id="train-tab" aria-labelledby={`tab-${tab}`} sx={{ pt: 1.5 }}>
+        {tab === 'drawing' && <DrawingTab train={train} canEdit={can('trains.edit')} />}
+        {tab === 'stages' && <StagesTab train={train} canEdit={can('trains.edit')} />}
+        {tab === 'bom' && <BomTab train={train} canExport={can('bom.export')} />}
+        {tab === 'record' && <RecordTab key={train.code} train={train} canEdit={can('trains.edit')} />}
+      </Box>
+      <Cautions short={tab !== 'bom'} />
+    </>
+  );
 }

@@ -1,3 +1,195 @@
+import Box from '@mui/material/Box';
+import FormControlLabel from '@mui/material/FormControlLabel';
+import Switch from '@mui/material/Switch';
+import type { GridColDef } from '@mui/x-data-grid';
+import { useMemo } from 'react';
+import { Link, useNavigate } from 'react-router-dom';
+import { useTrains } from '../../api/hooks/useTrains';
+import { asProblem } from '../../api/problem';
+import type { TrainSummary } from '../../api/types';
+import { DataTable } from '../../components/DataTable';
+import { EmptyState } from '../../components/EmptyState';
+import { FilterBar } from '../../components/FilterBar';
+import { FilterText } from '../../components/FilterText';
+import { formatDay, formatFixed } from '../../components/figures';
+import { boxWords, errorWords, moduleWords, ratioWords } from '../../components/optionWords';
+import { PageHeader } from '../../components/PageHeader';
+import { useListState, writeSort } from '../../components/useListState';
+import { VerdictWord } from '../../components/VerdictWord';
+import { commonScale, TrainStrip } from '../../drawings/TrainStrip';
+import { specTeethWords } from './trainWords';
+
+const FILTERS = ['text', 'mine'] as const;
+const SORTS = ['code', 'title', 'owner', 'updatedAt'] as const;
+const STRIP = { width: 100, height: 36 };
+
+const right = { align: 'right', headerAlign: 'right', sortable: false } as const;
+
+function columnsFor(scale: number): GridColDef<TrainSummary>[] {
+  return [
+    {
+      field: 'strip',
+      headerName: 'One scale',
+      width: 120,
+      sortable: false,
+      renderCell: ({ row }) => (
+        <Box sx={{ height: '100%', display: 'flex', alignItems: 'center' }}>
+          <TrainStrip train={row.spec} {...STRIP} mmPerPixel={scale} />
+        </Box>
+      ),
+    },
+    { field: 'code', headerName: 'Train', width: 84, cellClassName: 'part-number' },
+    { field: 'title', headerName: 'Title', flex: 2, minWidth: 190 },
+    {
+      field: 'revision',
+      headerName: 'Revision',
+      width: 110,
+      sortable: false,
+      valueGetter: (_, row) => `${row.revision}, ${row.state}`,
+    },
+    {
+      field: 'teeth',
+      headerName: 'Teeth',
+      width: 170,
+      sortable: false,
+      valueGetter: (_, { spec }) => `${specTeethWords(spec)}  ${moduleWords(spec.stages)}`,
+    },
+    {
+      field: 'ratio',
+      headerName: 'Ratio',
+      width: 84,
+      ...right,
+      valueGetter: (_, { ratio }) => ratioWords(ratio.value),
+    },
+    {
+      field: 'error',
+      headerName: 'Error %',
+      width: 80,
+      ...right,
+      valueGetter: (_, { ratio }) => errorWords(ratio.errorPercent),
+    },
+    { field: 'box', headerName: 'Box mm', width: 126, ...right, valueGetter: (_, { box }) => boxWords(box) },
+    {
+      field: 'mass',
+      headerName: 'Mass kg',
+      width: 80,
+      ...right,
+      valueGetter: (_, { mass }) => formatFixed(mass, 2),
+    },
+    {
+      field: 'checks',
+      headerName: 'Checks',
+      width: 130,
+      sortable: false,
+      renderCell: ({ row }) => <ChecksCell fails={row.fails} marginals={row.marginals} />,
+    },
+    { field: 'owner', headerName: 'Owner', width: 130 },
+    {
+      field: 'updatedAt',
+      headerName: 'Changed',
+      width: 108,
+      align: 'right',
+      headerAlign: 'right',
+      valueFormatter: (iso: string) => formatDay(iso),
+    },
+  ];
+}
+
+function ChecksCell({ fails, marginals }: { fails: number; marginals: number }) {
+  if (fails > 0)
+    return (
+      <>
+        {fails}&nbsp;
+        <VerdictWord verdict="fails" />
+      </>
+    );
+  if (marginals > 0)
+    return (
+      <>
+        {marginals}&nbsp;
+        <VerdictWord verdict="marginal" />
+      </>
+    );
+  return <VerdictWord verdict="passes" />;
+}
+
+/** Every adopted train, drawn on one scale; filters, order and page live in the address. */
 export default function TrainsPage() {
-  return null;
+  const navigate = useNavigate();
+  const state = useListState(FILTERS, SORTS);
+  const { text, mine } = state.filters;
+  const { data, error, isLoading, mutate } = useTrains({
+    page: state.page,
+    size: state.size,
+    sort: writeSort(state.sort) || '-updatedAt',
+    ...(text ? { text } : {}),
+    ...(mine ? { mine: true } : {}),
+  });
+  const items = data?.items;
+  const columns = useMemo(
+    () =>
+      columnsFor(
+        commonScale(
+          (items ?? []).map(({ spec }) => spec),
+          STRIP.height,
+          STRIP.width,
+        ),
+      ),
+    [items],
+  );
+  return (
+    <>
+      <PageHeader
+        title="Trains"
+        facts="Adopted options, each with its drawing, stages and bill of materials"
+      />
+      <FilterBar
+        filterCount={state.filterCount}
+        onClear={state.clearFilters}
+        result={data && (data.total === 1 ? '1 train' : `${data.total} trains`)}
+      >
+        <FilterText
+          label="Code, title or note"
+          value={text ?? ''}
+          onChange={(next) => state.setFilters({ text: next })}
+        />
+        <FormControlLabel
+          control={
+            <Switch
+              size="small"
+              checked={mine !== undefined}
+              onChange={(_, on) => state.setFilters({ mine: on ? 'true' : '' })}
+            />
+          }
+          label="Mine"
+          sx={{ minHeight: 34, ml: 0.5 }}
+        />
+      </FilterBar>
+      <DataTable
+        label="Trains"
+        columns={columns}
+        rows={items}
+        total={data?.total}
+        getRowId={(row) => row.code}
+        state={state}
+        loading={isLoading}
+        rowHeight={38}
+        problem={error === undefined ? null : asProblem(error)}
+        onRetry={() => void mutate()}
+        onOpen={(row) => void navigate(`/trains/${encodeURIComponent(row.code)}`)}
+        empty={
+          state.filterCount > 0 ? (
+            <EmptyState title="No train fits these filters">
+              Clear a filter, or look for less of the title.
+            </EmptyState>
+          ) : (
+            <EmptyState title="No trains yet">
+              Open a brief, search it, and adopt an option: it becomes a train.{' '}
+              <Link to="/briefs">To the briefs</Link>
+            </EmptyState>
+          )
+        }
+      />
+    </>
+  );
 }

@@ -1,0 +1,143 @@
+import ArrowDownward from '@mui/icons-material/ArrowDownward';
+import ArrowUpward from '@mui/icons-material/ArrowUpward';
+import Box from '@mui/material/Box';
+import ButtonBase from '@mui/material/ButtonBase';
+import Table from '@mui/material/Table';
+import TableBody from '@mui/material/TableBody';
+import TableCell from '@mui/material/TableCell';
+import TableHead from '@mui/material/TableHead';
+import TableRow from '@mui/material/TableRow';
+import { useMemo, type ReactNode } from 'react';
+import type { TrainOption } from '../../../api/types';
+import { commonScale } from '../../../drawings/TrainStrip';
+import { OptionTableRow, STRIP } from './OptionTableRow';
+import type { OptionOrder, OptionSort } from './optionOrder';
+import { OPTION_HEADS, optionRow } from './optionRows';
+import { useRowSelection } from './useRowSelection';
+
+interface OptionTableProps {
+  options: readonly TrainOption[];
+  /** Every option of the search: the strips' common scale does not change with the filter. */
+  allOptions: readonly TrainOption[];
+  pinned: ReadonlySet<string>;
+  /** Left out for people who may not pin. */
+  onPin?: (option: TrainOption, pin: boolean) => void;
+  order: OptionOrder | null;
+  onSort: (by: OptionSort) => void;
+  /** Says where the copy button stands; called with the act. */
+  toolbar: (copy: () => void, selected: number) => ReactNode;
+}
+
+interface Head {
+  text: string;
+  unit?: string;
+  sort?: OptionSort;
+  left?: boolean;
+}
+
+const HEADS: Head[] = [
+  { text: 'Train, one scale', sort: 'stages', left: true },
+  { text: 'Teeth, module', left: true },
+  { text: 'Ratio', sort: 'ratio' },
+  { text: 'Error', unit: '%', sort: 'error' },
+  { text: 'Centres', unit: 'mm', sort: 'centres' },
+  { text: 'Box', unit: 'mm', sort: 'box' },
+  { text: 'Mass', unit: 'kg', sort: 'mass' },
+  { text: 'Contact', sort: 'contact' },
+  { text: 'Backlash', unit: '′', sort: 'backlash' },
+];
+
+/** The options, one row each, with the train drawn on one scale. Arrows move, Space pins, Ctrl+C copies. */
+export function OptionTable(props: OptionTableProps) {
+  const { options, pinned, onPin, order, onSort } = props;
+  const { body, rowProps, copy, selected } = useRowSelection({
+    rows: options.length,
+    heads: OPTION_HEADS,
+    cellsOf: (row) => (options[row] ? optionRow(options[row]) : []),
+    onSpace: (row) => {
+      const option = options[row];
+      if (option) onPin?.(option, !pinned.has(option.key));
+    },
+  });
+  const { allOptions } = props;
+  const scale = useMemo(() => commonScale(allOptions, STRIP.height, STRIP.width), [allOptions]);
+  return (
+    <>
+      {props.toolbar(() => void copy(), selected.size)}
+      <Box sx={{ bgcolor: 'background.paper', overflowX: 'auto', minWidth: 0 }}>
+        <Table
+          role="grid"
+          aria-label="Options"
+          aria-multiselectable
+          sx={{ '& .MuiTableCell-root': { py: 0, px: 1, fontSize: '0.8125rem', whiteSpace: 'nowrap' } }}
+        >
+          <TableHead>
+            <TableRow sx={{ height: 32 }}>
+              <TableCell scope="col" sx={{ width: 34 }}>
+                Pin
+              </TableCell>
+              {HEADS.map((head) => (
+                <HeadCell key={head.text} head={head} order={order} onSort={onSort} />
+              ))}
+            </TableRow>
+          </TableHead>
+          <TableBody ref={body}>
+            {options.map((option, row) => (
+              <OptionTableRow
+                key={option.key}
+                option={option}
+                scale={scale}
+                pinned={pinned.has(option.key)}
+                onPin={onPin}
+                rowProps={rowProps(row)}
+              />
+            ))}
+          </TableBody>
+        </Table>
+      </Box>
+    </>
+  );
+}
+
+function HeadCell({
+  head,
+  order,
+  onSort,
+}: { head: Head; order: OptionOrder | null } & Pick<OptionTableProps, 'onSort'>) {
+  const { text, unit, sort, left } = head;
+  const current = sort !== undefined && order?.by === sort ? order : null;
+  const label = (
+    <>
+      {text}
+      {unit && (
+        <Box component="span" sx={{ ml: 0.5, opacity: 0.85 }}>
+          {unit}
+        </Box>
+      )}
+    </>
+  );
+  const Arrow = current?.down ? ArrowDownward : ArrowUpward;
+  return (
+    <TableCell
+      scope="col"
+      align={left ? 'left' : 'right'}
+      aria-sort={current ? (current.down ? 'descending' : 'ascending') : undefined}
+    >
+      {sort === undefined ? (
+        label
+      ) : (
+        <ButtonBase
+          onClick={() => onSort(sort)}
+          sx={{
+            font: 'inherit',
+            color: current ? 'text.primary' : 'inherit',
+            fontWeight: current ? 600 : 500,
+          }}
+        >
+          {current && <Arrow aria-hidden sx={{ fontSize: 14, mr: 0.25 }} />}
+          {label}
+        </ButtonBase>
+      )}
+    </TableCell>
+  );
+}

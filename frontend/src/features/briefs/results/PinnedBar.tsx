@@ -1,0 +1,59 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import Typography from '@mui/material/Typography';
+import { useState } from 'react';
+import { Link } from 'react-router-dom';
+import type { Brief } from '../../../api/types';
+import { AdoptDialog } from '../../../components/AdoptDialog';
+import { teethWords } from '../../../components/optionWords';
+
+/** What is pinned and what can be done with it; stays in sight at the foot of the page. */
+export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean }) {
+  const [adopting, setAdopting] = useState(false);
+  const { pins } = brief;
+  if (pins.length === 0) return null;
+  return (
+    <Box
+      component="section"
+      aria-label="Pinned options"
+      sx={{
+        position: 'sticky',
+        bottom: 12,
+        zIndex: 3,
+        mt: 1.5,
+        display: 'flex',
+        alignItems: 'center',
+        flexWrap: 'wrap',
+        columnGap: 2,
+        rowGap: 1,
+        px: 2,
+        py: 1,
+        bgcolor: 'background.paper',
+        border: '1px solid',
+        borderColor: 'secondary.main',
+      }}
+    >
+      <Typography component="p" sx={{ flex: '1 1 220px', minWidth: 0 }}>
+        <Box component="strong" sx={{ fontWeight: 600, mr: 1.5 }}>
+          {pins.length} pinned
+        </Box>
+        <Box component="span" sx={{ color: 'text.secondary' }}>
+          {joined(pins.map(({ option }) => teethWords(option.stages)))}
+        </Box>
+      </Typography>
+      <Button variant="outlined" component={Link} to={`/briefs/${encodeURIComponent(brief.id)}/compare`}>
+        {pins.length === 1 ? 'Look closer' : 'Compare side by side'}
+      </Button>
+      {canAdopt && (
+        <Button variant="contained" onClick={() => setAdopting(true)}>
+          Adopt as train
+        </Button>
+      )}
+      {adopting && <AdoptDialog brief={brief} pins={pins} onClose={() => setAdopting(false)} />}
+    </Box>
+  );
+}
+
+function joined(items: string[]): string {
+  return items.length < 2 ? items.join('') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`;
+}
