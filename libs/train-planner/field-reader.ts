@@ -4,11 +4,10 @@ import { compareRatios, InputError, toRatio, type FieldIssue, type RatioInput } 
 export class FieldReader {
   readonly issues: FieldIssue[] = [];
 
-  /** An object at `field`; missing or of another kind gives an empty one and, when `required`, an issue. */
-  object(value: unknown, field: string, required: boolean): Record<string, unknown> {
+  /** An object at `field`. A missing one counts as empty: its fields then say what is wanted. */
+  object(value: unknown, field: string): Record<string, unknown> {
     if (isRecord(value)) return value;
-    if (required || isGiven(value))
-      this.refuse(field, value, `${field} must be an object with named fields.`);
+    if (isGiven(value)) this.refuse(field, value, `The field ${field} must be an object with named fields.`);
     return {};
   }
 
@@ -35,7 +34,7 @@ export class FieldReader {
   /** Two whole numbers, the first not above the second. */
   range(value: unknown, field: string, words: string, bounds: Bounds): { min: number; max: number } {
     const found = this.issues.length;
-    const { min, max } = this.object(value, field, true);
+    const { min, max } = this.object(value, field);
     const read = {
       min: this.whole(min, `${field}.min`, `Least ${words}`, bounds),
       max: this.whole(max, `${field}.max`, `Greatest ${words}`, bounds),

@@ -28,9 +28,9 @@ const PRESSURE_ANGLES = [14.5, 15, 17.5, 20, 22.5, 25] as const;
  */
 export function validateOptionRequest(input: unknown): CheckedRequest {
   const read = new FieldReader();
-  const request = read.object(input, 'request', true);
-  const ratio = read.object(request.ratio, 'ratio', true);
-  const teeth = read.object(request.teeth, 'teeth', true);
+  const request = read.object(input, 'request');
+  const ratio = read.object(request.ratio, 'ratio');
+  const teeth = read.object(request.teeth, 'teeth');
   const bounds = REQUEST_BOUNDS;
   const checked: CheckedRequest = {
     ratio: {
@@ -131,7 +131,7 @@ function readModules(read: FieldReader, value: unknown): number[] {
     return [];
   }
   if (value.length > mostModules) {
-    const message = `${value.length} modules are listed. List at most ${mostModules}.`;
+    const message = `The list has ${value.length} modules. Give at most ${mostModules}.`;
     read.refuse('modules', value, message, mostModules);
     return [];
   }
@@ -139,7 +139,7 @@ function readModules(read: FieldReader, value: unknown): number[] {
 }
 
 function readStageRatio(read: FieldReader, value: unknown): CheckedRequest['stageRatio'] {
-  const { min, max } = read.object(value, 'stageRatio', false);
+  const { min, max } = read.object(value, 'stageRatio');
   const bounds = REQUEST_BOUNDS.stageRatio;
   const found = read.issues.length;
   const least = isGiven(min) ? read.decimal(min, 'stageRatio.min', 'The least stage ratio', bounds) : 1;
@@ -154,7 +154,7 @@ function readStageRatio(read: FieldReader, value: unknown): CheckedRequest['stag
 
 function readEnvelope(read: FieldReader, value: unknown): Envelope | undefined {
   if (!isGiven(value)) return undefined;
-  const given = read.object(value, 'envelope', true);
+  const given = read.object(value, 'envelope');
   const envelope: Envelope = {};
   for (const side of ['length', 'width', 'height'] as const) {
     if (!isGiven(given[side])) continue;
