@@ -44,7 +44,7 @@ export async function createApp(settings: Settings): Promise<NestFastifyApplicat
     logger: nestLogger(log),
     abortOnError: false,
   });
-  const server = app.getHttpAdapter().getInstance() as unknown as FastifyInstance;
+  const server = app.getHttpAdapter().getInstance();
   addRequestRules(server, settings);
   logAnswers(server);
   closeInTime(server);

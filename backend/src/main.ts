@@ -1,6 +1,5 @@
 import { type NestFastifyApplication } from '@nestjs/platform-fastify';
-import { createApp } from './app.js';
-import { OpeningService } from './auth/opening.service.js';
+import type { OpeningService } from './auth/opening.service.js';
 import { loadSettings, type Settings, SettingsError } from './settings/settings.js';
 
 /** Leaves with a plain sentence and without a stack trace. */
@@ -30,28 +29,49 @@ function listenProblem(error: unknown, { host, port }: Settings): string | null 
   return null;
 }
 
-async function announce(app: NestFastifyApplication, settings: Settings): Promise<void> {
+async function announce(
+  app: NestFastifyApplication,
+  settings: Settings,
+  opening: OpeningService,
+): Promise<void> {
   const address = app.getHttpServer().address();
   const port = typeof address === 'object' && address !== null ? address.port : settings.port;
   const host = settings.host.includes(':') ? `[${settings.host}]` : settings.host;
   const base = settings.publicUrl ?? `http://${host}:${port}`;
   process.stdout.write(`Stageyard listens at ${base}${settings.demo ? ' (demo mode)' : ''}\n`);
-  const path = await app.get(OpeningService).firstAdminPath();
-  if (path)
-    process.stdout.write(
-      `Nobody can sign in yet. Open this link once to become administrator:\n${base}${path}\n`,
+  const path = await opening.firstAdminPath();
+  if (path === null) return;
+  process.stdout.write(
+    `Nobody can sign in yet. Open this link once to become administrator:\n${base}${path}\n`,
+  );
+}
+
+/** Takes no more requests, lets running ones and queued writes finish, then leaves; a second signal leaves at once. */
+function endOnSignals(app: NestFastifyApplication): void {
+  let ending = false;
+  const end = () => {
+    if (ending) process.exit(1);
+    ending = true;
+    app.close().then(
+      () => process.exit(0),
+      (error: unknown) => leave(`Stageyard did not close cleanly: ${String(error)}`),
     );
+  };
+  for (const signal of ['SIGTERM', 'SIGINT'] as const) process.on(signal, end);
 }
 
 const settings = readSettings();
+// Read only now, so that bad settings are told of at once.
+const { createApp } = await import('./app.js');
+const { OpeningService: Opening } = await import('./auth/opening.service.js');
 const app = await createApp(settings).catch((error: unknown) =>
   leave(`Stageyard cannot start: ${error instanceof Error ? error.message : String(error)}`),
 );
-app.enableShutdownHooks(['SIGTERM', 'SIGINT']);
+endOnSignals(app);
 try {
   await app.listen({ host: settings.host, port: settings.port });
 } catch (error) {
   await app.close();
   leave(listenProblem(error, settings) ?? `Stageyard cannot listen: ${String(error)}`);
 }
-await announce(app, settings);
+await announce(app, settings, app.get(Opening));

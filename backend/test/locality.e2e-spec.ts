@@ -36,12 +36,13 @@ describe('demo mode', () => {
   it.each(['/', '/api/health', '/api/docs-json', '/api/auth/welcome'])(
     'answers %s only under a name of this machine and without a proxy',
     async (path) => {
-      for (const headers of [
+      const afar: Record<string, string>[] = [
         { host: 'gears.example.com' },
         { host: 'localhost', 'x-forwarded-for': '10.0.0.1' },
         { host: 'localhost', forwarded: 'for=10.0.0.1' },
         { host: 'localhost', 'x-real-ip': '10.0.0.1' },
-      ]) {
+      ];
+      for (const headers of afar) {
         const answer = await raw(demo, path, headers);
         expect(answer.status).toBe(403);
         expect(JSON.parse(answer.text)).toMatchObject({ statusCode: 403, code: 'demo-is-local' });
@@ -81,7 +82,11 @@ describe('a write from a page of another address', () => {
     const admin = await real.as('admin');
     const before = (await admin.get<{ total: number }>('/api/users')).body.total;
     const body = { name: 'Mallory', email: 'm@example.com', roles: ['admin'], password: 'long enough' };
-    for (const headers of [{ origin: 'http://evil.example' }, { 'sec-fetch-site': 'cross-site' }]) {
+    const foreign: Record<string, string>[] = [
+      { origin: 'http://evil.example' },
+      { 'sec-fetch-site': 'cross-site' },
+    ];
+    for (const headers of foreign) {
       const answer = await admin.send<{ code: string }>('POST', '/api/users', { body, headers });
       expect([answer.status, answer.body.code]).toEqual([403, 'foreign-origin']);
     }

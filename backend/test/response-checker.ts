@@ -4,8 +4,12 @@ import { type OpenAPIObject } from '@nestjs/swagger';
 
 type Json = Record<string, unknown>;
 
+interface DocumentedResponse {
+  content?: Record<string, { schema: Json } | undefined>;
+}
+
 interface DocumentedOperation {
-  responses: Record<string, { content?: Record<string, { schema: Json }> } | undefined>;
+  responses: Record<string, DocumentedResponse | undefined>;
 }
 
 export interface CheckedAnswer {
@@ -74,7 +78,7 @@ export class ResponseChecker {
   }
 }
 
-const PROBLEM_RESPONSE = {
+const PROBLEM_RESPONSE: DocumentedResponse = {
   content: { 'application/json': { schema: { $ref: '#/components/schemas/Problem' } } },
 };
 

@@ -39,7 +39,8 @@ describe('the database', () => {
   it('can undo every migration', async () => {
     const other = await openTempDatabase();
     await other.writing.query('PRAGMA foreign_keys = OFF');
-    for (const _ of other.writing.migrations) await other.writing.undoLastMigration();
+    for (let left = other.writing.migrations.length; left > 0; left -= 1)
+      await other.writing.undoLastMigration();
     const tables = await other.writing.query<{ name: string }[]>(
       `SELECT name FROM sqlite_master WHERE type = 'table' AND name NOT LIKE 'sqlite_%' AND name <> 'migrations'`,
     );

@@ -40,14 +40,15 @@ describe('refuseForeignWrites', () => {
   });
   const local = { publicUrl: null };
 
-  it.each([{}, { origin: 'http://localhost:3000' }, { 'sec-fetch-site': 'same-origin' }])(
-    'lets %o pass',
-    (headers) => {
-      expect(() => refuseForeignWrites(write(headers), local)).not.toThrow();
-    },
-  );
+  it.each<Record<string, string>>([
+    {},
+    { origin: 'http://localhost:3000' },
+    { 'sec-fetch-site': 'same-origin' },
+  ])('lets %o pass', (headers) => {
+    expect(() => refuseForeignWrites(write(headers), local)).not.toThrow();
+  });
 
-  it.each([
+  it.each<Record<string, string>>([
     { origin: 'http://localhost:4000' },
     { origin: 'http://evil.example' },
     { origin: 'null' },

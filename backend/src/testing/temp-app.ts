@@ -6,7 +6,7 @@ import { tempSettings } from './temp-settings.js';
 export interface TempApp {
   app: NestFastifyApplication;
   settings: Settings;
-  close(): Promise<void>;
+  close: () => Promise<void>;
 }
 
 /** The whole server on a data folder of its own, not listening: services come from `app.get(Service)`. */

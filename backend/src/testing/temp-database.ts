@@ -10,7 +10,7 @@ export interface TempDatabase {
   source: DataSource;
   /** The source inside the queue; services never see it. */
   writing: DataSource;
-  close(): Promise<void>;
+  close: () => Promise<void>;
 }
 
 /** A migrated database in a folder of its own, without the rest of the server. */

@@ -6,7 +6,7 @@ import { loadSettings, type Settings } from '../settings/settings.js';
 export interface TempSettings {
   settings: Settings;
   /** Deletes the data folder. */
-  remove(): void;
+  remove: () => void;
 }
 
 /** Demo mode, quiet, a free port, and an empty data folder of its own. */
