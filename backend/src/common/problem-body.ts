@@ -15,7 +15,12 @@ const SECRET = /password|token|secret/i;
 /** The answer to a refusal. Values are echoed cut short, and never from a field that holds a secret. */
 export function problemBody(problem: ProblemError, requestId: string): ProblemBody {
   const { statusCode, code, message, extra } = problem;
-  const errors = problem.errors?.map((issue) => ({ ...issue, value: echo(issue.field, issue.value) }));
+  const errors = problem.errors?.map((issue) => ({
+    ...issue,
+    // A field that is not known was named by the sender, at any length.
+    field: cut(issue.field),
+    value: echo(issue.field, issue.value),
+  }));
   return { statusCode, code, message, ...(errors && { errors }), requestId, ...extra };
 }
 

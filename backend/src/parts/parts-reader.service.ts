@@ -22,6 +22,9 @@ const LAST_SIGN = '\uffff';
 /** Columns that may be empty: parts without the figure come last whichever way the list is sorted. */
 const MAY_BE_EMPTY: ReadonlySet<PartSort> = new Set(['teeth', 'module', 'faceWidth', 'bore', 'mass']);
 
+/** Fields of few values, each with an index that goes on with the number. */
+const THEN_BY_NUMBER: ReadonlySet<PartSort> = new Set(['kind', 'standing']);
+
 /** Everything that reads the library. */
 @Injectable()
 export class PartsReader {
@@ -145,12 +148,15 @@ const CONDITIONS = [
 ] as const;
 
 /**
- * Sorts, with the row id as the last key so that pages never overlap. It follows the direction of the key before it,
- * so that one index serves both.
+ * Sorts, with the number and then the row id as last keys so that pages never overlap. They follow the direction of the
+ * key before them, so that one index serves them all.
  */
 function order(rows: SelectQueryBuilder<Part>, sorts: SortKey<PartSort>[]): void {
   for (const { field, direction } of sorts) {
     rows.addOrderBy(`part.${field}`, direction, MAY_BE_EMPTY.has(field) ? 'NULLS LAST' : undefined);
   }
-  rows.addOrderBy('part.id', sorts.at(-1)?.direction ?? 'ASC');
+  const last = sorts.at(-1);
+  const [only] = sorts.length === 1 ? sorts : [];
+  if (only && THEN_BY_NUMBER.has(only.field)) rows.addOrderBy('part.number', only.direction);
+  rows.addOrderBy('part.id', last?.direction ?? 'ASC');
 }

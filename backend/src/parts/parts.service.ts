@@ -111,13 +111,14 @@ export class PartsService {
   ): Promise<Partial<Part>> {
     const standing = patch.standing ?? before.standing;
     checkStandingStep(before.standing, standing);
-    const { attributes: raw, version: _version, material, supplier, successorNumber, ...plain } = patch;
+    const { attributes: raw, description, mass, supply, note, material, supplier, successorNumber } = patch;
     const attributes = raw && checkAttributes(before.kind, raw);
     // A part in use again needs no successor any more.
     const kept = standing === 'withdrawn' ? before.successorNumber : null;
     const successor = successorNumber === undefined ? kept : successorNumber;
     return {
-      ...given(plain),
+      standing,
+      ...given({ description, mass, supply, note }),
       ...(material === undefined ? {} : { material: material || null }),
       ...(supplier === undefined ? {} : { supplier: supplier || null }),
       successorNumber: await this.successors.check(manager, before, standing, successor),

@@ -1,23 +1,18 @@
 import { ApiSchema } from '@nestjs/swagger';
 import { FieldFigure } from '../../common/field-figure.decorator.js';
-import { LibraryField } from './library-field.decorator.js';
+import { DecimalField } from './decimal-field.decorator.js';
 
 /** A ratio to be approached by fractions of small terms. */
 @ApiSchema({ name: 'FractionsInput' })
 export class FractionsInputDto {
-  @LibraryField({
-    type: 'string',
-    description: 'Target ratio as a decimal, read exactly; above 0',
-    example: '8.3043478',
-  })
+  @DecimalField({ description: 'Target ratio, read exactly; above 0', example: '8.3043478' })
   target!: string;
 
-  @LibraryField({
-    oneOf: [{ type: 'number' }, { type: 'string' }],
-    required: false,
+  @DecimalField({
     description: 'Marks each fraction as inside or outside this tolerance (per cent); it does not filter',
+    optional: true,
   })
-  tolerancePercent?: number | string;
+  tolerancePercent?: string;
 
   @FieldFigure({
     description: 'Largest numerator or denominator',

@@ -51,7 +51,8 @@ export function LibraryField(documentation: ApiPropertyOptions): PropertyDecorat
 /** A nested object whose unknown fields are refused; whether it must be there, the library decides. */
 export function LibraryObject(type: () => new () => object, description: string, required = false) {
   return applyDecorators(
-    ApiProperty({ type, description, required }),
+    // The documentation takes a function for a lazy type only when it is called `type`.
+    ApiProperty({ type: () => type(), description, required }),
     Type(type),
     ValidateIf((_, value) => typeof value === 'object' && value !== null && !Array.isArray(value)),
     ValidateNested(),

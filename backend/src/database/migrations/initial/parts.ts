@@ -44,6 +44,7 @@ export const PARTS = [
   `CREATE INDEX "part_face_width" ON "part" ("faceWidth")`,
   `CREATE INDEX "part_bore" ON "part" ("bore")`,
   `CREATE INDEX "part_updated" ON "part" ("updatedAt")`,
+  `CREATE INDEX "part_standing_number" ON "part" ("standing", "number")`,
   `CREATE INDEX "part_standing_updated" ON "part" ("standing", "updatedAt")`,
   `CREATE INDEX "part_kind_number" ON "part" ("kind", "number")`,
   `CREATE INDEX "part_kind_tooth" ON "part" ("kind", "module", "teeth")`,
