@@ -49,14 +49,18 @@ export function checkRequirement(input: object): Requirement {
 }
 
 function keptForm(checked: ReturnType<typeof validateOptionRequest>, duty?: Duty | null): Requirement {
-  const { ratio, stageRatio, ...rest } = checked;
+  const { target, tolerancePercent } = checked.ratio;
+  const given = Object.entries(duty ?? {}).filter(([, value]) => isGiven(value));
   return {
-    ...rest,
-    ratio: { target: String(ratio.target), tolerancePercent: String(ratio.tolerancePercent) },
-    // What came in as JSON is text or a number, never an exact fraction.
-    stageRatio: stageRatio as Requirement['stageRatio'],
-    ...(duty && Object.keys(duty).length > 0 ? { duty: { ...duty } } : {}),
+    ...checked,
+    ratio: { target: String(target), tolerancePercent: String(tolerancePercent) },
+    ...(given.length > 0 ? { duty: Object.fromEntries(given) } : {}),
   };
+}
+
+/** A form sends null for a field that was emptied. */
+function isGiven(value: unknown): boolean {
+  return value !== undefined && value !== null;
 }
 
 /** The part of a requirement that the planner searches by. */
@@ -65,14 +69,15 @@ export function optionRequestOf({ duty: _duty, ...request }: Requirement): Optio
 }
 
 function dutyIssues(duty: unknown): FieldIssue[] {
-  if (duty === undefined || duty === null) return [];
-  if (typeof duty !== 'object' || Array.isArray(duty)) {
+  if (!isGiven(duty)) return [];
+  if (typeof duty !== 'object' || duty === null || Array.isArray(duty)) {
     return [
       { field: 'duty', value: duty, message: 'The duty must hold speed, torque and application factor.' },
     ];
   }
   return Object.entries(duty).flatMap(([name, value]): FieldIssue[] => {
     const field = `duty.${name}`;
+    if (!isGiven(value)) return [];
     if (!Object.hasOwn(DUTY_BOUNDS, name)) {
       return [{ field, value, message: `The duty has no field “${name.slice(0, 40)}”. Leave it out.` }];
     }

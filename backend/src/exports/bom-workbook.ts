@@ -1,13 +1,14 @@
 import ExcelJS from 'exceljs';
 import { type TrainRecord } from '../trains/bom.service.js';
-import { BOM_COLUMNS, writeBomSheet } from './bom-sheet.js';
+import { writeBomSheet } from './bom-sheet.js';
 import { writeChecksSheet } from './checks-sheet.js';
-import { addHeadedSheet } from './sheet-heading.js';
-import { writeStagesSheet } from './stages-sheet.js';
+import { addHeadedSheet, HEAD_ROW } from './sheet-heading.js';
+import { stageColumns, writeStagesSheet } from './stages-sheet.js';
 import { stripPicture } from './strip-picture.js';
 
 export const XLSX_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
 
+/** px of 1/96 inch. */
 const PICTURE = { width: 360, height: 118 };
 
 /** `T-0001-A-bom.xlsx` */
@@ -22,23 +23,22 @@ export function workbookName({ code, revision }: { code: string; revision: strin
 export async function bomWorkbook({ train, bom, gearData }: TrainRecord, date: Date): Promise<Buffer> {
   const workbook = new ExcelJS.Workbook();
   workbook.title = `${train.code} revision ${train.revision}: bill of materials`;
-  // What the library would fill in by itself names a machine's user; these say only what made the file.
+  // Left alone, the writer names nobody as the author and the present moment as the date.
   workbook.creator = 'Stageyard';
   workbook.lastModifiedBy = 'Stageyard';
   workbook.created = date;
   workbook.modified = date;
-  const picture = stripPicture(train.spec, PICTURE.width, PICTURE.height);
-  const heading = { train, date, picture };
-  const lines = {
-    ...heading,
-    subject: 'Bill of materials',
-    columns: BOM_COLUMNS.length,
-    pictureColumn: 11.5,
-  };
-  writeBomSheet(addHeadedSheet(workbook, 'BOM', lines), bom);
-  const stages = { ...heading, subject: 'Stages', columns: 3 + gearData.length, pictureColumn: 5 };
-  writeStagesSheet(addHeadedSheet(workbook, 'Stages', stages), train, gearData);
-  const checks = { ...heading, subject: 'Checks', columns: 7, pictureColumn: 6.35 };
-  writeChecksSheet(addHeadedSheet(workbook, 'Checks', checks), train);
+  const { png } = stripPicture(train.spec, PICTURE.width, PICTURE.height);
+  const imageId = workbook.addImage({ base64: png.toString('base64'), extension: 'png' });
+  const heading = { train, date, picture: { ...PICTURE, imageId } };
+  const tableHead = `${HEAD_ROW}:${HEAD_ROW}`;
+  const lines = { subject: 'Bill of materials', pictureColumn: 11.5, repeatedRows: tableHead };
+  writeBomSheet(addHeadedSheet(workbook, 'BOM', { ...heading, ...lines }), bom);
+  // Three tables stand on this sheet, so that a page repeats what it is about and not the head of one table.
+  const pictureColumn = stageColumns(gearData.length) - 3;
+  const stages = { subject: 'Stages', pictureColumn, repeatedRows: '1:3' };
+  writeStagesSheet(addHeadedSheet(workbook, 'Stages', { ...heading, ...stages }), train, gearData);
+  const checks = { subject: 'Checks', pictureColumn: 6.35, repeatedRows: tableHead };
+  writeChecksSheet(addHeadedSheet(workbook, 'Checks', { ...heading, ...checks }), train);
   return Buffer.from(await workbook.xlsx.writeBuffer());
 }

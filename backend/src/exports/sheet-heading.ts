@@ -21,11 +21,12 @@ export interface Heading {
   /** What the sheet shows, such as `Bill of materials`. */
   subject: string;
   date: Date;
-  picture: Picture;
-  /** Columns of the sheet's table; the picture stands over the last ones. */
-  columns: number;
-  /** Column over which the picture's left edge stands, from 0. */
+  /** The train to scale, already in the workbook. */
+  picture: Pick<Picture, 'width' | 'height'> & { imageId: number };
+  /** Column over which the picture's left edge stands, from 0; the head's text keeps to the columns before it. */
   pictureColumn: number;
+  /** Rows that every printed page repeats, such as `7:7`. */
+  repeatedRows: string;
 }
 
 /** Adds a sheet with its head: what train, which revision, when, the exact ratio, and the train to scale. */
@@ -39,7 +40,7 @@ export function addHeadedSheet(workbook: Workbook, name: string, heading: Headin
       fitToWidth: 1,
       fitToHeight: 0,
       horizontalCentered: true,
-      printTitlesRow: `1:${HEAD_ROW}`,
+      printTitlesRow: heading.repeatedRows,
       margins: { left: 0.4, right: 0.4, top: 0.5, bottom: 0.6, header: 0.25, footer: 0.3 },
     },
     headerFooter: { oddFooter: footer(heading) },
@@ -48,12 +49,13 @@ export function addHeadedSheet(workbook: Workbook, name: string, heading: Headin
     const row = index + 1;
     const { height, look } = TITLE_ROWS[index] ?? TITLE_ROWS[4];
     sheet.getRow(row).height = height;
+    sheet.mergeCells(row, 1, row, Math.floor(heading.pictureColumn));
     const cell = sheet.getCell(row, 1);
     cell.value = text;
-    dress(cell, { ...look, alignment: { vertical: 'middle', horizontal: 'left' } });
+    dress(cell, { ...look, alignment: { vertical: 'middle', horizontal: 'left', shrinkToFit: true } });
   });
   sheet.getRow(6).height = 8;
-  addPicture(workbook, sheet, heading);
+  addPicture(sheet, heading);
   return sheet;
 }
 
@@ -93,9 +95,8 @@ function footer({ train, subject, date }: Heading): string {
   return `&L&8${train.code} revision ${train.revision}: ${subject.toLowerCase()}&C&8Page &P of &N&R&8Stageyard, ${day}`;
 }
 
-function addPicture(workbook: Workbook, sheet: Worksheet, { picture, pictureColumn }: Heading): void {
-  const imageId = workbook.addImage({ base64: picture.png.toString('base64'), extension: 'png' });
-  sheet.addImage(imageId, {
+function addPicture(sheet: Worksheet, { picture, pictureColumn }: Heading): void {
+  sheet.addImage(picture.imageId, {
     tl: { col: pictureColumn, row: 0.15 },
     ext: { width: picture.width, height: picture.height },
     editAs: 'oneCell',

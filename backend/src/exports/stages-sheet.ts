@@ -13,24 +13,29 @@ const GROUP_TITLES: Record<GearDataRow['group'], string> = {
   mate: 'Mating gear',
 };
 
+/** Columns of the sheet: three of words, then one a gear, with room for the picture above the last three. */
+export function stageColumns(gears: number): number {
+  return Math.max(8, 3 + gears);
+}
+
 /** Gear data of every gear side by side in the order of ISO 1340, then the meshes, then the shafts. */
 export function writeStagesSheet(
   sheet: Worksheet,
   train: TrainDto,
   gearData: readonly TrainGearData[],
 ): void {
-  [32, 10, 8, ...gearData.map(() => 17)].forEach(
-    (width, index) => (sheet.getColumn(index + 1).width = width),
-  );
-  const rows = gearRows(gearData);
-  const table = writeTable(sheet, HEAD_ROW, gearColumns(gearData), rows);
+  const width = stageColumns(gearData.length);
+  for (let column = 1; column <= width; column += 1) {
+    sheet.getColumn(column).width = [32, 10, 8][column - 1] ?? 17;
+  }
+  const table = writeTable(sheet, HEAD_ROW, gearColumns(gearData), gearRows(gearData));
+  sheet.getRow(table.lastRow + 1).addPageBreak();
   const meshes = writeBlock(sheet, table.lastRow + 2, 'Meshes', meshColumns(train.figures.meshes), MESH_ROWS);
   const shafts = train.spec.shafts.map(({ diameter }, index) => ({
     diameter,
     figures: train.figures.shafts[index],
   }));
   const last = writeBlock(sheet, meshes + 2, 'Shafts', shaftColumns(shafts), SHAFT_ROWS);
-  const width = Math.max(gearData.length, shafts.length, train.figures.meshes.length) + 3;
   sheet.pageSetup.printArea = `A1:${sheet.getColumn(width).letter}${last}`;
 }
 

@@ -82,8 +82,8 @@ export class SearchRunner implements OnApplicationBootstrap, BeforeApplicationSh
     if (this.closing) return;
     const finishedAt = this.clock.iso();
     await this.finish(search, { ...ending, finishedAt }, actor);
-    const { outcome: _outcome, ...shown } = ending;
-    live.changeTo({ ...shown, finishedAt });
+    const { state, message, optionCount, complete } = ending;
+    live.changeTo({ state, message, optionCount, complete, finishedAt });
   }
 
   private markRunning(id: number, live: LiveSearch): void {

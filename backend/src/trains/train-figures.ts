@@ -10,6 +10,7 @@ export interface StockGear {
 }
 
 type TrainFinding = TrainFigures['findings'][number];
+type TrainCheck = TrainFigures['checks'][number];
 
 /**
  * Every figure of a train, with what its shafts and chosen parts give rise to.
@@ -17,40 +18,40 @@ type TrainFinding = TrainFigures['findings'][number];
  */
 export function trainFigures(spec: AdoptedSpec, stock: ReadonlyMap<string, StockGear>): TrainFigures {
   const figures = describeTrain(spec);
-  const findings = [...shaftFindings(spec, figures), ...partFindings(spec, stock)];
-  return { ...figures, findings: [...figures.findings, ...findings] };
+  return {
+    ...figures,
+    findings: [...figures.findings, ...shaftFindings(spec), ...partFindings(spec, stock)],
+    checks: [...figures.checks, ...shaftChecks(spec, figures)],
+  };
 }
 
-function shaftFindings(spec: AdoptedSpec, figures: TrainFigures): TrainFinding[] {
+/** Each shaft against the least diameter for its torque, where one is known. */
+function shaftChecks(spec: AdoptedSpec, figures: TrainFigures): TrainCheck[] {
+  return spec.shafts.flatMap(({ diameter }, index): TrainCheck[] => {
+    const limit = figures.shafts[index]?.leastDiameter ?? null;
+    if (limit === null) return [];
+    const holds = diameter >= limit;
+    const mend = holds ? '' : ' Thicken it, or take larger gears so that there is room for it.';
+    const message = `Shaft ${index} is ${diameter} mm; torsion needs at least ${limit} mm.${mend}`;
+    const verdict = holds ? ('passes' as const) : ('fails' as const);
+    const label = `Diameter of shaft ${index}`;
+    return [{ code: 'shaft-diameter', label, value: diameter, limit, unit: 'mm', verdict, message }];
+  });
+}
+
+function shaftFindings(spec: AdoptedSpec): TrainFinding[] {
   return spec.shafts.flatMap(({ diameter, basis }, index): TrainFinding[] => {
-    const name = `Shaft ${index}`;
-    const least = figures.shafts[index]?.leastDiameter ?? null;
     const found: TrainFinding[] = [];
-    if (least !== null && diameter < least) {
-      found.push({
-        code: 'shaft-too-thin',
-        severity: 'fail',
-        message: `${name} is ${diameter} mm; its torque needs at least ${least} mm. Thicken it, or take a larger gear.`,
-        value: diameter,
-        limit: least,
-      });
-    }
     if (basis === 'start') {
-      const message = `${name} starts at ${STARTING_DIAMETER} mm or what fits, since no torque and no stock bore is known. Give a torque in the brief, or type a diameter.`;
+      const message = `Shaft ${index} starts at ${STARTING_DIAMETER} mm or what fits, since no torque and no stock bore is known. Give a torque in the brief, or type a diameter.`;
       found.push({ code: 'shaft-not-sized', severity: 'note', message, value: diameter });
     }
     for (const placed of gearsOnShaft(spec, index)) {
       const limit = rootLimit(spec, placed);
       if (diameter <= limit) continue;
-      const message = `${name} is ${diameter} mm; inside the teeth of the ${placeName(placed).toLowerCase()} there is room for ${limit} mm.`;
-      found.push({
-        code: 'shaft-over-root',
-        severity: 'fail',
-        message,
-        value: diameter,
-        limit,
-        stage: placed.stage,
-      });
+      const { stage } = placed;
+      const message = `Shaft ${index} is ${diameter} mm; inside the teeth of the ${placeName(placed).toLowerCase()} there is room for ${limit} mm.`;
+      found.push({ code: 'shaft-over-root', severity: 'fail', message, value: diameter, limit, stage });
     }
     return found;
   });

@@ -46,7 +46,8 @@ export class SearchPool implements OnApplicationShutdown {
     this.graceMs = options.graceMs ?? DEFAULT_GRACE_MS;
     this.pool = new Piscina({
       filename: options.entry,
-      minThreads: 0,
+      // With none kept, a thread that dies would leave the searches that wait behind it waiting for ever.
+      minThreads: 1,
       maxThreads: options.threads ?? Math.max(1, availableParallelism() - 1),
       idleTimeout: 60_000,
       // An idle thread that blocks on shared memory would not end by itself.

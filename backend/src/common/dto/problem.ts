@@ -46,6 +46,9 @@ export class Problem {
   @ApiPropertyOptional({ type: String, description: 'Of a second search: the one that still runs.' })
   searchId?: string;
 
+  @ApiPropertyOptional({ type: String, description: 'Of a second search: the brief that it searches for.' })
+  briefId?: string;
+
   @ApiPropertyOptional({
     type: 'integer',
     description: 'Of a refusal that ends by itself: how long to wait, s.',

@@ -61,6 +61,13 @@ export class ExactRatioDto {
   errorPercent!: number | null;
 }
 
+/** An option is always held against a target. */
+@ApiSchema({ name: 'OptionRatio' })
+export class OptionRatioDto extends ExactRatioDto {
+  @ApiProperty({ type: 'number', nullable: false, description: 'Signed: (value / target − 1) × 100' })
+  declare errorPercent: number;
+}
+
 /** One train found for a brief. */
 @ApiSchema({ name: 'TrainOption' })
 export class TrainOptionDto implements Omit<TrainOption, 'ratio'> {
@@ -74,8 +81,8 @@ export class TrainOptionDto implements Omit<TrainOption, 'ratio'> {
   @ApiProperty({ type: [TrainStageDto] })
   stages!: TrainStageDto[];
 
-  @ApiProperty({ type: ExactRatioDto })
-  ratio!: ExactRatioDto;
+  @ApiProperty({ type: OptionRatioDto })
+  ratio!: OptionRatioDto;
 
   @ApiProperty({ type: 'number', description: 'Sum of the operating centre distances (mm)' })
   centreDistanceSum!: number;
