@@ -242,7 +242,7 @@ describe('the list', () => {
     for (const text of ['"50%"', 'AND_OR', '(x*y)', '%"']) {
       expect(await numbersOf(`text=${encodeURIComponent(text)}`)).toEqual(['SIGNS-1']);
     }
-    for (const text of ["'; DROP TABLE part; --", 'NEAR(', '"""', '%', '_']) {
+    for (const text of ["'; DROP TABLE part; --", 'NEAR(', '"""', '%', '_', '\u0000abc']) {
       expect((await viewer.get(`/api/parts?text=${encodeURIComponent(text)}`)).status).toBe(200);
     }
   });

@@ -18,7 +18,7 @@ export class FinderService {
   ) {}
 
   async find(user: SignedInUser, text: string): Promise<FinderResultDto> {
-    const wanted = text.trim();
+    const wanted = text.replace(/\p{Cc}/gu, ' ').trim();
     if (wanted === '') return { parts: [], briefs: [], trains: [] };
     const may = (permission: SignedInUser['permissions'][number]) => user.permissions.includes(permission);
     return {

@@ -15,7 +15,11 @@ export function matchText<T extends ObjectLiteral>(
   text: string,
   enough?: number,
 ): void {
-  const words = text.split(/\s+/).filter(Boolean).slice(0, MOST_WORDS);
+  // Control characters mean an end of text to the database.
+  const words = text
+    .split(/[\s\p{Cc}]+/u)
+    .filter(Boolean)
+    .slice(0, MOST_WORDS);
   const indexed = words.filter((word) => [...word].length >= SHORTEST_INDEXED);
   const limit = enough !== undefined && indexed.length === words.length ? `LIMIT ${enough}` : '';
   if (indexed.length > 0) {
