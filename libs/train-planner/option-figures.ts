@@ -1,5 +1,5 @@
-import { meshGeometry, type MeshGeometry } from '../gear-geometry/index.js';
-import { ratio, ratioErrorPercent } from '../units/index.js';
+import { involute } from '../gear-geometry/index.js';
+import { radToArcmin, ratio, ratioErrorPercent } from '../units/index.js';
 import { type FoundTrain } from './best-list.js';
 import { type CheckedRequest } from './option-request.js';
 import { type PairPool } from './pair-pool.js';
@@ -9,12 +9,19 @@ import { outputBacklash } from './output-backlash.js';
 import { type Box, type OptionStage, type TrainOption } from './train-option.js';
 import { trainWidthNm } from './train-search.js';
 
-/** Turns trains of the search into options with all their figures. Meshes are computed once per pair. */
+/** One stage with what the backlash at the output needs of it. */
+interface StageEntry {
+  stage: OptionStage;
+  ratio: number;
+  angularBacklashArcmin: number;
+}
+
+/** Turns trains of the search into options with all their figures. Each pair is worked out once. */
 export class OptionFigures {
   readonly #request: CheckedRequest;
   readonly #stagePairs: StagePairs;
   readonly #pool: PairPool;
-  readonly #stages = new Map<number, { stage: OptionStage; mesh: MeshGeometry }>();
+  readonly #stages = new Map<number, StageEntry>();
 
   constructor(request: CheckedRequest, stagePairs: StagePairs, pool: PairPool) {
     this.#request = request;
@@ -38,14 +45,14 @@ export class OptionFigures {
       centreDistanceSum: train.distance / 1e6,
       mass: mass / 1e6,
       box: this.#box(train.pairs),
-      backlashArcmin: outputBacklash(entries.map(({ mesh }) => mesh)),
+      backlashArcmin: outputBacklash(entries),
       lossPercent: null,
       cost: null,
       newParts: null,
     };
   }
 
-  #stage(row: number): { stage: OptionStage; mesh: MeshGeometry } {
+  #stage(row: number): StageEntry {
     const known = this.#stages.get(row);
     if (known) return known;
     const pool = this.#pool;
@@ -53,14 +60,6 @@ export class OptionFigures {
     const wheel = this.#stagePairs.gear(pool.wheel[row] as number) as StageGear;
     const centreDistance = pool.centreDistance[row] as number;
     const { module, faceWidth } = this.#stagePairs;
-    const { pressureAngleDeg, helixAngleDeg, leastContactRatio } = this.#request;
-    const shape = { module, pressureAngleDeg, helixAngleDeg, faceWidth };
-    const mesh = meshGeometry({
-      pinion: { ...shape, teeth: pinion.teeth, profileShift: pinion.shift },
-      wheel: { ...shape, teeth: wheel.teeth, profileShift: wheel.shift },
-      centreDistance,
-      leastContactRatio,
-    });
     const stage: OptionStage = {
       pinionTeeth: pinion.teeth,
       wheelTeeth: wheel.teeth,
@@ -74,7 +73,12 @@ export class OptionFigures {
       contactRatio: pool.contactRatio[row] as number,
       contactRatioWorst: null,
     };
-    const entry = { stage, mesh };
+    const allowance = this.#request.centreDistanceAllowance * module;
+    const entry = {
+      stage,
+      ratio: wheel.teeth / pinion.teeth,
+      angularBacklashArcmin: angularBacklash(pinion, wheel, centreDistance, allowance),
+    };
     this.#stages.set(row, entry);
     return entry;
   }
@@ -92,4 +96,15 @@ export class OptionFigures {
       height: (toNm(2 * tip) + walls) / 1e6,
     };
   }
+}
+
+/**
+ * Angular backlash at the wheel, arcmin: j_wt = 2a (inv α_w,op − inv α_wt) over r_w2 = a z2/(z1 + z2). Without an
+ * allowance on the distance there is none.
+ */
+function angularBacklash(pinion: StageGear, wheel: StageGear, a: number, allowance: number): number {
+  if (allowance === 0) return 0;
+  const bases = pinion.base + wheel.base;
+  const spread = involute(Math.acos(bases / a)) - involute(Math.acos(bases / (a - allowance)));
+  return radToArcmin((2 * spread * (pinion.teeth + wheel.teeth)) / wheel.teeth);
 }

@@ -17,8 +17,6 @@ export interface PairPool {
   readonly pinionTip: Float64Array;
   readonly wheelTip: Float64Array;
   readonly contactRatio: Float64Array;
-  /** 1 when either gear is undercut. */
-  readonly undercut: Uint8Array;
 }
 
 const COLUMNS = [
@@ -32,13 +30,12 @@ const COLUMNS = [
 ] as const;
 
 type FloatColumn = (typeof COLUMNS)[number];
-export type PairRow = Record<FloatColumn, number> & { pinion: number; wheel: number; undercut: number };
+export type PairRow = Record<FloatColumn, number> & { pinion: number; wheel: number };
 
 /** Collects rows in any order and hands them over sorted. Columns, not objects: pools can hold 100,000s of rows. */
 export class PairPoolBuilder {
   readonly #pinion: number[] = [];
   readonly #wheel: number[] = [];
-  readonly #undercut: number[] = [];
   readonly #floats = Object.fromEntries(COLUMNS.map((name) => [name, [] as number[]])) as Record<
     FloatColumn,
     number[]
@@ -47,7 +44,6 @@ export class PairPoolBuilder {
   add(row: PairRow): void {
     this.#pinion.push(row.pinion);
     this.#wheel.push(row.wheel);
-    this.#undercut.push(row.undercut);
     for (const name of COLUMNS) this.#floats[name].push(row[name]);
   }
 
@@ -64,7 +60,6 @@ export class PairPoolBuilder {
       length: order.length,
       pinion: Int32Array.from(order, (index) => pinion[index] as number),
       wheel: Int32Array.from(order, (index) => wheel[index] as number),
-      undercut: Uint8Array.from(order, (index) => this.#undercut[index] as number),
       ...(Object.fromEntries(columns) as Record<FloatColumn, Float64Array>),
     };
   }

@@ -14,6 +14,8 @@ export interface SearchSpace {
   readonly ordered: boolean;
   /** Greatest length over the gears, walls taken off, whole nm; Infinity without a limit. */
   readonly lengthLimit: number;
+  /** Whether the flanks of a row's pair interfere; asked only of trains that would otherwise be taken. */
+  interferes(row: number): boolean;
 }
 
 /** Greatest sum of distances, nm, that can still fit the length: the outer gears stick out at both ends. */
@@ -54,6 +56,7 @@ export class TrainIntake {
   take(pairs: readonly number[], cost: number, distance: number, n: number, d: number): void {
     const best = this.#best;
     if (!best.admits(cost, n, d, distance)) return;
+    for (const row of pairs) if (this.#space.interferes(row)) return;
     if (!this.#space.ordered) {
       this.#offer(pairs, cost, distance, n, d);
       return;

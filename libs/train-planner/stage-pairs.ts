@@ -57,7 +57,7 @@ export class StagePairs {
   }
 
   /**
-   * Every pair within the limits that has a sound tip and does not interfere.
+   * Every pair within the limits with sound tips and roots. Whether its flanks interfere is left to `interferes`.
    * @param band ratios wanted; it only saves work
    */
   within(limits: StageLimits, { least, greatest } = ANY_RATIO): PairPool {
@@ -91,7 +91,7 @@ export class StagePairs {
     if (!(centreDistance > pinion.base + wheel.base)) return;
     const contactRatio = meshKernel(pinion, wheel, centreDistance, pinion.basePitch);
     if (contactRatio < limits.leastContactRatio) return;
-    if (this.#interferes(pinion, wheel, centreDistance)) return;
+    if (tipHitsRoot(pinion, wheel, centreDistance) || tipHitsRoot(wheel, pinion, centreDistance)) return;
     builder.add({
       pinion: pinion.teeth,
       wheel: wheel.teeth,
@@ -102,7 +102,6 @@ export class StagePairs {
       pinionTip: pinion.tip,
       wheelTip: wheel.tip,
       contactRatio,
-      undercut: pinion.undercut || wheel.undercut ? 1 : 0,
     });
   }
 
@@ -121,14 +120,17 @@ export class StagePairs {
     return zeroBacklash + centreDistanceAllowance * this.module;
   }
 
-  #interferes(pinion: StageGear, wheel: StageGear, centreDistance: number): boolean {
-    const key = pinion.teeth * 65536 + wheel.teeth;
+  /**
+   * Whether the flanks of a pair of `within` interfere. Dear where teeth are undercut, and rare, so a search asks
+   * only about pairs of trains that it would otherwise take.
+   */
+  interferes(pinionTeeth: number, wheelTeeth: number): boolean {
+    const key = pinionTeeth * 65536 + wheelTeeth;
     let verdict = this.#interference.get(key);
     if (verdict === undefined) {
-      verdict =
-        meshInterferes(pinion, wheel, centreDistance) ||
-        tipHitsRoot(pinion, wheel, centreDistance) ||
-        tipHitsRoot(wheel, pinion, centreDistance);
+      const pinion = this.gear(pinionTeeth);
+      const wheel = this.gear(wheelTeeth);
+      verdict = !pinion || !wheel || meshInterferes(pinion, wheel, this.#distance(pinion, wheel));
       this.#interference.set(key, verdict);
     }
     return verdict;

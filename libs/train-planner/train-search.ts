@@ -75,7 +75,10 @@ export class TrainSearch {
     }
     const ordered = objective === 'mass' || envelope !== undefined;
     const lengthLimit = roomNm(envelope?.length, envelope?.wall);
-    return { pool: this.pool, stages, window, objective, ordered, lengthLimit };
+    const { pool } = this;
+    const interferes = (row: number) =>
+      this.#stagePairs.interferes(pool.pinion[row] as number, pool.wheel[row] as number);
+    return { pool, stages, window, objective, ordered, lengthLimit, interferes };
   }
 }
 
