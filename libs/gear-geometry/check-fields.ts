@@ -77,7 +77,7 @@ export function plain(value: number): string {
 /** The refused value as a person recognises it, never longer than a line. */
 function shown(value: unknown): string {
   if (value === undefined || value === null || value === '') return '';
-  if (typeof value === 'number') return Number.isFinite(value) ? plain(value) : String(value);
+  if (typeof value === 'number') return Number.isFinite(value) ? plain(value) : 'that';
   if (typeof value === 'boolean') return String(value);
   if (typeof value === 'string') return `“${value.length > 40 ? `${value.slice(0, 40)}…` : value}”`;
   return Array.isArray(value) ? 'a list' : 'this value';

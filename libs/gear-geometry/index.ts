@@ -12,7 +12,7 @@ export { involute, inverseInvolute } from './involute.js';
 export { gearGeometry } from './gear.js';
 export { gearRadii } from './gear-radii.js';
 export { meshGeometry, type MeshInput } from './mesh.js';
-export { meshKernel, zeroBacklashDistance } from './mesh-kernel.js';
+export { meshKernel, shiftSumForDistance, zeroBacklashDistance } from './mesh-kernel.js';
 export { meshInterferes } from './tip-corner.js';
 export { assertMeshable, huntingTooth, type HuntingTooth } from './pair.js';
 export {
@@ -25,3 +25,4 @@ export {
 export { spanMeasurement, type SpanMeasurement } from './span.js';
 export { overPins, type PinMeasurement } from './pins.js';
 export { toothOutline, type OutlinePoint } from './outline.js';
+export { BASIC_RACKS, STANDARD_MODULES } from './standards.js';

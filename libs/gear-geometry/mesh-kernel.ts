@@ -44,3 +44,21 @@ export function zeroBacklashDistance(
   const alphaW = inverseInvolute(involute(alphaT) + (2 * Math.tan(alphaRad) * (x1 + x2)) / (z1 + z2));
   return alphaW > 0 ? (referenceDistance * Math.cos(alphaT)) / Math.cos(alphaW) : 0;
 }
+
+/**
+ * Sum of the profile shifts (modules) that makes `a` (mm) the zero-backlash distance, the inverse of
+ * `zeroBacklashDistance`. Angles in radians; `a` must exceed the sum of the base radii; nothing is checked.
+ */
+export function shiftSumForDistance(
+  z1: number,
+  z2: number,
+  a: number,
+  m: number,
+  alphaRad: number,
+  betaRad: number,
+): number {
+  const cosBeta = Math.cos(betaRad);
+  const alphaT = betaRad === 0 ? alphaRad : Math.atan(Math.tan(alphaRad) / cosBeta);
+  const alphaW = Math.acos((m * (z1 + z2) * Math.cos(alphaT)) / (2 * cosBeta * a));
+  return ((z1 + z2) * (involute(alphaW) - involute(alphaT))) / (2 * Math.tan(alphaRad));
+}

@@ -91,8 +91,10 @@ function cornerTurn(path: CornerPath, radius: number): number {
 
 function filletBite(path: CornerPath, tip: RackTip, eps: number): number {
   const turn = cornerTurn(path, filletRadius(tip, eps)) - filletTurn(tip, eps);
-  const along = tip.cosBeta * Math.cos(tip.alpha + eps);
+  // At the deepest point the cosine may round to just below zero, which would turn the sign.
+  const along = tip.cosBeta * Math.max(0, Math.cos(tip.alpha + eps));
   const across = Math.sin(tip.alpha + eps);
+  if (along === 0 || turn === Number.NEGATIVE_INFINITY) return Number.NEGATIVE_INFINITY;
   // The normal of the fillet passes the pitch point, so its lever about the axis is r times its slope.
   return (turn * tip.reference * along) / Math.hypot(along, across);
 }

@@ -13,6 +13,7 @@ export interface EnvelopeGear {
   addendum?: number;
   dedendum?: number;
   tipRadius?: number;
+  tipShortening?: number;
 }
 
 /** One gear cut by a rack; the transverse section, mm and radians. */
@@ -20,6 +21,7 @@ export class RackEnvelope {
   readonly z: number;
   readonly reference: number;
   readonly tip: number;
+  readonly root: number;
   private readonly m: number;
   private readonly tanAlpha: number;
   private readonly cosBeta: number;
@@ -29,7 +31,11 @@ export class RackEnvelope {
   readonly flankEnd: number;
   private readonly deepest: number;
 
-  constructor(gear: EnvelopeGear) {
+  /** Fewer `samples` are quicker and still right away from the onset of undercut. */
+  constructor(
+    gear: EnvelopeGear,
+    private readonly samples = 80,
+  ) {
     const m = gear.m ?? 1;
     const alpha = ((gear.alphaDeg ?? 20) * Math.PI) / 180;
     const radius = (gear.tipRadius ?? 0.38) * m;
@@ -39,8 +45,9 @@ export class RackEnvelope {
     this.cosBeta = Math.cos(((gear.betaDeg ?? 0) * Math.PI) / 180);
     this.shift = (gear.x ?? 0) * m;
     this.reference = (gear.z * m) / (2 * this.cosBeta);
-    this.tip = this.reference + (gear.addendum ?? 1) * m + this.shift;
+    this.tip = this.reference + ((gear.addendum ?? 1) - (gear.tipShortening ?? 0)) * m + this.shift;
     this.deepest = (gear.dedendum ?? 1.25) * m;
+    this.root = this.reference + this.shift - this.deepest;
     const depth = this.deepest - radius;
     // A circle that touches the flank lies radius/cos α inside it, measured along the datum.
     const offset = this.flankWidth(depth) - radius / Math.cos(alpha);
@@ -68,20 +75,42 @@ export class RackEnvelope {
     const { depth: centre, offset, radius: round } = this.rounding;
     if (round === 0) return this.reachAt(radius, this.deepest, offset);
     const from = Math.asin((this.flankEnd - centre) / round);
-    return greatest(0, Math.cbrt(Math.PI / 2 - from), (t) => {
-      const angle = from + t ** 3;
-      return this.reachAt(radius, centre + round * Math.sin(angle), offset + round * Math.cos(angle));
-    }).value;
+    return greatest(
+      0,
+      Math.cbrt(Math.PI / 2 - from),
+      (t) => {
+        const angle = from + t ** 3;
+        return this.reachAt(radius, centre + round * Math.sin(angle), offset + round * Math.cos(angle));
+      },
+      this.samples,
+    ).value;
+  }
+
+  /**
+   * Half the gap's angle left by the part of the flank furthest from its end that reaches as far as it can: the
+   * smooth flank, without the bite of the flank's end below it.
+   */
+  reachOfUpperFlank(radius: number): number {
+    return this.peaksOfFlank(radius, 0).at(-1)?.value ?? Number.NEGATIVE_INFINITY;
+  }
+
+  private bestOfFlank(radius: number, keepOff = 0): Peak {
+    const candidates = this.peaksOfFlank(radius, keepOff);
+    return candidates.reduce((best, peak) => (peak.value > best.value ? peak : best), {
+      at: 0,
+      value: Number.NEGATIVE_INFINITY,
+    });
   }
 
   /** Cubed steps crowd towards the flank's end, where the interesting part is tiny at the onset of undercut. */
-  private bestOfFlank(radius: number, keepOff = 0): { at: number; value: number } {
+  private peaksOfFlank(radius: number, keepOff: number): Peak[] {
     // A sharp corner is the flank's end too: keep the two apart.
     const from = Math.max(keepOff, this.rounding.radius === 0 ? this.m / 1000 : 0);
-    return greatest(Math.cbrt(from), Math.cbrt(this.flankEnd + this.m), (t) => {
+    const reach = (t: number) => {
       const depth = this.flankEnd - t ** 3;
       return this.reachAt(radius, depth, this.flankWidth(depth));
-    });
+    };
+    return peaks(Math.cbrt(from), Math.cbrt(this.flankEnd + this.m), reach, this.samples);
   }
 
   /** Whether the flank's point `step` above its end reaches further into the tooth than its end does. */
@@ -109,28 +138,34 @@ export class RackEnvelope {
   }
 }
 
-/** Greatest value of a function: samples, then golden section around every sample above its neighbours. */
-export function greatest(
-  low: number,
-  high: number,
-  value: (at: number) => number,
-  samples = 80,
-): { at: number; value: number } {
-  const step = (high - low) / samples;
-  const values = Array.from({ length: samples + 1 }, (_, i) => value(low + i * step));
-  let best = { at: low, value: Number.NEGATIVE_INFINITY };
-  values.forEach((here, i) => {
-    if (here < (values[i - 1] ?? here) || here < (values[i + 1] ?? here)) return;
-    const peak = refine(Math.max(low, low + (i - 1) * step), Math.min(high, low + (i + 1) * step), value);
-    for (const found of [{ at: low + i * step, value: here }, peak])
-      if (found.value > best.value) best = found;
-  });
-  return best;
+interface Peak {
+  at: number;
+  value: number;
 }
 
-function refine(low: number, high: number, value: (at: number) => number): { at: number; value: number } {
+/** Greatest value of a function, with where it is. */
+export function greatest(low: number, high: number, value: (at: number) => number, samples = 80): Peak {
+  return peaks(low, high, value, samples).reduce((best, peak) => (peak.value > best.value ? peak : best), {
+    at: low,
+    value: Number.NEGATIVE_INFINITY,
+  });
+}
+
+/** Every local maximum: samples, then golden section around each sample not below its neighbours. */
+function peaks(low: number, high: number, value: (at: number) => number, samples: number): Peak[] {
+  const step = (high - low) / samples;
+  const values = Array.from({ length: samples + 1 }, (_, i) => value(low + i * step));
+  return values.flatMap((here, i) => {
+    const hidden = here < (values[i - 1] ?? here) || here < (values[i + 1] ?? here);
+    if (here === Number.NEGATIVE_INFINITY || hidden) return [];
+    const peak = refine(Math.max(low, low + (i - 1) * step), Math.min(high, low + (i + 1) * step), value);
+    return [peak.value > here ? peak : { at: low + i * step, value: here }];
+  });
+}
+
+function refine(low: number, high: number, value: (at: number) => number): Peak {
   let [left, right] = [low, high];
-  for (let i = 0; i < 45; i++) {
+  for (let i = 0; i < 40; i++) {
     const third = (right - left) * 0.3819660112501051;
     if (value(left + third) > value(right - third)) right -= third;
     else left += third;
