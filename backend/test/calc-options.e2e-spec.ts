@@ -106,7 +106,7 @@ describe('the option search', () => {
     ['ratio.target', { ratio: { target: '9'.repeat(100_000), tolerancePercent: '1' } }],
     ['ratio.tolerancePercent', { ratio: { target: '5', tolerancePercent: '-1' } }],
     ['ratio.tolerance', { ratio: { target: '5', tolerancePercent: '1', tolerance: 1 } }],
-    ['ratio', { ratio: undefined }],
+    ['ratio.target', { ratio: undefined }],
     ['stages.max', { stages: { min: 1, max: 4 } }],
     ['teeth.pinion.max', { teeth: { pinion: { min: 24, max: 17 }, wheel: { min: 40, max: 150 } } }],
     ['teeth.wheel.min', { teeth: { pinion: { min: 17, max: 24 }, wheel: { min: 2, max: 150 } } }],

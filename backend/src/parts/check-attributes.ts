@@ -3,6 +3,7 @@ import { validateSync } from 'class-validator';
 import { badInput } from '../common/errors.js';
 import { validationProblem } from '../common/validation.js';
 import { under } from './under.js';
+import { contradictions } from './attribute-rules.js';
 import { ATTRIBUTES_OF_KIND, type PartAttributes } from './dto/attributes/part-attributes.js';
 import { ToothedAttributes } from './dto/attributes/toothed-attributes.js';
 import { toothedGeometry } from './part-geometry.js';
@@ -22,7 +23,8 @@ export function checkAttributes(kind: PartKind, raw: object): PartAttributes {
   });
   if (faults.length > 0) throw validationProblem([under('attributes', faults)]);
   if (attributes instanceof ToothedAttributes) checkHand(attributes);
-  toothedGeometry(kind, attributes);
+  const wrong = contradictions(kind, attributes, toothedGeometry(kind, attributes));
+  if (wrong.length > 0) throw badInput(wrong);
   return attributes;
 }
 

@@ -1,4 +1,5 @@
 import { gearGeometry, type GearGeometry, type GearInput } from '@stageyard/libs/gear-geometry';
+import { InputError } from '@stageyard/libs/units';
 import type { PartAttributes } from './dto/attributes/part-attributes.js';
 import { ToothedAttributes } from './dto/attributes/toothed-attributes.js';
 import { isToothed, type PartKind } from './part-kinds.js';
@@ -9,7 +10,19 @@ import { isToothed, type PartKind } from './part-kinds.js';
  */
 export function toothedGeometry(kind: PartKind, attributes: PartAttributes): GearGeometry | null {
   if (!isToothed(kind)) return null;
-  return gearGeometry(toGearInput(attributes as ToothedAttributes), 'attributes');
+  try {
+    return gearGeometry(toGearInput(attributes as ToothedAttributes), 'attributes');
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    throw new InputError(error.errors.map((issue) => ({ ...issue, field: attributeOf(issue.field) })));
+  }
+}
+
+/** A part keeps its allowances as two attributes of their own. */
+function attributeOf(field: string): string {
+  return field
+    .replace('thicknessAllowance.upper', 'thicknessAllowanceUpper')
+    .replace('thicknessAllowance.lower', 'thicknessAllowanceLower');
 }
 
 /** The geometry library's input for a stored gear. */

@@ -19,7 +19,7 @@ beforeAll(async () => {
       number: `P-${String(index).padStart(2, '0')}`,
       description: index % 2 ? 'Winch gear' : 'Vent gear',
       mass: index % 7 ? 1 + (index % 5) : null,
-      attributes: { teeth: 12 + (index % 10), module: 1 + (index % 3) },
+      attributes: { teeth: 12 + (index % 10), module: 1 + (index % 3), bore: 6 },
     }),
   );
   await library.module.get(PartsLoader).createMany(LIBRARIAN, inputs);

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { ProblemError } from '../common/errors.js';
-import { LIBRARIAN, newGear } from '../testing/new-part.js';
+import { LIBRARIAN, newGear, newPart } from '../testing/new-part.js';
 import { openTempLibrary, type TempLibrary } from '../testing/temp-library.js';
 import { PartsReader } from './parts-reader.service.js';
 import { PartsService } from './parts.service.js';
@@ -85,6 +85,10 @@ describe('adding a part', () => {
     ['hand', { hand: 'left' }],
     ['profileShift', { teeth: 8, profileShift: 1.5 }],
     ['colour', { colour: 'green' }],
+    // m 2, z 24 has a root diameter of 2 · (24 − 2.5) = 43 mm.
+    ['bore', { bore: 43 }],
+    ['bore', { bore: 20, hubDiameter: 18 }],
+    ['thicknessAllowanceLower', { thicknessAllowanceUpper: -0.1, thicknessAllowanceLower: -0.05 }],
   ])('refuses attributes.%s of %o', async (field, attributes) => {
     const problem = await refusal(parts.create(LIBRARIAN, newGear({ attributes })));
     const fields = problem.errors?.map((issue) => issue.field) ?? [];
@@ -99,6 +103,18 @@ describe('adding a part', () => {
     };
     const problem = await refusal(parts.create(LIBRARIAN, seal));
     expect(problem.errors?.map((issue) => issue.field)).toEqual(['attributes.width']);
+  });
+});
+
+describe('sizes that contradict each other', () => {
+  it.each([
+    ['bore', 'bearing', { bore: 47, outerDiameter: 47, width: 14, type: 'deep groove ball' }],
+    ['shaftDiameter', 'seal', { shaftDiameter: 40, outerDiameter: 35, width: 7 }],
+    ['grooveDiameter', 'retaining-ring', { shaftDiameter: 20, thickness: 1.2, grooveDiameter: 21 }],
+    ['wall', 'housing', { length: 200, width: 100, height: 20, wall: 10 }],
+  ] as const)('name attributes.%s of a %s', async (field, kind, attributes) => {
+    const problem = await refusal(parts.create(LIBRARIAN, newPart(kind, attributes)));
+    expect(problem.errors?.map((issue) => issue.field)).toEqual([`attributes.${field}`]);
   });
 });
 

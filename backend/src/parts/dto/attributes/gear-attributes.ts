@@ -17,7 +17,7 @@ export class GearAttributes extends ToothedAttributes {
   hubDiameter: number | null = null;
 
   @FieldFigure({
-    description: 'Hub length beyond the face',
+    description: 'Length of the hub beyond the face width; the bore is as long as both together',
     unit: 'mm',
     min: 0,
     above: true,
