@@ -1,6 +1,6 @@
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
-import '../theme/fonts';
+import '../theme/fonts.css';
 import { App } from './App';
 
 const root = document.getElementById('root');
