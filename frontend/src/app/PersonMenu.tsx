@@ -59,7 +59,7 @@ export function PersonMenu() {
       <Menu anchorEl={anchor} open={anchor !== null} onClose={() => setAnchor(null)}>
         <Box sx={{ px: 1.5, py: 0.75 }} role="presentation">
           <Typography sx={{ fontWeight: 600 }}>{me.name}</Typography>
-          <Typography variant="body2" color="text.secondary">
+          <Typography variant="body2" color="textSecondary">
             {me.email} · {me.roles.join(', ')}
           </Typography>
         </Box>

@@ -18,7 +18,7 @@ export function EmptyState({ title, children, action }: EmptyStateProps) {
         {title}
       </Typography>
       {children !== undefined && (
-        <Typography component="div" color="text.secondary" sx={{ mb: action === undefined ? 0 : 1.5 }}>
+        <Typography component="div" color="textSecondary" sx={{ mb: action === undefined ? 0 : 1.5 }}>
           {children}
         </Typography>
       )}

@@ -21,7 +21,7 @@ export function ErrorState({ problem, onRetry, what = 'this page' }: ErrorStateP
       <Typography variant="h2" gutterBottom>
         {missing ? 'Not found' : `Could not load ${what}`}
       </Typography>
-      <Typography color="text.secondary" sx={{ mb: 1.5 }}>
+      <Typography color="textSecondary" sx={{ mb: 1.5 }}>
         {problem.message}
         {problem.requestId !== null && !missing && ` (request ${problem.requestId})`}
       </Typography>

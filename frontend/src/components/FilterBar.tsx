@@ -27,7 +27,7 @@ export function FilterBar({ children, filterCount, onClear, result, aside }: Fil
       )}
       <Box sx={{ ml: 'auto', display: 'flex', alignItems: 'center', gap: 1.5, minHeight: 34 }}>
         {result !== undefined && (
-          <Typography color="text.secondary" component="span" role="status">
+          <Typography color="textSecondary" component="span" role="status">
             {result}
           </Typography>
         )}

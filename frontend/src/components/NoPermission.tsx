@@ -8,7 +8,7 @@ export function NoPermission({ message }: { message?: string }) {
       <Typography variant="h2" gutterBottom>
         Your role does not include this
       </Typography>
-      <Typography color="text.secondary">
+      <Typography color="textSecondary">
         {message ?? 'An administrator can give you a role that does.'}
       </Typography>
     </Box>

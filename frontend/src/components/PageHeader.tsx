@@ -45,7 +45,7 @@ export function PageHeader({ title, code, facts, figure, actions }: PageHeaderPr
           </Box>
         </Typography>
         {facts !== undefined && (
-          <Typography component="div" color="text.secondary">
+          <Typography component="div" color="textSecondary">
             {facts}
           </Typography>
         )}

@@ -22,7 +22,7 @@ export function GeometryPanel({ live, bore, shiftUnknown }: GeometryPanelProps) 
     <Sheet title="Computed geometry" flush>
       <Box aria-live="polite" sx={{ pb: 1 }}>
         {live.kind === 'waiting' && (
-          <Typography color="text.secondary" sx={{ px: 1.75, pb: 1 }}>
+          <Typography color="textSecondary" sx={{ px: 1.75, pb: 1 }}>
             Give {live.missing.join(' and ')}, and the geometry appears here as you type.
           </Typography>
         )}
@@ -38,7 +38,7 @@ export function GeometryPanel({ live, bore, shiftUnknown }: GeometryPanelProps) 
             </Box>
             <GeometryTable geometry={live.geometry} module={live.gear.module} />
             {shiftUnknown && (
-              <Typography variant="body2" color="text.secondary" sx={{ px: 1.25, pt: 1 }}>
+              <Typography variant="body2" color="textSecondary" sx={{ px: 1.25, pt: 1 }}>
                 The maker gives no profile shift: 0 is taken.
               </Typography>
             )}

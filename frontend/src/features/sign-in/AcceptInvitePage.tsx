@@ -56,7 +56,7 @@ export default function AcceptInvitePage() {
   }
   return (
     <OpeningPage title="Set up your team">
-      <Typography color="text.secondary">
+      <Typography color="textSecondary">
         You become its first administrator and can add the others.
       </Typography>
       <Box component="form" noValidate onSubmit={(event) => void handleSubmit(accept)(event)} sx={formSx}>

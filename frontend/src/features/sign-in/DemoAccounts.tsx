@@ -28,7 +28,7 @@ export function DemoAccounts({ accounts, disabled, onChoose }: DemoAccountsProps
       <Typography variant="h2" id="demo">
         Try it with a demo account
       </Typography>
-      <Typography variant="body2" color="text.secondary" sx={{ mb: 1 }}>
+      <Typography variant="body2" color="textSecondary" sx={{ mb: 1 }}>
         Bracken Bay is an invented workshop; change what you like.
       </Typography>
       <Box component="ul" sx={{ listStyle: 'none', m: 0, p: 0 }}>

@@ -41,7 +41,7 @@ export function OpeningPage({ title, children }: { title: string; children: Reac
         <Typography sx={{ mt: 3, maxWidth: 470, fontSize: 17, lineHeight: 1.45, fontWeight: 500 }}>
           From a brief to a train that runs, fits and can be bought.
         </Typography>
-        <Typography color="text.secondary" sx={{ mt: 0.5, maxWidth: 470 }}>
+        <Typography color="textSecondary" sx={{ mt: 0.5, maxWidth: 470 }}>
           State the ratio, the room and the duty. See every sensible train to scale, one stage against
           several, and take the bill of materials to purchasing.
         </Typography>

@@ -87,7 +87,7 @@ export default function SignInPage() {
         />
       )}
       {welcome?.demo === false && (
-        <Typography variant="body2" color="text.secondary" sx={{ mt: 3 }}>
+        <Typography variant="body2" color="textSecondary" sx={{ mt: 3 }}>
           No account, or the password is lost? An administrator of your team can help.
         </Typography>
       )}
