@@ -8,7 +8,7 @@ import { openTempApp } from '../src/testing/temp-app.js';
 import { Client } from './client.js';
 import { ResponseChecker } from './response-checker.js';
 
-export { Client } from './client.js';
+export { type Answer, Client } from './client.js';
 export { ROLES, type Role };
 
 export interface TestServer {

@@ -21,9 +21,9 @@ export class OpeningService implements OnApplicationBootstrap {
     @Inject(SETTINGS) private readonly settings: Settings,
   ) {}
 
-  /** In demo mode an empty database gets the known accounts. */
+  /** In demo mode a database without the known accounts gets them. */
   async onApplicationBootstrap(): Promise<void> {
-    if (!this.settings.demo || (await this.users.count()) > 0) return;
+    if (!this.settings.demo || (await this.users.countBy({ demo: true })) > 0) return;
     const passwordHash = await hashPassword(DEMO_PASSWORD);
     await this.queue.run(async (manager) => {
       for (const { email, name, role } of DEMO_PEOPLE) {

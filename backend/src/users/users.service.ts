@@ -131,7 +131,7 @@ export class UsersService {
 
   private async keepAnAdmin(manager: EntityManager): Promise<void> {
     const active = await manager.findBy(UserEntity, { active: true });
-    if (active.some((user) => user.roles.includes('admin'))) return;
+    if (active.some((user) => user.roles.includes('admin') && this.sessions.mayUse(user))) return;
     const message = 'This is the last administrator. Make somebody else administrator first.';
     throw conflict('last-admin', message);
   }
