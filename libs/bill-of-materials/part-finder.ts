@@ -93,6 +93,7 @@ export interface PartGear {
   faceWidth: number;
   /** null for a pinion shaft. */
   bore: number | null;
+  /** Length of the bore, face width and hub together; the face width when left out. */
   hubLength?: number | null;
   thicknessAllowance: { upper: number; lower: number } | null;
 }

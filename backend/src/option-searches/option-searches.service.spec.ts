@@ -8,6 +8,7 @@ import { createApp } from '../app.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { impossibleRequirement, newBrief, newRequirement, slowRequirement } from '../testing/new-brief.js';
 import { addSignedIn } from '../testing/people.js';
+import { searchEnded } from '../testing/new-train.js';
 import { openTempApp, type TempApp } from '../testing/temp-app.js';
 import { tempSettings } from '../testing/temp-settings.js';
 import { type SearchDto } from './dto/search.dto.js';
@@ -28,13 +29,7 @@ beforeAll(async () => {
 });
 afterAll(() => temp.close());
 
-async function ended(id: string): Promise<SearchDto> {
-  for (;;) {
-    const search = await searches.get(id);
-    if (search.finishedAt !== null) return search;
-    await delay(20);
-  }
-}
+const ended = (id: string) => searchEnded(temp.app, id);
 
 async function running(id: string): Promise<SearchDto> {
   for (;;) {

@@ -36,7 +36,8 @@ function toPartGear(attributes: ToothedAttributes, bore: number | null): PartGea
     profileShift: attributes.profileShift,
     faceWidth: attributes.faceWidth,
     bore,
-    hubLength,
+    // The library states the hub beyond the face; a key may be as long as both together.
+    hubLength: hubLength === null ? null : attributes.faceWidth + hubLength,
     thicknessAllowance: upper === null || lower === null ? null : { upper, lower },
   };
 }

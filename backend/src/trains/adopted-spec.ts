@@ -10,7 +10,10 @@ export interface AdoptedStage extends SpecStage {
   wheel: AdoptedGear;
 }
 
-/** Where a shaft's diameter comes from: its torque, a stock gear's bore, the house's starting figure, or a person. */
+/**
+ * Where a shaft's diameter comes from: its torque (raised to the next bearing bore), a stock gear's bore, the house's
+ * starting figure, or a person.
+ */
 export const DIAMETER_BASES = ['torque', 'bore', 'start', 'typed'] as const;
 export type DiameterBasis = (typeof DIAMETER_BASES)[number];
 

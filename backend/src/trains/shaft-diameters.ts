@@ -1,4 +1,4 @@
-import { parallelKeyForBore } from '@stageyard/libs/bill-of-materials';
+import { bearingBoreFor, parallelKeyForBore } from '@stageyard/libs/bill-of-materials';
 import { gearGeometry } from '@stageyard/libs/gear-geometry';
 import { type AdoptedShaft, type AdoptedSpec, gearsOnShaft, type PlacedGear } from './adopted-spec.js';
 
@@ -16,9 +16,9 @@ export interface ShaftDemand {
 }
 
 /**
- * A diameter for every shaft, in whole mm unless a stock bore says otherwise: the torque's least diameter, raised to
- * the smallest bore of the stock gears on the shaft where that is larger; without a torque that bore; else the
- * starting figure. Never more than fits inside the roots of the gears on the shaft.
+ * A diameter for every shaft: the smallest bore of the stock gears on it where the torque allows that; else the
+ * torque's least diameter raised to the next bearing bore (ISO 15), so that bearings, rings and seals can be bought;
+ * else the starting figure. Where the roots of the gears leave less room, what fits in whole mm.
  * @param demands one a shaft, in order
  */
 export function chooseShaftDiameters(
@@ -40,10 +40,11 @@ export function chooseShaftDiameters(
 
 function wishedDiameter({ leastDiameter, bores }: ShaftDemand): AdoptedShaft {
   const bore = bores.length > 0 ? Math.min(...bores) : null;
-  if (leastDiameter !== null && (bore === null || leastDiameter >= bore)) {
-    return { diameter: leastDiameter, basis: 'torque' };
+  if (bore !== null && (leastDiameter === null || bore >= leastDiameter))
+    return { diameter: bore, basis: 'bore' };
+  if (leastDiameter !== null) {
+    return { diameter: bearingBoreFor(leastDiameter) ?? leastDiameter, basis: 'torque' };
   }
-  if (bore !== null) return { diameter: bore, basis: 'bore' };
   return { diameter: STARTING_DIAMETER, basis: 'start' };
 }
 

@@ -64,7 +64,8 @@ export class SpecShaftDto {
   @ApiProperty({
     enum: DIAMETER_BASES,
     enumName: 'DiameterBasis',
-    description: 'Where the diameter comes from: torque, a stock bore, the starting figure, or a person',
+    description:
+      'Where the diameter comes from: the torque (raised to the next bearing bore where it fits), a stock bore, the starting figure, or a person',
   })
   basis!: DiameterBasis;
 }
