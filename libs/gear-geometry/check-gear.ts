@@ -12,12 +12,8 @@ import { degToRad } from '../units/index.js';
 export function checkGear(input: unknown, path: string, checks: FieldChecks): ResolvedGear | null {
   const before = checks.issues.length;
   if (!isRecord(input)) {
-    checks.refuse(
-      path || 'gear',
-      input,
-      titled(path, 'gear'),
-      'is not a gear. Give at least teeth and module.',
-    );
+    const mend = `is ${input === undefined || input === null ? 'missing' : 'not a gear'}. Give at least teeth and module.`;
+    checks.refuse(path || 'gear', input, titled('', path || 'gear'), mend);
     return null;
   }
   const at = (field: string) => (path === '' ? field : `${path}.${field}`);

@@ -1,7 +1,7 @@
 import { involute } from './involute.js';
 import { UNDERCUT_SLACK } from './limits.js';
 import { resolveGear } from './resolve.js';
-import { formReach } from './trochoid.js';
+import { filletEndEps, formReach } from './trochoid.js';
 import { type GearFigures, type GearInput, type RackTip, type ResolvedGear } from './types.js';
 
 /**
@@ -23,7 +23,8 @@ export function figuresOf(gear: ResolvedGear): GearFigures {
   const leastShift = leastShiftWithoutUndercut(gear);
   const undercut = gear.effectiveShift < leastShift - UNDERCUT_SLACK;
   const rackTip = rackTipOf(gear, reference, base, leastShift);
-  const reach = formReach(rackTip, undercut);
+  const filletEnd = filletEndEps(rackTip, undercut);
+  const reach = formReach(rackTip, filletEnd);
   return {
     teeth: gear.teeth,
     module: m,
@@ -39,6 +40,7 @@ export function figuresOf(gear: ResolvedGear): GearFigures {
     undercut,
     leastShift,
     rackTip,
+    filletEnd,
   };
 }
 

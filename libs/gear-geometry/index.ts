@@ -17,6 +17,7 @@ export { meshInterferes } from './tip-corner.js';
 export { assertMeshable, huntingTooth, type HuntingTooth } from './pair.js';
 export {
   SHIFT_POLICIES,
+  leastClearShift,
   shiftForPolicy,
   type ShiftInput,
   type ShiftPolicy,

@@ -2,7 +2,7 @@ import { FieldChecks } from './check-fields.js';
 import { checkGear } from './check-gear.js';
 import { figuresOf } from './gear-radii.js';
 import { involute, involuteOfTangent } from './involute.js';
-import { deepestEps, filletRadius, filletTurn, undercutEps } from './trochoid.js';
+import { deepestEps, filletRadius, filletTurn } from './trochoid.js';
 import { type GearFigures, type GearInput, type ResolvedGear } from './types.js';
 
 /** A point in the transverse plane, mm, y upwards. */
@@ -66,7 +66,7 @@ function flankPoints(gear: ResolvedGear, figures: GearFigures, count: number): F
   });
   const deepest = deepestEps(tip);
   const involuteLeft = figures.formReach < figures.tipReach;
-  const last = involuteLeft ? (figures.undercut ? undercutEps(tip) : 0) : epsAtRadius(figures);
+  const last = involuteLeft ? figures.filletEnd : epsAtRadius(figures);
   const onFillet = Math.max(2, Math.floor(count / 2));
   const onInvolute = Math.max(2, count - onFillet);
   const points: FlankPoint[] = [];

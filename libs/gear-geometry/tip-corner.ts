@@ -1,6 +1,6 @@
 import { involuteOfTangent } from './involute.js';
 import { CORNER_BITE_LIMIT, INTERFERENCE_SLACK } from './limits.js';
-import { deepestEps, filletRadius, filletTurn, undercutEps } from './trochoid.js';
+import { deepestEps, filletRadius, filletTurn } from './trochoid.js';
 import { type GearFigures, type RackTip } from './types.js';
 
 /** How one gear's root takes the mate's tip. */
@@ -34,8 +34,7 @@ export function meshInterferes(pinion: GearFigures, wheel: GearFigures, a: numbe
 export function cornerBite(gear: GearFigures, mate: GearFigures, a: number): number {
   const path = cornerPath(gear, mate, a);
   const tip = gear.rackTip;
-  const start = gear.undercut ? undercutEps(tip) : 0;
-  const onFillet = greatest(start, deepestEps(tip), (eps) => filletBite(path, tip, eps));
+  const onFillet = greatest(gear.filletEnd, deepestEps(tip), (eps) => filletBite(path, tip, eps));
   const lowest = Math.max(gear.form, path.closest);
   if (lowest >= gear.tip) return onFillet;
   const onInvolute = greatest(lowest, gear.tip, (radius) => involuteBite(path, gear.base, radius));

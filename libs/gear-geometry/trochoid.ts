@@ -77,8 +77,12 @@ function epsAtBaseCircle(tip: RackTip): number {
   return low;
 }
 
-/** ε where the fillet of an undercut gear crosses the involute. */
-export function undercutEps(tip: RackTip): number {
+/**
+ * ε where the fillet gives way to the involute: at the end of the straight flank (0), or, undercut, where the
+ * trochoid of the rack's tip rounding crosses the involute.
+ */
+export function filletEndEps(tip: RackTip, undercut: boolean): number {
+  if (!undercut) return 0;
   let low = 0;
   let high = epsAtBaseCircle(tip);
   for (let step = 0; step < 60; step++) {
@@ -91,11 +95,8 @@ export function undercutEps(tip: RackTip): number {
   return (low + high) / 2;
 }
 
-/**
- * c = √(r_F² − r_b²) in mm, where the usable involute begins: at the end of the straight flank, or, undercut,
- * where the trochoid of the rack's tip rounding crosses the involute.
- */
-export function formReach(tip: RackTip, undercut: boolean): number {
-  if (!undercut) return Math.max(0, tip.endReach);
-  return Math.sqrt(Math.max(0, filletReachSquared(tip, undercutEps(tip))));
+/** c = √(r_F² − r_b²) in mm, the tangent length at the ε where the usable involute begins. */
+export function formReach(tip: RackTip, endEps: number): number {
+  if (endEps === 0) return Math.max(0, tip.endReach);
+  return Math.sqrt(Math.max(0, filletReachSquared(tip, endEps)));
 }

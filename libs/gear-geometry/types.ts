@@ -104,6 +104,8 @@ export interface GearFigures extends GearRadii {
   /** Least shift without undercut x_min, modules. */
   leastShift: number;
   rackTip: RackTip;
+  /** Angle on the rack's rounding where the fillet gives way to the involute, radians from the flank's end. */
+  filletEnd: number;
 }
 
 /** Limits on a pair that a brief may set apart from the house rules. */
