@@ -25,7 +25,8 @@ export function checkAttributes(kind: PartKind, raw: object): PartAttributes {
   if (attributes instanceof ToothedAttributes) checkHand(attributes);
   const wrong = contradictions(kind, attributes, toothedGeometry(kind, attributes));
   if (wrong.length > 0) throw badInput(wrong);
-  return attributes;
+  // A plain object, as it comes back from the database, so that the two can be compared.
+  return { ...attributes };
 }
 
 /** A helical gear has a hand, a spur gear has none. */

@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from 'node:util';
 import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js';
 import { type Part } from './entities/part.entity.js';
 
@@ -15,7 +16,7 @@ interface PartChange {
 export function partChange(before: Part, after: Part): PartChange {
   const [old, now] = [toPartSummaryDto(before), toPartSummaryDto(after)];
   const fields = (Object.keys(now) as (keyof PartSummaryDto)[]).filter(
-    (field) => !OF_EVERY_EDIT.has(field) && JSON.stringify(old[field]) !== JSON.stringify(now[field]),
+    (field) => !OF_EVERY_EDIT.has(field) && !isDeepStrictEqual(old[field], now[field]),
   );
   const only = (part: PartSummaryDto): Partial<PartSummaryDto> =>
     Object.fromEntries(fields.map((field) => [field, part[field]]));

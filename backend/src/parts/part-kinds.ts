@@ -24,9 +24,6 @@ export type PartSupply = (typeof PART_SUPPLIES)[number];
 export const HANDS = ['left', 'right'] as const;
 export type Hand = (typeof HANDS)[number];
 
-/** Pressure angles that the house cuts, degrees. */
-export const PRESSURE_ANGLES = [14.5, 15, 17.5, 20, 22.5, 25] as const;
-
 /** Kinds with teeth, whose geometry is computed and whose figures can be filtered. */
 export function isToothed(kind: PartKind): kind is 'gear' | 'pinion-shaft' {
   return kind === 'gear' || kind === 'pinion-shaft';

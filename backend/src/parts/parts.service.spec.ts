@@ -194,6 +194,15 @@ describe('changing a part', () => {
     expect(problem.errors?.[0]?.field).toBe('successorNumber');
   });
 
+  it('neither counts nor records an edit that changes nothing', async () => {
+    const part = await parts.create(LIBRARIAN, newGear());
+    const { description, mass } = part;
+    const attributes = Object.fromEntries(Object.entries(part.attributes).reverse());
+    const same = { version: 1, description, mass, attributes };
+    expect(await parts.update(LIBRARIAN, part.number, same)).toEqual(part);
+    expect((await reader.changes(part.number, {})).total).toBe(1);
+  });
+
   it('keeps nothing of a refused edit', async () => {
     const { number } = await parts.create(LIBRARIAN, newGear());
     const attributes = { ...newGear().attributes, teeth: 2 };

@@ -90,6 +90,8 @@ export class PartsService {
         // A stale edit is told so first: its other faults may come from what the person could not see.
         if (before.version !== patch.version) throw new ChangedMeanwhileError(toPartDto(before));
         const change = await this.changedColumns(manager, before, patch);
+        // Nothing changed: nothing to count up or to put on record.
+        if (partChange(before, { ...before, ...change }).fields.length === 0) return before;
         const after = await updateVersioned(
           manager,
           Part,
@@ -132,7 +134,7 @@ export class PartsService {
     const successor = after.successorNumber ? `, use ${after.successorNumber} instead` : '';
     const summary =
       action === 'changed'
-        ? `Changed ${fields.join(', ') || 'nothing'} of ${after.number}`
+        ? `Changed ${fields.join(', ')} of ${after.number}`
         : `${action.charAt(0).toUpperCase()}${action.slice(1)} ${after.number}${successor}`;
     await this.audit.record(manager, {
       actor,

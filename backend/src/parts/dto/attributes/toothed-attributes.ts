@@ -1,7 +1,8 @@
+import { PRESSURE_ANGLES_DEG } from '@stageyard/libs/gear-geometry';
 import { FieldChoice } from '../../../common/field-choice.decorator.js';
 import { FieldFigure } from '../../../common/field-figure.decorator.js';
 import { FieldText } from '../../../common/field-text.decorator.js';
-import { HANDS, PRESSURE_ANGLES, type Hand } from '../../part-kinds.js';
+import { HANDS, type Hand } from '../../part-kinds.js';
 
 /** What every part with teeth states; the tip, root and form diameters follow from it and are computed. */
 export abstract class ToothedAttributes {
@@ -13,7 +14,7 @@ export abstract class ToothedAttributes {
 
   @FieldChoice({
     description: 'Normal pressure angle (degrees); 20 when left out',
-    values: PRESSURE_ANGLES,
+    values: PRESSURE_ANGLES_DEG,
     optional: true,
     default: 20,
   })
