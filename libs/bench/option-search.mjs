@@ -4,7 +4,7 @@ import { StagePairs } from '../dist/train-planner/stage-pairs.js';
 import { TrainSearch } from '../dist/train-planner/train-search.js';
 import { WorkWatch } from '../dist/train-planner/work-watch.js';
 import { chosenRows, highsModel } from './highs-model.mjs';
-import { plainLoops } from './plain-loops.mjs';
+import { plainLoops, withinByFloats, withinExactly } from './plain-loops.mjs';
 import { inMs, printTable, shortest, times } from './timing.mjs';
 
 /** Pinions 12–24 with wheels 24–60: at most 500 pairs a stage. */
@@ -38,8 +38,12 @@ export async function benchOptionSearch() {
       });
     const [one, fifty] = [ours(1), ours(50)];
     const whole = shortest(() => searchOptions(request));
-    const loops = shortest(() => plainLoops(pool, stages, window, 50), { budgetMs: 1500, least: 2 });
-    const sameFifty = loops.result.every((train, index) => train.cost === fifty.result[index].cost);
+    const floats = withinByFloats(pool, window);
+    const loops = shortest(() => plainLoops(pool, stages, window.target, floats, 50), { budgetMs: 1500 });
+    const exact = withinExactly(pool, Number(target), 1);
+    const exactLoops = shortest(() => plainLoops(pool, stages, window.target, exact, 50), { least: 1 });
+    const same = (found) => found.every((train, index) => train.cost === fifty.result[index].cost);
+    const sameFifty = same(loops.result) && same(exactLoops.result);
 
     const model = highsModel(pool, stages, window);
     const options = {
@@ -65,10 +69,16 @@ export async function benchOptionSearch() {
       ['option search, best 50', inMs(fifty.ms), '', ''],
       ['whole request, best 50, pairs and figures included', inMs(whole.ms), '', ''],
       [
-        'plain nested loops, best 50',
+        'plain nested loops, floats, best 50',
         inMs(loops.ms),
         `${times(loops.ms / fifty.ms)} (goal 50 ×)`,
-        sameFifty ? 'yes, all 50' : 'NO',
+        same(loops.result) ? 'yes, all 50' : 'NO',
+      ],
+      [
+        'plain nested loops, exact fractions, best 50',
+        inMs(exactLoops.ms),
+        `${times(exactLoops.ms / fifty.ms)} (goal 50 ×)`,
+        same(exactLoops.result) ? 'yes, all 50' : 'NO',
       ],
       [
         `HiGHS, best 1 (${peer.result.Status})`,

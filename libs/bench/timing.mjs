@@ -1,5 +1,5 @@
 /** Runs `work` until `budgetMs` is used (at least `least` times) and gives the shortest time in ms and the last result. */
-export function shortest(work, { budgetMs = 400, least = 3 } = {}) {
+export function shortest(work, { budgetMs = 1000, least = 3 } = {}) {
   let best = Infinity;
   let result;
   const end = performance.now() + budgetMs;

@@ -1,6 +1,7 @@
 import { type BestList } from './best-list.js';
 import { RatioBounds } from './ratio-bounds.js';
 import { countTrains, distanceLimit, TrainIntake, type SearchSpace } from './search-space.js';
+import { sortedOrder } from './sorted-order.js';
 import { firstAbove, firstNotBelow, RangeLeast } from './sorted-search.js';
 import { type WorkWatch } from './work-watch.js';
 
@@ -13,7 +14,29 @@ const WIDER = 1 + 1e-14;
  * length. Ties are always followed, so the outcome is exact.
  */
 export function searchByCost(space: SearchSpace, best: BestList, watch: WorkWatch): void {
-  if (space.pool.length > 0) new CostSearch(space, best, watch).run();
+  if (space.pool.length === 0) return;
+  if (space.stages === 1) settleOneStage(space, best, watch);
+  else new CostSearch(space, best, watch).run();
+}
+
+/** A single stage needs no bounds: every pair inside the ratio window is looked at. */
+function settleOneStage(space: SearchSpace, best: BestList, watch: WorkWatch): void {
+  const { pool, window } = space;
+  const intake = new TrainIntake(space, best);
+  const cost = costColumn(space);
+  const start = firstNotBelow(pool.ratio, window.low / WIDER, 0, pool.length);
+  const end = firstAbove(pool.ratio, window.high * WIDER, start, pool.length);
+  for (let row = start; row < end; row++) {
+    watch.step();
+    if ((cost[row] as number) > best.costLimit) continue;
+    const n = pool.wheel[row] as number;
+    const d = pool.pinion[row] as number;
+    if (window.contains(n, d)) intake.take([row], cost[row] as number, pool.distance[row] as number, n, d);
+  }
+}
+
+function costColumn({ pool, objective }: SearchSpace): Float64Array {
+  return objective === 'mass' ? pool.mass : pool.distance;
 }
 
 class CostSearch {
@@ -39,47 +62,52 @@ class CostSearch {
     this.#best = best;
     this.#watch = watch;
     this.#intake = new TrainIntake(space, best);
-    this.#cost = space.objective === 'mass' ? pool.mass : pool.distance;
-    this.#least = new RangeLeast(this.#cost);
+    this.#cost = costColumn(space);
+    this.#least = new RangeLeast(this.#cost, () => watch.look());
     this.#costBounds = new RatioBounds(pool.ratio, this.#cost, window.low, window.high);
+    watch.look();
     this.#distanceLimit = distanceLimit(space);
     this.#distanceBounds =
       this.#distanceLimit === Infinity
         ? null
         : new RatioBounds(pool.ratio, pool.distance, window.low, window.high);
+    watch.look();
     this.#logs = pool.ratio.map(Math.log);
+    watch.look();
     this.#logLow = Math.log(window.low);
     this.#pending = Array.from({ length: stages }, () => []);
   }
 
   run(): void {
-    const { pool, stages, ordered } = this.#space;
-    if (stages === 1) {
-      this.#visitLast(0, pool.length, 0, 0, 1, 1);
-    } else {
-      for (const { row, bound } of this.#firstStages()) {
-        if (bound > this.#best.costLimit) break;
-        this.#choose(0, row, 0, 0, 1, 1);
-        const before = countTrains(row, stages, ordered);
-        this.#watch.settled += countTrains(row + 1, stages, ordered) - before;
-      }
+    const { stages, ordered } = this.#space;
+    const { rows, bounds, order } = this.#firstStages();
+    for (const place of order) {
+      if ((bounds[place] as number) > this.#best.costLimit) break;
+      const row = rows[place] as number;
+      this.#choose(0, row, 0, 0, 1, 1);
+      const before = countTrains(row, stages, ordered);
+      this.#watch.settled += countTrains(row + 1, stages, ordered) - before;
     }
   }
 
-  /** First stages that may lead to a train, the most promising first. */
-  #firstStages(): { row: number; bound: number }[] {
-    const { stages, window } = this.#space;
+  /** First stages that may lead to a train, with a lower bound of its cost; the most promising first. */
+  #firstStages(): { rows: number[]; bounds: number[]; order: Uint32Array } {
+    const { stages, window, pool } = this.#space;
     const rest = stages - 1 === 1 ? 1 : 2;
-    const found: { row: number; bound: number }[] = [];
-    for (let row = 0; row < this.#logs.length; row++) {
-      const ratio = this.#space.pool.ratio[row] as number;
-      // No later stage has a larger ratio than the first.
-      if (ratio ** stages * WIDER < window.low) continue;
+    const rows: number[] = [];
+    const bounds: number[] = [];
+    // No later stage has a larger ratio than the first.
+    const smallest = window.low ** (1 / stages) / WIDER;
+    for (let row = pool.length - 1; row >= 0 && (pool.ratio[row] as number) >= smallest; row--) {
+      this.#watch.step();
       const missing = this.#logLow - (this.#logs[row] as number);
       const bound = (this.#cost[row] as number) + this.#costBounds.least(rest, missing);
-      if (bound < Infinity) found.push({ row, bound });
+      if (bound === Infinity) continue;
+      rows.push(row);
+      bounds.push(bound);
     }
-    return found.sort((a, b) => a.bound - b.bound || b.row - a.row);
+    const byBound = (a: number, b: number) => (bounds[a] as number) - (bounds[b] as number);
+    return { rows, bounds, order: sortedOrder(rows.length, byBound, () => this.#watch.step()) };
   }
 
   /** Takes `row` as stage `level` and goes on to the stages after it. */

@@ -1,3 +1,5 @@
+import { sortedOrder } from './sorted-order.js';
+
 /**
  * Pinion-and-wheel pairs that may serve as a stage, as columns. Rows are sorted by rising ratio and, within one
  * ratio, by falling pinion teeth: read backwards this is "larger ratio first, equal ratios smaller pinion first".
@@ -47,19 +49,29 @@ export class PairPoolBuilder {
     for (const name of COLUMNS) this.#floats[name].push(row[name]);
   }
 
-  build(): PairPool {
+  /** @param step called as the rows are sorted */
+  build(step: () => void): PairPool {
     const pinion = this.#pinion;
     const wheel = this.#wheel;
-    const order = Uint32Array.from(pinion, (_teeth, index) => index).sort((a, b) => {
-      const [pinionA, pinionB] = [pinion[a] as number, pinion[b] as number];
+    const byRatio = (a: number, b: number) => {
+      const pinionA = pinion[a] as number;
+      const pinionB = pinion[b] as number;
       return (wheel[a] as number) * pinionB - (wheel[b] as number) * pinionA || pinionB - pinionA;
-    });
-    const sorted = (from: number[]) => Float64Array.from(order, (index) => from[index] as number);
-    const columns = COLUMNS.map((name) => [name, sorted(this.#floats[name])] as const);
+    };
+    const order = sortedOrder(pinion.length, byRatio, step);
+    // Plain loops: `from` with a function is many times slower on large typed arrays.
+    const sorted = <T extends Float64Array | Int32Array>(from: number[], to: T): T => {
+      step();
+      for (let place = 0; place < order.length; place++) to[place] = from[order[place] as number] as number;
+      return to;
+    };
+    const columns = COLUMNS.map(
+      (name) => [name, sorted(this.#floats[name], new Float64Array(order.length))] as const,
+    );
     return {
       length: order.length,
-      pinion: Int32Array.from(order, (index) => pinion[index] as number),
-      wheel: Int32Array.from(order, (index) => wheel[index] as number),
+      pinion: sorted(pinion, new Int32Array(order.length)),
+      wheel: sorted(wheel, new Int32Array(order.length)),
       ...(Object.fromEntries(columns) as Record<FloatColumn, Float64Array>),
     };
   }

@@ -9,27 +9,33 @@ export interface RatioGroups {
   readonly leastDistance: Float64Array;
 }
 
-export function groupByRatio(pool: PairPool): RatioGroups {
-  const starts: number[] = [];
+/** @param step called once a row */
+export function groupByRatio(pool: PairPool, step: () => void): RatioGroups {
+  const { pinion, wheel, distance } = pool;
+  const start = new Int32Array(pool.length + 1);
+  const ratio = new Float64Array(pool.length);
+  const leastDistance = new Float64Array(pool.length).fill(Infinity);
+  let length = 0;
   for (let row = 0; row < pool.length; row++) {
-    const previous = row - 1;
+    step();
+    const before = row - 1;
     const same =
       row > 0 &&
-      (pool.wheel[row] as number) * (pool.pinion[previous] as number) ===
-        (pool.wheel[previous] as number) * (pool.pinion[row] as number);
-    if (!same) starts.push(row);
+      (wheel[row] as number) * (pinion[before] as number) ===
+        (wheel[before] as number) * (pinion[row] as number);
+    if (!same) {
+      start[length] = row;
+      ratio[length] = pool.ratio[row] as number;
+      length++;
+    }
+    const group = length - 1;
+    leastDistance[group] = Math.min(leastDistance[group] as number, distance[row] as number);
   }
-  const ends = [...starts.slice(1), pool.length];
+  start[length] = pool.length;
   return {
-    length: starts.length,
-    start: Int32Array.from([...starts, pool.length]),
-    ratio: Float64Array.from(starts, (row) => pool.ratio[row] as number),
-    leastDistance: Float64Array.from(starts, (row, group) => {
-      let least = Infinity;
-      for (let index = row; index < (ends[group] as number); index++) {
-        least = Math.min(least, pool.distance[index] as number);
-      }
-      return least;
-    }),
+    length,
+    start,
+    ratio: ratio.subarray(0, length),
+    leastDistance: leastDistance.subarray(0, length),
   };
 }

@@ -31,7 +31,7 @@ class RatioSearch {
     this.#best = best;
     this.#watch = watch;
     this.#intake = new TrainIntake(space, best);
-    this.#groups = groupByRatio(space.pool);
+    this.#groups = groupByRatio(space.pool, () => watch.step());
     this.#distanceLimit = distanceLimit(space);
     this.#leastOfAll = this.#groups.leastDistance.reduce((least, value) => Math.min(least, value), Infinity);
   }

@@ -27,9 +27,12 @@ export class RangeLeast {
   readonly #values: Float64Array;
   readonly #levels: Int32Array[];
 
-  constructor(values: Float64Array) {
+  /** @param step called once for each level of the table */
+  constructor(values: Float64Array, step: () => void = () => undefined) {
     this.#values = values;
-    this.#levels = [Int32Array.from(values, (_value, index) => index)];
+    const single = new Int32Array(values.length);
+    for (let index = 0; index < single.length; index++) single[index] = index;
+    this.#levels = [single];
     for (let width = 2; width <= values.length; width *= 2) {
       const below = this.#levels[this.#levels.length - 1] as Int32Array;
       const level = new Int32Array(values.length - width + 1);
@@ -37,6 +40,7 @@ export class RangeLeast {
         level[start] = this.#lower(below[start] as number, below[start + width / 2] as number);
       }
       this.#levels.push(level);
+      step();
     }
   }
 

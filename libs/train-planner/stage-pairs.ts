@@ -62,17 +62,18 @@ export class StagePairs {
    */
   within(limits: StageLimits, { least, greatest } = ANY_RATIO): PairPool {
     const builder = new PairPoolBuilder();
-    if (least > greatest) return builder.build();
+    const step = () => this.#watch.step();
+    if (least > greatest) return builder.build(step);
     const wheels = this.#gearsWithin(limits.wheel, limits);
     for (const pinion of this.#gearsWithin(limits.pinion, limits)) {
       for (const wheel of wheels) {
         const ratio = wheel.teeth / pinion.teeth;
         if (ratio < least || ratio > greatest) continue;
-        this.#watch.step();
+        step();
         this.#addPair(pinion, wheel, limits, builder);
       }
     }
-    return builder.build();
+    return builder.build(step);
   }
 
   #gearsWithin({ min, max }: { min: number; max: number }, limits: StageLimits): StageGear[] {
