@@ -42,7 +42,7 @@ export function BriefFacts({ brief }: { brief: Brief }) {
               borderColor: 'line.rule',
             }}
           >
-            <Typography component="dt" variant="body2" color="text.secondary">
+            <Typography component="dt" variant="body2" color="textSecondary">
               {name}
             </Typography>
             <Typography component="dd" variant="body2" sx={{ m: 0, textAlign: 'right' }}>
@@ -51,7 +51,7 @@ export function BriefFacts({ brief }: { brief: Brief }) {
           </Box>
         ))}
       </Box>
-      <Typography variant="body2" color="text.secondary" sx={{ mt: 1 }}>
+      <Typography variant="body2" color="textSecondary" sx={{ mt: 1 }}>
         Version {brief.version}, saved {formatWhen(brief.updatedAt)}. Strength is not rated yet; the duty only
         sizes the shafts.
       </Typography>

@@ -1,6 +1,7 @@
 import Button from '@mui/material/Button';
 import FormControlLabel from '@mui/material/FormControlLabel';
 import Switch from '@mui/material/Switch';
+import useMediaQuery from '@mui/material/useMediaQuery';
 import type { GridColDef } from '@mui/x-data-grid';
 import { Link, useNavigate } from 'react-router-dom';
 import { useBriefs } from '../../api/hooks/useBriefs';
@@ -25,66 +26,55 @@ const STANDING_WORDS: Record<BriefSummary['standing'], string> = {
   adopted: 'adopted',
 };
 
+const right = { align: 'right', headerAlign: 'right' } as const;
+
 const COLUMNS: GridColDef<BriefSummary>[] = [
-  { field: 'code', headerName: 'Brief', width: 84, cellClassName: 'part-number' },
-  { field: 'title', headerName: 'Title', flex: 2, minWidth: 200 },
+  { field: 'code', headerName: 'Brief', width: 80, cellClassName: 'part-number' },
+  { field: 'title', headerName: 'Title', flex: 1, minWidth: 180 },
   {
     field: 'ratioTarget',
     headerName: 'Ratio',
-    width: 100,
-    align: 'right',
-    headerAlign: 'right',
+    width: 136,
+    ...right,
     sortable: false,
-    valueGetter: (_, { ratioTarget }) => `${ratioTarget} : 1`,
-  },
-  {
-    field: 'tolerancePercent',
-    headerName: 'Tolerance %',
-    width: 104,
-    align: 'right',
-    headerAlign: 'right',
-    sortable: false,
+    valueGetter: (_, row) => `${row.ratioTarget} : 1 ± ${row.tolerancePercent} %`,
   },
   {
     field: 'stages',
     headerName: 'Stages',
-    width: 76,
-    align: 'right',
-    headerAlign: 'right',
+    width: 72,
+    ...right,
     sortable: false,
     valueGetter: (_, { stages }) => (stages.min === stages.max ? stages.min : `${stages.min}–${stages.max}`),
   },
   {
     field: 'objective',
     headerName: 'Best by',
-    width: 160,
+    width: 150,
     sortable: false,
     valueGetter: (_, { objective }) => OBJECTIVE_WORDS[objective],
   },
-  {
-    field: 'standing',
-    headerName: 'Standing',
-    width: 130,
-    valueGetter: (_, row) => standingWords(row),
-  },
+  { field: 'standing', headerName: 'Standing', width: 112, valueGetter: (_, row) => standingWords(row) },
   {
     field: 'pinCount',
     headerName: 'Pinned',
-    width: 76,
-    align: 'right',
-    headerAlign: 'right',
+    width: 70,
+    ...right,
     sortable: false,
+    valueFormatter: (count: number) => (count === 0 ? '' : String(count)),
   },
-  { field: 'owner', headerName: 'Owner', width: 140 },
+  { field: 'owner', headerName: 'Owner', width: 120 },
   {
     field: 'updatedAt',
     headerName: 'Changed',
     width: 110,
-    align: 'right',
-    headerAlign: 'right',
+    ...right,
     valueFormatter: (iso: string) => formatDay(iso),
   },
 ];
+
+/** Left out where the screen is a phone's. */
+const NARROW = { stages: false, objective: false, pinCount: false, owner: false, updatedAt: false };
 
 function standingWords({ standing, latestSearch }: BriefSummary): string {
   if (latestSearch?.state === 'running' || latestSearch?.state === 'queued') return 'searching';
@@ -105,6 +95,7 @@ export default function BriefsPage() {
     ...(text ? { text } : {}),
     ...(mine ? { mine: true } : {}),
   });
+  const narrow = useMediaQuery('(max-width: 600px)');
   const newBrief = can('briefs.edit') && (
     <Button variant="contained" component={Link} to="/briefs/new">
       New brief
@@ -142,6 +133,7 @@ export default function BriefsPage() {
       <DataTable
         label="Briefs"
         columns={COLUMNS}
+        hidden={narrow ? NARROW : undefined}
         rows={data?.items}
         total={data?.total}
         getRowId={(row) => row.id}

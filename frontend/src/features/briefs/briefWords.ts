@@ -31,7 +31,7 @@ function insideWords(envelope: Requirement['envelope']): string | null {
 }
 
 function contactWords({ leastContactRatio = 1.2, centreDistanceAllowance = 0 }: Requirement): string {
-  const least = `contact ratio ≥ ${leastContactRatio.toFixed(2)}`;
+  const least = `contact ratio at least ${leastContactRatio.toFixed(2)}`;
   return centreDistanceAllowance === 0
     ? least
     : `${least} at +${formatTrimmed(centreDistanceAllowance, 4)} m`;

@@ -46,7 +46,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
         <TableHead>
           <TableRow>
             <TableCell sx={{ verticalAlign: 'bottom', minWidth: 168 }}>
-              <Typography variant="body2" color="text.secondary">
+              <Typography variant="body2" color="textSecondary">
                 All drawn on one scale
               </Typography>
             </TableCell>
@@ -58,7 +58,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
                 <Typography variant="h2" component="p" sx={{ color: 'text.primary' }}>
                   {teethWords(pin.option.stages)}
                 </Typography>
-                <Typography variant="body2" color="text.secondary">
+                <Typography variant="body2" color="textSecondary">
                   {stageCountWords(pin.option.stages.length)}, {moduleWords(pin.option.stages)}
                 </Typography>
                 {(onAdopt || onUnpin) && (

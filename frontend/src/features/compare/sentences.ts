@@ -12,8 +12,7 @@ export function fewerAgainstMore(options: readonly TrainOption[], whyNot: readon
   const [fewest, ...others] = byCount;
   if (!fewest) return sentences;
   const missingOne = whyNot.find(({ stages }) => stages === 1);
-  if (fewest.stages.length > 1 && missingOne)
-    sentences.push(`One stage is out: ${lowerFirst(missingOne.message)}`);
+  if (fewest.stages.length > 1 && missingOne) sentences.push(missingOne.message);
   for (const other of others) sentences.push(held(other, fewest));
   if (others.length === 0 && options.length > 1) {
     sentences.push(
@@ -61,5 +60,3 @@ function change(value: number, reference: number, what: string, decimals: number
 function joined(parts: readonly string[]): string {
   return parts.length < 2 ? parts.join('') : `${parts.slice(0, -1).join(', ')} and ${parts.at(-1)}`;
 }
-
-const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);

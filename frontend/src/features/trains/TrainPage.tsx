@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import MuiLink from '@mui/material/Link';
 import Tab from '@mui/material/Tab';
 import Tabs from '@mui/material/Tabs';
 import { Link, useParams, useSearchParams } from 'react-router-dom';
@@ -47,9 +48,9 @@ function TrainInTabs({ train }: { train: Train }) {
             {train.brief && (
               <>
                 {' · from '}
-                <Link to={`/briefs/${encodeURIComponent(train.brief.id)}`} style={{ color: 'inherit' }}>
+                <MuiLink component={Link} to={`/briefs/${encodeURIComponent(train.brief.id)}`}>
                   {train.brief.code}
-                </Link>
+                </MuiLink>
               </>
             )}
           </>

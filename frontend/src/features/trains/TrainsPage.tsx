@@ -1,7 +1,9 @@
 import Box from '@mui/material/Box';
+import MuiLink from '@mui/material/Link';
 import FormControlLabel from '@mui/material/FormControlLabel';
 import Switch from '@mui/material/Switch';
 import type { GridColDef } from '@mui/x-data-grid';
+import useMediaQuery from '@mui/material/useMediaQuery';
 import { useMemo } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { useTrains } from '../../api/hooks/useTrains';
@@ -83,7 +85,7 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
       sortable: false,
       renderCell: ({ row }) => <ChecksCell fails={row.fails} marginals={row.marginals} />,
     },
-    { field: 'owner', headerName: 'Owner', width: 130 },
+    { field: 'owner', headerName: 'Owner', width: 110 },
     {
       field: 'updatedAt',
       headerName: 'Changed',
@@ -94,6 +96,9 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
     },
   ];
 }
+
+/** Left out where the screen is a phone's. */
+const NARROW = { revision: false, error: false, box: false, mass: false, owner: false, updatedAt: false };
 
 function ChecksCell({ fails, marginals }: { fails: number; marginals: number }) {
   if (fails > 0)
@@ -125,6 +130,7 @@ export default function TrainsPage() {
     ...(text ? { text } : {}),
     ...(mine ? { mine: true } : {}),
   });
+  const narrow = useMediaQuery('(max-width: 600px)');
   const items = data?.items;
   const columns = useMemo(
     () =>
@@ -168,6 +174,7 @@ export default function TrainsPage() {
       <DataTable
         label="Trains"
         columns={columns}
+        hidden={narrow ? NARROW : undefined}
         rows={items}
         total={data?.total}
         getRowId={(row) => row.code}
@@ -185,7 +192,9 @@ export default function TrainsPage() {
           ) : (
             <EmptyState title="No trains yet">
               Open a brief, search it, and adopt an option: it becomes a train.{' '}
-              <Link to="/briefs">To the briefs</Link>
+              <MuiLink component={Link} to="/briefs">
+                To the briefs
+              </MuiLink>
             </EmptyState>
           )
         }

@@ -17,7 +17,7 @@ export function BriefCheck({ remarks }: { remarks: readonly Hint[] }) {
       sx={{ position: { md: 'sticky' }, top: 68, alignSelf: 'start' }}
     >
       {remarks.length === 0 && (
-        <Typography variant="body2" color="text.secondary">
+        <Typography variant="body2" color="textSecondary">
           Nothing in this brief crosses a limit.
         </Typography>
       )}
@@ -51,7 +51,7 @@ function Remarks({ title, colour, remarks }: { title: string; colour: string; re
           <Typography variant="body2" component="span" sx={{ fontWeight: 600, display: 'block' }}>
             {FIELD_NAMES[remark.field].label}
           </Typography>
-          <Typography variant="body2" component="span" color="text.secondary">
+          <Typography variant="body2" component="span" color="textSecondary">
             {remark.message}
           </Typography>
         </ButtonBase>

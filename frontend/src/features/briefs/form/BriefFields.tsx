@@ -56,9 +56,9 @@ export function BriefFields() {
         <FigureField field="leastContactRatio" />
         <FigureField field="centreDistanceAllowance" unit="modules" />
       </FormSection>
-      <FormSection title="Box" remark="Outside, in line. Leave a side blank for no limit.">
+      <FormSection title="Box" remark="Outside, in line. Leave a side blank for no limit." dense>
         <FigureField field="envelopeLength" label="Length" unit="mm" placeholder="no limit" />
-        <FigureField field="envelopeWidth" label="Width, along the shafts" unit="mm" placeholder="no limit" />
+        <FigureField field="envelopeWidth" label="Width along shafts" unit="mm" placeholder="no limit" />
         <FigureField field="envelopeHeight" label="Height" unit="mm" placeholder="no limit" />
         <FigureField field="envelopeWall" label="Wall" unit="mm" />
       </FormSection>
@@ -127,7 +127,7 @@ function DutyLine() {
   });
   const words = dutyWords({ inputSpeed, outputTorque, ratioTarget });
   return words === null ? null : (
-    <Typography variant="body2" color="text.secondary">
+    <Typography variant="body2" color="textSecondary">
       {words}
     </Typography>
   );

@@ -6,11 +6,13 @@ interface FormSectionProps {
   title: string;
   /** One plain remark under the heading. */
   remark?: string;
+  /** Narrower fields, so that four stand in a row. */
+  dense?: boolean;
   children: ReactNode;
 }
 
 /** A heading at the side and its fields in a row beside it; stacked on a narrow screen. */
-export function FormSection({ title, remark, children }: FormSectionProps) {
+export function FormSection({ title, remark, dense = false, children }: FormSectionProps) {
   return (
     <Box
       component="section"
@@ -30,7 +32,7 @@ export function FormSection({ title, remark, children }: FormSectionProps) {
       <div>
         <Typography variant="h2">{title}</Typography>
         {remark && (
-          <Typography variant="body2" color="text.secondary" sx={{ mt: 0.25 }}>
+          <Typography variant="body2" color="textSecondary" sx={{ mt: 0.25 }}>
             {remark}
           </Typography>
         )}
@@ -38,7 +40,7 @@ export function FormSection({ title, remark, children }: FormSectionProps) {
       <Box
         sx={{
           display: 'grid',
-          gridTemplateColumns: 'repeat(auto-fill, minmax(172px, 1fr))',
+          gridTemplateColumns: `repeat(auto-fill, minmax(${dense ? 128 : 172}px, 1fr))`,
           columnGap: 2,
           rowGap: 1.5,
           alignItems: 'start',

@@ -24,7 +24,7 @@ export function MeanwhilePanel({ meanwhile, onTakeTheirs, onKeepMine }: Meanwhil
       sx={{ bgcolor: 'background.paper', border: '1px solid', borderColor: 'warning.main', p: 2, mb: 1.5 }}
     >
       <Typography variant="h2">This brief was saved by somebody else while you were typing</Typography>
-      <Typography color="text.secondary" sx={{ mb: 1 }}>
+      <Typography color="textSecondary" sx={{ mb: 1 }}>
         Saved {formatWhen(saved.updatedAt)}. Nothing you typed is lost.
         {changes.length === 0 && ' They changed no field of this form.'}
       </Typography>

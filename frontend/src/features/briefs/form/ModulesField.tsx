@@ -109,7 +109,7 @@ export function ModulesField() {
         <Button variant="outlined" onClick={add}>
           Add
         </Button>
-        <Typography variant="body2" color="text.secondary" sx={{ alignSelf: 'center' }}>
+        <Typography variant="body2" color="textSecondary" sx={{ alignSelf: 'center' }}>
           {chosen.length === 0
             ? 'None chosen'
             : chosen

@@ -61,9 +61,9 @@ export function OptionTableRow({ option, scale, pinned, onPin, rowProps }: Optio
       <TableCell>
         <TrainStrip train={option} width={STRIP.width} height={STRIP.height} mmPerPixel={scale} />
       </TableCell>
-      <TableCell sx={{ lineHeight: 1.2 }}>
+      <TableCell sx={{ lineHeight: 1.25 }}>
         <Box>{teeth}</Box>
-        <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{moduleWords(option.stages)}</Box>
+        <Box sx={{ color: 'text.secondary', fontSize: '0.6875rem' }}>{moduleWords(option.stages)}</Box>
       </TableCell>
       <TableCell align="right" title={`Exactly ${exactRatioWords(option.ratio)}`}>
         {ratioWords(option.ratio.value)}

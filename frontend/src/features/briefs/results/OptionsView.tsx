@@ -112,7 +112,7 @@ function StageFilter({ options, chosen, onChoose }: StageFilterProps) {
   if (counts.length < 2) return null;
   return (
     <Box sx={{ display: 'flex', alignItems: 'center', gap: 1 }}>
-      <Typography component="span" color="text.secondary" id="stage-filter">
+      <Typography component="span" color="textSecondary" id="stage-filter">
         Stages
       </Typography>
       <ToggleButtonGroup

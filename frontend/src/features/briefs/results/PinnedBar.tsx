@@ -13,42 +13,43 @@ export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean
   const { pins } = brief;
   if (pins.length === 0) return null;
   return (
+    // The paper behind the bar hides the rows that scroll under it.
     <Box
       component="section"
       aria-label="Pinned options"
-      sx={{
-        position: 'sticky',
-        bottom: 12,
-        zIndex: 3,
-        mt: 1.5,
-        display: 'flex',
-        alignItems: 'center',
-        flexWrap: 'wrap',
-        columnGap: 2,
-        rowGap: 1,
-        px: 2,
-        py: 1,
-        bgcolor: 'background.paper',
-        border: '1px solid',
-        borderColor: 'secondary.main',
-      }}
+      sx={{ position: 'sticky', bottom: 0, zIndex: 3, pt: 1, pb: 1.5, mb: -3, bgcolor: 'background.default' }}
     >
-      <Typography component="p" sx={{ flex: '1 1 220px', minWidth: 0 }}>
-        <Box component="strong" sx={{ fontWeight: 600, mr: 1.5 }}>
-          {pins.length} pinned
-        </Box>
-        <Box component="span" sx={{ color: 'text.secondary' }}>
-          {joined(pins.map(({ option }) => teethWords(option.stages)))}
-        </Box>
-      </Typography>
-      <Button variant="outlined" component={Link} to={`/briefs/${encodeURIComponent(brief.id)}/compare`}>
-        {pins.length === 1 ? 'Look closer' : 'Compare side by side'}
-      </Button>
-      {canAdopt && (
-        <Button variant="contained" onClick={() => setAdopting(true)}>
-          Adopt as train
+      <Box
+        sx={{
+          display: 'flex',
+          alignItems: 'center',
+          flexWrap: 'wrap',
+          columnGap: 2,
+          rowGap: 1,
+          px: 2,
+          py: 0.75,
+          bgcolor: 'background.paper',
+          border: '1px solid',
+          borderColor: 'secondary.main',
+        }}
+      >
+        <Typography component="p" sx={{ flex: '1 1 220px', minWidth: 0 }}>
+          <Box component="strong" sx={{ fontWeight: 600, mr: 1.5 }}>
+            {pins.length} pinned
+          </Box>
+          <Box component="span" sx={{ color: 'text.secondary' }}>
+            {joined(pins.map(({ option }) => teethWords(option.stages)))}
+          </Box>
+        </Typography>
+        <Button variant="outlined" component={Link} to={`/briefs/${encodeURIComponent(brief.id)}/compare`}>
+          {pins.length === 1 ? 'Look closer' : 'Compare side by side'}
         </Button>
-      )}
+        {canAdopt && (
+          <Button variant="contained" onClick={() => setAdopting(true)}>
+            Adopt as train
+          </Button>
+        )}
+      </Box>
       {adopting && <AdoptDialog brief={brief} pins={pins} onClose={() => setAdopting(false)} />}
     </Box>
   );

@@ -27,7 +27,9 @@ export function WhyNotPanel({ whyNot, onTry }: WhyNotPanelProps) {
                 onClick={() => onTry(relaxed)}
                 sx={{ ml: -1, minHeight: 28, fontWeight: 500 }}
               >
-                Open the brief with this change
+                {limit === 'objective'
+                  ? 'Open the brief for this count alone'
+                  : 'Open the brief with this change'}
               </Button>
             )}
           </section>

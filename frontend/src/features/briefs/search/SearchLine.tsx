@@ -46,7 +46,7 @@ export function RunningLine({ search, connected, onStop, stopping }: RunningLine
         value={percent ?? undefined}
         sx={{ mt: 1, height: 3 }}
       />
-      <Typography variant="body2" color="text.secondary" sx={{ mt: 0.75 }}>
+      <Typography variant="body2" color="textSecondary" sx={{ mt: 0.75 }}>
         {connected
           ? 'The search goes on when you leave this page.'
           : 'Connection lost; the search goes on at the server. Asking again every 3 s.'}

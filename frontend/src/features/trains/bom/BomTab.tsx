@@ -44,7 +44,7 @@ export function BomTab({ train, canExport }: { train: Train; canExport: boolean 
   return (
     <>
       <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', columnGap: 2, mb: 0.75 }}>
-        <Typography sx={{ flex: 1, minWidth: 240 }} color="text.secondary">
+        <Typography sx={{ flex: 1, minWidth: 240 }} color="textSecondary">
           <Box component="strong" sx={{ fontWeight: 600, color: 'text.primary', mr: 1.5 }}>
             {totals.lines} lines
           </Box>
@@ -54,13 +54,13 @@ export function BomTab({ train, canExport }: { train: Train; canExport: boolean 
           Copy table
         </Button>
         {!canExport && (
-          <Typography variant="body2" color="text.secondary">
+          <Typography variant="body2" color="textSecondary">
             The workbook is for designers, librarians, purchasers and administrators.
           </Typography>
         )}
       </Box>
       <BomTable lines={bom.lines} />
-      <Typography variant="body2" color="text.secondary" sx={{ mt: 1 }}>
+      <Typography variant="body2" color="textSecondary" sx={{ mt: 1 }}>
         Prices and lead times are not known yet; their columns in the workbook are empty.
       </Typography>
     </>

@@ -5,10 +5,9 @@ import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import WarningAmber from '@mui/icons-material/WarningAmberOutlined';
-import { Link } from 'react-router-dom';
 import type { BomLine } from '../../../api/types';
-import { formatFixed } from '../../../components/figures';
-import { partNumberWords, quantityWords } from './bomCells';
+import { PartLink } from '../PartLink';
+import { massWords, partNumberWords, quantityWords } from './bomCells';
 
 /** Lines of a bill of materials; flags stand under the description they concern. */
 export function BomTable({ lines }: { lines: readonly BomLine[] }) {
@@ -24,11 +23,13 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
           <TableRow>
             <TableCell align="right">Find</TableCell>
             <TableCell>Part</TableCell>
-            <TableCell>Description</TableCell>
+            <TableCell sx={{ width: '40%' }}>Description</TableCell>
             <TableCell align="right">Quantity</TableCell>
             <TableCell>Material</TableCell>
             <TableCell>Supply</TableCell>
-            <TableCell align="right">Mass each, kg</TableCell>
+            <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
+              Each, kg
+            </TableCell>
             <TableCell>Used in</TableCell>
           </TableRow>
         </TableHead>
@@ -42,9 +43,7 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
                     {partNumberWords(line)}
                   </Box>
                 ) : (
-                  <Link to={`/parts/${encodeURIComponent(line.partNumber)}`} className="part-number">
-                    {line.partNumber}
-                  </Link>
+                  <PartLink number={line.partNumber} />
                 )}
               </TableCell>
               <TableCell>
@@ -52,21 +51,15 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
                 {line.note !== '' && (
                   <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{line.note}</Box>
                 )}
-                {line.flags.map((flag) => (
-                  <Box
-                    key={flag}
-                    sx={{
-                      color: 'warning.main',
-                      fontSize: '0.75rem',
-                      display: 'flex',
-                      gap: 0.5,
-                      alignItems: 'center',
-                    }}
-                  >
-                    <WarningAmber titleAccess="Look at this before ordering" sx={{ fontSize: 14 }} />
-                    {flag}
+                {line.flags.length > 0 && (
+                  <Box sx={{ color: 'warning.main', fontSize: '0.75rem', display: 'flex', gap: 0.5 }}>
+                    <WarningAmber
+                      titleAccess="Look at this before ordering"
+                      sx={{ fontSize: 14, mt: '1px', flexShrink: 0 }}
+                    />
+                    {line.flags.join(' · ')}
                   </Box>
-                ))}
+                )}
               </TableCell>
               <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
                 {quantityWords(line)}
@@ -78,7 +71,7 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
                   <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{line.supplier}</Box>
                 )}
               </TableCell>
-              <TableCell align="right">{formatFixed(line.mass, 3)}</TableCell>
+              <TableCell align="right">{massWords(line.mass)}</TableCell>
               <TableCell>{line.source.join(', ')}</TableCell>
             </TableRow>
           ))}

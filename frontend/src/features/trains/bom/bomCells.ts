@@ -1,5 +1,5 @@
 import type { BomLine } from '../../../api/types';
-import { formatPlain } from '../../../components/figures';
+import { formatFixed, formatPlain } from '../../../components/figures';
 
 /** Heads of the copied table. */
 export const BOM_HEADS = [
@@ -43,3 +43,7 @@ export function bomCells(line: BomLine): string[] {
 /** `2 pcs`, `0.25 l`. */
 export const quantityWords = ({ quantity, unit }: Pick<BomLine, 'quantity' | 'unit'>): string =>
   `${formatPlain(quantity, 3)} ${unit}`;
+
+/** Three decimals, four for what is lighter than 10 g; a dash where it is not known. */
+export const massWords = (kg: number | null): string =>
+  formatFixed(kg, kg !== null && kg > 0 && kg < 0.01 ? 4 : 3);

@@ -26,6 +26,9 @@ export function DrawingTab({ train, canEdit }: { train: Train; canEdit: boolean 
           <TrainDrawing train={spec} figures={figures} shaftDiameters={diameters} />
         </Sheet>
         <ShaftsTable train={train} canEdit={canEdit} />
+        <Sheet title="Checks of the whole" flush>
+          <ChecksTable checks={figures.checks.filter(({ stage }) => stage === undefined)} />
+        </Sheet>
       </Box>
       <Box sx={{ display: 'grid', gap: 2 }}>
         <Sheet title="Whole train" flush>
@@ -65,9 +68,6 @@ export function DrawingTab({ train, canEdit }: { train: Train; canEdit: boolean 
               },
             ]}
           />
-        </Sheet>
-        <Sheet title="Checks of the whole" flush>
-          <ChecksTable checks={figures.checks.filter(({ stage }) => stage === undefined)} />
         </Sheet>
       </Box>
     </Box>

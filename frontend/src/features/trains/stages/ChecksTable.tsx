@@ -18,7 +18,7 @@ const DECIMALS: Record<string, number> = { mm: 3, '%': 3, '': 3, kg: 3, '′': 1
 export function ChecksTable({ checks }: { checks: readonly Check[] }) {
   if (checks.length === 0) {
     return (
-      <Typography variant="body2" color="text.secondary" sx={{ px: 1.75, pb: 1.25 }}>
+      <Typography variant="body2" color="textSecondary" sx={{ px: 1.75, pb: 1.25 }}>
         Nothing is asked here.
       </Typography>
     );

@@ -59,7 +59,7 @@ export function ChoosePartDialog({ train, stage, role, onClose }: ChoosePartDial
             </Alert>
           )}
           {place && (
-            <Typography color="text.secondary" sx={{ mb: 1 }}>
+            <Typography color="textSecondary" sx={{ mb: 1 }}>
               {`Cleared gears with ${place.teeth} teeth, m ${formatPlain(place.module)}, shift ${formatPlain(place.profileShift)}, at least ${formatPlain(place.faceWidth)} mm wide.`}
             </Typography>
           )}
@@ -81,7 +81,7 @@ export function ChoosePartDialog({ train, stage, role, onClose }: ChoosePartDial
             </RadioGroup>
           )}
           {gears?.length === 0 && (
-            <Typography color="text.secondary" sx={{ mt: 1 }}>
+            <Typography color="textSecondary" sx={{ mt: 1 }}>
               No cleared gear in the library agrees in every figure. A librarian can add one under Parts.
             </Typography>
           )}

@@ -1,11 +1,11 @@
 import Button from '@mui/material/Button';
 import { formatTrimmed, moduleToDiametralPitch } from '@stageyard/libs/units';
 import { useState, type ReactNode } from 'react';
-import { Link } from 'react-router-dom';
 import type { GearGeometry, Train } from '../../../api/types';
 import { FigureTable, type FigureRow } from '../../../components/FigureTable';
 import { formatFixed, formatSigned } from '../../../components/figures';
 import { Sheet } from '../../../components/Sheet';
+import { PartLink } from '../PartLink';
 import { ChoosePartDialog } from './ChoosePartDialog';
 
 interface GearTableProps {
@@ -24,13 +24,7 @@ export function GearTable({ train, stage, canEdit }: GearTableProps) {
     const number = spec[role].partNumber;
     return (
       <>
-        {number === null ? (
-          'to be made'
-        ) : (
-          <Link to={`/parts/${encodeURIComponent(number)}`} className="part-number">
-            {number}
-          </Link>
-        )}
+        {number === null ? 'to be made' : <PartLink number={number} />}
         {canEdit && (
           <>
             <br />

@@ -85,19 +85,28 @@ export function StagesTab({ train, canEdit }: { train: Train; canEdit: boolean }
               view={whole ? 'whole' : 'mesh'}
             />
           </Sheet>
-          <Sheet title="Checks of this stage" flush>
-            <ChecksTable checks={ofStage(train.figures.checks)} />
-          </Sheet>
-          <FindingsList findings={ofStage(train.figures.findings)} />
+          <Box
+            sx={{
+              display: 'grid',
+              gridTemplateColumns: 'repeat(auto-fit, minmax(min(100%, 370px), 1fr))',
+              gap: 2,
+              alignItems: 'start',
+            }}
+          >
+            <MeshTable
+              mesh={mesh}
+              teeth={[stage.pinion.teeth, stage.wheel.teeth]}
+              leastContactRatio={train.spec.leastContactRatio}
+            />
+            <Box sx={{ display: 'grid', gap: 2, minWidth: 0 }}>
+              <Sheet title="Checks of this stage" flush>
+                <ChecksTable checks={ofStage(train.figures.checks)} />
+              </Sheet>
+              <FindingsList findings={ofStage(train.figures.findings)} />
+            </Box>
+          </Box>
         </Box>
-        <Box sx={{ display: 'grid', gap: 2 }}>
-          <GearTable train={train} stage={index} canEdit={canEdit} />
-          <MeshTable
-            mesh={mesh}
-            teeth={[stage.pinion.teeth, stage.wheel.teeth]}
-            leastContactRatio={train.spec.leastContactRatio}
-          />
-        </Box>
+        <GearTable train={train} stage={index} canEdit={canEdit} />
       </Box>
     </>
   );
