@@ -8,7 +8,8 @@ export class ProblemField {
   @ApiProperty({
     oneOf: [{ type: 'string' }, { type: 'number' }, { type: 'boolean' }],
     nullable: true,
-    description: 'The value sent; long text is cut, lists and objects are shown as text, secrets are left out.',
+    description:
+      'The value sent; long text is cut, lists and objects are shown as text, secrets are left out.',
   })
   value!: string | number | boolean | null;
 
