@@ -184,6 +184,16 @@ describe('backlash', () => {
 });
 
 describe('a helical mesh', () => {
+  it('has the normal backlash (|A_s1| + |A_s2|) cos α at its zero-backlash distance, whatever the helix', () => {
+    // cos α_t cos β_b = cos α cos β (ISO 21771), so the helix drops out.
+    const thin = { thicknessAllowance: { upper: -0.05, lower: -0.05 } };
+    for (const helixAngleDeg of [0, 15, 40]) {
+      const gear = { teeth: 24, module: 3, helixAngleDeg, ...thin };
+      const mesh = meshGeometry({ pinion: gear, wheel: { ...gear, teeth: 50 } });
+      expect(mesh.normalBacklash).toBeCloseTo(0.1 * Math.cos(Math.PI / 9), 12);
+    }
+  });
+
   const pair = {
     pinion: { teeth: 20, module: 4, helixAngleDeg: 15, faceWidth: 60, hand: 'left' as const },
     wheel: { teeth: 50, module: 4, helixAngleDeg: 15, faceWidth: 50, hand: 'right' as const },

@@ -60,6 +60,20 @@ describe('a tooth outline', () => {
   });
 });
 
+describe('the tip', () => {
+  it.each([0, 15, 35])(
+    'of a gear with helix %i° is as thick as the rolling rack leaves it, square to it',
+    (beta) => {
+      const input = gear(17, { helixAngleDeg: beta, profileShift: 0.2 });
+      const cut = rolled(input);
+      const transverse = 2 * cut.tip * (Math.PI / 17 - cut.gapAt(cut.tip));
+      // The lead is one for all cylinders: tan of the helix angle grows with the radius.
+      const helixAtTip = Math.atan((Math.tan((beta * Math.PI) / 180) * cut.tip) / cut.reference);
+      expect(gearGeometry(input).tipThickness).toBeCloseTo(transverse * Math.cos(helixAtTip), 8);
+    },
+  );
+});
+
 describe('span and pins', () => {
   it.each([
     [12, 0.3],
