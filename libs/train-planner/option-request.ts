@@ -32,15 +32,20 @@ export interface OptionRequest {
   /** Added to the zero-backlash distance, in modules. */
   centreDistanceAllowance?: number;
   undercut?: 'allow' | 'refuse';
-  /** Wheel teeth / pinion teeth of every stage, decimals read exactly, both ends allowed. */
+  /**
+   * Wheel teeth / pinion teeth of every stage, decimals read exactly, both ends allowed; at least 1 unless `min`
+   * says less. In a stage that speeds up the driving gear stands as pinion.
+   */
   stageRatio?: { min?: string | number; max?: string | number };
   envelope?: Envelope;
   arrangement?: 'in-line';
   direction?: 'same' | 'opposite' | 'any';
   source?: 'any';
   objective: Objective;
-  /** Most options returned. */
+  /** Most options returned; of each stage count where `bestOf` says so. */
   limit?: number;
+  /** Whether the stage counts compete for the places (`all`) or each keeps its own best (`each-count`). */
+  bestOf?: 'all' | 'each-count';
 }
 
 /** A request whose defaults are filled in and whose fields are known to be good. Still a valid request itself. */

@@ -174,3 +174,24 @@ describe('watching a search', () => {
     expect(outcome).toMatchObject({ options: [], search: { complete: false }, whyNot: [] });
   });
 });
+
+describe('best of each stage count', () => {
+  it.each(['centre-distance', 'ratio-error', 'mass'] as const)(
+    'by %s is what each count gives alone',
+    (objective) => {
+      const request = winchRequest({ objective, limit: 12 });
+      const alone = [2, 3].map((count) =>
+        keys(searchOptions({ ...request, stages: { min: count, max: count } }).options),
+      );
+      const together = searchOptions({
+        ...request,
+        stages: { min: 2, max: 3 },
+        bestOf: 'each-count',
+      }).options;
+      const ofCount = (count: number) => keys(together.filter(({ stages }) => stages.length === count));
+      expect([ofCount(2), ofCount(3)]).toEqual(alone);
+      const overall = keys(searchOptions({ ...request, stages: { min: 2, max: 3 } }).options);
+      expect(keys(together).slice(0, 12)).toEqual(overall);
+    },
+  );
+});

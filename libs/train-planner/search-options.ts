@@ -1,3 +1,4 @@
+import { type BestList, type FoundTrain } from './best-list.js';
 import { OptionFigures } from './option-figures.js';
 import { type OptionRequest } from './option-request.js';
 import { StagePairs } from './stage-pairs.js';
@@ -9,7 +10,10 @@ import { SearchEnded, WorkWatch } from './work-watch.js';
 
 /**
  * The best trains for a request, exact and the same on every run. `complete: true` means that nothing in the
- * space outranks the options returned; after a stop or the time limit it is false and the best so far are given.
+ * space outranks the options returned (with `bestOf: 'each-count'`, within their stage count); after a stop or the time limit it is false and the best so far are given.
+ * Order: the objective as whole nm or mg, then ratio error (exact), sum of distances, fewer stages, teeth.
+ * Orders of the same stages are one option for `centre-distance` and `ratio-error` without an envelope, else
+ * separate options. Without a load every stage has the smallest module listed.
  * Masses are those of solid discs at the reference diameter, 7,850 kg/m³.
  * @throws InputError listing every field at fault
  */
@@ -21,22 +25,24 @@ export function searchOptions(request: OptionRequest, control: SearchControl = {
   const search = unlessEnded(() => new TrainSearch(checked, stagePairs));
   if (!search) return outcome([], false, [], watch);
 
-  const best = search.emptyList();
+  const lists = [search.emptyList()];
+  watch.found = () => lists.reduce((sum, { trains }) => sum + trains.length, 0);
   const ended = !unlessEnded(() => {
     for (let stages = checked.stages.min; stages <= checked.stages.max; stages++) {
-      search.run(stages, best, watch);
-      watch.found = best.trains.length;
+      if (checked.bestOf === 'each-count' && stages > checked.stages.min) lists.unshift(search.emptyList());
+      search.run(stages, lists[0] as BestList, watch);
     }
     return true;
   });
+  const best = ranked(lists);
   const figures = new OptionFigures(checked, stagePairs, search.pool);
-  const options = best.trains.map((train) => figures.option(train));
+  const options = best.map((train) => figures.option(train));
   const combinations = watch.settled;
   const whyNot: WhyNot[] = [];
   if (!ended) {
     unlessEnded(() => {
       for (let stages = checked.stages.min; stages <= checked.stages.max; stages++) {
-        if (best.trains.some((train) => train.pairs.length === stages)) continue;
+        if (best.some((train) => train.pairs.length === stages)) continue;
         watch.beginPhase('why not', stages, 0);
         whyNot.push(...explainStages(stages, search, stagePairs, watch));
       }
@@ -45,6 +51,11 @@ export function searchOptions(request: OptionRequest, control: SearchControl = {
   }
   watch.settled = combinations;
   return outcome(options, !ended, whyNot, watch);
+}
+
+/** The trains of all lists in one order. */
+function ranked(lists: BestList[]): FoundTrain[] {
+  return lists.flatMap(({ trains }) => trains).sort((a, b) => (lists[0] as BestList).compare(a, b));
 }
 
 function outcome(

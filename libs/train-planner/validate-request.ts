@@ -107,6 +107,7 @@ export function validateOptionRequest(input: unknown): CheckedRequest {
       'mass',
     ]),
     limit: read.whole(request.limit, 'limit', 'The number of options', bounds.limit, 50),
+    bestOf: read.choice(request.bestOf, 'bestOf', 'Best of', ['all', 'each-count'], 'all'),
   };
   const envelope = readEnvelope(read, request.envelope);
   if (envelope) checked.envelope = envelope;

@@ -40,8 +40,32 @@ describe('why not', () => {
     );
   });
 
-  it('says so when no single limit helps', () => {
-    const found = reasons({ stages: { min: 1, max: 1 }, envelope: { length: 10, width: 5, height: 10 } });
+  it('names the limits that must give together, each with its least figure', () => {
+    // By hand: 17 teeth and 37.125 : 1 need 631.1, so 632; r_a 9.5 and 317; a 324.5 + 0.02; length 9.5 + 324.52 + 317
+    // and height 2 · 317, each with two walls of 6 mm.
+    const request = winchRequest({
+      ratio: { target: '37.5', tolerancePercent: 1 },
+      stages: { min: 1, max: 1 },
+      teeth: { pinion: { min: 17, max: 40 }, wheel: { min: 17, max: 120 } },
+      modules: [1],
+      centreDistanceAllowance: 0.02,
+      envelope: { length: 220, width: 90, height: 140, wall: 6 },
+    });
+    const [reason, ...others] = searchOptions(request).whyNot;
+    expect(others).toEqual([]);
+    expect(reason?.message).toBe(
+      'One stage needs a wheel of at least 632 teeth; the brief allows 120. That also takes a length of at least ' +
+        '663.02 mm; the box allows 220 mm, and a height of at least 646.00 mm; the box allows 140 mm.',
+    );
+    const again = { ...request, ...reason?.relaxed };
+    expect(searchOptions(again).options[0]?.key).toBe('17/632m1');
+    expect(searchOptions(withLimit(again, 'envelope.length', 663.01)).options).toEqual([]);
+    expect(searchOptions(withLimit(again, 'envelope.height', 645.99)).options).toEqual([]);
+    expect(searchOptions(withLimit(again, 'teeth.wheel.max', 631)).options).toEqual([]);
+  });
+
+  it('says so when loosening a limit and the room for it does not help', () => {
+    const found = reasons({ stages: { min: 1, max: 1 }, leastContactRatio: 4 });
     expect(found).toHaveLength(1);
     expect(found[0]).toMatchObject({ stages: 1, limit: 'several', nearest: null });
   });

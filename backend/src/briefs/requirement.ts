@@ -39,7 +39,8 @@ export function checkRequirement(input: object): Requirement {
   const { duty, ...request } = input as Record<string, unknown>;
   const issues = dutyIssues(duty);
   try {
-    const checked = validateOptionRequest(request);
+    // A brief compares stage counts side by side, so each keeps its own best unless told otherwise.
+    const checked = validateOptionRequest({ bestOf: 'each-count', ...request });
     if (issues.length === 0) return keptForm(checked, duty as Duty | null | undefined);
   } catch (error) {
     if (!(error instanceof InputError)) throw error;

@@ -112,6 +112,14 @@ export class OptionRequestDto {
   })
   limit?: number;
 
+  @LibraryField({
+    enum: ['all', 'each-count'],
+    required: false,
+    default: 'all',
+    description: 'Whether the stage counts compete for the places or each keeps its own best; briefs: each-count',
+  })
+  bestOf?: 'all' | 'each-count';
+
   /** Known to the interface and refused by the planner with the reason, instead of as an unknown field. */
   @ApiHideProperty()
   @Allow()
