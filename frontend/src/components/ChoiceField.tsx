@@ -34,6 +34,7 @@ export function ChoiceField<Form extends FieldValues>(props: ChoiceFieldProps<Fo
       disabled={disabled}
       error={error !== undefined}
       helperText={error ?? hint}
+      slotProps={{ select: { displayEmpty: true } }}
     >
       {choices.map((choice) => (
         <MenuItem key={choice.value} value={choice.value}>

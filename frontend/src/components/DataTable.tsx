@@ -48,7 +48,7 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
   }
   const [first] = state.sort;
   return (
-    <Box sx={{ height: props.height ?? 'calc(100dvh - 236px)', minHeight: 380, bgcolor: 'background.paper' }}>
+    <Box sx={{ height: props.height ?? 'calc(100dvh - 204px)', minHeight: 380, bgcolor: 'background.paper' }}>
       <DataGrid<Row>
         aria-label={props.label}
         columns={props.columns}

@@ -30,7 +30,14 @@ export function Sheet({ title, aside, children, flush = false, sx }: SheetProps)
     >
       {named && (
         <Box
-          sx={{ display: 'flex', alignItems: 'baseline', gap: 2, px: 1.75, pt: 1.25, pb: flush ? 0.75 : 0 }}
+          sx={{
+            display: 'flex',
+            alignItems: 'baseline',
+            gap: 2,
+            px: flush ? 1.25 : 1.75,
+            pt: 1.25,
+            pb: flush ? 0.75 : 0,
+          }}
         >
           <Typography variant="h2" id={id} sx={{ flex: 1 }}>
             {title}

@@ -36,13 +36,10 @@ export function VerdictWord({ verdict, value, limit, unit, decimals = 2 }: Verdi
       sx={{
         color,
         fontWeight: verdict === 'passes' || verdict === 'note' ? 400 : 600,
-        display: 'inline-flex',
-        alignItems: 'center',
-        gap: 0.5,
         whiteSpace: 'nowrap',
       }}
     >
-      <Icon aria-hidden="true" sx={{ fontSize: '1.1em' }} />
+      <Icon aria-hidden="true" sx={{ fontSize: '1.1em', verticalAlign: '-0.16em', mr: 0.5 }} />
       {`${verdict}${withUnit}`}
     </Box>
   );

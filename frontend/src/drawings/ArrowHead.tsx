@@ -8,9 +8,9 @@ interface ArrowHeadProps {
   length?: number;
 }
 
-/** A slim filled arrow head, three times as long as wide. */
+/** A slim filled arrow head, somewhat more than twice as long as wide. */
 export function ArrowHead({ tip, angle, colour, length = 7 }: ArrowHeadProps) {
-  const half = length / 6;
+  const half = length / 4.6;
   const back = (side: number): string => {
     const x = tip.x - length * Math.cos(angle) - side * half * Math.sin(angle);
     const y = tip.y - length * Math.sin(angle) + side * half * Math.cos(angle);

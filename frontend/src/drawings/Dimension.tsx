@@ -13,7 +13,7 @@ interface DimensionProps {
 
 const GAP = 2.5;
 const PAST = 3;
-const HEAD = 7;
+const HEAD = 9;
 
 /** Extension lines, a dimension line with arrow heads, and its figure above the line (ISO 129-1). */
 export function Dimension({ from, to, at, direction, text }: DimensionProps) {

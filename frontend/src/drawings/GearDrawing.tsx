@@ -44,7 +44,7 @@ export function GearDrawing({ gear, geometry, bore, size = 300 }: GearDrawingPro
       <path d={outline} fill={INK.pinion} stroke={INK.outline} strokeWidth={1} />
       {circle(geometry.referenceDiameter, INK.centre, true)}
       {circle(geometry.baseDiameter, INK.faint, false)}
-      {bore !== undefined && bore !== null && bore > 0 && (
+      {bore !== undefined && bore !== null && bore > 0 && bore < geometry.rootDiameter && (
         <circle cx={middle} cy={middle} r={(bore / 2) * scale} fill={INK.sheet} stroke={INK.outline} />
       )}
       <path

@@ -17,7 +17,6 @@ export function PlanView({ layout, toPx, pxPerMm, dimensions }: PlanViewProps) {
   const right = strip.bounds.x + strip.bounds.width + wall;
   const topLeft = toPx(left, depth + wall);
   const bottomRight = toPx(right, -wall);
-  const last = layout.shafts.length - 1;
   return (
     <g>
       {wall > 0 && (
@@ -33,11 +32,8 @@ export function PlanView({ layout, toPx, pxPerMm, dimensions }: PlanViewProps) {
         />
       )}
       {layout.shafts.map((shaft, index) => {
-        // Input and output shafts pass through their walls; the others end at their bearings.
-        const z1 = index === 0 ? -wall : shaft.z1;
-        const z2 = index === last ? depth + wall : shaft.z2;
-        const from = toPx(shaft.x, z2);
-        const to = toPx(shaft.x, z1);
+        const from = toPx(shaft.x, shaft.z2);
+        const to = toPx(shaft.x, shaft.z1);
         const half = ((shaft.diameter ?? 0) / 2) * pxPerMm;
         return (
           <g key={index}>

@@ -56,14 +56,14 @@ export function layOut(
           faces: [stage.pinion.faceWidth, stage.wheel.faceWidth],
         },
   );
-  let z = gap / 2;
+  let z = 0;
   const planes = stages.map(({ faces }) => {
     const face = Math.max(...faces);
     const plane = { from: z, to: z + face };
     z += face + gap;
     return plane;
   });
-  const depth = z - gap / 2;
+  const depth = z - gap;
   const gears = strip.gears.map((gear): LaidGear => {
     const plane = planes[gear.stage] ?? { from: 0, to: 0 };
     const which = gear.role === 'pinion' ? 0 : 1;
@@ -78,17 +78,19 @@ export function layOut(
     };
   });
   const last = strip.axes.length - 1;
+  const wall = figures ? Math.max(0, (figures.box.length - strip.bounds.width) / 2) : 0;
+  // A shaft spans its gears' planes and half a gap each side; the first and the last run through their walls.
+  const through = Math.max(gap / 2, wall);
   const shafts = strip.axes.map(({ x }, shaft): LaidShaft => {
     const known = figures?.shafts[shaft];
-    const from = shaft === 0 ? 0 : (planes[shaft - 1]?.from ?? 0) - gap / 2;
-    const to = shaft === last ? depth : (planes[shaft]?.to ?? depth) + gap / 2;
+    const first = planes[Math.max(0, shaft - 1)]?.from ?? 0;
+    const final = planes[Math.min(planes.length - 1, shaft)]?.to ?? depth;
     return {
       x,
-      z1: shaft === 0 ? 0 : from,
-      z2: shaft === 0 && last > 0 ? (planes[0]?.to ?? depth) + gap / 2 : to,
+      z1: known?.z1 ?? first - (shaft === 0 ? through : gap / 2),
+      z2: known?.z2 ?? final + (shaft === last ? through : gap / 2),
       diameter: diameters?.[shaft] ?? known?.leastDiameter ?? null,
     };
   });
-  const wall = figures ? Math.max(0, (figures.box.length - strip.bounds.width) / 2) : 0;
   return { strip, gears, shafts, depth, wall };
 }

@@ -18,7 +18,7 @@ const controls: Look = {
     styleOverrides: {
       root: { minHeight: 34, paddingInline: 14, borderRadius: 3, whiteSpace: 'nowrap' },
       outlined: ({ theme }) => ({
-        borderColor: theme.vars.palette.primary.main,
+        borderColor: 'currentColor',
         backgroundColor: 'transparent',
         '&:hover': { backgroundColor: theme.vars.palette.wash.green },
       }),
@@ -90,12 +90,13 @@ const fields: Look = {
         '&:hover:not(.Mui-error) fieldset': { borderColor: theme.vars.palette.text.primary },
         '&.Mui-focused fieldset': { borderColor: theme.vars.palette.secondary.main, borderWidth: 2 },
       }),
-      input: {
+      input: ({ theme }) => ({
+        '&::placeholder': { color: theme.vars.palette.text.secondary, opacity: 1 },
         paddingBlock: 6.5,
         paddingInline: 10,
         height: '1.3125rem',
         '&.MuiInputBase-inputMultiline': { height: 'auto' },
-      },
+      }),
       multiline: { padding: 0 },
     },
   },
@@ -260,7 +261,6 @@ const grid: Look = {
 const ground: Look = {
   MuiCssBaseline: {
     styleOverrides: (theme) => ({
-      html: { scrollbarGutter: 'stable' },
       body: { fontSize: '0.875rem', fontVariantNumeric: 'tabular-nums', textRendering: 'optimizeLegibility' },
       ':focus-visible': { ...focusRing(theme) },
       '.number': { textAlign: 'right', fontVariantNumeric: 'tabular-nums' },

@@ -36,6 +36,12 @@ export function GeometryPanel({ live, bore, shiftUnknown }: GeometryPanelProps) 
             <Box sx={{ px: 1.75, pt: 0.5, pb: 1 }}>
               <GearDrawing gear={live.gear} geometry={live.geometry} bore={bore} size={250} />
             </Box>
+            {bore !== null && bore >= live.geometry.rootDiameter && (
+              <Alert severity="error" sx={{ mx: 1.25, mb: 1 }}>
+                The bore of {formatFixed(bore, 2)} mm reaches the root circle of{' '}
+                {formatFixed(live.geometry.rootDiameter, 2)} mm: nothing is left to hold the teeth.
+              </Alert>
+            )}
             <GeometryTable geometry={live.geometry} module={live.gear.module} />
             {shiftUnknown && (
               <Typography variant="body2" color="textSecondary" sx={{ px: 1.25, pt: 1 }}>

@@ -27,7 +27,7 @@ export function PartChanges({ number, version }: { number: string; version: numb
             key={change.id}
             sx={{
               display: 'grid',
-              gridTemplateColumns: { xs: '1fr', sm: '190px 150px 1fr' },
+              gridTemplateColumns: { xs: '1fr', sm: '160px 130px 1fr' },
               columnGap: 2,
               py: 0.75,
               borderBottom: '1px solid',

@@ -1,4 +1,3 @@
-import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useParams, useSearchParams } from 'react-router-dom';
 import { answer, api } from '../../api/client';
@@ -78,10 +77,7 @@ export default function PartPage() {
           )
         }
       />
-      <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2 }}>
-        <PartFacts part={part} />
-        <PartChanges number={part.number} version={part.version} />
-      </Box>
+      <PartFacts part={part} below={<PartChanges number={part.number} version={part.version} />} />
     </>
   );
 }

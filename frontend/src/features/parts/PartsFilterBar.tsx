@@ -1,6 +1,8 @@
 import Tune from '@mui/icons-material/Tune';
 import Button from '@mui/material/Button';
 import type { ReactNode } from 'react';
+import useMediaQuery from '@mui/material/useMediaQuery';
+import { useTheme } from '@mui/material/styles';
 import { useState } from 'react';
 import { usePartFacets } from '../../api/hooks/usePartFacets';
 import type { PartKind } from '../../api/types';
@@ -8,7 +10,7 @@ import { formatPlain } from '../../components/figures';
 import { FilterBar } from '../../components/FilterBar';
 import type { ListState } from '../../components/useListState';
 import { ChoiceFilter, TypedFilter } from './FilterFields';
-import type { PartFilter } from './partFilters';
+import { PART_FILTERS, type PartFilter } from './partFilters';
 import { KIND_NAMES, PART_KINDS, STANDINGS } from './partKinds';
 import { SecondSort } from './SecondSort';
 
@@ -31,7 +33,10 @@ const MORE: readonly PartFilter[] = [
 /** The library's filters; the rarer ones fold away until one of them is set. */
 export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
   const { facets } = usePartFacets();
-  const rareSet = MORE.some((name) => state.filters[name] !== undefined);
+  const narrow = useMediaQuery(useTheme().breakpoints.down('sm'));
+  const rareSet = (narrow ? PART_FILTERS.filter((name) => name !== 'text') : MORE).some(
+    (name) => state.filters[name] !== undefined,
+  );
   const [open, setOpen] = useState(false);
   const bind = (name: PartFilter) => ({
     value: state.filters[name] ?? '',
@@ -63,12 +68,16 @@ export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
   return (
     <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result} aside={aside}>
       <TypedFilter label="Number or words" width={180} {...bind('text')} />
-      <ChoiceFilter label="Kind" width={128} choices={kinds} {...bind('kind')} />
-      <ChoiceFilter label="Module, mm" width={92} choices={modules} {...bind('module')} />
-      <TypedFilter figure label="Teeth, least" width={84} {...bind('teethMin')} />
-      <TypedFilter figure label="most" width={72} {...bind('teethMax')} />
-      <ChoiceFilter label="Material" width={128} choices={materials} {...bind('material')} />
-      <ChoiceFilter label="Standing" width={108} choices={standings} {...bind('standing')} />
+      {(!narrow || shown) && (
+        <>
+          <ChoiceFilter label="Kind" width={128} choices={kinds} {...bind('kind')} />
+          <ChoiceFilter label="Module, mm" width={92} choices={modules} {...bind('module')} />
+          <TypedFilter figure label="Teeth, least" width={84} {...bind('teethMin')} />
+          <TypedFilter figure label="most" width={72} {...bind('teethMax')} />
+          <ChoiceFilter label="Material" width={128} choices={materials} {...bind('material')} />
+          <ChoiceFilter label="Standing" width={108} choices={standings} {...bind('standing')} />
+        </>
+      )}
       {shown && (
         <>
           <ChoiceFilter
@@ -101,7 +110,7 @@ export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
       )}
       {!rareSet && (
         <Button startIcon={<Tune />} aria-expanded={shown} onClick={() => setOpen(!open)}>
-          {open ? 'Fewer' : 'More'}
+          {open ? 'Fewer' : narrow ? 'Filters' : 'More'}
         </Button>
       )}
     </FilterBar>

@@ -15,7 +15,7 @@ import { useNotices } from '../../components/Notices';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState } from '../../components/useListState';
 import { attributeOf, figureOf } from './attributes';
-import { hiddenColumns, PART_COLUMNS } from './partColumns';
+import { columnsFor, hiddenColumns, type TableWidth } from './partColumns';
 import { PART_FILTERS, PART_SORTS, partQuery } from './partFilters';
 import { PartsFilterBar } from './PartsFilterBar';
 
@@ -53,6 +53,8 @@ export default function PartsPage() {
   const theme = useTheme();
   const narrow = useMediaQuery(theme.breakpoints.down('sm'));
   const wide = useMediaQuery('(min-width: 1400px)');
+  const full = useMediaQuery('(min-width: 1700px)');
+  const width: TableWidth = narrow ? 'narrow' : full ? 'full' : wide ? 'wide' : 'middle';
   const { can } = useMe();
   const { tell } = useNotices();
   const state = useListState(PART_FILTERS, PART_SORTS);
@@ -96,7 +98,7 @@ export default function PartsPage() {
       />
       <DataTable<PartSummary>
         label="Parts"
-        columns={PART_COLUMNS}
+        columns={columnsFor(width)}
         rows={page?.items}
         total={page?.total}
         getRowId={(part) => part.id}
@@ -107,7 +109,7 @@ export default function PartsPage() {
         onOpen={(part) => void navigate(`/parts/${encodeURIComponent(part.number)}`)}
         selection={narrow ? undefined : selection}
         onSelection={setSelection}
-        hidden={hiddenColumns(narrow ? 'narrow' : wide ? 'wide' : 'middle')}
+        hidden={hiddenColumns(width)}
         empty={
           filtered ? (
             <EmptyState

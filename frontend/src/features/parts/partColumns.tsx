@@ -36,6 +36,7 @@ export const PART_COLUMNS: Column[] = [
         style={{ color: 'inherit', textDecoration: 'none' }}
       >
         {row.number}
+        {row.standing === 'withdrawn' && <span title="withdrawn"> ✕</span>}
       </Link>
     ),
   },
@@ -46,10 +47,10 @@ export const PART_COLUMNS: Column[] = [
     width: 112,
     valueFormatter: (kind: PartSummary['kind']) => KIND_NAMES[kind],
   },
-  attributeColumn('teeth', 'Teeth', 62),
-  attributeColumn('module', 'Module mm', 92),
+  attributeColumn('teeth', 'Teeth', 84),
+  attributeColumn('module', 'Module mm', 104),
   {
-    ...attributeColumn('helixAngleDeg', 'Helix', 84, false),
+    ...attributeColumn('helixAngleDeg', 'Helix', 86, false),
     valueGetter: (_, part) => {
       const angle = figureOf(part, 'helixAngleDeg');
       if (angle === null) return '';
@@ -59,12 +60,12 @@ export const PART_COLUMNS: Column[] = [
     valueFormatter: undefined,
   },
   {
-    ...attributeColumn('profileShift', 'Shift x', 68, false),
+    ...attributeColumn('profileShift', 'Shift x', 76, false),
     valueGetter: (_, part) => (figureOf(part, 'teeth') === null ? null : figureOf(part, 'profileShift')),
     valueFormatter: (value: number | null) => (value === null ? NOTHING : formatFixed(value, 3)),
   },
-  attributeColumn('faceWidth', 'Face mm', 78),
-  attributeColumn('bore', 'Bore mm', 78),
+  attributeColumn('faceWidth', 'Face mm', 84),
+  attributeColumn('bore', 'Bore mm', 84),
   {
     field: 'material',
     headerName: 'Material',
@@ -96,16 +97,36 @@ export const PART_COLUMNS: Column[] = [
   },
 ];
 
-/** Shown beside the number on a narrow screen. */
-const NARROW = new Set(['number', 'description', 'teeth', 'module', 'standing']);
-/** Left out where a laptop's width would cramp the rest. */
-const WIDE_ONLY = new Set(['updatedAt', 'profileShift', 'mass']);
+/** How much of a table a screen has room for. */
+export type TableWidth = 'narrow' | 'middle' | 'wide' | 'full';
 
-export function hiddenColumns(width: 'narrow' | 'middle' | 'wide'): Record<string, boolean> {
+/** The least room in which a column shows; columns not named here show from `middle` on. */
+const ROOM: Partial<Record<string, readonly TableWidth[]>> = {
+  number: ['narrow', 'middle', 'wide', 'full'],
+  description: ['narrow', 'middle', 'wide', 'full'],
+  teeth: ['narrow', 'middle', 'wide', 'full'],
+  module: ['narrow', 'middle', 'wide', 'full'],
+  material: ['wide', 'full'],
+  mass: ['wide', 'full'],
+  profileShift: ['full'],
+  updatedAt: ['full'],
+};
+
+const FROM_MIDDLE: readonly TableWidth[] = ['middle', 'wide', 'full'];
+
+export function hiddenColumns(width: TableWidth): Record<string, boolean> {
   return Object.fromEntries(
-    PART_COLUMNS.map(({ field }) => [
-      field,
-      width === 'wide' || (width === 'middle' ? !WIDE_ONLY.has(field) : NARROW.has(field)),
-    ]),
+    PART_COLUMNS.map(({ field }) => [field, (ROOM[field] ?? FROM_MIDDLE).includes(width)]),
   );
+}
+
+/** On a narrow screen the columns draw closer, and the standing moves into the number. */
+export function columnsFor(width: TableWidth): Column[] {
+  if (width !== 'narrow') return PART_COLUMNS;
+  return PART_COLUMNS.map((column) => {
+    if (column.field === 'description') return { ...column, minWidth: 100 };
+    if (column.field === 'teeth') return { ...column, width: 66 };
+    if (column.field === 'module') return { ...column, headerName: 'm mm', width: 64 };
+    return column;
+  });
 }

@@ -66,8 +66,8 @@ const TOOTHED: readonly AttributeField[] = [
 ];
 
 const FINISH: readonly AttributeField[] = [
-  { ...mm('thicknessAllowanceUpper', 'Thickness allowance, upper', false), hint: '0 or below' },
-  { ...mm('thicknessAllowanceLower', 'Thickness allowance, lower', false), hint: '0 or below' },
+  { ...mm('thicknessAllowanceUpper', 'Tooth allowance, upper', false), hint: 'On thickness, 0 or below' },
+  { ...mm('thicknessAllowanceLower', 'Tooth allowance, lower', false), hint: '0 or below' },
   text('heatTreatment', 'Heat treatment', false),
   text('hardness', 'Hardness', false, 'With its scale, such as 58 HRC'),
 ];
