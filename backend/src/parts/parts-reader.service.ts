@@ -11,7 +11,7 @@ import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js
 import { type PartDto, toPartDto } from './dto/part.dto.js';
 import { Part } from './entities/part.entity.js';
 import { type PartStanding } from './part-kinds.js';
-import { matchText } from './part-text-search.js';
+import { narrowToAnyOf, narrowToText } from './part-text-search.js';
 
 /** Most materials offered in the filter bar. */
 const MOST_MATERIALS = 200;
@@ -36,7 +36,8 @@ export class PartsReader {
   /** One page of the library; sorted by number when nothing else is asked for. */
   async list(query: PartListQueryDto): Promise<Page<PartSummaryDto>> {
     const list = parseListQuery(query, PART_SORTS);
-    const rows = this.filtered(query, list.text);
+    const rows = this.filtered(query);
+    if (list.text) await narrowToText(rows, list.text);
     const total = await rows.getCount();
     order(rows, list.sorts.length > 0 ? list.sorts : [{ field: 'number', direction: 'ASC' }]);
     // Sorting ids alone keeps the sort small: whole rows are read for this page only.
@@ -91,7 +92,7 @@ export class PartsReader {
         .orderBy('part.number'),
     );
     const anywhere = this.parts.createQueryBuilder('part');
-    matchText(anywhere, text, limit);
+    narrowToAnyOf(anywhere, text, limit);
     const others = named.length < limit ? await brief(anywhere) : [];
     const found = new Map([...named, ...others].map((part) => [part.id, part]));
     return [...found.values()].slice(0, limit).map(({ number, description }) => ({ number, description }));
@@ -119,13 +120,12 @@ export class PartsReader {
     return part;
   }
 
-  private filtered(query: PartListQueryDto, text: string | null): SelectQueryBuilder<Part> {
+  private filtered(query: PartListQueryDto): SelectQueryBuilder<Part> {
     const rows = this.parts.createQueryBuilder('part');
     for (const [field, condition] of CONDITIONS) {
       const value = query[field];
       if (value !== undefined) rows.andWhere(`part.${condition} :${field}`, { [field]: value });
     }
-    if (text) matchText(rows, text);
     return rows;
   }
 }
