@@ -10,7 +10,8 @@ import { SearchEnded, WorkWatch } from './work-watch.js';
 
 /**
  * The best trains for a request, exact and the same on every run. `complete: true` means that nothing in the
- * space outranks the options returned (with `bestOf: 'each-count'`, within their stage count); after a stop or the time limit it is false and the best so far are given.
+ * space outranks the options returned (with `bestOf: 'each-count'`, within their stage count); after a stop or the
+ * time limit it is false and the best so far are given.
  * Order: the objective as whole nm or mg, then ratio error (exact), sum of distances, fewer stages, teeth.
  * Orders of the same stages are one option for `centre-distance` and `ratio-error` without an envelope, else
  * separate options. Without a load every stage has the smallest module listed.

@@ -116,7 +116,8 @@ export class OptionRequestDto {
     enum: ['all', 'each-count'],
     required: false,
     default: 'all',
-    description: 'Whether the stage counts compete for the places or each keeps its own best; briefs: each-count',
+    description:
+      'Whether the stage counts compete for the places or each keeps its own best; briefs: each-count',
   })
   bestOf?: 'all' | 'each-count';
 
