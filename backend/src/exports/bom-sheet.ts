@@ -2,7 +2,7 @@ import { partNumberText } from '@stageyard/libs/bill-of-materials';
 import { type CellValue, type Worksheet } from 'exceljs';
 import { type BomDto, type BomLineDto } from '../trains/dto/bom.dto.js';
 import { type Column, type PlacedTable, writeTable } from './table.js';
-import { HEAD_ROW } from './sheet-heading.js';
+import { HEAD_ROW, setPrintArea } from './sheet-heading.js';
 import { COLOUR, dress, font, RULE_BELOW, TOTAL_ABOVE } from './workbook-style.js';
 
 const MONEY = '#,##0.00';
@@ -28,15 +28,15 @@ export const BOM_COLUMNS: readonly Column<BomLineDto>[] = [
         : {},
   },
   { title: 'Description', width: 40, kind: 'words', value: (line) => line.description },
-  { title: 'Quantity', width: 9, kind: 'figure', value: (line) => line.quantity, numFmt: '0.###' },
+  { title: 'Quantity', width: 10, kind: 'figure', value: (line) => line.quantity, numFmt: '0.###' },
   { title: 'Unit', width: 6, kind: 'words', value: (line) => line.unit },
   { title: 'Material', width: 16, kind: 'words', value: (line) => line.material },
   { title: 'Made or bought', width: 10, kind: 'words', value: (line) => line.supply },
   { title: 'Supplier', width: 18, kind: 'words', value: (line) => line.supplier },
   { title: 'Unit price', width: 10, kind: 'figure', value: () => null, numFmt: MONEY },
   { title: 'Line total', width: 11, kind: 'figure', value: (_, row) => lineTotal(row), numFmt: MONEY },
-  { title: 'Lead time, days', width: 9, kind: 'figure', value: () => null, numFmt: '0' },
-  { title: 'Mass each, kg', width: 9, kind: 'figure', value: (line) => line.mass, numFmt: MASS },
+  { title: 'Lead time, days', width: 10, kind: 'figure', value: () => null, numFmt: '0' },
+  { title: 'Mass each, kg', width: 10, kind: 'figure', value: (line) => line.mass, numFmt: MASS },
   { title: 'Source', width: 20, kind: 'words', value: (line) => line.source.join(', ') },
   {
     title: 'Note',
@@ -57,7 +57,7 @@ export function writeBomSheet(sheet: Worksheet, bom: BomDto): void {
     to: { row: Math.max(table.headRow, table.lastRow), column: BOM_COLUMNS.length },
   };
   writeSums(sheet, bom, table);
-  sheet.pageSetup.printArea = `A1:N${table.lastRow + 1}`;
+  setPrintArea(sheet, 'N', table.lastRow + 1);
 }
 
 /** Shows nothing until a price is filled in; the stored result is what a reader without formulas sees. */
@@ -83,10 +83,17 @@ function writeSums(sheet: Worksheet, { lines, totals }: BomDto, { firstRow, last
   const masses = `${EACH_MASS}${firstRow}:${EACH_MASS}${last}`;
   totalMass.value = { formula: `SUMPRODUCT(${quantities},${masses})`, result: totals.massKg };
   totalMass.numFmt = MASS;
+  for (const sum of [totalPrice, totalMass]) sum.alignment = { horizontal: 'right' };
+  sheet.mergeCells(row, 13, row, 14);
+  sheet.getCell(row, 13).alignment = { indent: 1 };
+  sheet.getCell(row, 3).alignment = { indent: 1 };
   sheet.getCell(row, 13).value =
     unknown === 0 ? 'kg in all' : `kg in all, without ${unknown} of unknown mass`;
 }
 
+/** The kit's note as it stands, then the flags as one sentence. */
 function noteOf({ note, flags }: BomLineDto): string {
-  return [note, ...flags].filter((text) => text !== '').join('; ');
+  const list = flags.join('; ');
+  const warning = list === '' ? '' : `${list.charAt(0).toUpperCase()}${list.slice(1)}.`;
+  return [note, warning].filter((text) => text !== '').join(' ');
 }

@@ -28,6 +28,8 @@ export async function bomWorkbook({ train, bom, gearData }: TrainRecord, date: D
   workbook.lastModifiedBy = 'Stageyard';
   workbook.created = date;
   workbook.modified = date;
+  // Whoever opens it sees totals of what they filled in, not what was stored.
+  workbook.calcProperties.fullCalcOnLoad = true;
   const { png } = stripPicture(train.spec, PICTURE.width, PICTURE.height);
   const imageId = workbook.addImage({ base64: png.toString('base64'), extension: 'png' });
   const heading = { train, date, picture: { ...PICTURE, imageId } };

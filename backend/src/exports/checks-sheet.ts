@@ -1,7 +1,7 @@
 import { type Worksheet } from 'exceljs';
 import { type TrainDto } from '../trains/dto/train.dto.js';
 import { CAUTIONS } from './cautions.js';
-import { HEAD_ROW } from './sheet-heading.js';
+import { HEAD_ROW, setPrintArea } from './sheet-heading.js';
 import { type Column, writeTable } from './table.js';
 import { COLOUR, dress, font, RULE_BELOW, VERDICT_COLOUR } from './workbook-style.js';
 
@@ -47,7 +47,7 @@ export function writeChecksSheet(sheet: Worksheet, { figures }: TrainDto): void 
     to: { row: Math.max(table.headRow, table.lastRow), column: CHECK_COLUMNS.length },
   };
   const last = writeCautions(sheet, table.lastRow + 2);
-  sheet.pageSetup.printArea = `A1:G${last}`;
+  setPrintArea(sheet, 'G', last);
 }
 
 function checkRows({ checks, findings }: TrainDto['figures']): CheckRow[] {

@@ -59,6 +59,11 @@ export function addHeadedSheet(workbook: Workbook, name: string, heading: Headin
   return sheet;
 }
 
+/** Everything from the first cell to this column and row is printed. The writer adds the column's dollar sign itself. */
+export function setPrintArea(sheet: Worksheet, column: string, row: number): void {
+  sheet.pageSetup.printArea = `A$1:${column}$${row}`;
+}
+
 function headLines({ train, subject, date }: Heading): string[] {
   const { brief } = train;
   const from = brief ? `, from brief ${brief.code} “${brief.title}”` : '';

@@ -3,7 +3,7 @@ import { type MeshGeometry } from '@stageyard/libs/gear-geometry';
 import { type TrainShaft } from '@stageyard/libs/train-planner';
 import { type Worksheet } from 'exceljs';
 import { type TrainDto } from '../trains/dto/train.dto.js';
-import { HEAD_ROW } from './sheet-heading.js';
+import { HEAD_ROW, setPrintArea } from './sheet-heading.js';
 import { type Column, writeTable } from './table.js';
 import { COLOUR, dress, font } from './workbook-style.js';
 
@@ -12,6 +12,9 @@ const GROUP_TITLES: Record<GearDataRow['group'], string> = {
   teeth: 'Gear teeth',
   mate: 'Mating gear',
 };
+
+/** Text among figures, such as the basic rack, is longer than they are. */
+const WRAPPED = { horizontal: 'right', vertical: 'top', wrapText: true } as const;
 
 /** Columns of the sheet: three of words, then one a gear, with room for the picture above the last three. */
 export function stageColumns(gears: number): number {
@@ -36,7 +39,7 @@ export function writeStagesSheet(
     figures: train.figures.shafts[index],
   }));
   const last = writeBlock(sheet, meshes + 2, 'Shafts', shaftColumns(shafts), SHAFT_ROWS);
-  sheet.pageSetup.printArea = `A1:${sheet.getColumn(width).letter}${last}`;
+  setPrintArea(sheet, sheet.getColumn(width).letter, last);
 }
 
 /** One row of gear data over all gears. */
@@ -73,6 +76,7 @@ function gearColumns(gearData: readonly TrainGearData[]): Column<GearRow>[] {
       look: ({ first, values }) => ({
         ...(typeof values[index] === 'number' ? { numFmt: decimals(first.digits) } : {}),
         ...(values[index] === null ? { font: font({ color: { argb: COLOUR.slate } }) } : {}),
+        ...(typeof values[index] === 'string' ? { alignment: WRAPPED } : {}),
       }),
     })),
   ];

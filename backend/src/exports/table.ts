@@ -34,7 +34,8 @@ export function writeTable<Row>(
     const cell = sheet.getCell(headRow, index + 1);
     cell.value = title;
     const horizontal = kind === 'figure' ? 'right' : 'left';
-    dress(cell, { ...HEAD_LOOK, alignment: { ...HEAD_LOOK.alignment, horizontal } });
+    const indent = kind === 'figure' ? 0 : 1;
+    dress(cell, { ...HEAD_LOOK, alignment: { ...HEAD_LOOK.alignment, horizontal, indent } });
   });
   sheet.getRow(headRow).height = 30;
   rows.forEach((row, offset) => {
@@ -56,6 +57,8 @@ function plainLook({ kind, numFmt }: Pick<Column<never>, 'kind' | 'numFmt'>): Ce
       vertical: 'top',
       horizontal: kind === 'figure' ? 'right' : 'left',
       wrapText: kind === 'words',
+      // Words beside right-aligned figures need air between.
+      indent: kind === 'figure' ? 0 : 1,
     },
     ...(numFmt ? { numFmt } : {}),
   };
