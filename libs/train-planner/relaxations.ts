@@ -70,7 +70,8 @@ export const RELAXATIONS: readonly Relaxation[] = [
     towards: -1,
     perUnit: 1000,
     current: ({ leastContactRatio }) => Math.ceil(leastContactRatio * 1000 - GRAIN),
-    loosest: 0,
+    // Below 1 the teeth lose contact: no brief should be loosened that far.
+    loosest: 1000,
     change: (_request, leastContactRatio) => ({ leastContactRatio }),
     neededBy: (train, pool) => -most(train, (row) => -Math.floor((pool.contactRatio[row] as number) * 1000)),
     words: (figure, { leastContactRatio }) => ({

@@ -16,7 +16,10 @@ export class WorkWatch {
   #stepsLeft = Infinity;
   #phase = { name: '', stages: 0, total: 0, settledBefore: 0 };
   settled = 0;
-  found = 0;
+  /** How many trains the search holds; asked for every report. */
+  found: () => number = () => 0;
+  /** Counted in whole looks at the clock. */
+  stepsTaken = 0;
 
   constructor(control: SearchControl) {
     this.#control = control;
@@ -50,6 +53,7 @@ export class WorkWatch {
   step(): void {
     if (++this.#sinceLook < STEPS_PER_LOOK) return;
     this.#sinceLook = 0;
+    this.stepsTaken += STEPS_PER_LOOK;
     this.#stepsLeft -= STEPS_PER_LOOK;
     if (this.#stepsLeft <= 0) throw new SearchEnded();
     this.look();
@@ -68,7 +72,7 @@ export class WorkWatch {
     this.#lastReport = this.#now();
     const { name, stages, total, settledBefore } = this.#phase;
     const settled = this.settled - settledBefore;
-    this.#control.onProgress?.({ phase: name, stages, settled, total, found: this.found });
+    this.#control.onProgress?.({ phase: name, stages, settled, total, found: this.found() });
   }
 
   #now(): number {
