@@ -774,7 +774,7 @@ export interface components {
       bore: number;
       /** @description Hub diameter (mm) */
       hubDiameter?: number | null;
-      /** @description Hub length beyond the face (mm) */
+      /** @description Length of the hub beyond the face width; the bore is as long as both together (mm) */
       hubLength?: number | null;
     };
     PinionShaftAttributes: {
@@ -1528,6 +1528,12 @@ export interface components {
        * @default 50
        */
       limit: number;
+      /**
+       * @description Whether the stage counts compete for the places or each keeps its own best; briefs: each-count
+       * @default all
+       * @enum {string}
+       */
+      bestOf: 'all' | 'each-count';
     };
     TrainStage: {
       pinionTeeth: number;
@@ -1798,6 +1804,12 @@ export interface components {
        * @default 50
        */
       limit: number;
+      /**
+       * @description Whether the stage counts compete for the places or each keeps its own best; briefs: each-count
+       * @default all
+       * @enum {string}
+       */
+      bestOf: 'all' | 'each-count';
       /** @description Recorded; used for shaft speeds and sizes. Strength is not rated from it yet. */
       duty?: components['schemas']['Duty'];
     };
@@ -1941,14 +1953,14 @@ export interface components {
       wheel: components['schemas']['SpecGear'];
     };
     /**
-     * @description Where the diameter comes from: torque, a stock bore, the starting figure, or a person
+     * @description Where the diameter comes from: the torque (raised to the next bearing bore where it fits), a stock bore, the starting figure, or a person
      * @enum {string}
      */
     DiameterBasis: 'torque' | 'bore' | 'start' | 'typed';
     SpecShaft: {
       /** @description mm */
       diameter: number;
-      /** @description Where the diameter comes from: torque, a stock bore, the starting figure, or a person */
+      /** @description Where the diameter comes from: the torque (raised to the next bearing bore where it fits), a stock bore, the starting figure, or a person */
       basis: components['schemas']['DiameterBasis'];
     };
     TrainSpec: {
