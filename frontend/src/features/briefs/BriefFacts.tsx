@@ -3,7 +3,7 @@ import Typography from '@mui/material/Typography';
 import { formatModule, formatTrimmed } from '@stageyard/libs/units';
 import type { Brief, Requirement } from '../../api/types';
 import { formatCount, formatWhen } from '../../components/figures';
-import { DIRECTION_WORDS, OBJECTIVE_WORDS, SHIFT_WORDS, UNDERCUT_WORDS } from './choiceWords';
+import { BEST_OF_WORDS, DIRECTION_WORDS, OBJECTIVE_WORDS, SHIFT_WORDS, UNDERCUT_WORDS } from './choiceWords';
 
 /** The whole brief to read, for everybody: the same groups as the form, without fields. */
 export function BriefFacts({ brief }: { brief: Brief }) {
@@ -69,6 +69,10 @@ function facts(requirement: Requirement): [string, string][] {
     ['Stages', range(stages)],
     ['Output turns', DIRECTION_WORDS[requirement.direction ?? 'any']],
     ['Best by', OBJECTIVE_WORDS[requirement.objective]],
+    [
+      'Options kept',
+      `${requirement.limit ?? 50}, the best ${BEST_OF_WORDS[requirement.bestOf ?? 'all'].toLowerCase()}`,
+    ],
     ['Pinion teeth', range(teeth.pinion)],
     ['Wheel teeth', range(teeth.wheel)],
     ['Stage ratio', `${stageRatio?.min ?? 1} to ${stageRatio?.max ?? 'no limit'}`],

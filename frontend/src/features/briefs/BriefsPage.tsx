@@ -30,7 +30,7 @@ const right = { align: 'right', headerAlign: 'right' } as const;
 
 const COLUMNS: GridColDef<BriefSummary>[] = [
   { field: 'code', headerName: 'Brief', width: 80, cellClassName: 'part-number' },
-  { field: 'title', headerName: 'Title', flex: 1, minWidth: 180 },
+  { field: 'title', headerName: 'Title', flex: 1, minWidth: 150 },
   {
     field: 'ratioTarget',
     headerName: 'Ratio',
@@ -74,7 +74,14 @@ const COLUMNS: GridColDef<BriefSummary>[] = [
 ];
 
 /** Left out where the screen is a phone's. */
-const NARROW = { stages: false, objective: false, pinCount: false, owner: false, updatedAt: false };
+const NARROW = {
+  ratioTarget: false,
+  stages: false,
+  objective: false,
+  pinCount: false,
+  owner: false,
+  updatedAt: false,
+};
 
 function standingWords({ standing, latestSearch }: BriefSummary): string {
   if (latestSearch?.state === 'running' || latestSearch?.state === 'queued') return 'searching';

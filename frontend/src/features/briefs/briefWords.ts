@@ -10,7 +10,7 @@ export function briefWords(requirement: Requirement): string[] {
   parts.push(
     stages.min === stages.max
       ? `${stages.min} ${stages.min === 1 ? 'stage' : 'stages'}`
-      : `${stages.min} to ${stages.max} stages`,
+      : `${stages.min}–${stages.max} stages`,
   );
   if (duty?.outputTorque !== undefined) parts.push(`${formatTrimmed(duty.outputTorque, 2)} N·m out`);
   if (duty?.inputSpeed !== undefined) parts.push(`${formatCount(duty.inputSpeed)} rpm in`);
@@ -31,7 +31,7 @@ function insideWords(envelope: Requirement['envelope']): string | null {
 }
 
 function contactWords({ leastContactRatio = 1.2, centreDistanceAllowance = 0 }: Requirement): string {
-  const least = `contact ratio at least ${leastContactRatio.toFixed(2)}`;
+  const least = `contact from ${leastContactRatio.toFixed(2)}`;
   return centreDistanceAllowance === 0
     ? least
     : `${least} at +${formatTrimmed(centreDistanceAllowance, 4)} m`;

@@ -11,6 +11,8 @@ export const OBJECTIVE_WORDS = {
   mass: 'Mass',
 } as const;
 
+export const BEST_OF_WORDS = { 'each-count': 'Of each stage count', all: 'Of all counts together' } as const;
+
 export const SHIFT_WORDS = { none: 'None', 'clear-undercut': 'Clear undercut' } as const;
 
 export const UNDERCUT_WORDS = { allow: 'Allowed', refuse: 'Refused' } as const;

@@ -45,7 +45,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
       >
         <TableHead>
           <TableRow>
-            <TableCell sx={{ verticalAlign: 'bottom', minWidth: 168 }}>
+            <TableCell sx={{ verticalAlign: 'bottom', minWidth: { xs: 110, sm: 168 } }}>
               <Typography variant="body2" color="textSecondary">
                 All drawn on one scale
               </Typography>

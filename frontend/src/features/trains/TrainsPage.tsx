@@ -41,7 +41,7 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
       ),
     },
     { field: 'code', headerName: 'Train', width: 84, cellClassName: 'part-number' },
-    { field: 'title', headerName: 'Title', flex: 2, minWidth: 190 },
+    { field: 'title', headerName: 'Title', flex: 2, minWidth: 160 },
     {
       field: 'revision',
       headerName: 'Revision',

@@ -9,7 +9,7 @@ import { FigureField, RangeFields } from './FigureField';
 import { FormSection, WholeRow } from './FormSection';
 import { ModulesField } from './ModulesField';
 import { FieldRemarks, useRemarks } from './remarks';
-import { DIRECTION_WORDS, OBJECTIVE_WORDS, SHIFT_WORDS, UNDERCUT_WORDS } from '../choiceWords';
+import { BEST_OF_WORDS, DIRECTION_WORDS, OBJECTIVE_WORDS, SHIFT_WORDS, UNDERCUT_WORDS } from '../choiceWords';
 
 const choicesOf = (words: Record<string, string>) =>
   Object.entries(words).map(([value, text]) => ({ value, words: text }));
@@ -36,6 +36,7 @@ export function BriefFields() {
         <ChoiceField field="direction" choices={choicesOf(DIRECTION_WORDS)} />
         <ChoiceField field="objective" choices={choicesOf(OBJECTIVE_WORDS)} />
         <FigureField field="limit" />
+        <ChoiceField field="bestOf" choices={choicesOf(BEST_OF_WORDS)} />
       </FormSection>
       <FormSection title="Teeth">
         <RangeFields from="pinionMin" to="pinionMax" title="Pinion" />

@@ -30,6 +30,7 @@ export interface BriefForm {
   direction: 'any' | 'same' | 'opposite';
   objective: 'centre-distance' | 'ratio-error' | 'mass';
   limit: string;
+  bestOf: 'each-count' | 'all';
   inputSpeed: string;
   outputTorque: string;
   applicationFactor: string;
@@ -66,6 +67,7 @@ export const NEW_BRIEF: BriefForm = {
   direction: 'any',
   objective: 'centre-distance',
   limit: '50',
+  bestOf: 'each-count',
   inputSpeed: '',
   outputTorque: '',
   applicationFactor: '1.25',
@@ -107,6 +109,7 @@ export function formFromRequirement(requirement: Requirement): Omit<BriefForm, '
     direction: requirement.direction ?? 'any',
     objective: requirement.objective,
     limit: text(requirement.limit ?? 50),
+    bestOf: requirement.bestOf ?? 'all',
     inputSpeed: text(duty?.inputSpeed),
     outputTorque: text(duty?.outputTorque),
     applicationFactor: text(duty?.applicationFactor ?? 1.25),

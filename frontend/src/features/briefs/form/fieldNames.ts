@@ -29,6 +29,7 @@ export const FIELD_NAMES: Record<BriefField, { path: string; label: string }> = 
   direction: { path: 'direction', label: 'Output turns' },
   objective: { path: 'objective', label: 'Best by' },
   limit: { path: 'limit', label: 'Options to keep' },
+  bestOf: { path: 'bestOf', label: 'Keep the best' },
   inputSpeed: { path: 'duty.inputSpeed', label: 'Input speed' },
   outputTorque: { path: 'duty.outputTorque', label: 'Output torque' },
   applicationFactor: { path: 'duty.applicationFactor', label: 'Application factor' },

@@ -2,7 +2,12 @@ import { describe, expect, it } from 'vitest';
 import { formFromBrief, NEW_BRIEF, type BriefForm } from './briefForm';
 import { requirementFromForm } from './requirementFromForm';
 
-const filled: BriefForm = { ...NEW_BRIEF, title: 'Kelp-line winch', ratioTarget: '37,5', tolerancePercent: '0,5' };
+const filled: BriefForm = {
+  ...NEW_BRIEF,
+  title: 'Kelp-line winch',
+  ratioTarget: '37,5',
+  tolerancePercent: '0,5',
+};
 
 function requirementOf(form: BriefForm) {
   const reading = requirementFromForm(form);
@@ -32,7 +37,12 @@ describe('requirementFromForm', () => {
 
   it('names every field that cannot be read, and invents nothing in its place', () => {
     const issues = issuesOf({ ...filled, ratioTarget: 'abc', pinionMin: '', stagesMax: '2.5', modules: [] });
-    expect(issues.map(({ field }) => field).sort()).toEqual(['modules', 'pinionMin', 'ratioTarget', 'stagesMax']);
+    expect(issues.map(({ field }) => field).sort()).toEqual([
+      'modules',
+      'pinionMin',
+      'ratioTarget',
+      'stagesMax',
+    ]);
     expect(issues.find(({ field }) => field === 'pinionMin')?.message).toContain('missing');
     expect(issues.find(({ field }) => field === 'stagesMax')?.message).toContain('whole');
   });

@@ -41,6 +41,7 @@ export function requirementFromForm(form: BriefForm): RequirementReading {
     direction: form.direction,
     objective: form.objective,
     limit: reader.whole('limit', 50),
+    bestOf: form.bestOf,
     duty: readDuty(reader),
   };
   const envelope = readEnvelope(reader);

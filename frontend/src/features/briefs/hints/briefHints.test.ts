@@ -58,7 +58,9 @@ describe('briefHints', () => {
   it('puts undercut at the full-depth 20° rack limit of 17.1 teeth, so 17 are undercut and 18 are not', () => {
     // Published: 17.0973 teeth (Shigley, Norton, Mott; from memory), see the project's check values.
     const refused = messages({ pinionMin: '17', shiftPolicy: 'none', undercut: 'refuse' });
-    expect(refused).toEqual(['Pinion from 17 teeth: undercut below 18 (20°), and refused, so pinions begin at 18.']);
+    expect(refused).toEqual([
+      'Pinion from 17 teeth: undercut below 18 (20°), and refused, so pinions begin at 18.',
+    ]);
     expect(messages({ pinionMin: '18', shiftPolicy: 'none', undercut: 'refuse' })).toEqual([]);
   });
 
@@ -72,7 +74,9 @@ describe('briefHints', () => {
     const hints = hintsFor({ centreDistanceAllowance: '1,2' });
     const hint = hints.find(({ field }) => field === 'centreDistanceAllowance');
     expect(hint?.kind).toBe('crossed');
-    expect(hint?.message).toMatch(/^Allowance 1\.2 m leaves a contact ratio of [01]\.\d{3} even between 24 and 150 teeth/);
+    expect(hint?.message).toMatch(
+      /^Allowance 1\.2 m leaves a contact ratio of [01]\.\d{3} even between 24 and 150 teeth/,
+    );
   });
 
   it('knows that a spur pair at 20° never reaches a contact ratio of 2', () => {
@@ -82,7 +86,9 @@ describe('briefHints', () => {
   });
 
   it('counts the stages that turn the output the wished way', () => {
-    expect(hintsFor({ direction: 'same', stagesMin: '1', stagesMax: '1', ratioTarget: '5' })[0]).toMatchObject({
+    expect(
+      hintsFor({ direction: 'same', stagesMin: '1', stagesMax: '1', ratioTarget: '5' })[0],
+    ).toMatchObject({
       field: 'direction',
       kind: 'crossed',
     });

@@ -7,7 +7,8 @@ import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
-import { useMemo, type ReactNode } from 'react';
+import Button from '@mui/material/Button';
+import { useMemo, useState, type ReactNode } from 'react';
 import type { TrainOption } from '../../../api/types';
 import { commonScale } from '../../../drawings/TrainStrip';
 import { OptionTableRow, STRIP } from './OptionTableRow';
@@ -47,11 +48,17 @@ const HEADS: Head[] = [
   { text: 'Backlash', unit: '′', sort: 'backlash' },
 ];
 
+/** Rows drawn before the reader asks for more: the drawings of thousands would stall the page. */
+const DRAWN_AT_ONCE = 200;
+
 /** The options, one row each, with the train drawn on one scale. Arrows move, Space pins, Ctrl+C copies. */
 export function OptionTable(props: OptionTableProps) {
   const { options, pinned, onPin, order, onSort } = props;
+  const [room, setRoom] = useState(DRAWN_AT_ONCE);
+  const drawn = options.slice(0, room);
   const { body, rowProps, copy, selected } = useRowSelection({
-    rows: options.length,
+    rows: drawn.length,
+    allRows: options.length,
     heads: OPTION_HEADS,
     cellsOf: (row) => (options[row] ? optionRow(options[row]) : []),
     onSpace: (row) => {
@@ -69,10 +76,10 @@ export function OptionTable(props: OptionTableProps) {
           role="grid"
           aria-label="Options"
           aria-multiselectable
-          sx={{ '& .MuiTableCell-root': { py: 0, px: 1, fontSize: '0.8125rem', whiteSpace: 'nowrap' } }}
+          sx={{ '& .MuiTableCell-root': { py: 0, px: 0.75, fontSize: '0.8125rem', whiteSpace: 'nowrap' } }}
         >
           <TableHead>
-            <TableRow sx={{ height: 32 }}>
+            <TableRow sx={{ height: 30 }}>
               <TableCell scope="col" sx={{ width: 34 }}>
                 Pin
               </TableCell>
@@ -82,7 +89,7 @@ export function OptionTable(props: OptionTableProps) {
             </TableRow>
           </TableHead>
           <TableBody ref={body}>
-            {options.map((option, row) => (
+            {drawn.map((option, row) => (
               <OptionTableRow
                 key={option.key}
                 option={option}
@@ -94,6 +101,11 @@ export function OptionTable(props: OptionTableProps) {
             ))}
           </TableBody>
         </Table>
+        {drawn.length < options.length && (
+          <Button variant="text" onClick={() => setRoom(room + DRAWN_AT_ONCE)} sx={{ m: 0.5 }}>
+            {`Show more; ${options.length - drawn.length} options are not shown yet`}
+          </Button>
+        )}
       </Box>
     </>
   );

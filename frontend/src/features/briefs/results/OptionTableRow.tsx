@@ -18,7 +18,7 @@ import {
 import { TrainStrip } from '../../../drawings/TrainStrip';
 
 /** The box a strip stands in, px. */
-export const STRIP = { width: 104, height: 36 } as const;
+export const STRIP = { width: 98, height: 36 } as const;
 
 interface OptionTableRowProps {
   option: TrainOption;

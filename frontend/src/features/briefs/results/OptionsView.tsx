@@ -45,7 +45,7 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
     <Box
       sx={{
         display: 'grid',
-        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: 'minmax(0, 1fr) 264px' },
+        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: 'minmax(0, 1fr) 236px', xl: 'minmax(0, 1fr) 280px' },
         columnGap: 2,
         rowGap: 2,
         alignItems: 'start',
@@ -78,12 +78,12 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
                   alignItems: 'center',
                   columnGap: 2,
                   rowGap: 0.5,
-                  mb: 0.75,
+                  mb: 0.5,
                 }}
               >
                 <OutcomeLine search={search} shown={shown.length} />
                 <StageFilter options={all} chosen={view.stages} onChoose={view.setStages} />
-                <Button variant="text" onClick={copy} sx={{ fontWeight: 500 }}>
+                <Button variant="text" onClick={copy} sx={{ fontWeight: 500, minHeight: 28, py: 0 }}>
                   {selected > 0 ? `Copy ${selected} selected` : 'Copy table'}
                 </Button>
               </Box>

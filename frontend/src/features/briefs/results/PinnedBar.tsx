@@ -17,7 +17,15 @@ export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean
     <Box
       component="section"
       aria-label="Pinned options"
-      sx={{ position: 'sticky', bottom: 0, zIndex: 3, pt: 1, pb: 1.5, mb: -3, bgcolor: 'background.default' }}
+      sx={{
+        position: 'sticky',
+        bottom: 0,
+        zIndex: 3,
+        pt: 0.5,
+        pb: 0.75,
+        mb: -3,
+        bgcolor: 'background.default',
+      }}
     >
       <Box
         sx={{
@@ -27,7 +35,7 @@ export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean
           columnGap: 2,
           rowGap: 1,
           px: 2,
-          py: 0.75,
+          py: 0.5,
           bgcolor: 'background.paper',
           border: '1px solid',
           borderColor: 'secondary.main',

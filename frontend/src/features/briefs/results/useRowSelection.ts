@@ -4,7 +4,10 @@ import { useNotices } from '../../../components/Notices';
 import { NO_ROWS, rowAfterKey, selectRow } from './rowSelection';
 
 interface RowSelectionOptions {
+  /** Rows on the screen. */
   rows: number;
+  /** Rows there are; copying without a selection takes them all. */
+  allRows: number;
   /** Cells of one row for the clipboard. */
   cellsOf: (row: number) => string[];
   heads: string[];
@@ -13,7 +16,7 @@ interface RowSelectionOptions {
 }
 
 /** Keyboard reach and selection for a plain table: arrows move, Shift extends, Ctrl+A all, Ctrl+C copies. */
-export function useRowSelection({ rows, cellsOf, heads, onSpace }: RowSelectionOptions) {
+export function useRowSelection({ rows, allRows, cellsOf, heads, onSpace }: RowSelectionOptions) {
   const [selection, setSelection] = useState(NO_ROWS);
   const body = useRef<HTMLTableSectionElement>(null);
   const { tell } = useNotices();
@@ -21,7 +24,7 @@ export function useRowSelection({ rows, cellsOf, heads, onSpace }: RowSelectionO
 
   async function copy(): Promise<void> {
     const chosen = [...selection.chosen].filter((row) => row < rows).sort((a, b) => a - b);
-    const copied = chosen.length > 0 ? chosen : Array.from({ length: rows }, (_, row) => row);
+    const copied = chosen.length > 0 ? chosen : Array.from({ length: allRows }, (_, row) => row);
     const done = await copyTsv([heads, ...copied.map(cellsOf)]);
     const what = copied.length === 1 ? '1 row' : `${copied.length} rows`;
     tell(done ? `${what} copied; paste into a spreadsheet.` : 'The browser did not allow copying.');

@@ -22,19 +22,26 @@ export function progressPercent(progress: SearchProgress | null): number | null 
 export const optionCount = (count: number): string =>
   count === 1 ? '1 option' : `${formatCount(count)} options`;
 
+export type SearchAsked = Pick<Search, 'state'> & {
+  request: Pick<Search['request'], 'bestOf' | 'limit' | 'stages'>;
+};
+
 /** The sentence after the count: how much was settled, and what that says about anything better. */
-export function outcomeWords(search: Pick<Search, 'state'>, outcome: SearchOutcome): string {
+export function outcomeWords(search: SearchAsked, outcome: SearchOutcome): string {
   const { complete, combinations, elapsedMs } = outcome.search;
   const settled = `${formatCount(combinations)} in ${seconds(elapsedMs)}`;
   if (complete) {
-    const last =
-      outcome.options.length === 0
-        ? 'No train meets every limit of this brief.'
-        : 'Nothing better exists inside this brief.';
-    return `Every combination settled: ${settled}. ${last}`;
+    return `Every combination settled: ${settled}. ${claim(search.request, outcome)}`;
   }
   const why = search.state === 'stopped' ? 'Stopped' : 'Stopped at the time limit';
   return `${why} after ${settled}. These are the best so far; better ones may exist.`;
+}
+
+/** What a settled search may claim; with a list for each stage count it claims it for each. */
+function claim({ bestOf, limit, stages }: SearchAsked['request'], { options }: SearchOutcome): string {
+  if (options.length === 0) return 'No train meets every limit of this brief.';
+  if (bestOf !== 'each-count' || stages.min === stages.max) return 'Nothing better exists inside this brief.';
+  return `The best ${limit ?? 50} of each stage count; nothing better exists inside this brief.`;
 }
 
 function seconds(ms: number): string {

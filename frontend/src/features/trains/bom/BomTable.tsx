@@ -23,14 +23,14 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
           <TableRow>
             <TableCell align="right">Find</TableCell>
             <TableCell>Part</TableCell>
-            <TableCell sx={{ width: '40%' }}>Description</TableCell>
+            <TableCell sx={{ width: '34%' }}>Description</TableCell>
             <TableCell align="right">Quantity</TableCell>
             <TableCell>Material</TableCell>
             <TableCell>Supply</TableCell>
             <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
               Each, kg
             </TableCell>
-            <TableCell>Used in</TableCell>
+            <TableCell sx={{ minWidth: 150 }}>Used in</TableCell>
           </TableRow>
         </TableHead>
         <TableBody>

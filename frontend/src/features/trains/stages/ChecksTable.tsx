@@ -39,7 +39,7 @@ export function ChecksTable({ checks }: { checks: readonly Check[] }) {
             const decimals = DECIMALS[check.unit] ?? 2;
             return (
               <TableRow key={`${check.code}-${index}`} sx={{ '&:last-of-type > *': { borderBottom: 0 } }}>
-                <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
+                <TableCell component="th" scope="row" sx={{ fontWeight: 400, minWidth: 130 }}>
                   {check.label}
                   {check.unit && (
                     <Box component="span" sx={{ color: 'text.secondary' }}>{`, ${check.unit}`}</Box>
