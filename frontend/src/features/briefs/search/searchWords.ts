@@ -5,8 +5,9 @@ import type { SearchProgress } from '../../../api/hooks/searchEvents';
 /** `Two stages: 1,204,331 of 41,208,113 combinations settled, 37 options so far`. */
 export function progressWords(progress: SearchProgress | null): string {
   if (!progress) return 'Waiting for a free worker…';
+  // A phase may settle more than it first counted on; then its total says nothing.
   const counts =
-    progress.total > 0
+    progress.total >= progress.settled && progress.total > 0
       ? `${formatCount(progress.settled)} of ${formatCount(progress.total)} combinations settled`
       : `${formatCount(progress.settled)} combinations settled`;
   const stages = ['', 'One stage', 'Two stages', 'Three stages'][progress.stages] ?? progress.phase;
