@@ -17,6 +17,7 @@ interface JourneyChecks {
 export const test = base.extend<JourneyOptions & JourneyChecks>({
   role: [null, { option: true }],
   scheme: ['light', { option: true }],
+  // eslint-disable-next-line no-empty-pattern -- the runner reads the names of a fixture's needs from this pattern
   baseURL: ({}, use) => use(process.env.STAGEYARD_JOURNEY_URL),
   storageState: ({ role }, use) => use(role === null ? undefined : stateFile(role)),
   colorScheme: ({ scheme }, use) => use(scheme),

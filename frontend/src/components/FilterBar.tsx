@@ -23,7 +23,12 @@ export function FilterBar({ children, filterCount, onClear, result, aside }: Fil
     >
       {children}
       {filterCount > 0 && (
-        <Button onClick={onClear}>Clear {filterCount === 1 ? 'the filter' : `${filterCount} filters`}</Button>
+        <Button
+          onClick={onClear}
+          aria-label={filterCount === 1 ? 'Clear the filter' : `Clear ${filterCount} filters`}
+        >
+          Clear
+        </Button>
       )}
       <Box sx={{ ml: 'auto', display: 'flex', alignItems: 'center', gap: 1.5, minHeight: 34 }}>
         {result !== undefined && (

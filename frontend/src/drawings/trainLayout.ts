@@ -78,7 +78,9 @@ export function layOut(
     };
   });
   const last = strip.axes.length - 1;
-  const wall = figures ? Math.max(0, (figures.box.length - strip.bounds.width) / 2) : 0;
+  const spare = figures ? (figures.box.length - strip.bounds.width) / 2 : 0;
+  // A wall thinner than a hundredth is rounding, not a wall.
+  const wall = spare > 0.01 ? spare : 0;
   // A shaft spans its gears' planes and half a gap each side; the first and the last run through their walls.
   const through = Math.max(gap / 2, wall);
   const shafts = strip.axes.map(({ x }, shaft): LaidShaft => {

@@ -82,7 +82,7 @@ export default function HomePage() {
           </Sheet>
         )}
         {!makes && !can('parts.edit') && overview.trains.length === 0 && overview.briefs.length === 0 && (
-          <Sheet>
+          <Sheet flush>
             <EmptyState
               title="Nothing waits for you"
               action={

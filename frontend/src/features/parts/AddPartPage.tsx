@@ -23,8 +23,7 @@ export default function AddPartPage() {
     const part = await answer(api.POST('/api/parts', { body: inputOf(form) }));
     refresh();
     tell(`${part.number} added.`);
-    // After the form has settled as saved, so that leaving it does not ask.
-    setTimeout(() => void navigate(`/parts/${encodeURIComponent(part.number)}`), 0);
+    return () => void navigate(`/parts/${encodeURIComponent(part.number)}`);
   };
 
   if (!can('parts.edit')) {

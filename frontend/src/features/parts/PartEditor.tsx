@@ -1,7 +1,7 @@
 import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import { useDeferredValue, useMemo, useState, type ReactNode } from 'react';
+import { useDeferredValue, useEffect, useMemo, useState, type ReactNode } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
 import { asProblem } from '../../api/problem';
 import type { Part } from '../../api/types';
@@ -19,8 +19,12 @@ interface PartEditorProps {
   start: PartForm;
   /** The stored part under edit; absent for a new one. */
   part?: Part;
-  /** Sends the form; `version` is the one it was based on (or agreed to overwrite). Throws a Problem when refused. */
-  onSave: (form: PartForm, version: number) => Promise<void>;
+  /**
+   * Sends the form; `version` is the one it was based on (or agreed to overwrite). Gives what to do once the form
+   * counts as saved, such as going on to another page.
+   * @throws Problem when refused
+   */
+  onSave: (form: PartForm, version: number) => Promise<() => void>;
   onCancel: () => void;
   saveName: string;
   head?: ReactNode;
@@ -34,7 +38,7 @@ export function PartEditor({ start, part, onSave, onCancel, saveName, head }: Pa
   const [refusal, setRefusal] = useState<string | null>(null);
   const [base, setBase] = useState(part);
   const [theirs, setTheirs] = useState<Part | null>(null);
-  const [saved, setSaved] = useState(false);
+  const [next, setNext] = useState<(() => void) | null>(null);
   const { control, handleSubmit, setError, reset, formState } = useForm<PartForm>({ defaultValues: start });
   const { isDirty, isSubmitting } = formState;
   const kind = useWatch({ control, name: 'kind' });
@@ -45,19 +49,21 @@ export function PartEditor({ start, part, onSave, onCancel, saveName, head }: Pa
   const send = async (form: PartForm, version: number) => {
     setRefusal(null);
     try {
-      await onSave(form, version);
-      setSaved(true);
+      const then = await onSave(form, version);
+      setNext(() => then);
     } catch (error) {
       const problem = asProblem(error);
       if (problem.changedMeanwhile && problem.current !== undefined) setTheirs(problem.current as Part);
       else setRefusal(applyProblem(problem, setError, (path) => fieldOf(form.kind, path)));
     }
   };
+  // Runs after the warning below has learned that nothing is unsaved any more.
+  useEffect(() => next?.(), [next]);
   const submit = handleSubmit((form) => send(form, base?.version ?? 0));
 
   return (
     <Box component="form" noValidate onSubmit={(event) => void submit(event)}>
-      <UnsavedWarning dirty={isDirty && !saved} what="this part" />
+      <UnsavedWarning dirty={isDirty && next === null} what="this part" />
       {head}
       {refusal !== null && (
         <Alert severity="error" sx={{ mb: 1.5 }}>

@@ -42,7 +42,7 @@ export default function PartPage() {
     await mutate(after, { revalidate: false });
     refresh();
     tell(`${part.number} saved.`);
-    setTimeout(() => showEdit(false), 0);
+    return () => showEdit(false);
   };
 
   if (editing) {

@@ -67,7 +67,7 @@ export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
   const shown = open || rareSet;
   return (
     <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result} aside={aside}>
-      <TypedFilter label="Number or words" width={180} {...bind('text')} />
+      <TypedFilter label="Number or words" width={130} {...bind('text')} />
       {(!narrow || shown) && (
         <>
           <ChoiceFilter label="Kind" width={128} choices={kinds} {...bind('kind')} />

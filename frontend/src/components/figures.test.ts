@@ -1,0 +1,40 @@
+import { describe, expect, it } from 'vitest';
+import { formatCount, formatFixed, formatPlain, formatSigned } from './figures';
+import { toTsv } from './copyTsv';
+
+describe('figures', () => {
+  it('writes a real minus sign and never minus nought', () => {
+    expect(formatFixed(-0.507, 3)).toBe('\u22120.507');
+    expect(formatFixed(-0.0001, 3)).toBe('0.000');
+    expect(formatSigned(0.211, 3)).toBe('+0.211');
+    expect(formatSigned(-0.0001, 3)).toBe('0.000');
+    expect(formatSigned(-1, 1)).toBe('\u22121.0');
+  });
+
+  it('writes a dash for what is not known and for what is no number', () => {
+    expect([null, undefined, Number.NaN, Infinity].map((value) => formatFixed(value, 2))).toEqual([
+      '–',
+      '–',
+      '–',
+      '–',
+    ]);
+    expect(formatPlain(null)).toBe('–');
+  });
+
+  it('drops trailing zeros of plain figures and groups counts', () => {
+    expect(formatPlain(1.25)).toBe('1.25');
+    expect(formatPlain(20)).toBe('20');
+    expect(formatCount(41208113)).toBe('41,208,113');
+  });
+});
+
+describe('toTsv', () => {
+  it('parts cells by tabs and rows by line ends, whatever a cell holds', () => {
+    expect(
+      toTsv([
+        ['a\tb', 1, null],
+        ['c\nd', -2.5, undefined],
+      ]),
+    ).toBe('a b\t1\t\nc d\t-2.5\t');
+  });
+});
