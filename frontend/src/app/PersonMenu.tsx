@@ -3,6 +3,7 @@ import Button from '@mui/material/Button';
 import Menu from '@mui/material/Menu';
 import MenuItem from '@mui/material/MenuItem';
 import Divider from '@mui/material/Divider';
+import Check from '@mui/icons-material/Check';
 import PersonOutline from '@mui/icons-material/PersonOutlined';
 import { useColorScheme } from '@mui/material/styles';
 import Typography from '@mui/material/Typography';
@@ -73,6 +74,7 @@ export function PersonMenu() {
             onClick={() => setMode(scheme.mode)}
           >
             {scheme.name}
+            {mode === scheme.mode && <Check fontSize="small" aria-hidden="true" sx={{ ml: 'auto', pl: 1 }} />}
           </MenuItem>
         ))}
         <Divider component="li" />

@@ -119,6 +119,24 @@ const surfaces: Look = {
       list: { paddingBlock: 4 },
     },
   },
+  MuiAutocomplete: {
+    styleOverrides: {
+      paper: ({ theme }) => ({
+        marginTop: 2,
+        border: `1px solid ${theme.vars.palette.line.rule}`,
+        boxShadow: '0 6px 20px rgb(0 0 0 / 0.16)',
+      }),
+      listbox: { paddingBlock: 4 },
+      groupLabel: ({ theme }) => ({
+        lineHeight: '26px',
+        fontSize: '0.75rem',
+        fontWeight: 500,
+        backgroundColor: theme.vars.palette.background.paper,
+        color: theme.vars.palette.text.secondary,
+      }),
+      option: { minHeight: 30, fontSize: '0.875rem' },
+    },
+  },
   MuiMenuItem: {
     styleOverrides: {
       root: ({ theme }) => ({

@@ -27,8 +27,10 @@ interface RowTableProps<Row> {
 /** A short list on the first page; the whole row leads on. */
 export function RowTable<Row>({ label, columns, rows, keyOf, pathOf }: RowTableProps<Row>) {
   const navigate = useNavigate();
-  const wide = (column: RowColumn<Row>) =>
-    column.wideOnly ? { display: { xs: 'none', sm: 'table-cell' } } : {};
+  const wide = (column: RowColumn<Row>) => ({
+    ...(column.figure ? { whiteSpace: 'nowrap' } : {}),
+    ...(column.wideOnly ? { display: { xs: 'none', sm: 'table-cell' } } : {}),
+  });
   return (
     <TableContainer>
       <Table aria-label={label}>

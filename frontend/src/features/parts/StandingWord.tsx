@@ -12,7 +12,13 @@ export function StandingWord({ standing }: { standing: PartStanding }) {
   const { mark, filled, colour } = LOOK[standing];
   return (
     <Box component="span" sx={{ color: colour, whiteSpace: 'nowrap' }}>
-      <svg width="12" height="12" viewBox="0 0 12 12" aria-hidden="true" style={{ marginRight: 5 }}>
+      <svg
+        width="12"
+        height="12"
+        viewBox="0 0 12 12"
+        aria-hidden="true"
+        style={{ marginRight: 5, verticalAlign: '-1px' }}
+      >
         <path
           d={mark}
           fill={filled ? 'currentColor' : 'none'}
