@@ -1,6 +1,6 @@
 // What npm start and npm test share: check the machine, install what the lock file names, build what has changed.
 import { spawnSync } from 'node:child_process';
-import { existsSync, readFileSync } from 'node:fs';
+import { existsSync, readFileSync, realpathSync } from 'node:fs';
 import path from 'node:path';
 import { fail, ROOT, run, runNode, step } from './process.mjs';
 import { fingerprint, isStamped, stamp } from './stamps.mjs';
@@ -31,6 +31,12 @@ function checkCompilers() {
   }
 }
 
+/** Node's own headers where they came with it: compiling against them needs no download. */
+function headersEnv() {
+  const prefix = path.resolve(path.dirname(realpathSync(process.execPath)), '..');
+  return existsSync(path.join(prefix, 'include/node/node_api.h')) ? { npm_config_nodedir: prefix } : {};
+}
+
 async function install() {
   const print = fingerprint(['pnpm-lock.yaml', 'pnpm-workspace.yaml', ...MANIFESTS]);
   if (isStamped('install', print) && existsSync(path.join(ROOT, 'backend/node_modules'))) return;
@@ -39,6 +45,7 @@ async function install() {
   await step('Install the packages of the lock file', () =>
     run('npx', ['-y', packageManager, 'install', '--frozen-lockfile', '--reporter=append-only'], {
       quiet: true,
+      env: headersEnv(),
     }),
   );
   stamp('install', print);
