@@ -2,12 +2,12 @@ import useSWR, { mutate } from 'swr';
 import { answer, api } from '../client';
 import type { Brief, BriefInput, BriefPatch } from '../types';
 
-const keyOf = (id: string) => ['/api/briefs/{id}', id] as const;
+export const briefKey = (id: string) => ['/api/briefs/{id}', id] as const;
 
 /** One brief with its pins and latest search; not read again on focus, so that a form never changes underfoot. */
 export function useBrief(id: string | null) {
   return useSWR(
-    id === null ? null : keyOf(id),
+    id === null ? null : briefKey(id),
     ([, briefId]) => answer(api.GET('/api/briefs/{id}', { params: { path: { id: briefId } } })),
     { revalidateOnFocus: false, revalidateOnReconnect: false },
   );
@@ -15,14 +15,14 @@ export function useBrief(id: string | null) {
 
 /** Puts a brief the server has just sent in front of every screen that shows it, and has the lists read again. */
 export async function keepBrief(brief: Brief): Promise<Brief> {
-  await mutate(keyOf(brief.id), brief, { revalidate: false });
+  await mutate(briefKey(brief.id), brief, { revalidate: false });
   void mutate((key) => Array.isArray(key) && (key[0] === '/api/briefs' || key[0] === '/api/overview'));
   return brief;
 }
 
 /** Reads a brief again, after something about it changed elsewhere. */
 export async function refreshBrief(id: string): Promise<void> {
-  await mutate(keyOf(id));
+  await mutate(briefKey(id));
 }
 
 /** @throws Problem 400 naming the fields */

@@ -57,7 +57,7 @@ function Compare({ brief }: { brief: Brief }) {
 
   async function unpin(pin: Pin): Promise<void> {
     try {
-      await unpinOption(brief.id, pin.key);
+      await unpinOption(brief, pin.key);
       tell(`${teethWords(pin.option.stages)} is no longer pinned.`);
     } catch (refusal) {
       tell(asProblem(refusal).message);

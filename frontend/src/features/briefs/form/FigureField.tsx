@@ -9,13 +9,15 @@ interface FigureFieldProps {
   field: BriefField;
   unit?: string;
   label?: string;
+  /** What a screen reader says where the visible label needs its neighbour: “Pinion to”. */
+  spoken?: string;
   placeholder?: string;
   /** Remarks stand under the pair instead of under the field. */
   bare?: boolean;
 }
 
 /** A figure with its unit; keeps exactly what was typed and says under it what is wrong or worth knowing. */
-export function FigureField({ field, unit, label, placeholder, bare = false }: FigureFieldProps) {
+export function FigureField({ field, unit, label, spoken, placeholder, bare = false }: FigureFieldProps) {
   const { control } = useFormContext<BriefForm>();
   const remarks = useRemarks(field);
   const remarksId = `remarks-${field}`;
@@ -40,6 +42,7 @@ export function FigureField({ field, unit, label, placeholder, bare = false }: F
               htmlInput: {
                 inputMode: 'decimal',
                 autoComplete: 'off',
+                'aria-label': spoken,
                 'aria-describedby': remarks.length > 0 ? remarksId : undefined,
               },
               input: unit
@@ -76,7 +79,14 @@ export function RangeFields({ from, to, unit, title, openEnd = false }: RangeFie
     <div role="group" aria-label={title}>
       <div style={{ display: 'grid', gridTemplateColumns: '1fr 1fr', columnGap: 8 }}>
         <FigureField field={from} label={`${title} from`} unit={unit} bare />
-        <FigureField field={to} label="to" unit={unit} bare placeholder={openEnd ? 'no limit' : undefined} />
+        <FigureField
+          field={to}
+          label="to"
+          spoken={`${title} to`}
+          unit={unit}
+          bare
+          placeholder={openEnd ? 'no limit' : undefined}
+        />
       </div>
       <FieldRemarks id={`remarks-${from}`} remarks={remarks} />
     </div>

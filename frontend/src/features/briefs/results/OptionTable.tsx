@@ -122,7 +122,7 @@ function HeadCell({
     <>
       {text}
       {unit && (
-        <Box component="span" sx={{ ml: 0.5, opacity: 0.85 }}>
+        <Box component="span" sx={{ ml: 0.5 }}>
           {unit}
         </Box>
       )}

@@ -35,7 +35,7 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
 
   async function pin(option: TrainOption, on: boolean): Promise<void> {
     try {
-      await (on ? pinOption(brief.id, option.key, search.id) : unpinOption(brief.id, option.key));
+      await (on ? pinOption(brief, option, search.id) : unpinOption(brief, option.key));
     } catch (error) {
       tell(asProblem(error).message);
     }
@@ -56,10 +56,16 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
           <>
             <OutcomeLine search={search} shown={0} />
             <Box sx={{ bgcolor: 'background.paper', border: '1px solid', borderColor: 'line.rule', mt: 1 }}>
-              <EmptyState title="No option">
-                The reasons stand beside this. Each names the limit in the way and the least change that would
-                let an option in.
-              </EmptyState>
+              {search.outcome?.search.complete ? (
+                <EmptyState title="No option">
+                  The reasons stand beside this. Each names the limit in the way and the least change that
+                  would let an option in.
+                </EmptyState>
+              ) : (
+                <EmptyState title="Nothing found before it stopped">
+                  Search again and let it run longer, or narrow the brief: fewer teeth to try, fewer stages.
+                </EmptyState>
+              )}
             </Box>
           </>
         ) : (
