@@ -38,8 +38,11 @@ test('a new brief is warned about, saved, searched and stopped', async ({ page }
   await expect(page.getByRole('heading', { level: 1, name: /B-\d{4} Long search/ })).toBeVisible();
   await page.getByRole('button', { name: 'Search', exact: true }).click();
   await page.getByRole('button', { name: 'Stop' }).click();
-  await expect(page.getByText(/Stopped after/)).toBeVisible({ timeout: 20_000 });
-  await expect(page.getByText(/Every combination settled/)).toHaveCount(0);
+  // Stopped while it looked for trains, or while it worked out why there is none.
+  await expect(
+    page.getByText(/Nothing found before it stopped|was stopped before the reasons/),
+  ).toBeVisible();
+  await expect(page.getByRole('button', { name: 'Search again' })).toBeVisible();
 });
 
 test('a search goes on while its page is left', async ({ page }) => {

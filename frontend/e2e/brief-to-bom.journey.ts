@@ -57,7 +57,7 @@ test.describe.serial('from the winch brief to its spreadsheet', () => {
     await expect(table.getByText('better').first()).toBeVisible();
     await expect(page.getByText(/^Three stages \(.*instead of two stages/)).toBeVisible();
     const before = await table.getByRole('row').count();
-    await page.getByRole('switch', { name: 'Differences only' }).check();
+    await page.getByRole('switch', { name: 'Differences only' }).click();
     await expect.poll(() => table.getByRole('row').count()).toBeLessThan(before);
 
     await page.getByRole('button', { name: 'Adopt as train' }).first().click();

@@ -36,10 +36,12 @@ export function PageHeader({ title, code, facts, figure, actions }: PageHeaderPr
       <Box sx={{ flex: '1 1 300px', minWidth: 0 }}>
         <Typography variant="h1" sx={{ overflowWrap: 'anywhere' }}>
           {code !== undefined && (
-            <Box component="span" sx={{ mr: 1, whiteSpace: 'nowrap' }}>
+            <Box component="span" sx={{ mr: 0.5, whiteSpace: 'nowrap' }}>
               {code}
             </Box>
           )}
+          {/* A gap for readers of text, too: the name is “B-0001 Winch”. */}
+          {code !== undefined && ' '}
           <Box component="span" sx={{ fontWeight: code === undefined ? 600 : 400 }}>
             {title}
           </Box>

@@ -1,6 +1,7 @@
 import useSWR, { mutate } from 'swr';
 import { answer, api } from '../client';
 import type { Brief, BriefInput, BriefPatch } from '../types';
+import { readAgain } from './readAgain';
 
 export const briefKey = (id: string) => ['/api/briefs/{id}', id] as const;
 
@@ -16,7 +17,7 @@ export function useBrief(id: string | null) {
 /** Puts a brief the server has just sent in front of every screen that shows it, and has the lists read again. */
 export async function keepBrief(brief: Brief): Promise<Brief> {
   await mutate(briefKey(brief.id), brief, { revalidate: false });
-  void mutate((key) => Array.isArray(key) && (key[0] === '/api/briefs' || key[0] === '/api/overview'));
+  readAgain('/api/briefs', '/api/overview');
   return brief;
 }
 

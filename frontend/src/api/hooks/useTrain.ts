@@ -1,6 +1,7 @@
 import useSWR, { mutate } from 'swr';
 import { answer, api } from '../client';
 import type { Train, TrainPatch } from '../types';
+import { readAgain } from './readAgain';
 
 const keyOf = (code: string) => ['/api/trains/{code}', code] as const;
 
@@ -16,8 +17,7 @@ export function useTrain(code: string) {
 /** Puts a train the server has sent in front of every screen that shows it. */
 export async function keepTrain(train: Train): Promise<Train> {
   await mutate(keyOf(train.code), train, { revalidate: false });
-  const touched = ['/api/trains', '/api/trains/{code}/bom', '/api/trains/{code}/changes', '/api/overview'];
-  void mutate((key) => Array.isArray(key) && touched.includes(String(key[0])));
+  readAgain('/api/trains', '/api/trains/{code}/bom', '/api/trains/{code}/changes', '/api/overview');
   return train;
 }
 

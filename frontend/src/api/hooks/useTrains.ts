@@ -1,7 +1,8 @@
-import useSWR, { mutate } from 'swr';
+import useSWR from 'swr';
 import { answer, api } from '../client';
 import type { paths } from '../schema';
 import type { Train, TrainInput } from '../types';
+import { readAgain } from './readAgain';
 import { refreshBrief } from './useBrief';
 
 export type TrainQuery = NonNullable<paths['/api/trains']['get']['parameters']['query']>;
@@ -16,7 +17,7 @@ export function useTrains(query: TrainQuery) {
 /** Makes a pinned or listed option a train of its own, revision A. */
 export async function adoptOption(input: TrainInput): Promise<Train> {
   const train = await answer(api.POST('/api/trains', { body: input }));
-  void mutate((key) => Array.isArray(key) && (key[0] === '/api/trains' || key[0] === '/api/overview'));
+  readAgain('/api/trains', '/api/overview');
   void refreshBrief(input.briefId);
   return train;
 }

@@ -57,10 +57,7 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
             <OutcomeLine search={search} shown={0} />
             <Box sx={{ bgcolor: 'background.paper', border: '1px solid', borderColor: 'line.rule', mt: 1 }}>
               {search.outcome?.search.complete ? (
-                <EmptyState title="No option">
-                  The reasons stand beside this. Each names the limit in the way and the least change that
-                  would let an option in.
-                </EmptyState>
+                <EmptyState title="No option">{reasonsWords(search.outcome.whyNot.length > 0)}</EmptyState>
               ) : (
                 <EmptyState title="Nothing found before it stopped">
                   Search again and let it run longer, or narrow the brief: fewer teeth to try, fewer stages.
@@ -104,6 +101,12 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
       </Box>
     </Box>
   );
+}
+
+function reasonsWords(known: boolean): string {
+  return known
+    ? 'The reasons stand beside this. Each names the limit in the way and the least change that would let an option in.'
+    : 'The search was stopped before the reasons were worked out. Search again to see them.';
 }
 
 interface StageFilterProps {
