@@ -47,6 +47,7 @@ export default tseslint.config(
     rules: { '@typescript-eslint/consistent-type-imports': 'off' },
   },
   { files: ['**/*.mjs', '*.js', '**/*.config.ts'], languageOptions: { globals: globals.node } },
+  { files: ['frontend/public/**/*.js'], languageOptions: { globals: globals.browser, sourceType: 'script' } },
   {
     files: ['libs/units/**/*.ts'],
     rules: forbid([NODE_OR_FRAMEWORK, inside('gear-geometry', 'train-planner', 'bill-of-materials')], PURE),
