@@ -1,4 +1,4 @@
-import useSWR, { mutate } from 'swr';
+import useSWR, { mutate, type SWRResponse } from 'swr';
 import { answer, api } from '../client';
 import type { Brief, BriefInput, BriefPatch } from '../types';
 import { readAgain } from './readAgain';
@@ -6,8 +6,8 @@ import { readAgain } from './readAgain';
 export const briefKey = (id: string) => ['/api/briefs/{id}', id] as const;
 
 /** One brief with its pins and latest search; not read again on focus, so that a form never changes underfoot. */
-export function useBrief(id: string | null) {
-  return useSWR(
+export function useBrief(id: string | null): SWRResponse<Brief, unknown> {
+  return useSWR<Brief, unknown, ReturnType<typeof briefKey> | null>(
     id === null ? null : briefKey(id),
     ([, briefId]) => answer(api.GET('/api/briefs/{id}', { params: { path: { id: briefId } } })),
     { revalidateOnFocus: false, revalidateOnReconnect: false },

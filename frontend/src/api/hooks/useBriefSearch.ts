@@ -16,7 +16,7 @@ const keyOf = (id: string) => ['/api/searches/{id}', id] as const;
  */
 export function useBriefSearch(id: string | null) {
   const [connected, setConnected] = useState(true);
-  const search = useSWR(
+  const search = useSWR<Search, unknown, ReturnType<typeof keyOf> | null>(
     id === null ? null : keyOf(id),
     ([, searchId]) => answer(api.GET('/api/searches/{id}', { params: { path: { id: searchId } } })),
     {

@@ -1,6 +1,8 @@
 import useSWR from 'swr';
 import { answer, api } from '../client';
-import type { TrainSpec } from '../types';
+import type { PartPage, TrainSpec } from '../types';
+
+type PartSummary = PartPage['items'][number];
 
 /** The data a stock gear must agree in to take a place in a train. */
 export interface GearPlace {
@@ -34,26 +36,29 @@ const SAME_SHIFT = 1e-6;
 
 /** Cleared gears of the library that can take a place; a shift the library does not know counts as 0. */
 export function useFittingGears(place: GearPlace | null) {
-  return useSWR(place === null ? null : ['/api/parts', 'fitting', place], async () => {
-    const { teeth, module, pressureAngleDeg, helixAngleDeg, hand, faceWidth, profileShift } =
-      place as GearPlace;
-    const query = {
-      kind: 'gear' as const,
-      standing: 'cleared' as const,
-      teethMin: teeth,
-      teethMax: teeth,
-      module,
-      pressureAngleDeg,
-      helixAngleDeg,
-      faceWidthMin: faceWidth,
-      size: 100,
-      sort: 'faceWidth,number',
-      ...(helixAngleDeg > 0 && hand ? { hand } : {}),
-    };
-    const page = await answer(api.GET('/api/parts', { params: { query } }));
-    return page.items.filter(({ attributes }) => {
-      const shift = 'profileShift' in attributes ? Number(attributes.profileShift ?? 0) : 0;
-      return Math.abs(shift - profileShift) < SAME_SHIFT;
-    });
-  });
+  return useSWR<PartSummary[], unknown>(
+    place === null ? null : ['/api/parts', 'fitting', place],
+    async () => {
+      const { teeth, module, pressureAngleDeg, helixAngleDeg, hand, faceWidth, profileShift } =
+        place as GearPlace;
+      const query = {
+        kind: 'gear' as const,
+        standing: 'cleared' as const,
+        teethMin: teeth,
+        teethMax: teeth,
+        module,
+        pressureAngleDeg,
+        helixAngleDeg,
+        faceWidthMin: faceWidth,
+        size: 100,
+        sort: 'faceWidth,number',
+        ...(helixAngleDeg > 0 && hand ? { hand } : {}),
+      };
+      const page = await answer(api.GET('/api/parts', { params: { query } }));
+      return page.items.filter(({ attributes }) => {
+        const shift = 'profileShift' in attributes ? Number(attributes.profileShift ?? 0) : 0;
+        return Math.abs(shift - profileShift) < SAME_SHIFT;
+      });
+    },
+  );
 }

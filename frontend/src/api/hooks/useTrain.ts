@@ -1,13 +1,13 @@
-import useSWR, { mutate } from 'swr';
+import useSWR, { mutate, type SWRResponse } from 'swr';
 import { answer, api } from '../client';
-import type { Train, TrainPatch } from '../types';
+import type { ChangePage, Train, TrainPatch } from '../types';
 import { readAgain } from './readAgain';
 
 const keyOf = (code: string) => ['/api/trains/{code}', code] as const;
 
 /** One train with every figure; not read again on focus, so that a form never changes underfoot. */
-export function useTrain(code: string) {
-  return useSWR(
+export function useTrain(code: string): SWRResponse<Train, unknown> {
+  return useSWR<Train, unknown, ReturnType<typeof keyOf>>(
     keyOf(code),
     ([, trainCode]) => answer(api.GET('/api/trains/{code}', { params: { path: { code: trainCode } } })),
     { revalidateOnFocus: false, revalidateOnReconnect: false },
@@ -30,7 +30,7 @@ export async function saveTrain(code: string, patch: TrainPatch): Promise<Train>
 
 /** Who changed the train, when, and what; newest first. */
 export function useTrainChanges(code: string, page = 1) {
-  return useSWR(['/api/trains/{code}/changes', code, page], () =>
+  return useSWR<ChangePage, unknown>(['/api/trains/{code}/changes', code, page], () =>
     answer(api.GET('/api/trains/{code}/changes', { params: { path: { code }, query: { page, size: 50 } } })),
   );
 }

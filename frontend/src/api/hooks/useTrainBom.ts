@@ -1,9 +1,10 @@
 import useSWR from 'swr';
 import { answer, api } from '../client';
+import type { Bom } from '../types';
 
 /** The bill of materials of one train. */
 export function useTrainBom(code: string) {
-  return useSWR(['/api/trains/{code}/bom', code], () =>
+  return useSWR<Bom, unknown>(['/api/trains/{code}/bom', code], () =>
     answer(api.GET('/api/trains/{code}/bom', { params: { path: { code } } })),
   );
 }

@@ -51,7 +51,7 @@ describe('the brief form', () => {
     expect(onSaved).not.toHaveBeenCalled();
   });
 
-  it('sends nothing while a figure cannot be read, and leads to it', async () => {
+  it('sends nothing while a figure cannot be read, and leads to it', () => {
     const { sent } = pretendServer({});
     show();
     type('Ratio', '1,400');

@@ -28,7 +28,8 @@ export function briefHints(requirement: Requirement): Hint[] {
 }
 
 function refusals(requirement: Requirement): Hint[] {
-  const { duty: _dutySizesShaftsOnly, ...request } = requirement;
+  // The duty only sizes shafts; the planner does not know it.
+  const request = { ...requirement, duty: undefined };
   try {
     validateOptionRequest(request);
     return [];

@@ -40,7 +40,7 @@ export function OptionTableRow({ option, scale, pinned, onPin, rowProps }: Optio
         outlineOffset: -2,
         ...(pinned && {
           bgcolor: 'wash.brass',
-          boxShadow: `inset 3px 0 0 ${theme.vars!.palette.secondary.main}`,
+          boxShadow: `inset 3px 0 0 ${theme.vars.palette.secondary.main}`,
         }),
         '&[aria-selected="true"]': { bgcolor: pinned ? 'wash.brass' : 'wash.hover' },
         '&[aria-selected="true"] td:nth-of-type(3)': { fontWeight: 600 },
