@@ -1,4 +1,3 @@
-/* global document, localStorage, matchMedia */
 // Runs before the first paint so that a dark page never flashes white. A file of its own: the page's
 // content policy allows no inline script. The key is the one the theme provider writes.
 (function () {
