@@ -33,9 +33,9 @@ describe('the kit of a two-stage train, counted by hand', () => {
       '104 Spur gear z 50, m 2, 20°, x 0, face 20 mm, bore 20 mm 1',
     ]);
     expect(shown('shaft')).toEqual([
-      '301 Shaft ⌀12 × 60 mm 1',
-      '302 Shaft ⌀15 × 60 mm 1',
-      '303 Shaft ⌀20 × 60 mm 1',
+      '301 Shaft Ø12 × 60 mm 1',
+      '302 Shaft Ø15 × 60 mm 1',
+      '303 Shaft Ø20 × 60 mm 1',
     ]);
     expect(shown('pinion-shaft')).toEqual([]);
   });
@@ -62,8 +62,8 @@ describe('the kit of a two-stage train, counted by hand', () => {
 
   it('closes with seals at input and output, housing and oil', () => {
     expect(shown('seal')).toEqual([
-      '701 Rotary shaft seal, shaft ⌀12 mm 1',
-      '702 Rotary shaft seal, shaft ⌀20 mm 1',
+      '701 Rotary shaft seal, shaft Ø12 mm 1',
+      '702 Rotary shaft seal, shaft Ø20 mm 1',
     ]);
     expect(shown('housing')).toEqual(['801 Housing 200 × 80 × 120 mm, wall 6 mm 1']);
     // Inside 188 × 68 × 108 mm = 1.381 l; a third is 0.460 l, rounded up to 0.5 l.
@@ -340,7 +340,7 @@ describe('sizes without a standard part', () => {
     expect(ofKind(lines, 'key')[0]?.flags[0]).toBe(
       'no DIN 6885-1 key for bore 5 mm: choose another way to hold the gear',
     );
-    const ring = ofKind(lines, 'retaining-ring').find((line) => line.description.includes('⌀23'));
+    const ring = ofKind(lines, 'retaining-ring').find((line) => line.description.includes('Ø23'));
     // The pinion of stage 2 is too thin for a keyway at 23 mm: the wheel and the locating bearing are left.
     expect(ring).toMatchObject({ quantity: 2 });
     expect(ring?.flags[0]).toBe('DIN 471 has no ring for 23 mm: step the seat to 22 mm or use another way');

@@ -47,7 +47,7 @@ function describeGear({ gear, shaft, bore }: MountedGear): string {
     gear.helixAngleDeg === 0 ? '' : `, β ${formatTrimmed(gear.helixAngleDeg, 4)}° ${gear.hand ?? ''}`;
   const seat =
     bore === null
-      ? `, on shaft ⌀${formatTrimmed(shaft.diameter, 3)} × ${formatTrimmed(shaft.length, 2)} mm`
+      ? `, on shaft Ø${formatTrimmed(shaft.diameter, 3)} × ${formatTrimmed(shaft.length, 2)} mm`
       : `, bore ${formatTrimmed(bore, 3)} mm`;
   const name = bore === null ? 'pinion shaft' : 'gear';
   return (

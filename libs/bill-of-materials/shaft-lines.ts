@@ -52,7 +52,7 @@ function shaftItem(shaft: KitShaft, library: PartFinder): KitItem {
     {
       kind: 'shaft',
       wanted: shaft.partNumber ?? null,
-      description: `Shaft ⌀${formatTrimmed(diameter, 3)} × ${formatTrimmed(length, 2)} mm`,
+      description: `Shaft Ø${formatTrimmed(diameter, 3)} × ${formatTrimmed(length, 2)} mm`,
       quantity: 1,
       material: shaft.material ?? null,
       supply: 'made',
@@ -119,12 +119,12 @@ function ringItem(seat: number, source: string, library: PartFinder): KitItem {
       ? `step the seat to ${below.shaftDiameter} mm or use another way`
       : 'use another way';
     const flags = [`DIN 471 has no ring for ${size} mm: ${advice}`];
-    const description = `Retaining ring for shaft ⌀${size} mm`;
+    const description = `Retaining ring for shaft Ø${size} mm`;
     return kitItem({ ...boughtSteel('retaining-ring', description, source), mass: null, flags }, null);
   }
   const { shaftDiameter, thickness } = ring;
   const description = `Retaining ring DIN 471 ${shaftDiameter} × ${thickness}`;
-  const note = `Groove ⌀${ring.grooveDiameter} mm, ${ring.grooveWidth} mm wide.`;
+  const note = `Groove Ø${ring.grooveDiameter} mm, ${ring.grooveWidth} mm wide.`;
   return kitItem(
     { ...boughtSteel('retaining-ring', description, source), mass: null, note },
     library.find({ kind: 'retaining-ring', shaftDiameter, thickness }),
@@ -135,7 +135,7 @@ function sealItem({ diameter }: KitShaft, source: string, library: PartFinder): 
   return kitItem(
     {
       kind: 'seal',
-      description: `Rotary shaft seal, shaft ⌀${formatTrimmed(diameter, 3)} mm`,
+      description: `Rotary shaft seal, shaft Ø${formatTrimmed(diameter, 3)} mm`,
       quantity: 1,
       material: null,
       supply: 'bought',
