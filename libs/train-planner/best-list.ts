@@ -14,6 +14,9 @@ export interface FoundTrain {
   d: number;
 }
 
+/** The most that rounding takes off a sum, and a little for the float noise of adding up. */
+const ROUNDING = 0.51;
+
 /** Thrown by a list that wants a single train, whichever comes first; never leaves the planner. */
 export class FirstFound extends Error {}
 
@@ -29,7 +32,7 @@ export class BestList {
   readonly #byError: boolean;
   /** True: any one train will do, and the search ends with it by `FirstFound`. */
   stopAtFirst = false;
-  /** Cost above which a train can no longer enter. */
+  /** Cost (a sum not yet rounded) above which a train can no longer enter. */
   costLimit = Infinity;
   /** Float ratio error above which a train can no longer enter when the error is the objective. */
   errorLimit = Infinity;
@@ -41,13 +44,17 @@ export class BestList {
     this.#byError = objective === 'ratio-error';
   }
 
-  /** Whether a train with these figures would enter, whatever its teeth (a tie counts as yes). */
+  /**
+   * Whether a train with these figures would enter, whatever its teeth (a tie counts as yes).
+   * @param cost whole
+   * @param distance may be a sum not yet rounded
+   */
   admits(cost: number, n: number, d: number, distance: number): boolean {
     const last = this.trains[this.#size - 1];
     if (!last) return true;
     if (cost !== last.cost) return cost < last.cost;
     const byError = this.#window.compareErrors(n, d, last.n, last.d);
-    return byError !== 0 ? byError < 0 : distance <= last.distance;
+    return byError !== 0 ? byError < 0 : distance <= last.distance + ROUNDING;
   }
 
   /** Takes the train in if it is among the best. The caller has checked every limit. */
@@ -68,7 +75,7 @@ export class BestList {
     if (trains.length > size) trains.pop();
     const worst = trains[size - 1];
     if (!worst) return;
-    this.costLimit = worst.cost;
+    this.costLimit = worst.cost * (1 + 1e-14) + ROUNDING;
     // A hair wider than the float error, so that exact ties and near ties are still looked at.
     if (this.#byError) this.errorLimit = this.#window.error(worst.n, worst.d) * (1 + 1e-12) + 1e-14;
   }

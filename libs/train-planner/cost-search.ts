@@ -9,7 +9,7 @@ import { type WorkWatch } from './work-watch.js';
 const WIDER = 1 + 1e-14;
 
 /**
- * Best trains by an additive whole-number cost. Depth first over falling ratios; a branch is left when its cost
+ * Best trains by an additive cost, in whole nm or mg once it is summed. Depth first over falling ratios; a branch is left when its cost
  * plus the least cost of the ratio still missing exceeds the worst train kept, or when it can no longer fit the
  * length. Ties are always followed, so the outcome is exact.
  */

@@ -33,8 +33,9 @@ export function describeTrain(train: TrainSpec): TrainFigures {
       value: ratioToNumber(exact),
       errorPercent: train.target ? ratioErrorPercent(exact, train.target.ratio) : null,
     },
-    centreDistanceSum: meshes.reduce((sum, mesh) => sum + toNm(mesh.centreDistance), 0) / 1e6,
-    mass: meshes.reduce((sum, mesh, index) => sum + stageMass(train.stages[index], mesh), 0) / 1e6,
+    centreDistanceSum: toNm(meshes.reduce((sum, mesh) => sum + mesh.centreDistance, 0)) / 1e6,
+    mass:
+      Math.round(meshes.reduce((sum, mesh, index) => sum + stageMass(train.stages[index], mesh), 0)) / 1e6,
     box,
     backlashArcmin: outputBacklash(meshes),
     direction: outputDirection(train.stages.length),
@@ -82,14 +83,14 @@ function gearInput(train: TrainSpec, stage: SpecStage, gear: SpecGear): GearInpu
   return input;
 }
 
-/** mg, both gears as solid discs at the reference diameter, rounded as the search rounds. */
+/** mg, both gears as solid discs at the reference diameter. */
 function stageMass(stage: SpecStage | undefined, mesh: MeshGeometry): number {
   if (!stage) return 0;
   const disc = (gear: SpecGear, diameter: number) =>
     Math.PI * (diameter / 2) ** 2 * gear.faceWidth * (gear.density ?? DEFAULT_DENSITY) * 1e-3;
-  return Math.round(
+  return (
     disc(stage.pinion, mesh.gear.pinion.referenceDiameter) +
-      disc(stage.wheel, mesh.gear.wheel.referenceDiameter),
+    disc(stage.wheel, mesh.gear.wheel.referenceDiameter)
   );
 }
 

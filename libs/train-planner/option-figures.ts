@@ -43,7 +43,7 @@ export class OptionFigures {
         errorPercent: ratioErrorPercent(exact, this.#request.ratio.target),
       },
       centreDistanceSum: train.distance / 1e6,
-      mass: mass / 1e6,
+      mass: Math.round(mass) / 1e6,
       box: this.#box(train.pairs),
       backlashArcmin: outputBacklash(entries),
       lossPercent: null,

@@ -10,10 +10,10 @@ export interface PairPool {
   readonly wheel: Int32Array;
   /** wheel / pinion. */
   readonly ratio: Float64Array;
-  /** Operating distance, mm, and the same rounded to whole nm. */
+  /** Operating distance, mm, and the same in nm; sums are rounded to whole nm, so that equal sums tie. */
   readonly centreDistance: Float64Array;
   readonly distance: Float64Array;
-  /** Both gears as solid discs, rounded to whole mg. */
+  /** Both gears as solid discs, mg; sums are rounded as above. */
   readonly mass: Float64Array;
   /** Tip radii, mm. */
   readonly pinionTip: Float64Array;

@@ -40,6 +40,34 @@ describe('every option, recomputed by the geometry library', () => {
   });
 });
 
+describe('equal sums', () => {
+  // Helical distances are m·Σz/(2 cos β): no whole nm each, but the same for the same number of teeth in all.
+  it('tie, however the teeth are split between the stages, and fall to the ratio error', () => {
+    const helical = winchRequest({
+      stages: { min: 2, max: 2 },
+      helixAngleDeg: 17,
+      modules: [1.25],
+      limit: 200,
+    });
+    const { options } = searchOptions(helical);
+    const cosBeta = Math.cos((17 * Math.PI) / 180);
+    const teethOf = ({ stages }: TrainOption) =>
+      stages.reduce((sum, { pinionTeeth, wheelTeeth }) => sum + pinionTeeth + wheelTeeth, 0);
+    const errorOf = (option: TrainOption | undefined) => Math.abs(option?.ratio.errorPercent ?? NaN);
+    let ties = 0;
+    options.forEach((option, place) => {
+      const exact = (1.25 * teethOf(option)) / (2 * cosBeta);
+      expect(Math.abs(option.centreDistanceSum - exact)).toBeLessThan(0.51e-6);
+      const before = options[place - 1];
+      if (!before || teethOf(before) !== teethOf(option)) return;
+      ties++;
+      expect(before.centreDistanceSum).toBe(option.centreDistanceSum);
+      expect(errorOf(before)).toBeLessThanOrEqual(errorOf(option) + 1e-12);
+    });
+    expect(ties).toBeGreaterThan(50);
+  });
+});
+
 function expectWithinLimits(option: TrainOption, request: OptionRequest): void {
   const { teeth, stageRatio, envelope } = request;
   const module = Math.min(...request.modules);

@@ -19,7 +19,7 @@ export interface SearchSpace {
 }
 
 /** Greatest sum of distances, nm, that can still fit the length: the outer gears stick out at both ends. */
-export function distanceLimit({ pool, stages, lengthLimit }: SearchSpace): number {
+export function distanceLimit({ pool, lengthLimit }: SearchSpace): number {
   if (lengthLimit === Infinity) return Infinity;
   let pinionTip = Infinity;
   let wheelTip = Infinity;
@@ -27,8 +27,8 @@ export function distanceLimit({ pool, stages, lengthLimit }: SearchSpace): numbe
     pinionTip = Math.min(pinionTip, pool.pinionTip[index] as number);
     wheelTip = Math.min(wheelTip, pool.wheelTip[index] as number);
   }
-  // Distances are rounded one by one: half a nm each, and one for the length itself.
-  return lengthLimit - toNm(pinionTip + wheelTip) + stages + 1;
+  // Half a nm is lost in rounding the length, and half in rounding the tips.
+  return lengthLimit - toNm(pinionTip + wheelTip) + 2;
 }
 
 /** Number of trains in the space: multisets of pairs, or sequences where the order counts. */
@@ -51,10 +51,13 @@ export class TrainIntake {
 
   /**
    * @param pairs larger ratio first, equal ratios smaller pinion first; copied before it is kept
+   * @param costSum, distanceSum as added up; rounded here, so that equal sums tie however they came about
    * @param n, d products of wheel and of pinion teeth; the caller has checked the ratio
    */
-  take(pairs: readonly number[], cost: number, distance: number, n: number, d: number): void {
+  take(pairs: readonly number[], costSum: number, distanceSum: number, n: number, d: number): void {
     const best = this.#best;
+    const cost = Math.round(costSum);
+    const distance = Math.round(distanceSum);
     if (!best.admits(cost, n, d, distance)) return;
     for (const row of pairs) if (this.#space.interferes(row)) return;
     if (!this.#space.ordered) {

@@ -21,8 +21,7 @@ interface PlainPair {
   z1: number;
   z2: number;
   a: number;
-  nm: bigint;
-  mg: bigint;
+  mg: number;
   tip1: number;
   tip2: number;
 }
@@ -61,8 +60,9 @@ export function exhaustiveSearch(request: OptionRequest): PlainTrain[] {
       if (!room(envelope.length, length) || !room(envelope.height, height)) return;
       if (!room(envelope.width, width)) return;
     }
-    const distance = train.reduce((sum, { nm }) => sum + nm, 0n);
-    const mass = train.reduce((sum, { mg }) => sum + mg, 0n);
+    const whole = (sum: number) => BigInt(Math.round(sum));
+    const distance = whole(train.reduce((sum, { a }) => sum + a, 0) * 1e6);
+    const mass = whole(train.reduce((sum, { mg }) => sum + mg, 0));
     found.push({
       key: train.map(({ z1, z2 }) => `${z1}/${z2}m${module}`).join('+'),
       objective: objective === 'mass' ? mass : objective === 'centre-distance' ? distance : 0n,
@@ -114,8 +114,7 @@ function plainPairs(request: OptionRequest, module: number, faceWidth: number): 
         z1,
         z2,
         a: mesh.centreDistance,
-        nm: BigInt(Math.round(mesh.centreDistance * 1e6)),
-        mg: BigInt(Math.round(area * faceWidth * 7.85)),
+        mg: area * faceWidth * 7.85,
         tip1: pinion.tipDiameter / 2,
         tip2: wheel.tipDiameter / 2,
       });
