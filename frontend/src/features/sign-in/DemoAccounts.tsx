@@ -10,9 +10,9 @@ interface DemoAccountsProps {
 }
 
 const DOES: Record<string, string> = {
-  designer: 'Designer: writes briefs, searches, adopts trains',
-  librarian: 'Librarian: keeps the parts true',
-  purchaser: 'Purchaser: takes the bills of materials',
+  designer: 'Designer: briefs, searches and trains',
+  librarian: 'Librarian: keeps the parts',
+  purchaser: 'Purchaser: bills of materials',
   viewer: 'Viewer: looks up and prints',
   admin: 'Administrator: people and roles',
 };

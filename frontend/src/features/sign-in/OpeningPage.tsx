@@ -1,7 +1,7 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import { useEffect, type ReactNode } from 'react';
-import { GearPairFigure } from './GearPairFigure';
+import { TrainFigure } from './TrainFigure';
 
 /** The frame of the pages before sign-in: the form on a sheet, and a train at work beside it. */
 export function OpeningPage({ title, children }: { title: string; children: ReactNode }) {
@@ -9,7 +9,7 @@ export function OpeningPage({ title, children }: { title: string; children: Reac
     document.title = `${title} · Stageyard`;
   }, [title]);
   return (
-    <Box sx={{ minHeight: '100dvh', display: 'grid', gridTemplateColumns: { xs: '1fr', md: '460px 1fr' } }}>
+    <Box sx={{ minHeight: '100dvh', display: 'grid', gridTemplateColumns: { xs: '1fr', md: '440px 1fr' } }}>
       <Box
         component="main"
         sx={{
@@ -33,18 +33,22 @@ export function OpeningPage({ title, children }: { title: string; children: Reac
           display: { xs: 'none', md: 'flex' },
           flexDirection: 'column',
           justifyContent: 'center',
-          px: 6,
+          px: { md: 4, lg: 7 },
           py: 4,
+          minWidth: 0,
         }}
       >
-        <GearPairFigure />
-        <Typography sx={{ mt: 3, maxWidth: 470, fontSize: 17, lineHeight: 1.45, fontWeight: 500 }}>
-          From a brief to a train that runs, fits and can be bought.
-        </Typography>
-        <Typography color="textSecondary" sx={{ mt: 0.5, maxWidth: 470 }}>
-          State the ratio, the room and the duty. See every sensible train to scale, one stage against
-          several, and take the bill of materials to purchasing.
-        </Typography>
+        {/* Never taller than the window leaves room for with the words beneath. */}
+        <Box sx={{ width: '100%', maxWidth: 'min(1100px, calc((100dvh - 190px) * 1.5))', mx: 'auto' }}>
+          <TrainFigure />
+          <Typography sx={{ mt: 3, fontSize: 19, lineHeight: 1.4, fontWeight: 500 }}>
+            From a brief to a train that runs, fits and can be bought.
+          </Typography>
+          <Typography color="textSecondary" sx={{ mt: 0.5, maxWidth: 620 }}>
+            State the ratio, the room and the duty. See every sensible train to scale, one stage against
+            several, and take the bill of materials to purchasing.
+          </Typography>
+        </Box>
       </Box>
     </Box>
   );
