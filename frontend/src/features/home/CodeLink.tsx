@@ -4,7 +4,7 @@ import { Link as RouterLink } from 'react-router-dom';
 /** The code that a row begins with, as its link. */
 export function CodeLink({ to, code }: { to: string; code: string }) {
   return (
-    <Link component={RouterLink} to={to} className="part-number" onClick={(event) => event.stopPropagation()}>
+    <Link component={RouterLink} to={to} className="part-number">
       {code}
     </Link>
   );

@@ -10,20 +10,18 @@ import { PageHeader } from '../../components/PageHeader';
 import { Sheet } from '../../components/Sheet';
 import { BriefRows } from './BriefRows';
 import { DraftRows } from './DraftRows';
+import { FirstSteps } from './FirstSteps';
+import { LatestChanges } from './LatestChanges';
+import { LatestTrains } from './LatestTrains';
+import { MoreLink } from './MoreLink';
 import { TrainRows } from './TrainRows';
+import { WithdrawnParts } from './WithdrawnParts';
 
-/** Today's work: own briefs and trains, and for the librarian the drafts to clear. */
+/** Today's work. A list that is not this person's daily business stands here only when something is in it. */
 export default function HomePage() {
   const { me, can } = useMe();
   const { overview, problem, mutate } = useOverview();
   const first = me?.name.split(' ')[0] ?? '';
-
-  const newBrief = can('briefs.edit') ? (
-    <Button variant="contained" component={Link} to="/briefs/new">
-      New brief
-    </Button>
-  ) : undefined;
-
   if (overview === undefined) {
     return (
       <>
@@ -38,30 +36,23 @@ export default function HomePage() {
       </>
     );
   }
-  const makes = can('briefs.edit') || can('trains.edit');
+  const { counts, briefs, trains, draftParts } = overview;
+  const roles = me?.roles ?? [];
+  const [designs, keeps] = [roles.includes('designer'), roles.includes('librarian')];
+  const newBrief = designs && (
+    <Button variant="contained" component={Link} to="/briefs/new">
+      New brief
+    </Button>
+  );
   return (
     <>
-      <PageHeader title={first === '' ? 'Today' : `Today, ${first}`} actions={newBrief} />
+      <PageHeader title={first === '' ? 'Today' : `Today, ${first}`} actions={newBrief || undefined} />
       <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2 }}>
-        {can('parts.edit') && (
-          <Sheet
-            title="Drafts to clear"
-            aside={<MoreLink to="/parts?standing=draft" text="All drafts" />}
-            flush
-          >
-            {overview.draftParts.length > 0 ? (
-              <DraftRows parts={overview.draftParts} />
-            ) : (
-              <EmptyState title="No draft waits to be cleared">
-                Parts that are added as drafts stand here until somebody clears them for use.
-              </EmptyState>
-            )}
-          </Sheet>
-        )}
-        {(makes || overview.briefs.length > 0) && (
+        {can('people.manage') && counts.parts + counts.briefs === 0 && <FirstSteps />}
+        {(designs || briefs.length > 0) && (
           <Sheet title="My briefs" aside={<MoreLink to="/briefs" text="All briefs" />} flush>
-            {overview.briefs.length > 0 ? (
-              <BriefRows briefs={overview.briefs} />
+            {briefs.length > 0 ? (
+              <BriefRows briefs={briefs} />
             ) : (
               <EmptyState title="You have no briefs yet">
                 A brief states the ratio, the room and the duty; its search then shows every sensible train.
@@ -70,10 +61,10 @@ export default function HomePage() {
             )}
           </Sheet>
         )}
-        {(makes || overview.trains.length > 0) && (
+        {(designs || trains.length > 0) && (
           <Sheet title="My trains" aside={<MoreLink to="/trains" text="All trains" />} flush>
-            {overview.trains.length > 0 ? (
-              <TrainRows trains={overview.trains} />
+            {trains.length > 0 ? (
+              <TrainRows label="My trains" trains={trains} />
             ) : (
               <EmptyState title="You have adopted no train yet">
                 Search a brief, compare its options, and adopt the best one as a train.
@@ -81,46 +72,25 @@ export default function HomePage() {
             )}
           </Sheet>
         )}
-        {!makes && !can('parts.edit') && overview.trains.length === 0 && overview.briefs.length === 0 && (
-          <Sheet flush>
-            <EmptyState
-              title="Nothing waits for you"
-              action={
-                <Box sx={{ display: 'flex', gap: 1 }}>
-                  <Button variant="outlined" component={Link} to="/trains">
-                    Look up a train
-                  </Button>
-                  <Button variant="outlined" component={Link} to="/parts">
-                    Look up a part
-                  </Button>
-                </Box>
-              }
-            >
-              {can('bom.export')
-                ? 'Open a train to take its bill of materials as a spreadsheet.'
-                : 'You can look up trains, parts and briefs, and print them.'}{' '}
-              Press / to search.
-            </EmptyState>
+        {(keeps || draftParts.length > 0) && (
+          <Sheet
+            title="Drafts to clear"
+            aside={<MoreLink to="/parts?standing=draft" text="All drafts" />}
+            flush
+          >
+            {draftParts.length > 0 ? (
+              <DraftRows parts={draftParts} />
+            ) : (
+              <EmptyState title="No draft waits to be cleared">
+                Parts that are added as drafts stand here until somebody clears them for use.
+              </EmptyState>
+            )}
           </Sheet>
         )}
+        {keeps && <WithdrawnParts />}
+        {!designs && !keeps && <LatestTrains />}
+        {can('people.manage') && <LatestChanges />}
       </Box>
     </>
-  );
-}
-
-function MoreLink({ to, text }: { to: string; text: string }) {
-  return (
-    <Box
-      component={Link}
-      to={to}
-      sx={{
-        color: 'primary.main',
-        fontWeight: 500,
-        textDecoration: 'none',
-        '&:hover': { textDecoration: 'underline' },
-      }}
-    >
-      {text}
-    </Box>
   );
 }

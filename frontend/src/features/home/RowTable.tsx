@@ -48,7 +48,10 @@ export function RowTable<Row>({ label, columns, rows, keyOf, pathOf }: RowTableP
             <TableRow
               key={keyOf(row)}
               hover
-              onClick={() => void navigate(pathOf(row))}
+              onClick={({ target }) => {
+                // A link in the row goes its own way.
+                if (!(target instanceof Element && target.closest('a'))) void navigate(pathOf(row));
+              }}
               sx={{ cursor: 'pointer', '&:last-of-type > *': { borderBottom: 0 } }}
             >
               {columns.map((column) => (

@@ -44,7 +44,14 @@ function columns(mmPerPixel: number): RowColumn<TrainSummary>[] {
   ];
 }
 
-export function TrainRows({ trains }: { trains: readonly TrainSummary[] }) {
+interface TrainRowsProps {
+  label: string;
+  trains: readonly TrainSummary[];
+  /** One more column at the end. */
+  last?: RowColumn<TrainSummary>;
+}
+
+export function TrainRows({ label, trains, last }: TrainRowsProps) {
   const scale = commonScale(
     trains.map(({ spec }) => spec),
     STRIP.height,
@@ -52,8 +59,8 @@ export function TrainRows({ trains }: { trains: readonly TrainSummary[] }) {
   );
   return (
     <RowTable
-      label="My trains"
-      columns={columns(scale)}
+      label={label}
+      columns={last === undefined ? columns(scale) : [...columns(scale), last]}
       rows={trains}
       keyOf={(train) => train.code}
       pathOf={pathOf}
