@@ -8,6 +8,8 @@ interface TextInputProps<Form extends FieldValues> {
   label: string;
   hint?: ReactNode;
   required?: boolean;
+  /** Fewest characters, unless blank. */
+  least?: number;
   /** Most characters; said at the field rather than cut off silently. */
   most?: number;
   rows?: number;
@@ -19,7 +21,19 @@ interface TextInputProps<Form extends FieldValues> {
 
 /** A text field of a form whose refusals stand right under it. */
 export function TextInput<Form extends FieldValues>(props: TextInputProps<Form>) {
-  const { control, name, label, hint, required, most = 200, rows, type, autoComplete, autoFocus } = props;
+  const {
+    control,
+    name,
+    label,
+    hint,
+    required,
+    least = 0,
+    most = 200,
+    rows,
+    type,
+    autoComplete,
+    autoFocus,
+  } = props;
   const { field, fieldState } = useController({
     control,
     name,
@@ -27,6 +41,8 @@ export function TextInput<Form extends FieldValues>(props: TextInputProps<Form>)
       validate: (typed) => {
         const text = String(typed ?? '');
         if (required && text.trim() === '') return 'Fill this in.';
+        if (text !== '' && text.length < least)
+          return `At least ${least} characters; this has ${text.length}.`;
         return text.length <= most || `At most ${most} characters; this has ${text.length}.`;
       },
     },

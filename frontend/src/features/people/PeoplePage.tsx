@@ -6,6 +6,7 @@ import type { User } from '../../api/types';
 import { ErrorState } from '../../components/ErrorState';
 import { LoadingRows } from '../../components/LoadingRows';
 import { NoPermission } from '../../components/NoPermission';
+import { useNotices } from '../../components/Notices';
 import { PageHeader } from '../../components/PageHeader';
 import { Sheet } from '../../components/Sheet';
 import { PeopleTable } from './PeopleTable';
@@ -16,6 +17,7 @@ export default function PeoplePage() {
   const { me, can } = useMe();
   const allowed = can('people.manage');
   const { users, problem, mutate } = useUsers(allowed);
+  const { tell } = useNotices();
   const [edited, setEdited] = useState<User | 'new' | null>(null);
   if (!allowed) {
     return (
@@ -49,8 +51,9 @@ export default function PeoplePage() {
         <PersonDialog
           person={edited === 'new' ? null : edited}
           onClose={() => setEdited(null)}
-          onSaved={() => {
+          onSaved={(message) => {
             setEdited(null);
+            tell(message);
             void mutate();
           }}
         />

@@ -1,3 +1,4 @@
+import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
@@ -13,6 +14,7 @@ import type { User } from '../../api/types';
 import { ConfirmDialog } from '../../components/ConfirmDialog';
 import { formatDay } from '../../components/figures';
 import { useNotices } from '../../components/Notices';
+import { roleWords } from './roleNames';
 
 interface PeopleTableProps {
   users: readonly User[];
@@ -43,24 +45,37 @@ export function PeopleTable({ users, myId, onEdit, onChanged }: PeopleTableProps
         <TableHead>
           <TableRow>
             <TableCell>Name</TableCell>
-            <TableCell>E-mail address</TableCell>
+            <TableCell sx={WIDE}>E-mail address</TableCell>
             <TableCell>Roles</TableCell>
-            <TableCell>State</TableCell>
-            <TableCell align="right">Since</TableCell>
-            <TableCell>
-              <span style={hiddenText}>Actions</span>
+            <TableCell sx={WIDE}>State</TableCell>
+            <TableCell align="right" sx={WIDE}>
+              Since
             </TableCell>
+            <TableCell align="right">Actions</TableCell>
           </TableRow>
         </TableHead>
         <TableBody>
           {users.map((user) => (
             <TableRow key={user.id} hover>
-              <TableCell sx={{ fontWeight: 500 }}>{user.name}</TableCell>
-              <TableCell>{user.email}</TableCell>
-              <TableCell>{user.roles.join(', ')}</TableCell>
-              <TableCell>{user.active ? 'active' : 'switched off'}</TableCell>
-              <TableCell align="right">{formatDay(user.createdAt)}</TableCell>
-              <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
+              <TableCell sx={{ fontWeight: 500, overflowWrap: 'anywhere' }}>
+                {user.name}
+                {user.id === myId && (
+                  <Box component="span" sx={quietSx}>
+                    {' (you)'}
+                  </Box>
+                )}
+                <Box sx={{ ...quietSx, display: { sm: 'none' } }}>{user.email}</Box>
+              </TableCell>
+              <TableCell sx={{ ...WIDE, overflowWrap: 'anywhere' }}>{user.email}</TableCell>
+              <TableCell>
+                {roleWords(user.roles)}
+                {!user.active && <Box sx={{ ...quietSx, display: { sm: 'none' } }}>switched off</Box>}
+              </TableCell>
+              <TableCell sx={WIDE}>{user.active ? 'active' : 'switched off'}</TableCell>
+              <TableCell align="right" sx={WIDE}>
+                {formatDay(user.createdAt)}
+              </TableCell>
+              <TableCell align="right" sx={{ whiteSpace: { sm: 'nowrap' } }}>
                 <Button onClick={() => onEdit(user)} aria-label={`Edit ${user.name}`}>
                   Edit
                 </Button>
@@ -100,10 +115,6 @@ export function PeopleTable({ users, myId, onEdit, onChanged }: PeopleTableProps
   );
 }
 
-const hiddenText = {
-  position: 'absolute',
-  width: 1,
-  height: 1,
-  overflow: 'hidden',
-  clipPath: 'inset(50%)',
-} as const;
+/** On a narrow screen these stand under the name and the roles. */
+const WIDE = { display: { xs: 'none', sm: 'table-cell' } } as const;
+const quietSx = { fontWeight: 400, color: 'text.secondary' } as const;

@@ -12,7 +12,9 @@ import { asProblem } from '../../api/problem';
 import type { Role, User } from '../../api/types';
 import { applyProblem } from '../../components/applyProblem';
 import { TextInput } from '../../components/TextInput';
+import { PasswordField } from './PasswordField';
 import { RolesField } from './RolesField';
+import { roleWords } from './roleNames';
 
 export interface PersonForm {
   name: string;
@@ -27,14 +29,15 @@ interface PersonDialogProps {
   /** null: a new person. */
   person: User | null;
   onClose: () => void;
-  onSaved: () => void;
+  /** Gets what to say about it. */
+  onSaved: (message: string) => void;
 }
 
 /** Adds or changes a person; what was typed stays when the server refuses. */
 export function PersonDialog({ person, onClose, onSaved }: PersonDialogProps) {
   const [refusal, setRefusal] = useState<string | null>(null);
   const [version, setVersion] = useState(person?.version ?? 0);
-  const { control, handleSubmit, setError, formState } = useForm<PersonForm>({
+  const { control, handleSubmit, setError, setValue, formState } = useForm<PersonForm>({
     defaultValues: {
       name: person?.name ?? '',
       email: person?.email ?? '',
@@ -47,20 +50,22 @@ export function PersonDialog({ person, onClose, onSaved }: PersonDialogProps) {
     setRefusal(null);
     try {
       if (person === null) {
-        await answer(api.POST('/api/users', { body: form }));
+        const added = await answer(api.POST('/api/users', { body: form }));
+        onSaved(`${added.name} can now sign in at ${window.location.origin} with the first password.`);
       } else {
         const { password, ...rest } = form;
         const body = { version, ...rest, ...(password === '' ? {} : { password }) };
-        await answer(api.PATCH('/api/users/{id}', { params: { path: { id: person.id } }, body }));
+        const path = { id: person.id };
+        const after = await answer(api.PATCH('/api/users/{id}', { params: { path }, body }));
+        onSaved(`${after.name} saved.`);
       }
-      onSaved();
     } catch (error) {
       const problem = asProblem(error);
       if (problem.changedMeanwhile) {
         const theirs = problem.current as User;
         setVersion(theirs.version);
         setRefusal(
-          `Somebody changed this person meanwhile: now ${theirs.name}, ${theirs.email}, ${theirs.roles.join(', ')}. Save again to put yours in its place.`,
+          `Somebody changed this person meanwhile: now ${theirs.name}, ${theirs.email}, ${roleWords(theirs.roles)}. Save again to put yours in its place.`,
         );
         return;
       }
@@ -83,18 +88,8 @@ export function PersonDialog({ person, onClose, onSaved }: PersonDialogProps) {
             {refusal !== null && <Alert severity="error">{refusal}</Alert>}
             <TextInput control={control} name="name" label="Name" required most={120} autoFocus />
             <TextInput control={control} name="email" label="E-mail address" type="email" required />
-            <TextInput
-              control={control}
-              name="password"
-              label={person === null ? 'First password' : 'New password'}
-              type="password"
-              autoComplete="new-password"
-              required={person === null}
-              hint={
-                person === null ? 'At least 10 characters; hand it over in person.' : 'Blank: stays as it is.'
-              }
-            />
             <RolesField control={control} />
+            <PasswordField control={control} setValue={setValue} first={person === null} />
           </Box>
         </DialogContent>
         <DialogActions>

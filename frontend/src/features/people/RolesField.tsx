@@ -6,14 +6,7 @@ import FormLabel from '@mui/material/FormLabel';
 import { useController, type Control } from 'react-hook-form';
 import type { Role } from '../../api/types';
 import type { PersonForm } from './PersonDialog';
-
-const ROLES: readonly { role: Role; does: string }[] = [
-  { role: 'designer', does: 'briefs, searches and trains' },
-  { role: 'librarian', does: 'parts' },
-  { role: 'purchaser', does: 'takes bills of materials' },
-  { role: 'viewer', does: 'looks, nothing else' },
-  { role: 'admin', does: 'everything, people included' },
-];
+import { ROLES } from './roleNames';
 
 /** One or more roles, each with what it gives. */
 export function RolesField({ control }: { control: Control<PersonForm> }) {
@@ -29,7 +22,7 @@ export function RolesField({ control }: { control: Control<PersonForm> }) {
       <FormLabel component="legend" sx={{ fontSize: '0.8125rem', fontWeight: 500 }}>
         Roles
       </FormLabel>
-      {ROLES.map(({ role, does }) => (
+      {ROLES.map(({ role, name, does }) => (
         <FormControlLabel
           key={role}
           control={
@@ -39,7 +32,7 @@ export function RolesField({ control }: { control: Control<PersonForm> }) {
               onBlur={field.onBlur}
             />
           }
-          label={`${role}: ${does}`}
+          label={`${name}: ${does}`}
         />
       ))}
       {fieldState.error !== undefined && <FormHelperText>{fieldState.error.message}</FormHelperText>}
