@@ -40,9 +40,11 @@ interface DataTableProps<Row extends GridValidRowModel> {
  */
 export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<Row>) {
   const { state, problem } = props;
-  // The last known count stands while a page loads; the grid would go back to its first page otherwise.
-  const [rowCount, setRowCount] = useState(0);
-  if (props.total !== undefined && props.total !== rowCount) setRowCount(props.total);
+  // The last known count stands while a page loads, and until there is one there are rows enough for the page that the
+  // address asks for; the grid would go back to its first page otherwise.
+  const [known, setKnown] = useState(0);
+  if (props.total !== undefined && props.total !== known) setKnown(props.total);
+  const rowCount = props.total ?? Math.max(known, state.page * state.size);
   if (problem !== null && props.rows === undefined) {
     return <ErrorState problem={problem} onRetry={props.onRetry} what={props.label.toLowerCase()} />;
   }

@@ -13,7 +13,7 @@ interface EmptyStateProps {
 /** An empty list: says so, and says what to do next. */
 export function EmptyState({ title, children, action }: EmptyStateProps) {
   return (
-    <Box sx={{ py: 2.5, px: 2, maxWidth: 560 }}>
+    <Box sx={{ py: 2, px: 1.25, maxWidth: 560 }}>
       <Typography variant="h3" component="p" gutterBottom>
         {title}
       </Typography>

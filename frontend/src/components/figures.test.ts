@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { formatCount, formatFixed, formatPlain, formatSigned } from './figures';
+import { formatCount, formatFixed, formatMass, formatPlain, formatSigned } from './figures';
 import { toTsv } from './copyTsv';
 
 describe('figures', () => {
@@ -19,6 +19,10 @@ describe('figures', () => {
       '–',
     ]);
     expect(formatPlain(null)).toBe('–');
+  });
+
+  it('does not let a light thing read as weighing nothing', () => {
+    expect([0.0004, 0.0006, 1.14, null].map(formatMass)).toEqual(['< 0.001', '0.001', '1.140', '–']);
   });
 
   it('drops trailing zeros of plain figures and groups counts', () => {

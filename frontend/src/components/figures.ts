@@ -12,6 +12,11 @@ export function formatFixed(value: number | null | undefined, decimals: number):
   return Number(text) === 0 ? text.replace('-', '') : text.replace('-', MINUS);
 }
 
+/** A mass in kg to the gram; what is lighter than that says so rather than reading as nothing. */
+export function formatMass(value: number | null | undefined): string {
+  return typeof value === 'number' && value > 0 && value < 0.0005 ? '< 0.001' : formatFixed(value, 3);
+}
+
 /** Like `formatFixed`, with a plus sign on positive values. */
 export function formatSigned(value: number | null | undefined, decimals: number): string {
   const text = formatFixed(value, decimals);

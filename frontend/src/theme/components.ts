@@ -88,7 +88,10 @@ const fields: Look = {
         '& fieldset': { top: 0, borderColor: theme.vars.palette.line.strong },
         '& legend': { display: 'none' },
         '&:hover:not(.Mui-error) fieldset': { borderColor: theme.vars.palette.text.primary },
-        '&.Mui-focused fieldset': { borderColor: theme.vars.palette.secondary.main, borderWidth: 2 },
+        '&.Mui-focused:not(.Mui-error) .MuiOutlinedInput-notchedOutline': {
+          borderColor: theme.vars.palette.secondary.main,
+          borderWidth: 2,
+        },
       }),
       input: ({ theme }) => ({
         '&::placeholder': { color: theme.vars.palette.text.secondary, opacity: 1 },
@@ -257,6 +260,8 @@ const grid: Look = {
         '& .MuiDataGrid-columnHeader:hover .MuiDataGrid-columnSeparator': { opacity: 1 },
         '& .MuiDataGrid-cell': { paddingInline: 10 },
         '& .MuiDataGrid-columnHeader': { paddingInline: 10 },
+        // The mark of the sorted column takes little, so that the column's name stays whole.
+        '& .MuiDataGrid-sortButton': { padding: 0, fontSize: '1rem', '& svg': { fontSize: '1rem' } },
         '& .MuiDataGrid-cell:focus-visible, & .MuiDataGrid-columnHeader:focus-visible': {
           outline: `2px solid ${theme.vars.palette.secondary.main}`,
           outlineOffset: -2,

@@ -22,18 +22,18 @@ export function GeometryPanel({ live, bore, shiftUnknown }: GeometryPanelProps) 
     <Sheet title="Computed geometry" flush>
       <Box aria-live="polite" sx={{ pb: 1 }}>
         {live.kind === 'waiting' && (
-          <Typography color="textSecondary" sx={{ px: 1.75, pb: 1 }}>
+          <Typography color="textSecondary" sx={{ px: 1.25, pb: 1 }}>
             Give {live.missing.join(' and ')}, and the geometry appears here as you type.
           </Typography>
         )}
         {live.kind === 'refused' && (
-          <Alert severity="error" sx={{ mx: 1.75, mb: 1 }}>
+          <Alert severity="error" sx={{ mx: 1.25, mb: 1 }}>
             <b>This gear cannot be cut.</b> {live.messages.join(' ')}
           </Alert>
         )}
         {live.kind === 'computed' && (
           <>
-            <Box sx={{ px: 1.75, pt: 0.5, pb: 1 }}>
+            <Box sx={{ px: 1.25, pt: 0.5, pb: 1 }}>
               <GearDrawing gear={live.gear} geometry={live.geometry} bore={bore} size={250} />
             </Box>
             {bore !== null && bore >= live.geometry.rootDiameter && (

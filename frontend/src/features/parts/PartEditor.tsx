@@ -65,11 +65,6 @@ export function PartEditor({ start, part, onSave, onCancel, saveName, head }: Pa
     <Box component="form" noValidate onSubmit={(event) => void submit(event)}>
       <UnsavedWarning dirty={isDirty && next === null} what="this part" />
       {head}
-      {refusal !== null && (
-        <Alert severity="error" sx={{ mb: 1.5 }}>
-          {refusal}
-        </Alert>
-      )}
       {theirs !== null && base !== undefined && (
         <ConflictNotice
           base={base}
@@ -90,6 +85,12 @@ export function PartEditor({ start, part, onSave, onCancel, saveName, head }: Pa
         <Box sx={{ display: 'flex', flexDirection: 'column', gap: 1.5, minWidth: 0 }}>
           <PartFormFields control={control} kind={kind} isNew={part === undefined} />
           <Box sx={barSx}>
+            {/* Here, beside the button that was pressed: the head of a long form is out of sight. */}
+            {refusal !== null && (
+              <Alert severity="error" sx={{ flexBasis: '100%' }}>
+                {refusal}
+              </Alert>
+            )}
             <Button type="submit" variant="contained" disabled={isSubmitting}>
               {isSubmitting ? 'Saving…' : saveName}
             </Button>
@@ -119,6 +120,7 @@ const layoutSx = {
 
 const barSx = {
   display: 'flex',
+  flexWrap: 'wrap',
   gap: 1,
   position: 'sticky',
   bottom: 0,

@@ -4,7 +4,7 @@ import { formatModule } from '@stageyard/libs/units';
 import { useMemo, type ReactNode } from 'react';
 import type { Part } from '../../api/types';
 import { Cautions } from '../../components/Cautions';
-import { formatFixed, NOTHING } from '../../components/figures';
+import { formatFixed, formatMass, NOTHING } from '../../components/figures';
 import { FigureTable, type FigureRow } from '../../components/FigureTable';
 import { Sheet } from '../../components/Sheet';
 import { attributeOf, figureOf, shownValue } from './attributes';
@@ -24,7 +24,7 @@ export function PartFacts({ part, below }: { part: Part; below: ReactNode }) {
       values: [shownAttribute(part, field)],
     })),
     { label: 'Material', values: [part.material ?? NOTHING] },
-    { label: 'Mass of one', unit: 'kg', values: [formatFixed(part.mass, 3)] },
+    { label: 'Mass of one', unit: 'kg', values: [formatMass(part.mass)] },
     { label: 'Made or bought', values: [part.supply === 'made' ? 'made by us' : 'bought'] },
     { label: 'Supplier', values: [part.supplier ?? NOTHING] },
   ];

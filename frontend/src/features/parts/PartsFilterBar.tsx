@@ -34,9 +34,12 @@ const MORE: readonly PartFilter[] = [
 export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
   const { facets } = usePartFacets();
   const narrow = useMediaQuery(useTheme().breakpoints.down('sm'));
-  const rareSet = (narrow ? PART_FILTERS.filter((name) => name !== 'text') : MORE).some(
-    (name) => state.filters[name] !== undefined,
-  );
+  // A second sort key shows itself, too: an order that nobody can see looks like none.
+  const rareSet =
+    state.sort.length > 1 ||
+    (narrow ? PART_FILTERS.filter((name) => name !== 'text') : MORE).some(
+      (name) => state.filters[name] !== undefined,
+    );
   const [open, setOpen] = useState(false);
   const bind = (name: PartFilter) => ({
     value: state.filters[name] ?? '',

@@ -1,3 +1,4 @@
+import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useTheme } from '@mui/material/styles';
 import useMediaQuery from '@mui/material/useMediaQuery';
@@ -81,7 +82,7 @@ export default function PartsPage() {
   ) : undefined;
   const filtered = state.filterCount > 0;
   return (
-    <>
+    <Box sx={pageSx}>
       <PageHeader title="Parts" actions={add} />
       <PartsFilterBar
         state={state}
@@ -96,41 +97,48 @@ export default function PartsPage() {
           )
         }
       />
-      <DataTable<PartSummary>
-        label="Parts"
-        columns={columnsFor(width)}
-        rows={page?.items}
-        total={page?.total}
-        getRowId={(part) => part.id}
-        state={state}
-        loading={isLoading}
-        problem={problem}
-        onRetry={() => void mutate()}
-        onOpen={(part) => void navigate(`/parts/${encodeURIComponent(part.number)}`)}
-        selection={narrow ? undefined : selection}
-        onSelection={setSelection}
-        hidden={hiddenColumns(width)}
-        empty={
-          filtered ? (
-            <EmptyState
-              title="No part meets these filters"
-              action={
-                <Button variant="outlined" onClick={state.clearFilters}>
-                  Clear the filters
-                </Button>
-              }
-            >
-              Loosen one of them, or clear them all.
-            </EmptyState>
-          ) : (
-            <EmptyState title="The library is empty" action={add}>
-              {can('parts.edit')
-                ? 'Add the gears, bearings and other parts that you hold or can buy.'
-                : 'A librarian adds the gears, bearings and other parts.'}
-            </EmptyState>
-          )
-        }
-      />
-    </>
+      <Box sx={{ flex: '1 1 0', minHeight: 380 }}>
+        <DataTable<PartSummary>
+          label="Parts"
+          height="100%"
+          rowHeight={narrow ? 48 : 32}
+          columns={columnsFor(width)}
+          rows={page?.items}
+          total={page?.total}
+          getRowId={(part) => part.id}
+          state={state}
+          loading={isLoading}
+          problem={problem}
+          onRetry={() => void mutate()}
+          onOpen={(part) => void navigate(`/parts/${encodeURIComponent(part.number)}`)}
+          selection={narrow ? undefined : selection}
+          onSelection={setSelection}
+          hidden={hiddenColumns(width)}
+          empty={
+            filtered ? (
+              <EmptyState
+                title="No part meets these filters"
+                action={
+                  <Button variant="outlined" onClick={state.clearFilters}>
+                    Clear the filters
+                  </Button>
+                }
+              >
+                Loosen one of them, or clear them all.
+              </EmptyState>
+            ) : (
+              <EmptyState title="The library is empty" action={add}>
+                {can('parts.edit')
+                  ? 'Add the gears, bearings and other parts that you hold or can buy.'
+                  : 'A librarian adds the gears, bearings and other parts.'}
+              </EmptyState>
+            )
+          }
+        />
+      </Box>
+    </Box>
   );
 }
+
+/** The table takes what the filters leave of the window, however many lines they need. */
+const pageSx = { display: 'flex', flexDirection: 'column', minHeight: 'calc(100dvh - 92px)' } as const;

@@ -1,7 +1,7 @@
 import type { GridColDef } from '@mui/x-data-grid';
 import { Link } from 'react-router-dom';
 import type { PartSummary } from '../../api/types';
-import { formatDay, formatFixed, formatPlain, NOTHING } from '../../components/figures';
+import { formatDay, formatFixed, formatMass, formatPlain, NOTHING } from '../../components/figures';
 import { attributeOf, figureOf } from './attributes';
 import { KIND_NAMES } from './partKinds';
 import { StandingWord } from './StandingWord';
@@ -27,7 +27,7 @@ export const PART_COLUMNS: Column[] = [
   {
     field: 'number',
     headerName: 'Number',
-    width: 104,
+    width: 100,
     renderCell: ({ row }) => (
       <Link
         to={`/parts/${encodeURIComponent(row.number)}`}
@@ -40,17 +40,24 @@ export const PART_COLUMNS: Column[] = [
       </Link>
     ),
   },
-  { field: 'description', headerName: 'Description', flex: 1, minWidth: 210 },
+  {
+    field: 'description',
+    headerName: 'Description',
+    flex: 1,
+    minWidth: 210,
+    // What does not fit can be read in full by pointing at it.
+    renderCell: ({ row }) => <span title={row.description}>{row.description}</span>,
+  },
   {
     field: 'kind',
     headerName: 'Kind',
     width: 112,
     valueFormatter: (kind: PartSummary['kind']) => KIND_NAMES[kind],
   },
-  attributeColumn('teeth', 'Teeth', 84),
-  attributeColumn('module', 'Module mm', 104),
+  attributeColumn('teeth', 'Teeth', 76),
+  attributeColumn('module', 'Module mm', 112),
   {
-    ...attributeColumn('helixAngleDeg', 'Helix', 86, false),
+    ...attributeColumn('helixAngleDeg', 'Helix', 84, false),
     valueGetter: (_, part) => {
       const angle = figureOf(part, 'helixAngleDeg');
       if (angle === null) return '';
@@ -64,27 +71,27 @@ export const PART_COLUMNS: Column[] = [
     valueGetter: (_, part) => (figureOf(part, 'teeth') === null ? null : figureOf(part, 'profileShift')),
     valueFormatter: (value: number | null) => (value === null ? NOTHING : formatFixed(value, 3)),
   },
-  attributeColumn('faceWidth', 'Face mm', 84),
-  attributeColumn('bore', 'Bore mm', 84),
+  attributeColumn('faceWidth', 'Face mm', 92),
+  attributeColumn('bore', 'Bore mm', 92),
   {
     field: 'material',
     headerName: 'Material',
-    width: 120,
+    width: 106,
     sortable: false,
     valueFormatter: (value: string | null) => value ?? NOTHING,
   },
   {
     field: 'mass',
     headerName: 'Mass kg',
-    width: 80,
+    width: 92,
     align: 'right',
     headerAlign: 'right',
-    valueFormatter: (value: number | null) => formatFixed(value, 3),
+    valueFormatter: (value: number | null) => formatMass(value),
   },
   {
     field: 'standing',
     headerName: 'Standing',
-    width: 98,
+    width: 104,
     renderCell: ({ row }) => <StandingWord standing={row.standing} />,
   },
   {
@@ -104,6 +111,8 @@ export type TableWidth = 'narrow' | 'middle' | 'wide' | 'full';
 const ROOM: Partial<Record<string, readonly TableWidth[]>> = {
   number: ['narrow', 'middle', 'wide', 'full'],
   description: ['narrow', 'middle', 'wide', 'full'],
+  // The description says the kind first; its filter is always there.
+  kind: ['full'],
   teeth: ['narrow', 'middle', 'wide', 'full'],
   module: ['narrow', 'middle', 'wide', 'full'],
   material: ['wide', 'full'],
@@ -124,9 +133,16 @@ export function hiddenColumns(width: TableWidth): Record<string, boolean> {
 export function columnsFor(width: TableWidth): Column[] {
   if (width !== 'narrow') return PART_COLUMNS;
   return PART_COLUMNS.map((column) => {
-    if (column.field === 'description') return { ...column, minWidth: 100 };
-    if (column.field === 'teeth') return { ...column, width: 66 };
-    if (column.field === 'module') return { ...column, headerName: 'm mm', width: 64 };
+    if (column.field === 'description') {
+      // Two lines instead of one cut short.
+      const renderCell: Column['renderCell'] = ({ row }) => (
+        <span style={{ whiteSpace: 'normal', lineHeight: 1.3 }}>{row.description}</span>
+      );
+      return { ...column, minWidth: 100, renderCell };
+    }
+    if (column.field === 'number') return { ...column, width: 92 };
+    if (column.field === 'teeth') return { ...column, width: 62 };
+    if (column.field === 'module') return { ...column, headerName: 'm, mm', width: 68 };
     return column;
   });
 }
