@@ -10,6 +10,7 @@ export const FLAG = {
   draftPart: 'part is a draft, not cleared for use',
   withdrawnPart: 'part is withdrawn',
   bothHandsNeeded: 'a helical pair needs both hands: only one is in stock',
+  handNotChosen: 'hand of the helix not chosen',
   sameHand: 'both gears of this stage have the same hand',
   thinRim: 'rim under the keyway is thinner than two modules',
 } as const;

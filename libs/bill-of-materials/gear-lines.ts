@@ -105,6 +105,7 @@ function handFlags(own: MountedGear, mate: MountedGear | undefined): string[] {
   if (own.gear.helixAngleDeg === 0 || !mate) return [];
   const flags: string[] = [];
   const [hand, mateHand] = [handOf(own), handOf(mate)];
+  if (hand === null) flags.push(FLAG.handNotChosen);
   if (hand !== null && hand === mateHand) flags.push(FLAG.sameHand);
   if ((own.part === null) !== (mate.part === null)) flags.push(FLAG.bothHandsNeeded);
   return flags;

@@ -27,7 +27,7 @@ export interface ShaftNeed {
   kind: 'shaft';
   partNumber: string | null;
   diameter: number;
-  /** Least length; a longer stock shaft is cut down. */
+  /** Span between the bearing faces; a stock shaft is longer, for its seats and ends, and is cut down. */
   length: number;
 }
 

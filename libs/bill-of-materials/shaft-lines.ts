@@ -44,8 +44,10 @@ function shaftItem(shaft: KitShaft, library: PartFinder): KitItem {
   const part = library.find({ kind: 'shaft', partNumber: shaft.partNumber ?? null, diameter, length });
   const stockLength = part?.length ?? null;
   const flags: string[] = [];
-  if (stockLength !== null && stockLength < length) {
-    flags.push(`${formatTrimmed(stockLength, 2)} mm long in stock, ${formatTrimmed(length, 2)} mm needed`);
+  // The span is between the bearing faces: a shaft no longer than that has nothing for the bearings to sit on.
+  if (stockLength !== null && stockLength <= length) {
+    const [held, span] = [formatTrimmed(stockLength, 2), formatTrimmed(length, 2)];
+    flags.push(`${held} mm long in stock, more than ${span} mm needed`);
   }
   const cut = stockLength !== null && stockLength > length;
   return kitItem(
@@ -59,7 +61,7 @@ function shaftItem(shaft: KitShaft, library: PartFinder): KitItem {
       mass: shaftMass(shaft),
       source: `Shaft ${shaft.index}`,
       note: cut
-        ? `Cut to ${formatTrimmed(length, 2)} mm.`
+        ? `Cut from stock: ${formatTrimmed(length, 2)} mm between bearing faces, and seats and shaft ends as drawn.`
         : 'Length between bearing faces; seats and shaft ends as drawn.',
       flags,
     },
