@@ -4,9 +4,10 @@ import {
   type GridColDef,
   type GridRowId,
   type GridRowSelectionModel,
+  type GridSortModel,
   type GridValidRowModel,
 } from '@mui/x-data-grid';
-import { useState, type ReactNode } from 'react';
+import { useMemo, useRef, useState, type ReactNode } from 'react';
 import type { Problem } from '../api/problem';
 import { ErrorState } from './ErrorState';
 import type { ListState } from './useListState';
@@ -34,6 +35,8 @@ interface DataTableProps<Row extends GridValidRowModel> {
   rowHeight?: number;
 }
 
+const NO_SORT = { field: '', down: false };
+
 /**
  * A server-side table on the community data grid. Filters and the second sort key live outside (the grid has one of
  * each); the address holds page and sort; the row count stays steady while the next page is on its way.
@@ -45,12 +48,32 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
   const [known, setKnown] = useState(0);
   if (props.total !== undefined && props.total !== known) setKnown(props.total);
   const rowCount = props.total ?? Math.max(known, state.page * state.size);
+  // The grid goes to its first page by itself when it starts. That is not the reader's wish, who may have followed a link
+  // to page 12: only what comes after a click or a key counts, or a page that does not exist.
+  const touched = useRef(false);
+  const touch = () => {
+    touched.current = true;
+  };
+  const beyond = props.total !== undefined && state.page > 1 && (state.page - 1) * state.size >= props.total;
+  const [{ field, down } = NO_SORT] = state.sort;
+  // The same objects as long as they say the same: the grid takes new ones for a change, and starts over.
+  const sortModel = useMemo<GridSortModel>(
+    () => (field === '' ? [] : [{ field, sort: down ? 'desc' : 'asc' }]),
+    [field, down],
+  );
+  const paginationModel = useMemo(
+    () => ({ page: state.page - 1, pageSize: state.size }),
+    [state.page, state.size],
+  );
   if (problem !== null && props.rows === undefined) {
     return <ErrorState problem={problem} onRetry={props.onRetry} what={props.label.toLowerCase()} />;
   }
-  const [first] = state.sort;
   return (
-    <Box sx={{ height: props.height ?? 'calc(100dvh - 204px)', minHeight: 380, bgcolor: 'background.paper' }}>
+    <Box
+      onClickCapture={touch}
+      onKeyDownCapture={touch}
+      sx={{ height: props.height ?? 'calc(100dvh - 204px)', minHeight: 380, bgcolor: 'background.paper' }}
+    >
       <DataGrid<Row>
         aria-label={props.label}
         columns={props.columns}
@@ -64,13 +87,13 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
         paginationMode="server"
         sortingMode="server"
         filterMode="server"
-        paginationModel={{ page: state.page - 1, pageSize: state.size }}
+        paginationModel={paginationModel}
         pageSizeOptions={[25, 50, 100]}
         onPaginationModelChange={({ page, pageSize }) => {
-          // The grid clamps to page 0 while the count is unknown; that is not the reader's wish.
-          if (props.total !== undefined) state.setPage(pageSize === state.size ? page + 1 : 1, pageSize);
+          if (props.total !== undefined && (touched.current || beyond))
+            state.setPage(pageSize === state.size ? page + 1 : 1, pageSize);
         }}
-        sortModel={first ? [{ field: first.field, sort: first.down ? 'desc' : 'asc' }] : []}
+        sortModel={sortModel}
         onSortModelChange={([key]) => {
           const second = state.sort[1];
           const main = key ? [{ field: key.field, down: key.sort === 'desc' }] : [];

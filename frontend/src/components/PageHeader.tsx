@@ -33,7 +33,12 @@ export function PageHeader({ title, code, facts, figure, actions }: PageHeaderPr
       }}
     >
       {figure}
-      <Box sx={{ flex: '1 1 300px', minWidth: 0 }}>
+      <Box
+        sx={{
+          flex: { xs: facts === undefined && code === undefined ? '1 1 0' : '1 1 300px', sm: '1 1 300px' },
+          minWidth: 0,
+        }}
+      >
         <Typography variant="h1" sx={{ overflowWrap: 'anywhere' }}>
           {code !== undefined && (
             <Box component="span" sx={{ mr: 0.5, whiteSpace: 'nowrap' }}>
@@ -52,7 +57,9 @@ export function PageHeader({ title, code, facts, figure, actions }: PageHeaderPr
           </Typography>
         )}
       </Box>
-      {actions !== undefined && <Box sx={{ display: 'flex', gap: 1, flexWrap: 'wrap' }}>{actions}</Box>}
+      {actions !== undefined && (
+        <Box sx={{ display: 'flex', gap: 1, flexWrap: 'wrap', displayPrint: 'none' }}>{actions}</Box>
+      )}
     </Box>
   );
 }

@@ -41,6 +41,7 @@ export function LatestTrains() {
 const WORKBOOK = {
   name: 'BOM',
   figure: true,
+  wideOnly: true,
   cell: ({ code }: TrainSummary) => (
     <Link href={bomWorkbookUrl(code)} download aria-label={`Download the BOM of ${code}`}>
       Download

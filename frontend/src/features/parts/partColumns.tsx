@@ -138,7 +138,7 @@ export function columnsFor(width: TableWidth): Column[] {
       const renderCell: Column['renderCell'] = ({ row }) => (
         <span style={{ whiteSpace: 'normal', lineHeight: 1.3 }}>{row.description}</span>
       );
-      return { ...column, minWidth: 100, renderCell };
+      return { ...column, minWidth: 100, display: 'flex', renderCell };
     }
     if (column.field === 'number') return { ...column, width: 92 };
     if (column.field === 'teeth') return { ...column, width: 62 };

@@ -9,7 +9,7 @@ export function OpeningPage({ title, children }: { title: string; children: Reac
     document.title = `${title} · Stageyard`;
   }, [title]);
   return (
-    <Box sx={{ minHeight: '100dvh', display: 'grid', gridTemplateColumns: { xs: '1fr', md: '440px 1fr' } }}>
+    <Box sx={{ minHeight: '100dvh', display: 'grid', gridTemplateColumns: { xs: '1fr', md: '460px 1fr' } }}>
       <Box
         component="main"
         sx={{

@@ -98,7 +98,7 @@ export function TrainFigure() {
         strokeWidth={0.8}
         strokeDasharray={DASH_DOT}
       />
-      <TurnArrow centre={one.pinion.centre} radius={62} clockwise />
+      <TurnArrow centre={one.pinion.centre} radius={31} clockwise />
       <Dimension
         from={{ x: one.pinion.centre.x, y: middle + one.tip.pinion * SCALE + 8 }}
         to={{ x: two.pinion.centre.x, y: middle + one.tip.wheel * SCALE + 8 }}
