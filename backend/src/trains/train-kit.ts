@@ -1,6 +1,6 @@
 import { type KitGear, type KitRequest } from '@stageyard/libs/bill-of-materials';
 import { DEFAULT_TIP_RADIUS } from '@stageyard/libs/gear-geometry';
-import { type TrainFigures } from '@stageyard/libs/train-planner';
+import { describeTrain, type TrainFigures } from '@stageyard/libs/train-planner';
 import { type AdoptedSpec, gearsOf } from './adopted-spec.js';
 
 /** Wall of a housing when the brief says nothing of it, mm. */
@@ -17,6 +17,11 @@ function standardRack(pressureAngleDeg: number) {
 
 /** What the kit rules need to know of a train. */
 export function kitOf(title: string, spec: AdoptedSpec, figures: TrainFigures): KitRequest {
+  const wall = spec.envelope?.wall || STARTING_WALL;
+  // Without a wall in the brief the box ends at the gears: the starting wall stands round it, not in it.
+  const walled = spec.envelope?.wall
+    ? figures
+    : describeTrain({ ...spec, envelope: { ...spec.envelope, wall: STARTING_WALL } });
   return {
     trainTitle: title,
     centreDistances: spec.stages.map((stage) => stage.centreDistance),
@@ -39,9 +44,9 @@ export function kitOf(title: string, spec: AdoptedSpec, figures: TrainFigures): 
       };
     }),
     shafts: spec.shafts.map(({ diameter }, index) => {
-      const span = figures.shafts[index];
+      const span = walled.shafts[index];
       return { index, diameter, length: span ? Math.ceil(span.z2 - span.z1) : 0 };
     }),
-    box: { ...figures.box, wall: spec.envelope?.wall || STARTING_WALL },
+    box: { ...walled.box, wall },
   };
 }
