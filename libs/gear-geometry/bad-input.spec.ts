@@ -28,6 +28,11 @@ const shiftOf = (input: unknown) => () => shiftForPolicy(input as never);
 
 const good = { teeth: 20, module: 2 };
 
+it('a helix too slight for an axial pitch has none', () => {
+  expect(gearGeometry({ ...good, helixAngleDeg: 1e-308 }).axialPitch).toBeNull();
+  expect(gearGeometry({ ...good, helixAngleDeg: 1e-3 }).axialPitch).toBeGreaterThan(3e5);
+});
+
 describe('a gear is refused', () => {
   it.each<[string, unknown, unknown]>([
     ['teeth', { module: 2 }, undefined],
@@ -41,6 +46,7 @@ describe('a gear is refused', () => {
     ['module', { ...good, module: -2 }, -2],
     ['module', { ...good, module: Infinity }, Infinity],
     ['module', { ...good, module: 1e6 }, 1e6],
+    ['module', { ...good, module: 1e-300 }, 1e-300],
     ['pressureAngleDeg', { ...good, pressureAngleDeg: 21 }, 21],
     ['pressureAngleDeg', { ...good, pressureAngleDeg: NaN }, NaN],
     ['helixAngleDeg', { ...good, helixAngleDeg: -1 }, -1],

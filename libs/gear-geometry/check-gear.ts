@@ -1,6 +1,6 @@
 import { FieldChecks, isRecord, plain } from './check-fields.js';
 import { figuresOf, thicknessAt } from './gear-radii.js';
-import { INPUT_LIMITS, PRESSURE_ANGLES_DEG } from './limits.js';
+import { INPUT_LIMITS, LEAST_MODULE, PRESSURE_ANGLES_DEG } from './limits.js';
 import { largestTipRadius, resolveGear } from './resolve.js';
 import { type GearInput, type ResolvedGear } from './types.js';
 import { degToRad } from '../units/index.js';
@@ -20,7 +20,14 @@ export function checkGear(input: unknown, path: string, checks: FieldChecks): Re
   const label = (name: string) => titled(path, name);
 
   checkTeeth(input.teeth, at('teeth'), label('number of teeth'), checks);
-  checks.number(at('module'), input.module, label('module'), INPUT_LIMITS.module, 'mm');
+  const module = input.module;
+  if (
+    checks.number(at('module'), module, label('module'), INPUT_LIMITS.module, 'mm') &&
+    module < LEAST_MODULE
+  ) {
+    const mend = `is too small. Enter a number from ${LEAST_MODULE} to ${INPUT_LIMITS.module.max} mm.`;
+    checks.refuse(at('module'), module, label('module'), mend, LEAST_MODULE);
+  }
   checkPressureAngle(input.pressureAngleDeg, at('pressureAngleDeg'), label('pressure angle'), checks);
   const optional = [
     ['helixAngleDeg', 'helix angle', '°'],

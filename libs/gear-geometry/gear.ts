@@ -39,9 +39,15 @@ export function geometryOf(gear: ResolvedGear, figures: GearFigures): GearGeomet
     transverseModule: m / Math.cos(gear.beta),
     transversePressureAngleDeg: radToDeg(gear.alphaT),
     baseHelixAngleDeg: radToDeg(gear.betaB),
-    axialPitch: gear.beta === 0 ? null : (Math.PI * m) / Math.sin(gear.beta),
+    axialPitch: axialPitch(gear),
     toothDepth: figures.tip - figures.root,
     chordalThickness: normalDiameter * Math.sin(halfAngle),
     chordalHeight: figures.tip - figures.reference + (normalDiameter / 2) * (1 - Math.cos(halfAngle)),
   };
+}
+
+/** p_x = π m/sin β, mm; null for a spur gear, and for a helix so slight that the pitch is beyond any number. */
+function axialPitch(gear: ResolvedGear): number | null {
+  const pitch = (Math.PI * gear.module) / Math.sin(gear.beta);
+  return Number.isFinite(pitch) ? pitch : null;
 }

@@ -18,6 +18,9 @@ export const INPUT_LIMITS = {
   pinDiameter: { above: 0, max: 1_000 },
 } as const;
 
+/** Below this (mm) a module has no meaning, though it is above 0. */
+export const LEAST_MODULE = 1e-6;
+
 /** The team's own limits on a pair, in modules where not a ratio. */
 export const HOUSE_LIMITS = {
   contactRatio: 1.2,

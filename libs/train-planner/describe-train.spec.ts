@@ -97,6 +97,30 @@ describe('a whole train', () => {
   });
 });
 
+describe('a train is refused', () => {
+  it.each<[string, Partial<TrainSpec>]>([
+    ['inputSpeed', { inputSpeed: NaN }],
+    ['inputSpeed', { inputSpeed: -1 }],
+    ['inputTorque', { inputTorque: Infinity }],
+    ['outputTorque', { outputTorque: 1e308 }],
+    ['applicationFactor', { applicationFactor: 0 }],
+    ['gap', { gap: NaN }],
+    ['envelope.wall', { envelope: { wall: NaN } }],
+    ['leastContactRatio', { leastContactRatio: NaN }],
+    ['target.ratio', { target: { ratio: 'four', tolerancePercent: 1 } }],
+    ['target.tolerancePercent', { target: { ratio: '4', tolerancePercent: NaN } }],
+  ])('for %s in %o', (field, change) => {
+    let fields: string[] = [];
+    try {
+      describeTrain(winch(change));
+    } catch (error) {
+      if (!(error instanceof InputError)) throw error;
+      fields = error.errors.map((issue) => issue.field);
+    }
+    expect(fields).toEqual([field]);
+  });
+});
+
 describe('checks of a train', () => {
   it('passes a sound train and says every requirement in a sentence', () => {
     const { checks } = describeTrain(winch({ envelope: { length: 400, width: 90, height: 200, wall: 3 } }));

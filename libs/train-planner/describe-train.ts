@@ -1,5 +1,6 @@
 import { meshGeometry, type GearInput, type MeshGeometry } from '../gear-geometry/index.js';
-import { fieldError, InputError, multiply, ratio, ratioErrorPercent, ratioToNumber } from '../units/index.js';
+import { InputError, multiply, ratio, ratioErrorPercent, ratioToNumber } from '../units/index.js';
+import { checkTrain } from './check-train.js';
 import { outputBacklash } from './output-backlash.js';
 import { DEFAULT_DENSITY } from './stage-pairs.js';
 import { DEFAULT_GAP, lengthInLine, toNm, widthOfPlanes } from './train-box.js';
@@ -12,17 +13,10 @@ import { type SpecGear, type SpecStage, type TrainFigures, type TrainSpec } from
 /**
  * Every figure of a whole train: meshes at their operating distances, shafts, box, and each requirement held
  * against it. Masses are those of solid discs at the reference diameter.
- * @throws InputError naming the field (`stages.0.pinion.teeth`) when a stage has no meaning
+ * @throws InputError naming the field (`stages.0.pinion.teeth`) when a stage or a figure has no meaning
  */
 export function describeTrain(train: TrainSpec): TrainFigures {
-  if (train.stages.length === 0) {
-    throw fieldError('stages', 0, 'The train has no stage. Give at least one.', 1);
-  }
-  if (train.inputTorque !== undefined && train.outputTorque !== undefined) {
-    const message =
-      'Both an input and an output torque are given. Give one; the other follows from the ratio.';
-    throw fieldError('outputTorque', train.outputTorque, message);
-  }
+  checkTrain(train);
   const meshes = train.stages.map((stage, index) => stageMesh(train, stage, index));
   const exact = multiply(...train.stages.map(({ pinion, wheel }) => ratio(wheel.teeth, pinion.teeth)));
   const box = trainBox(train, meshes);

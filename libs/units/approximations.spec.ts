@@ -78,6 +78,8 @@ describe('convergents', () => {
 
 it.each([
   ['target 0', () => mediants('0')],
+  ['no target', () => mediants(null as never)],
+  ['a list as target', () => convergents([] as never)],
   ['negative target', () => convergents('-3')],
   ['maxTerm not whole', () => mediants('3.5', { maxTerm: 2.5 })],
   ['limit 0', () => convergents('3.5', { limit: 0 })],

@@ -62,7 +62,10 @@ export function parseDecimal(text: string, field = 'value'): Ratio {
  */
 export function toRatio(value: RatioInput, field = 'value'): Ratio {
   if (typeof value === 'string') return parseDecimal(value, field);
-  if (typeof value !== 'number') return ratio(value.numerator, value.denominator);
+  if (isRatio(value)) return ratio(value.numerator, value.denominator);
+  if (typeof value !== 'number') {
+    throw fieldError(field, shownKind(value), 'The figure is missing. Give a decimal, such as 37.5.');
+  }
   if (!Number.isFinite(value)) {
     throw fieldError(field, String(value), 'The figure must be a finite number, such as 37.5.');
   }
@@ -100,4 +103,13 @@ function wholeTerm(term: bigint | number, field: string): bigint {
     throw fieldError(field, String(term), `The ${field} must be a whole number below 9,007,199,254,740,992.`);
   }
   return BigInt(term);
+}
+
+function isRatio(value: unknown): value is Ratio {
+  return typeof value === 'object' && value !== null && 'numerator' in value && 'denominator' in value;
+}
+
+/** What stands where a figure should be, in a word: it may be anything when it comes from outside. */
+function shownKind(value: unknown): string | null {
+  return value === undefined || value === null ? null : `a ${typeof value}`;
 }
