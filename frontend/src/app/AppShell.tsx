@@ -7,6 +7,7 @@ import { Outlet, ScrollRestoration } from 'react-router-dom';
 import { Brand } from './Brand';
 import { HeaderSearch } from './HeaderSearch';
 import { PersonMenu } from './PersonMenu';
+import { usePrintInLight } from './usePrintInLight';
 import { SideNav } from './SideNav';
 
 const NAV_WIDTH = 188;
@@ -14,6 +15,7 @@ const NAV_WIDTH = 188;
 /** The frame round every signed-in page: navigation at the side, search and person on top. */
 export function AppShell() {
   const [drawer, setDrawer] = useState(false);
+  usePrintInLight();
   return (
     <Box sx={{ display: 'flex', minHeight: '100dvh' }}>
       <Box component="a" href="#content" sx={skipLink}>
@@ -22,6 +24,7 @@ export function AppShell() {
       <Box
         sx={{
           display: { xs: 'none', md: 'block' },
+          displayPrint: 'none',
           width: NAV_WIDTH,
           flexShrink: 0,
           borderRight: '1px solid',
@@ -68,6 +71,7 @@ export function AppShell() {
 }
 
 const topBar = {
+  displayPrint: 'none',
   position: 'sticky',
   top: 0,
   zIndex: 5,
@@ -83,6 +87,7 @@ const topBar = {
 } as const;
 
 const skipLink = {
+  displayPrint: 'none',
   position: 'fixed',
   left: 8,
   top: -60,

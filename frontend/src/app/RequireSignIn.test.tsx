@@ -2,16 +2,18 @@ import { screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useSWRConfig } from 'swr';
 import { describe, expect, it } from 'vitest';
-import { ME_KEY } from '../api/hooks/useMe';
+import { ME_KEY, useMe } from '../api/hooks/useMe';
 import { renderAt } from '../testing/renderAt';
 import { me, pretendServer, refusal } from '../testing/server';
 import { RequireSignIn } from './RequireSignIn';
 
 const SIGNED_OUT = refusal(401, 'signed-out', 'Sign in first.');
 
-/** A page with a text field, and a button that does what any refused request does: ask again who is signed in. */
+/** A page for some roles only, with a text field, and a button that does what any refused request does: ask again who is signed in. */
 function Page() {
   const { mutate } = useSWRConfig();
+  const { can } = useMe();
+  if (!can('parts.edit')) return <p>Not for you</p>;
   return (
     <>
       <input aria-label="Title" />
@@ -40,10 +42,10 @@ describe('RequireSignIn', () => {
   it('keeps the page and its text when the session ends in the middle, and lets the person back in', async () => {
     let signedIn = true;
     pretendServer({
-      'GET /api/auth/me': () => (signedIn ? me([]) : SIGNED_OUT),
+      'GET /api/auth/me': () => (signedIn ? me(['parts.edit']) : SIGNED_OUT),
       'POST /api/auth/sign-in': () => {
         signedIn = true;
-        return me([]);
+        return me(['parts.edit']);
       },
     });
     const user = userEvent.setup();

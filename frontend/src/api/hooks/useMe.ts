@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import useSWR from 'swr';
 import { answer, api } from '../client';
 import { asProblem } from '../problem';
@@ -15,11 +16,17 @@ async function whoAmI(): Promise<Me | null> {
   }
 }
 
-/** Who is signed in (`null`: nobody, `undefined`: not known yet) and what they may do. */
+/**
+ * Who is signed in (`null`: nobody, `undefined`: not known yet) and what they may do. When the session ends in the
+ * middle, `can` goes on answering for the person who was here: a page must not take its form away, with everything
+ * typed, before they have signed in again. What may be saved is the server's to say.
+ */
 export function useMe() {
   const { data, error, isLoading, mutate } = useSWR<Me | null, unknown>(ME_KEY, whoAmI, {
     shouldRetryOnError: false,
   });
-  const can = (permission: Permission): boolean => data?.permissions.includes(permission) ?? false;
+  const [last, setLast] = useState<Me | null>(null);
+  if (data && data !== last) setLast(data);
+  const can = (permission: Permission): boolean => (data ?? last)?.permissions.includes(permission) ?? false;
   return { me: data, can, problem: error === undefined ? null : asProblem(error), isLoading, mutate };
 }
