@@ -1,4 +1,5 @@
 import { expect, expectAccessible, expectNoSidewaysScroll, test } from './fixtures';
+import { DEMO_PASSWORD } from './roles';
 
 test.describe('a librarian', () => {
   test.use({ role: 'librarian' });
@@ -65,6 +66,49 @@ test.describe('a librarian', () => {
     await expect(page.getByText(/26–50 of/)).toBeVisible();
   });
 
+  for (const [address, rows] of [
+    ['/parts?page=2', '26–50'],
+    ['/parts?page=30&sort=teeth,-module', '726–750'],
+  ] as const) {
+    test(`a link to ${address} opens that page`, async ({ page }) => {
+      await page.goto(address, { waitUntil: 'networkidle' });
+      await expect(page.getByText(new RegExp(`${rows} of`))).toBeVisible();
+      expect(page.url()).toContain(address);
+    });
+  }
+
+  test('is asked to sign in again when the session ends before saving, and loses nothing', async ({
+    page,
+  }) => {
+    await page.goto('/add-part');
+    await page.getByLabel('Description').fill('Typed before the session ended');
+    await page.getByLabel('Teeth').fill('20');
+    await page.getByLabel('Module').fill('2');
+    await page.getByLabel('Face width').fill('20');
+    await page.getByLabel('Bore').fill('10');
+    await page.context().clearCookies();
+    await page.getByRole('button', { name: 'Add the part' }).click();
+    await expect(page.getByRole('dialog', { name: 'Your session ended' })).toBeVisible();
+    await expectAccessible(page);
+    await page.getByLabel('Password').fill(DEMO_PASSWORD);
+    await page.getByRole('button', { name: 'Sign in', exact: true }).click();
+    await expect(page.getByRole('dialog')).toHaveCount(0);
+    await expect(page.getByLabel('Description')).toHaveValue('Typed before the session ended');
+    await page.getByRole('button', { name: 'Add the part' }).click();
+    await expect(page).toHaveURL(/\/parts\/KW-\d{5}$/);
+  });
+
+  test('without a network the refusal stands beside the button, and nothing is lost', async ({ page }) => {
+    await page.goto('/add-part?kind=bearing');
+    await page.getByLabel('Description').fill('Typed without a network');
+    for (const label of ['Bore', 'Outer diameter', 'Width']) await page.getByLabel(label).fill('10');
+    await page.getByLabel('Type').fill('deep groove ball');
+    await page.context().setOffline(true);
+    await page.getByRole('button', { name: 'Add the part' }).click();
+    await expect(page.getByText(/did not answer/)).toBeInViewport();
+    await expect(page.getByLabel('Description')).toHaveValue('Typed without a network');
+  });
+
   test('sees at least fifteen parts on a laptop', async ({ page }) => {
     await page.goto('/parts');
     await expect(page.getByRole('row').nth(1)).toBeVisible();
@@ -117,6 +161,7 @@ for (const scheme of ['light', 'dark'] as const) {
       '/parts/KW-00100?edit=1',
       '/add-part',
       '/people',
+      '/nowhere',
     ]) {
       test(`${address} is accessible`, async ({ page }) => {
         await page.goto(address, { waitUntil: 'networkidle' });

@@ -1,4 +1,4 @@
-import { expect, expectAccessible, test } from './fixtures';
+import { expect, expectAccessible, expectNoSidewaysScroll, test } from './fixtures';
 
 test('a demo account is one click away, and the way in leads where the link pointed', async ({ page }) => {
   await page.goto('/parts?kind=gear');
@@ -39,6 +39,19 @@ test('the sign-in page brings neither the data grid nor charts', async ({ page }
   expect(names.filter((name) => /grid|chart|PartsPage|BriefPage|SignedInShell/i.test(name))).toEqual([]);
   // The grid alone is over 400 kB: the page's whole script, unpacked, stays under a megabyte.
   expect(script).toBeLessThan(1_000_000);
+});
+
+test.describe('on a telephone', () => {
+  test.use({ viewport: { width: 390, height: 844 } });
+  test('one signs in, and nothing sticks out to the side', async ({ page }) => {
+    await page.goto('/sign-in');
+    await expect(page.getByRole('button', { name: /Purchaser/ })).toBeInViewport();
+    await expectNoSidewaysScroll(page);
+    await page.getByRole('button', { name: /Purchaser/ }).click();
+    // A purchaser's day: trains, each leading to its bill of materials.
+    await expect(page.getByRole('link', { name: 'T-0001' })).toBeVisible();
+    await expectNoSidewaysScroll(page);
+  });
 });
 
 for (const scheme of ['light', 'dark'] as const) {

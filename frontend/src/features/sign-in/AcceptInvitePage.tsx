@@ -86,6 +86,7 @@ export default function AcceptInvitePage() {
           autoComplete="new-password"
           hint="At least 10 characters; a sentence is easiest to keep in mind."
           required
+          least={10}
           most={200}
         />
         <Button type="submit" variant="contained" disabled={formState.isSubmitting}>
