@@ -34,7 +34,9 @@ export function PartFacts({ part, below }: { part: Part; below: ReactNode }) {
       <Box sx={{ minWidth: 0 }}>
         <Sheet title="What it is" flush>
           <Box sx={{ display: 'grid', gridTemplateColumns: { xs: '1fr', lg: '1fr 1fr' }, columnGap: 2 }}>
-            <FigureTable label="What it is" rows={rows.slice(0, half)} />
+            <Box sx={{ borderBottom: { xs: 1, lg: 0 }, borderColor: 'line.rule' }}>
+              <FigureTable label="What it is" rows={rows.slice(0, half)} />
+            </Box>
             <FigureTable label="What it is, continued" rows={rows.slice(half)} />
           </Box>
         </Sheet>

@@ -1,5 +1,6 @@
 import Button from '@mui/material/Button';
-import { useParams, useSearchParams } from 'react-router-dom';
+import Link from '@mui/material/Link';
+import { Link as RouterLink, useParams, useSearchParams } from 'react-router-dom';
 import { answer, api } from '../../api/client';
 import { useMe } from '../../api/hooks/useMe';
 import { usePart } from '../../api/hooks/usePart';
@@ -26,8 +27,21 @@ export default function PartPage() {
   const showEdit = (on: boolean) => setParams(on ? { edit: '1' } : {}, { replace: !on });
 
   if (part === undefined) {
-    if (problem !== null)
-      return <ErrorState problem={problem} onRetry={() => void mutate()} what={`part ${number}`} />;
+    if (problem !== null) {
+      return (
+        <>
+          <PageHeader
+            title={number}
+            actions={
+              <Link component={RouterLink} to="/parts">
+                All parts
+              </Link>
+            }
+          />
+          <ErrorState problem={problem} onRetry={() => void mutate()} what={`part ${number}`} />
+        </>
+      );
+    }
     return (
       <>
         <PageHeader title={number} />

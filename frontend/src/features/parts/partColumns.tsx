@@ -114,7 +114,6 @@ const ROOM: Partial<Record<string, readonly TableWidth[]>> = {
   // The description says the kind first; its filter is always there.
   kind: ['full'],
   teeth: ['narrow', 'middle', 'wide', 'full'],
-  module: ['narrow', 'middle', 'wide', 'full'],
   material: ['wide', 'full'],
   mass: ['wide', 'full'],
   profileShift: ['full'],
@@ -129,20 +128,26 @@ export function hiddenColumns(width: TableWidth): Record<string, boolean> {
   );
 }
 
+const TWO_LINES = {
+  display: '-webkit-box',
+  WebkitBoxOrient: 'vertical',
+  WebkitLineClamp: 2,
+  overflow: 'hidden',
+  whiteSpace: 'normal',
+  lineHeight: 1.3,
+} as const;
+
 /** On a narrow screen the columns draw closer, and the standing moves into the number. */
 export function columnsFor(width: TableWidth): Column[] {
   if (width !== 'narrow') return PART_COLUMNS;
   return PART_COLUMNS.map((column) => {
     if (column.field === 'description') {
       // Two lines instead of one cut short.
-      const renderCell: Column['renderCell'] = ({ row }) => (
-        <span style={{ whiteSpace: 'normal', lineHeight: 1.3 }}>{row.description}</span>
-      );
+      const renderCell: Column['renderCell'] = ({ row }) => <span style={TWO_LINES}>{row.description}</span>;
       return { ...column, minWidth: 100, display: 'flex', renderCell };
     }
     if (column.field === 'number') return { ...column, width: 92 };
     if (column.field === 'teeth') return { ...column, width: 62 };
-    if (column.field === 'module') return { ...column, headerName: 'm, mm', width: 68 };
     return column;
   });
 }
