@@ -4,10 +4,16 @@ import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { prepare } from './prepare.mjs';
 import { ROOT, runNode } from './process.mjs';
+import { unstamp } from './stamps.mjs';
 
 await prepare();
-const env = { ...process.env, STAGEYARD_DATA: path.resolve(ROOT, process.env.STAGEYARD_DATA || 'data') };
-if (!existsSync(env.STAGEYARD_DATA)) await runNode('seed/dist/load.js', [], { env });
+// From here on the compilers write over what was built, whether or not they come to an end.
+for (const name of ['libs', 'backend']) unstamp(`build-${name}`);
+
+const dataFolder = path.resolve(ROOT, process.env.STAGEYARD_DATA || 'data');
+const api = `http://127.0.0.1:${process.env.PORT || 3000}`;
+const env = { STAGEYARD_API: api, ...process.env, STAGEYARD_DATA: dataFolder };
+if (!existsSync(path.join(dataFolder, 'stageyard.db'))) await runNode('seed/dist/load.js', [], { env });
 
 const watch = ['--watch', '--preserveWatchOutput', '--pretty', 'false'];
 const children = [

@@ -3,7 +3,7 @@ import { spawnSync } from 'node:child_process';
 import { existsSync, readFileSync, realpathSync } from 'node:fs';
 import path from 'node:path';
 import { fail, ROOT, run, runNode, step } from './process.mjs';
-import { fingerprint, isStamped, stamp } from './stamps.mjs';
+import { fingerprint, isStamped, stamp, unstamp } from './stamps.mjs';
 
 const PACKAGES = ['libs', 'backend', 'seed', 'frontend'];
 const MANIFESTS = ['package.json', ...PACKAGES.map((name) => `${name}/package.json`)];
@@ -39,8 +39,13 @@ function headersEnv() {
 
 async function install() {
   const print = fingerprint(['pnpm-lock.yaml', 'pnpm-workspace.yaml', ...MANIFESTS]);
-  if (isStamped('install', print) && existsSync(path.join(ROOT, 'backend/node_modules'))) return;
+  if (
+    isStamped('install', print) &&
+    PACKAGES.every((name) => existsSync(path.join(ROOT, name, 'node_modules')))
+  )
+    return;
   checkCompilers();
+  unstamp('install');
   const { packageManager } = JSON.parse(readFileSync(path.join(ROOT, 'package.json'), 'utf8'));
   await step('Install the packages of the lock file', () =>
     run('npx', ['-y', packageManager, 'install', '--frozen-lockfile', '--reporter=append-only'], {
@@ -55,6 +60,7 @@ async function install() {
 async function build(name, from, work) {
   const print = fingerprint(['pnpm-lock.yaml', 'tsconfig.base.json', ...from]);
   if (isStamped(`build-${name}`, print) && existsSync(path.join(ROOT, name, 'dist'))) return;
+  unstamp(`build-${name}`);
   await step(`Build ${name}`, work);
   stamp(`build-${name}`, print);
 }

@@ -1,5 +1,6 @@
 // Runs other programs for the scripts beside it. Node's own modules only: this runs before anything is installed.
 import { spawn } from 'node:child_process';
+import { constants } from 'node:os';
 import { fileURLToPath } from 'node:url';
 import path from 'node:path';
 
@@ -11,6 +12,24 @@ export function fail(message) {
   process.exit(1);
 }
 
+const running = new Set();
+
+/** A script that is ended takes what it runs with it. Ends with the code a shell gives for the signal. */
+function endAll(signal) {
+  for (const child of running) child.kill(signal);
+  process.exit(128 + constants.signals[signal]);
+}
+
+/** While programs run, a signal ends them too; otherwise it is left to whoever else listens. */
+function watch(child) {
+  if (running.size === 0) for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, endAll);
+  running.add(child);
+  child.on('close', () => {
+    running.delete(child);
+    if (running.size === 0) for (const signal of ['SIGINT', 'SIGTERM']) process.off(signal, endAll);
+  });
+}
+
 /**
  * Runs a program in the workspace and waits for it.
  * @param {string} command
@@ -19,16 +38,17 @@ export function fail(message) {
  * @returns {Promise<number>} the exit code (1 when it was ended by a signal)
  */
 export function run(command, args, { cwd = ROOT, env = {}, quiet = false } = {}) {
-  return new Promise((resolve, reject) => {
+  return new Promise((resolve) => {
     const child = spawn(command, args, {
       cwd,
       env: { ...process.env, ...env },
       stdio: quiet ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'],
     });
+    watch(child);
     const kept = [];
     child.stdout?.on('data', (chunk) => kept.push(chunk));
     child.stderr?.on('data', (chunk) => kept.push(chunk));
-    child.on('error', reject);
+    child.on('error', (error) => fail(`${command} could not be started: ${error.message}.`));
     child.on('close', (code) => {
       if (quiet && code !== 0) process.stderr.write(Buffer.concat(kept));
       resolve(code ?? 1);

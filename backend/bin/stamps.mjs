@@ -1,6 +1,6 @@
 // A stamp remembers the fingerprint of what a step was made from, so that a step already done is not done again.
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { ROOT } from './process.mjs';
 
@@ -37,6 +37,11 @@ export function fingerprint(places, extra = '') {
 export function isStamped(name, print) {
   const file = path.join(FOLDER, name);
   return existsSync(file) && readFileSync(file, 'utf8') === print;
+}
+
+/** Forgets that the step of that name was ever done: it is about to be done again, and may break off half-way. */
+export function unstamp(name) {
+  rmSync(path.join(FOLDER, name), { force: true });
 }
 
 /** Remembers that the step of that name is done for the fingerprint. */

@@ -6,7 +6,12 @@ import { prepare } from './prepare.mjs';
 import { ROOT, runNode } from './process.mjs';
 
 const reports = mkdtempSync(path.join(tmpdir(), 'stageyard-test-'));
-process.on('exit', () => rmSync(reports, { recursive: true, force: true }));
+let summed = false;
+process.on('exit', () => {
+  rmSync(reports, { recursive: true, force: true });
+  // The set-up failed, and said why: the last line says so too.
+  if (!summed) console.log('0 passed, 1 failed');
+});
 
 const seconds = (since) => `${((performance.now() - since) / 1000).toFixed(0)} s`;
 
@@ -41,13 +46,17 @@ async function vitest(folder, ...args) {
     cwd: path.join(ROOT, folder),
   });
   return counted(name, code, started, () => {
-    const { numPassedTests, numFailedTests, numPendingTests, numFailedTestSuites } = JSON.parse(
+    const { numPassedTests, numFailedTests, numPendingTests, numTodoTests, testResults } = JSON.parse(
       readFileSync(report, 'utf8'),
     );
     // A skipped test and a file that could not be loaded are both failures here.
+    const broken = testResults.filter(
+      ({ status, assertionResults }) =>
+        status === 'failed' && !assertionResults.some((test) => test.status === 'failed'),
+    );
     return {
       passed: numPassedTests,
-      failed: numFailedTests + numPendingTests || (numPassedTests ? 0 : numFailedTestSuites),
+      failed: numFailedTests + numPendingTests + numTodoTests + broken.length,
     };
   });
 }
@@ -94,4 +103,5 @@ const failed = results.reduce((sum, result) => sum + result.failed, 0);
 console.log(`\nAll checks took ${seconds(begun)}.`);
 for (const { name, failed: count } of results) if (count > 0) console.log(`${name}: ${count} failed`);
 console.log(`${passed} passed, ${failed} failed`);
+summed = true;
 process.exitCode = failed > 0 || passed === 0 ? 1 : 0;
