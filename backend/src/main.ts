@@ -1,5 +1,6 @@
 import { type NestFastifyApplication } from '@nestjs/platform-fastify';
 import type { OpeningService } from './auth/opening.service.js';
+import { folderProblem } from './database/storage-problem.js';
 import { loadSettings, type Settings, SettingsError } from './settings/settings.js';
 
 /** Leaves with a plain sentence and without a stack trace. */
@@ -46,12 +47,18 @@ async function announce(
   );
 }
 
-/** Takes no more requests, lets running ones and queued writes finish, then leaves; a second signal leaves at once. */
+/** Ctrl-C under npm arrives twice, from the terminal and from npm: signals this close together are one. */
+const ONE_SIGNAL_MS = 1_000;
+
+/** Takes no more requests, lets running ones and queued writes finish, then leaves; a later signal leaves at once. */
 function endOnSignals(app: NestFastifyApplication): void {
-  let ending = false;
+  let since: number | null = null;
   const end = () => {
-    if (ending) process.exit(1);
-    ending = true;
+    if (since !== null) {
+      if (performance.now() - since > ONE_SIGNAL_MS) process.exit(1);
+      return;
+    }
+    since = performance.now();
     app.close().then(
       () => process.exit(0),
       (error: unknown) => leave(`Stageyard did not close cleanly: ${String(error)}`),
@@ -65,7 +72,10 @@ const settings = readSettings();
 const { createApp } = await import('./app.js');
 const { OpeningService: Opening } = await import('./auth/opening.service.js');
 const app = await createApp(settings).catch((error: unknown) =>
-  leave(`Stageyard cannot start: ${error instanceof Error ? error.message : String(error)}`),
+  leave(
+    folderProblem(error, settings.dataDir) ??
+      `Stageyard cannot start: ${error instanceof Error ? error.message : String(error)}`,
+  ),
 );
 endOnSignals(app);
 try {

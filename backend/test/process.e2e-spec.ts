@@ -1,5 +1,5 @@
 import { type ChildProcess, spawn } from 'node:child_process';
-import { mkdtempSync, rmSync, statSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -74,6 +74,53 @@ describe('the server process', () => {
     expect(await second.ended).toBe(1);
     expect(second.output()).toContain(`Port ${port} on 127.0.0.1 is in use`);
     expect(second.output()).not.toMatch(/\n\s+at /);
+  });
+
+  it('ends calmly when Ctrl-C reaches it twice, from the terminal and from npm', async () => {
+    const server = run({});
+    await server.says(LISTENS);
+    server.child.kill('SIGINT');
+    server.child.kill('SIGINT');
+    setTimeout(() => server.child.kill('SIGINT'), 30);
+    expect(await server.ended).toBe(0);
+  });
+
+  it('refuses a data folder that another server uses, until that one is gone, however it went', async () => {
+    const first = run({});
+    await first.says(LISTENS);
+    const second = run({});
+    expect(await second.ended).toBe(1);
+    expect(second.output()).toContain(`Another Stageyard uses the data folder ${dataDir}`);
+    expect(second.output()).not.toMatch(/\n\s+at /);
+    first.child.kill('SIGKILL');
+    await first.ended;
+    await run({}).says(LISTENS);
+  });
+
+  it('says plainly that a data folder cannot be used', async () => {
+    const file = path.join(dataDir, 'a-file');
+    writeFileSync(file, '');
+    const damaged = path.join(dataDir, 'damaged');
+    mkdirSync(damaged);
+    writeFileSync(
+      path.join(damaged, 'stageyard.db'),
+      'this is no database, and long enough to be read as one',
+    );
+    const cases = [
+      [path.join(file, 'data'), 'It is no folder'],
+      [damaged, 'is damaged'],
+    ] as const;
+    const servers = cases.map(([folder, words]) => ({
+      folder,
+      words,
+      ...run({ STAGEYARD_DATA: folder }),
+    }));
+    for (const { folder, words, ended, output } of servers) {
+      expect(await ended).toBe(1);
+      expect(output()).toContain(`The data folder ${folder} (STAGEYARD_DATA) cannot be used.`);
+      expect(output()).toContain(words);
+      expect(output()).not.toMatch(/\n\s+at /);
+    }
   });
 
   it('prints the first link once, ends calmly on SIGTERM, and keeps its key and data for itself', async () => {

@@ -1,9 +1,10 @@
 import 'reflect-metadata';
-import { existsSync, mkdirSync, readdirSync, renameSync, rmSync } from 'node:fs';
+import { existsSync, readdirSync, renameSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { NestFactory } from '@nestjs/core';
 import { AppModule } from '@stageyard/backend/app.module';
 import { DATABASE_FILE } from '@stageyard/backend/database/data-sources';
+import { LOCK_FILE, lockFolder } from '@stageyard/backend/database/folder-lock';
 import { type Settings } from '@stageyard/backend/settings/settings';
 import { UsersService } from '@stageyard/backend/users/users.service';
 import { demoActors } from './actors.js';
@@ -19,10 +20,21 @@ export type DemoLoad = { parts: number; briefs: number; trains: number } | null;
  * Fills a data folder that has no database with the demo workshop: all of it or nothing. The data is booked beside the
  * folder's final place and moved in when it is complete, the database file last.
  * @returns what was booked; null where demo mode is off or the folder has a database already
+ * @throws FolderInUseError while another program works on the folder
  */
 export async function loadDemo(settings: Settings): Promise<DemoLoad> {
   if (!settings.demo || existsSync(path.join(settings.dataDir, DATABASE_FILE))) return null;
-  mkdirSync(settings.dataDir, { recursive: true, mode: 0o700 });
+  const release = lockFolder(settings.dataDir);
+  try {
+    return await bookBeside(settings);
+  } finally {
+    release();
+  }
+}
+
+async function bookBeside(settings: Settings): Promise<DemoLoad> {
+  // Another loading may have ended since the folder was looked at.
+  if (existsSync(path.join(settings.dataDir, DATABASE_FILE))) return null;
   const workshop = path.join(settings.dataDir, WORKSHOP);
   rmSync(workshop, { recursive: true, force: true });
   try {
@@ -49,6 +61,6 @@ async function book(settings: Settings): Promise<NonNullable<DemoLoad>> {
 }
 
 function moveIn(from: string, to: string): void {
-  const names = readdirSync(from).filter((name) => name !== DATABASE_FILE);
+  const names = readdirSync(from).filter((name) => name !== DATABASE_FILE && name !== LOCK_FILE);
   for (const name of [...names, DATABASE_FILE]) renameSync(path.join(from, name), path.join(to, name));
 }

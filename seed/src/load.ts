@@ -1,6 +1,14 @@
 // Entry of `npm start` for an empty data folder; the settings are those of the server.
+import { FolderInUseError } from '@stageyard/backend/database/folder-lock';
+import { folderProblem } from '@stageyard/backend/database/storage-problem';
 import { loadSettings, SettingsError } from '@stageyard/backend/settings/settings';
 import { loadDemo } from './load-demo.js';
+
+function wordsFor(error: unknown): string {
+  if (error instanceof SettingsError || error instanceof FolderInUseError) return error.message;
+  const folder = process.env.STAGEYARD_DATA ?? 'data';
+  return folderProblem(error, folder) ?? `The demo data could not be booked: ${String(error)}`;
+}
 
 try {
   const booked = await loadDemo(loadSettings(process.env));
@@ -10,8 +18,6 @@ try {
     );
   }
 } catch (error) {
-  const text =
-    error instanceof SettingsError ? error.message : `The demo data could not be booked: ${String(error)}`;
-  process.stderr.write(`${text}\n`);
+  process.stderr.write(`${wordsFor(error)}\n`);
   process.exitCode = 1;
 }

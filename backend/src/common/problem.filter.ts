@@ -1,6 +1,8 @@
 import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException } from '@nestjs/common';
 import { DomainError } from '@stageyard/libs/units';
 import { type FastifyReply, type FastifyRequest } from 'fastify';
+import { QueryFailedError } from 'typeorm';
+import { storageProblem } from '../database/storage-problem.js';
 import { ProblemError } from './errors.js';
 import { problemBody } from './problem-body.js';
 
@@ -50,6 +52,11 @@ export function toProblem(thrown: unknown): ProblemError {
   const known = BY_CAUSE[causeCode(thrown)] ?? BY_STATUS[status];
   if (known && status < 500) return new ProblemError(status, ...known);
   if (status < 500) return new ProblemError(status, 'refused', 'The server does not take this request.');
+  const problem = thrown instanceof QueryFailedError ? storageProblem(thrown) : null;
+  if (problem !== null) {
+    const message = `The server cannot use its data folder, so nothing was saved. ${problem} Then try again.`;
+    return new ProblemError(503, 'storage', message);
+  }
   const message =
     'Something went wrong on the server. Nothing was saved. Try again, and report the request number.';
   return new ProblemError(500, 'server-error', message);

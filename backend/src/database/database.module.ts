@@ -2,15 +2,26 @@ import { Global, Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
 import { SETTINGS, type Settings } from '../settings/settings.js';
 import { openWritingSource, readingOptions } from './data-sources.js';
+import { lockFolder } from './folder-lock.js';
 import { WriteQueue } from './write-queue.js';
 
-/** Opens the writing data source, which nothing but the queue ever holds, and migrates. */
+async function openQueue(dataDir: string): Promise<WriteQueue> {
+  const release = lockFolder(dataDir);
+  try {
+    return new WriteQueue(await openWritingSource(dataDir), release);
+  } catch (error) {
+    release();
+    throw error;
+  }
+}
+
+/** Keeps the data folder for this process, opens the writing data source, which nothing but the queue ever holds, and migrates. */
 @Module({
   providers: [
     {
       provide: WriteQueue,
       inject: [SETTINGS],
-      useFactory: async (settings: Settings) => new WriteQueue(await openWritingSource(settings.dataDir)),
+      useFactory: (settings: Settings) => openQueue(settings.dataDir),
     },
   ],
   exports: [WriteQueue],

@@ -21,8 +21,12 @@ export class WriteQueue implements OnApplicationShutdown {
   #tail: Promise<unknown> = Promise.resolve();
   #closed = false;
 
-  constructor(source: DataSource) {
+  readonly #afterClose: () => void;
+
+  /** @param afterClose called once the last write is done and the database is closed */
+  constructor(source: DataSource, afterClose: () => void = () => undefined) {
     this.#source = source;
+    this.#afterClose = afterClose;
   }
 
   /**
@@ -44,6 +48,7 @@ export class WriteQueue implements OnApplicationShutdown {
     this.#closed = true;
     await this.#tail;
     if (this.#source.isInitialized) await this.#source.destroy();
+    this.#afterClose();
   }
 
   async #transaction<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
