@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { MOST_WRONG } from '../src/auth/sign-in-throttle.js';
 import { addPerson } from '../src/testing/people.js';
+import { newBrief, slowRequirement } from '../src/testing/new-brief.js';
 import { startServer, type TestServer } from './harness.js';
 
 interface Me {
@@ -15,6 +16,15 @@ beforeAll(async () => {
   server = await startServer();
 });
 afterAll(() => server.close());
+
+/** Asks again until the answer is as wanted; the test's time limit ends it otherwise. */
+async function expectSoon<T>(ask: () => Promise<T>, isRight: (answer: T) => boolean): Promise<T> {
+  for (;;) {
+    const answer = await ask();
+    if (isRight(answer)) return answer;
+    await new Promise((resolve) => setTimeout(resolve, 20));
+  }
+}
 
 describe('signing in', () => {
   it('shows the known accounts in demo mode, and each of them works', async () => {
@@ -78,6 +88,50 @@ describe('signing in', () => {
       client.cookie = `${name}=${forged}`;
       expect((await client.get('/api/auth/me')).status).toBe(401);
     }
+  });
+
+  it('puts a refused sign-in on record for administrators, without what was typed', async () => {
+    const person = await addPerson(server.app, { name: 'Nora Finch' });
+    for (const email of [person.email, 'my-secret-typed-in-the-wrong-field']) {
+      await server.anonymous().post('/api/auth/sign-in', { email, password: 'not this one' });
+    }
+    const admin = await server.as('admin');
+    const address = `/api/audit?entity=session&entityId=${person.id}`;
+    const changes = await expectSoon(
+      () => admin.get<{ items: { action: string; summary: string }[] }>(address),
+      ({ body }) => body.items.length > 0,
+    );
+    expect(changes.body.items).toMatchObject([{ action: 'sign-in refused' }]);
+    expect(changes.body.items[0]?.summary).toContain('Nora Finch');
+    const all = await admin.get('/api/audit?entity=session');
+    expect(all.bytes.toString()).not.toMatch(/wrong-field|not this one/);
+    const viewer = await server.as('viewer');
+    for (const entity of ['session', 'user']) {
+      const seen = await viewer.get<{ total: number }>(`/api/audit?entity=${entity}`);
+      expect([seen.status, seen.body.total]).toEqual([200, 0]);
+    }
+  });
+
+  it('closes an event stream when its session ends', async () => {
+    const client = await server.asAnother('designer');
+    const { body: brief } = await client.post<{ id: string }>(
+      '/api/briefs',
+      newBrief({ requirement: slowRequirement() }),
+    );
+    const { body: search } = await client.post<{ id: string }>(`/api/briefs/${brief.id}/searches`);
+    const events = client.events(`/api/searches/${search.id}/events`);
+    expect((await events.next()).value).toMatchObject({ event: 'state' });
+    const rest = (async () => {
+      let last: unknown;
+      for await (const { data } of events) last = data;
+      return last;
+    })();
+    expect((await client.post('/api/auth/sign-out')).status).toBe(204);
+    await rest;
+    const admin = await server.as('admin');
+    const { body: now } = await admin.get<{ state: string }>(`/api/searches/${search.id}`);
+    expect(['queued', 'running']).toContain(now.state);
+    await admin.post(`/api/searches/${search.id}/stop`);
   });
 
   it('makes a person wait after many wrong passwords, and nobody else', async () => {

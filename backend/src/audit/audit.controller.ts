@@ -1,6 +1,7 @@
 import { Controller, Get, Query } from '@nestjs/common';
 import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Allow } from '../auth/allow.decorator.js';
+import { CurrentUser, type SignedInUser } from '../auth/current-user.decorator.js';
 import { type Page } from '../common/list-query.js';
 import { AuditService } from './audit.service.js';
 import { type Change, ChangePage } from './dto/change.js';
@@ -11,11 +12,11 @@ import { ChangeQuery } from './dto/change-query.js';
 export class AuditController {
   constructor(private readonly audit: AuditService) {}
 
-  /** Every change, newest first. */
+  /** Every change, newest first; accounts and sign-ins only for those who manage people. */
   @Get()
   @Allow('audit.read')
   @ApiOkResponse({ type: ChangePage })
-  list(@Query() query: ChangeQuery): Promise<Page<Change>> {
-    return this.audit.search(query);
+  list(@Query() query: ChangeQuery, @CurrentUser() user: SignedInUser): Promise<Page<Change>> {
+    return this.audit.visibleTo(user, query);
   }
 }

@@ -10,6 +10,8 @@ import { AuditEntry } from './entities/audit-entry.js';
 
 export type AuditedEntity = 'part' | 'brief' | 'search' | 'train' | 'user' | 'session';
 
+const ABOUT_PEOPLE: readonly AuditedEntity[] = ['user', 'session'];
+
 /** The server acting by itself. */
 export interface SystemActor {
   id: null;
@@ -55,14 +57,20 @@ export class AuditService {
     return this.search({ ...query, entity, entityId });
   }
 
+  /** What the person may see: accounts and sign-ins are for those who manage people. */
+  visibleTo({ permissions }: SignedInUser, query: ChangeQuery): Promise<Page<Change>> {
+    return this.search(query, permissions.includes('people.manage') ? [] : ABOUT_PEOPLE);
+  }
+
   /** All changes that match, newest first unless the query sorts by `at`. */
-  async search(query: ChangeQuery): Promise<Page<Change>> {
+  async search(query: ChangeQuery, hidden: readonly AuditedEntity[] = []): Promise<Page<Change>> {
     const list = parseListQuery(query, ['at']);
     const rows = this.entries
       .createQueryBuilder('entry')
       .orderBy('entry.id', list.sorts[0]?.direction ?? 'DESC')
       .skip(list.skip)
       .take(list.size);
+    if (hidden.length > 0) rows.andWhere('entry.entity NOT IN (:...hidden)', { hidden });
     if (query.entity) rows.andWhere('entry.entity = :entity', { entity: query.entity });
     if (query.entityId) rows.andWhere('entry.entityId = :entityId', { entityId: query.entityId });
     if (list.text) {

@@ -1,7 +1,7 @@
-import { Inject, Injectable } from '@nestjs/common';
+import { Inject, Injectable, Logger } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { Repository } from 'typeorm';
-import { AuditService } from '../audit/audit.service.js';
+import { AuditService, SYSTEM_ACTOR } from '../audit/audit.service.js';
 import { ProblemError } from '../common/errors.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { SETTINGS, type Settings } from '../settings/settings.js';
@@ -25,6 +25,8 @@ export interface Arrival {
 
 @Injectable()
 export class AuthService {
+  private readonly logger = new Logger(AuthService.name);
+
   constructor(
     @InjectRepository(UserEntity) private readonly users: Repository<UserEntity>,
     private readonly people: UsersService,
@@ -52,8 +54,34 @@ export class AuthService {
   async signIn({ email, password }: SignInInput, address: string): Promise<Arrival> {
     const key = email.trim().toLowerCase();
     const user = await this.throttle.guard(address, key, () => this.matching(key, password));
-    if (!user) throw wrongPair();
+    if (!user) {
+      this.noteRefusal(key, address);
+      throw wrongPair();
+    }
     return this.arrive(user);
+  }
+
+  /** Not awaited by the answer, whose time would tell which addresses exist. */
+  private noteRefusal(email: string, address: string): void {
+    this.logger.warn(`A sign-in from ${address} was refused.`);
+    this.recordRefusal(email, address).catch((error: unknown) =>
+      this.logger.warn(`A refused sign-in could not be put on record: ${String(error)}`),
+    );
+  }
+
+  /** Only of known accounts: the throttle keeps the rows few, and mistyped passwords in the field stay out. */
+  private async recordRefusal(email: string, address: string): Promise<void> {
+    const user = await this.users.findOneBy({ email });
+    if (!user) return;
+    await this.queue.run((manager) =>
+      this.audit.record(manager, {
+        actor: SYSTEM_ACTOR,
+        action: 'sign-in refused',
+        entity: 'session',
+        entityId: user.id,
+        summary: `A sign-in as ${user.name} from ${address} was refused`,
+      }),
+    );
   }
 
   async signOut(person: SignedInUser): Promise<void> {

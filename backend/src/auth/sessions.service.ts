@@ -1,6 +1,7 @@
 import { Inject, Injectable, Logger } from '@nestjs/common';
 import { JwtService } from '@nestjs/jwt';
 import { InjectRepository } from '@nestjs/typeorm';
+import { filter, type Observable, Subject, take } from 'rxjs';
 import { type EntityManager, LessThan, Repository } from 'typeorm';
 import { Clock } from '../common/clock.js';
 import { WriteQueue } from '../database/write-queue.js';
@@ -19,6 +20,12 @@ export const LIFETIME_MS = 30 * 24 * 60 * MINUTE_MS;
 /** How stale `seenAt` may get, so that reading does not write on every request. */
 const SEEN_STEP_MS = 5 * MINUTE_MS;
 
+/** One session, or all of a person. */
+interface EndedSessions {
+  sessionId?: string;
+  userId?: string;
+}
+
 interface SessionClaims {
   sid: string;
 }
@@ -27,6 +34,7 @@ interface SessionClaims {
 @Injectable()
 export class SessionsService {
   private readonly logger = new Logger(SessionsService.name);
+  private readonly ended = new Subject<EndedSessions>();
 
   constructor(
     @InjectRepository(SessionEntity) private readonly sessions: Repository<SessionEntity>,
@@ -75,10 +83,19 @@ export class SessionsService {
 
   async end(manager: EntityManager, sessionId: string): Promise<void> {
     await manager.delete(SessionEntity, { id: sessionId });
+    this.ended.next({ sessionId });
   }
 
   async endAllOf(manager: EntityManager, userId: string): Promise<void> {
     await manager.delete(SessionEntity, { userId });
+    this.ended.next({ userId });
+  }
+
+  /** Tells once when the session is ended, so that what was let in by it and is still open can be closed. */
+  ending(person: Pick<SignedInUser, 'id' | 'sessionId'>): Observable<EndedSessions> {
+    const isTheirs = ({ sessionId, userId }: EndedSessions) =>
+      sessionId === person.sessionId || userId === person.id;
+    return this.ended.pipe(filter(isTheirs), take(1));
   }
 
   private isAlive(session: SessionEntity): boolean {

@@ -6,9 +6,10 @@ import {
   ApiOkResponse,
   ApiTags,
 } from '@nestjs/swagger';
-import { type Observable } from 'rxjs';
+import { type Observable, takeUntil } from 'rxjs';
 import { Allow } from '../auth/allow.decorator.js';
 import { CurrentUser } from '../auth/current-user.decorator.js';
+import { SessionsService } from '../auth/sessions.service.js';
 import { type SignedInUser } from '../auth/signed-in-user.js';
 import { Problem } from '../common/dto/problem.js';
 import { SearchDto } from './dto/search.dto.js';
@@ -18,7 +19,10 @@ import { OptionSearchesService } from './option-searches.service.js';
 @ApiTags('Searches')
 @Controller()
 export class OptionSearchesController {
-  constructor(private readonly searches: OptionSearchesService) {}
+  constructor(
+    private readonly searches: OptionSearchesService,
+    private readonly sessions: SessionsService,
+  ) {}
 
   @Post('briefs/:id/searches')
   @Allow('briefs.edit')
@@ -49,8 +53,11 @@ export class OptionSearchesController {
       'Events `state` (a SearchSummary) and `progress` (a SearchProgress); ends when the search has ended',
     content: { 'text/event-stream': { schema: { type: 'string' } } },
   })
-  events(@Param('id') id: string): Promise<Observable<MessageEvent>> {
-    return this.searches.events(id);
+  async events(
+    @Param('id') id: string,
+    @CurrentUser() user: SignedInUser,
+  ): Promise<Observable<MessageEvent>> {
+    return (await this.searches.events(id)).pipe(takeUntil(this.sessions.ending(user)));
   }
 
   @Post('searches/:id/stop')
