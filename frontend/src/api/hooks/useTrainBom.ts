@@ -1,5 +1,6 @@
 import useSWR from 'swr';
 import { answer, api } from '../client';
+import { problemFrom } from '../problem';
 import type { Bom } from '../types';
 
 /** The bill of materials of one train. */
@@ -9,5 +10,16 @@ export function useTrainBom(code: string) {
   );
 }
 
-/** Where the workbook is fetched from; a plain link, so the browser names and saves the file. */
+/** Where the workbook is fetched from. */
 export const bomWorkbookUrl = (code: string): string => `/api/trains/${encodeURIComponent(code)}/bom.xlsx`;
+
+/**
+ * The workbook and the name that the server gives it.
+ * @throws Problem when the server refused; anything else thrown means that no answer came
+ */
+export async function fetchWorkbook(code: string): Promise<{ file: Blob; name: string }> {
+  const response = await fetch(new Request(new URL(bomWorkbookUrl(code), location.origin)));
+  if (!response.ok) throw await problemFrom(response);
+  const named = /filename="([^"]+)"/.exec(response.headers.get('content-disposition') ?? '')?.[1];
+  return { file: await response.blob(), name: named ?? `${code}-bom.xlsx` };
+}

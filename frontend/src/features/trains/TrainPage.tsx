@@ -1,12 +1,12 @@
+import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
-import Button from '@mui/material/Button';
 import MuiLink from '@mui/material/Link';
 import Tab from '@mui/material/Tab';
 import Tabs from '@mui/material/Tabs';
+import { useState } from 'react';
 import { Link, useParams, useSearchParams } from 'react-router-dom';
 import { useMe } from '../../api/hooks/useMe';
 import { useTrain } from '../../api/hooks/useTrain';
-import { bomWorkbookUrl } from '../../api/hooks/useTrainBom';
 import { asProblem } from '../../api/problem';
 import type { Train } from '../../api/types';
 import { Cautions } from '../../components/Cautions';
@@ -15,6 +15,7 @@ import { LoadingRows } from '../../components/LoadingRows';
 import { PageHeader } from '../../components/PageHeader';
 import { TrainStrip } from '../../drawings/TrainStrip';
 import { BomTab } from './bom/BomTab';
+import { DownloadBom } from './bom/DownloadBom';
 import { DrawingTab } from './drawing/DrawingTab';
 import { RecordTab } from './record/RecordTab';
 import { StagesTab } from './stages/StagesTab';
@@ -33,6 +34,7 @@ export default function TrainPage() {
 function TrainInTabs({ train }: { train: Train }) {
   const [params, setParams] = useSearchParams();
   const { can } = useMe();
+  const [refused, setRefused] = useState<string | null>(null);
   const tab = readTab(params.get('tab'));
   const show = (next: TrainTab) =>
     setParams(next === 'drawing' ? {} : { tab: next }, { preventScrollReset: true });
@@ -44,7 +46,7 @@ function TrainInTabs({ train }: { train: Train }) {
         figure={<TrainStrip train={train.spec} height={56} />}
         facts={
           <>
-            {trainFacts(train).join(' · ')} · <TallyWords tally={tallyOf(train.figures.checks)} />
+            {trainFacts(train).join(' · ')} · <TallyWords tally={tallyOf(train.figures)} />
             {train.brief && (
               <>
                 {' · from '}
@@ -57,23 +59,26 @@ function TrainInTabs({ train }: { train: Train }) {
         }
         actions={
           can('bom.export') && (
-            <Button
+            <DownloadBom
+              code={train.code}
               variant={tab === 'bom' ? 'contained' : 'outlined'}
-              component="a"
-              href={bomWorkbookUrl(train.code)}
-              download
-            >
-              Download BOM (.xlsx)
-            </Button>
+              onProblem={setRefused}
+            />
           )
         }
       />
+      {refused !== null && (
+        <Alert severity="error" onClose={() => setRefused(null)} sx={{ mb: 1 }}>
+          The workbook could not be downloaded. {refused}
+        </Alert>
+      )}
       <Tabs
         value={tab}
         onChange={(_, next: TrainTab) => show(next)}
         aria-label="Pages of this train"
         variant="scrollable"
         scrollButtons={false}
+        sx={{ displayPrint: 'none' }}
       >
         {TRAIN_TABS.map(({ value, name }) => (
           <Tab key={value} value={value} label={name} id={`tab-${value}`} aria-controls="train-tab" />

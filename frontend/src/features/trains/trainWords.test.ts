@@ -15,7 +15,31 @@ describe('the pages of a train', () => {
       ...check,
       verdict,
     }));
-    expect(tallyOf(checks)).toEqual({ passes: 2, marginal: 1, fails: 1 });
+    expect(tallyOf({ checks, findings: [] })).toEqual({ passes: 2, marginal: 1, fails: 1, findings: 0 });
+  });
+});
+
+describe('findings beside the checks', () => {
+  const undercut = {
+    code: 'undercut-pinion',
+    label: 'L',
+    value: 0,
+    limit: 1,
+    unit: '',
+    message: '',
+    stage: 0,
+    verdict: 'fails' as const,
+  };
+  const finding = { severity: 'marginal' as const, message: 'M', stage: 0 };
+
+  it('are counted once, and mere notes not at all', () => {
+    const findings = [
+      { ...finding, code: 'bore-differs' },
+      { ...finding, code: 'undercut' },
+      { ...finding, code: 'undercut', stage: 1 },
+      { ...finding, code: 'said', severity: 'note' as const },
+    ];
+    expect(tallyOf({ checks: [undercut], findings }).findings).toBe(2);
   });
 });
 

@@ -24,11 +24,18 @@ export interface CheckTally {
   passes: number;
   marginal: number;
   fails: number;
+  /** Remarks that stand beside the checks, such as a bore that does not suit its shaft. */
+  findings: number;
 }
 
-export function tallyOf(checks: Train['figures']['checks']): CheckTally {
-  const tally: CheckTally = { passes: 0, marginal: 0, fails: 0 };
+export function tallyOf({ checks, findings }: Pick<Train['figures'], 'checks' | 'findings'>): CheckTally {
+  const tally: CheckTally = { passes: 0, marginal: 0, fails: 0, findings: 0 };
   for (const { verdict } of checks) tally[verdict] += 1;
+  const counted = checks.filter(({ verdict }) => verdict !== 'passes');
+  for (const { code, severity, stage } of findings) {
+    const isCheck = counted.some((check) => check.stage === stage && check.code.startsWith(code));
+    if (severity !== 'note' && !isCheck) tally.findings += 1;
+  }
   return tally;
 }
 
