@@ -16,6 +16,7 @@ import { PageHeader } from '../../components/PageHeader';
 import { FilterText } from '../../components/FilterText';
 import { useListState, writeSort } from '../../components/useListState';
 import { OBJECTIVE_WORDS } from './choiceWords';
+import { optionCount } from './search/searchWords';
 
 const FILTERS = ['text', 'mine'] as const;
 const SORTS = ['code', 'title', 'standing', 'owner', 'updatedAt'] as const;
@@ -50,7 +51,7 @@ const COLUMNS: GridColDef<BriefSummary>[] = [
   {
     field: 'objective',
     headerName: 'Best by',
-    width: 150,
+    width: 176,
     sortable: false,
     valueGetter: (_, { objective }) => OBJECTIVE_WORDS[objective],
   },
@@ -86,7 +87,8 @@ const NARROW = {
 function standingWords({ standing, latestSearch }: BriefSummary): string {
   if (latestSearch?.state === 'running' || latestSearch?.state === 'queued') return 'searching';
   const count = latestSearch?.optionCount;
-  return standing === 'searched' && count != null ? `${count} options` : STANDING_WORDS[standing];
+  if (standing !== 'searched' || count == null) return STANDING_WORDS[standing];
+  return count === 0 ? 'no option' : optionCount(count);
 }
 
 /** Every brief; filters, order and page live in the address. */

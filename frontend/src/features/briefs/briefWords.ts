@@ -31,10 +31,8 @@ function insideWords(envelope: Requirement['envelope']): string | null {
 }
 
 function contactWords({ leastContactRatio = 1.2, centreDistanceAllowance = 0 }: Requirement): string {
-  const least = `contact from ${leastContactRatio.toFixed(2)}`;
-  return centreDistanceAllowance === 0
-    ? least
-    : `${least} at +${formatTrimmed(centreDistanceAllowance, 4)} m`;
+  const least = `contact at least ${formatTrimmed(leastContactRatio, 3)}`;
+  return centreDistanceAllowance === 0 ? least : `${least}, worst case`;
 }
 
 interface DutyText {

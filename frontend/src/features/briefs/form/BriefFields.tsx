@@ -53,7 +53,7 @@ export function BriefFields() {
         <ChoiceField field="shiftPolicy" choices={choicesOf(SHIFT_WORDS)} />
         <ChoiceField field="undercut" choices={choicesOf(UNDERCUT_WORDS)} />
       </FormSection>
-      <FormSection title="Mesh" remark="Held at the widened distance.">
+      <FormSection title="Mesh" remark="The contact ratio is asked for at the widest centre distance.">
         <FigureField field="leastContactRatio" />
         <FigureField field="centreDistanceAllowance" unit="modules" />
       </FormSection>

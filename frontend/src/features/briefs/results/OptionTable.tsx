@@ -14,6 +14,7 @@ import { commonScale } from '../../../drawings/TrainStrip';
 import { OptionTableRow, STRIP } from './OptionTableRow';
 import type { OptionOrder, OptionSort } from './optionOrder';
 import { OPTION_HEADS, optionRow } from './optionRows';
+import { stageOrders } from './stageOrders';
 import { useRowSelection } from './useRowSelection';
 
 interface OptionTableProps {
@@ -25,13 +26,15 @@ interface OptionTableProps {
   onPin?: (option: TrainOption, pin: boolean) => void;
   order: OptionOrder | null;
   onSort: (by: OptionSort) => void;
-  /** Says where the copy button stands; called with the act. */
-  toolbar: (copy: () => void, selected: number) => ReactNode;
+  /** Puts the table in its place, with what copies it. */
+  frame: (table: ReactNode, copy: () => void, selected: number) => ReactNode;
 }
 
 interface Head {
   text: string;
   unit?: string;
+  /** What a sign is called, where the unit is one. */
+  unitName?: string;
   sort?: OptionSort;
   left?: boolean;
 }
@@ -45,7 +48,7 @@ const HEADS: Head[] = [
   { text: 'Box', unit: 'mm', sort: 'box' },
   { text: 'Mass', unit: 'kg', sort: 'mass' },
   { text: 'Contact', sort: 'contact' },
-  { text: 'Backlash', unit: '′', sort: 'backlash' },
+  { text: 'Backlash', unit: '′', unitName: 'arc minutes', sort: 'backlash' },
 ];
 
 /** Rows drawn before the reader asks for more: the drawings of thousands would stall the page. */
@@ -68,47 +71,55 @@ export function OptionTable(props: OptionTableProps) {
   });
   const { allOptions } = props;
   const scale = useMemo(() => commonScale(allOptions, STRIP.height, STRIP.width), [allOptions]);
-  return (
-    <>
-      {props.toolbar(() => void copy(), selected.size)}
-      <Box sx={{ bgcolor: 'background.paper', overflowX: 'auto', minWidth: 0 }}>
-        <Table
-          role="grid"
-          aria-label="Options"
-          aria-multiselectable
-          sx={{ '& .MuiTableCell-root': { py: 0, px: 0.75, fontSize: '0.8125rem', whiteSpace: 'nowrap' } }}
-        >
-          <TableHead>
-            <TableRow sx={{ height: 30 }}>
-              <TableCell scope="col" sx={{ width: 34 }}>
-                Pin
-              </TableCell>
-              {HEADS.map((head) => (
-                <HeadCell key={head.text} head={head} order={order} onSort={onSort} />
-              ))}
-            </TableRow>
-          </TableHead>
-          <TableBody ref={body}>
-            {drawn.map((option, row) => (
-              <OptionTableRow
-                key={option.key}
-                option={option}
-                scale={scale}
-                pinned={pinned.has(option.key)}
-                onPin={onPin}
-                rowProps={rowProps(row)}
-              />
+  const orders = useMemo(() => stageOrders(allOptions), [allOptions]);
+  const table = (
+    <Box
+      sx={{
+        bgcolor: 'background.paper',
+        overflowX: 'auto',
+        minWidth: 0,
+        // An upright A4 sheet then holds every column.
+        '@media print': { zoom: 0.84 },
+      }}
+    >
+      <Table
+        role="grid"
+        aria-label="Options"
+        aria-multiselectable
+        sx={{ '& .MuiTableCell-root': { py: 0, px: 0.75, fontSize: '0.8125rem', whiteSpace: 'nowrap' } }}
+      >
+        <TableHead>
+          <TableRow sx={{ height: 26 }}>
+            <TableCell scope="col" sx={{ width: 34 }}>
+              Pin
+            </TableCell>
+            {HEADS.map((head) => (
+              <HeadCell key={head.text} head={head} order={order} onSort={onSort} />
             ))}
-          </TableBody>
-        </Table>
-        {drawn.length < options.length && (
-          <Button variant="text" onClick={() => setRoom(room + DRAWN_AT_ONCE)} sx={{ m: 0.5 }}>
-            {`Show more; ${options.length - drawn.length} options are not shown yet`}
-          </Button>
-        )}
-      </Box>
-    </>
+          </TableRow>
+        </TableHead>
+        <TableBody ref={body}>
+          {drawn.map((option, row) => (
+            <OptionTableRow
+              key={option.key}
+              option={option}
+              scale={scale}
+              order={orders.get(option.key)}
+              pinned={pinned.has(option.key)}
+              onPin={onPin}
+              rowProps={rowProps(row)}
+            />
+          ))}
+        </TableBody>
+      </Table>
+      {drawn.length < options.length && (
+        <Button variant="text" onClick={() => setRoom(room + DRAWN_AT_ONCE)} sx={{ m: 0.5 }}>
+          {`Show more; ${options.length - drawn.length} options are not shown yet`}
+        </Button>
+      )}
+    </Box>
   );
+  return props.frame(table, () => void copy(), selected.size);
 }
 
 function HeadCell({
@@ -116,13 +127,13 @@ function HeadCell({
   order,
   onSort,
 }: { head: Head; order: OptionOrder | null } & Pick<OptionTableProps, 'onSort'>) {
-  const { text, unit, sort, left } = head;
+  const { text, unit, unitName, sort, left } = head;
   const current = sort !== undefined && order?.by === sort ? order : null;
   const label = (
     <>
       {text}
       {unit && (
-        <Box component="span" sx={{ ml: 0.5 }}>
+        <Box component="span" title={unitName} sx={{ ml: 0.5 }}>
           {unit}
         </Box>
       )}

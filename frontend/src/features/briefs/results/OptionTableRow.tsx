@@ -16,6 +16,7 @@ import {
   teethWords,
 } from '../../../components/optionWords';
 import { TrainStrip } from '../../../drawings/TrainStrip';
+import { orderWords, type StageOrder } from './stageOrders';
 
 /** The box a strip stands in, px. */
 export const STRIP = { width: 98, height: 36 } as const;
@@ -23,12 +24,14 @@ export const STRIP = { width: 98, height: 36 } as const;
 interface OptionTableRowProps {
   option: TrainOption;
   scale: number;
+  /** Where it stands among the options with the same stages; left out where it is the only one. */
+  order?: StageOrder;
   pinned: boolean;
   onPin?: (option: TrainOption, pin: boolean) => void;
   rowProps: ComponentProps<typeof TableRow>;
 }
 
-export function OptionTableRow({ option, scale, pinned, onPin, rowProps }: OptionTableRowProps) {
+export function OptionTableRow({ option, scale, order, pinned, onPin, rowProps }: OptionTableRowProps) {
   const teeth = teethWords(option.stages);
   return (
     <TableRow
@@ -63,7 +66,16 @@ export function OptionTableRow({ option, scale, pinned, onPin, rowProps }: Optio
       </TableCell>
       <TableCell sx={{ lineHeight: 1.25 }}>
         <Box>{teeth}</Box>
-        <Box sx={{ color: 'text.secondary', fontSize: '0.6875rem' }}>{moduleWords(option.stages)}</Box>
+        <Box
+          sx={{ color: 'text.secondary', fontSize: '0.6875rem' }}
+          title={
+            order &&
+            `${order.of} options here have these very stages, each in another order; only the box and the backlash differ.`
+          }
+        >
+          {moduleWords(option.stages)}
+          {order && ` · ${orderWords(order)}`}
+        </Box>
       </TableCell>
       <TableCell align="right" title={`Exactly ${exactRatioWords(option.ratio)}`}>
         {ratioWords(option.ratio.value)}

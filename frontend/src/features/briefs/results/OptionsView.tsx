@@ -10,6 +10,7 @@ import type { Brief, Search, TrainOption, WhyNot } from '../../../api/types';
 import { Cautions } from '../../../components/Cautions';
 import { EmptyState } from '../../../components/EmptyState';
 import { useNotices } from '../../../components/Notices';
+import { Sheet } from '../../../components/Sheet';
 import { OutcomeLine } from '../search/SearchLine';
 import { OptionTable } from './OptionTable';
 import { orderedOptions } from './optionOrder';
@@ -31,6 +32,7 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
   const { tell } = useNotices();
   const all = useMemo(() => search.outcome?.options ?? [], [search.outcome]);
   const shown = orderedOptions(all, view.stages, view.order);
+  const whyNot = search.outcome?.whyNot ?? [];
   const pinned = useMemo(() => new Set(brief.pins.map(({ key }) => key)), [brief.pins]);
 
   async function pin(option: TrainOption, on: boolean): Promise<void> {
@@ -41,72 +43,97 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
     }
   }
 
-  return (
-    <Box
-      sx={{
-        display: 'grid',
-        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: 'minmax(0, 1fr) 236px', xl: 'minmax(0, 1fr) 280px' },
-        columnGap: 2,
-        rowGap: 2,
-        alignItems: 'start',
-      }}
-    >
-      <Box sx={{ minWidth: 0 }}>
-        {all.length === 0 ? (
-          <>
-            <OutcomeLine search={search} shown={0} />
-            <Box sx={{ bgcolor: 'background.paper', border: '1px solid', borderColor: 'line.rule', mt: 1 }}>
-              {search.outcome?.search.complete ? (
-                <EmptyState title="No option">{reasonsWords(search.outcome.whyNot.length > 0)}</EmptyState>
-              ) : (
-                <EmptyState title="Nothing found before it stopped">
-                  Search again and let it run longer, or narrow the brief: fewer teeth to try, fewer stages.
-                </EmptyState>
-              )}
-            </Box>
-          </>
-        ) : (
-          <OptionTable
-            options={shown}
-            allOptions={all}
-            pinned={pinned}
-            onPin={canEdit ? (option, on) => void pin(option, on) : undefined}
-            order={view.order}
-            onSort={view.sortBy}
-            toolbar={(copy, selected) => (
-              <Box
-                sx={{
-                  display: 'flex',
-                  flexWrap: 'wrap',
-                  alignItems: 'center',
-                  columnGap: 2,
-                  rowGap: 0.5,
-                  mb: 0.5,
-                }}
-              >
-                <OutcomeLine search={search} shown={shown.length} />
-                <StageFilter options={all} chosen={view.stages} onChoose={view.setStages} />
-                <Button variant="text" onClick={copy} sx={{ fontWeight: 500, minHeight: 28, py: 0 }}>
-                  {selected > 0 ? `Copy ${selected} selected` : 'Copy table'}
-                </Button>
-              </Box>
-            )}
-          />
-        )}
-        <PinnedBar brief={brief} canAdopt={canAdopt} />
-      </Box>
-      <Box component="aside" aria-label="About these options" sx={{ display: 'grid', rowGap: 1.5 }}>
-        <WhyNotPanel whyNot={search.outcome?.whyNot ?? []} onTry={canEdit ? onTry : undefined} />
-        <Cautions short />
-      </Box>
+  const aside = (
+    <Box component="aside" aria-label="About these options" sx={{ display: 'grid', rowGap: 1.5 }}>
+      {all.length > 0 && (
+        <WhyNotPanel whyNot={whyNot} request={search.request} onTry={canEdit ? onTry : undefined} />
+      )}
+      <Cautions short />
     </Box>
+  );
+
+  if (all.length === 0) {
+    return (
+      <>
+        <OutcomeLine search={search} shown={0} />
+        <Box sx={columns}>
+          <Box sx={{ minWidth: 0, mt: 1 }}>
+            <NoOption search={search} onTry={canEdit ? onTry : undefined} />
+            <PinnedBar brief={brief} canAdopt={canAdopt} />
+          </Box>
+          {aside}
+        </Box>
+      </>
+    );
+  }
+  return (
+    <OptionTable
+      options={shown}
+      allOptions={all}
+      pinned={pinned}
+      onPin={canEdit ? (option, on) => void pin(option, on) : undefined}
+      order={view.order}
+      onSort={view.sortBy}
+      frame={(table, copy, selected) => (
+        <>
+          <Box
+            sx={{
+              display: 'flex',
+              flexWrap: 'wrap',
+              alignItems: 'center',
+              columnGap: 2,
+              rowGap: 0.5,
+              mb: 0.5,
+              '& .MuiButtonBase-root': { minHeight: 28, py: 0 },
+            }}
+          >
+            <OutcomeLine search={search} shown={shown.length} />
+            <StageFilter options={all} chosen={view.stages} onChoose={view.setStages} />
+            <Button variant="text" onClick={copy} sx={{ fontWeight: 500, displayPrint: 'none' }}>
+              {selected > 0 ? `Copy ${selected} selected` : 'Copy table'}
+            </Button>
+          </Box>
+          <Box sx={columns}>
+            <Box sx={{ minWidth: 0 }}>
+              {table}
+              <PinnedBar brief={brief} canAdopt={canAdopt} />
+            </Box>
+            {aside}
+          </Box>
+        </>
+      )}
+    />
   );
 }
 
-function reasonsWords(known: boolean): string {
-  return known
-    ? 'The reasons stand beside this. Each names the limit in the way and the least change that would let an option in.'
-    : 'The search was stopped before the reasons were worked out. Search again to see them.';
+const columns = {
+  display: 'grid',
+  gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: 'minmax(0, 1fr) 236px', xl: 'minmax(0, 1fr) 280px' },
+  gap: 2,
+  alignItems: 'start',
+  '@media print': { gridTemplateColumns: 'minmax(0, 1fr)' },
+} as const;
+
+/** Nothing found: the reasons, as wide as the table would be; else what to do next. */
+function NoOption({
+  search,
+  onTry,
+}: Pick<OptionsViewProps, 'search'> & Partial<Pick<OptionsViewProps, 'onTry'>>) {
+  const whyNot = search.outcome?.whyNot ?? [];
+  if (whyNot.length > 0) return <WhyNotPanel whyNot={whyNot} request={search.request} onTry={onTry} />;
+  return (
+    <Sheet>
+      {search.outcome?.search.complete ? (
+        <EmptyState title="No option">
+          The search was stopped before the reasons were worked out. Search again to see them.
+        </EmptyState>
+      ) : (
+        <EmptyState title="Nothing found before it stopped">
+          Search again and let it run longer, or narrow the brief: fewer teeth to try, fewer stages.
+        </EmptyState>
+      )}
+    </Sheet>
+  );
 }
 
 interface StageFilterProps {
@@ -120,8 +147,8 @@ function StageFilter({ options, chosen, onChoose }: StageFilterProps) {
   const counts = [...new Set(options.map((option) => option.stages.length))].sort();
   if (counts.length < 2) return null;
   return (
-    <Box sx={{ display: 'flex', alignItems: 'center', gap: 1 }}>
-      <Typography component="span" color="textSecondary" id="stage-filter">
+    <Box sx={{ display: 'flex', alignItems: 'center', gap: 1, displayPrint: 'none' }}>
+      <Typography component="span" variant="body2" color="textSecondary" id="stage-filter">
         Stages
       </Typography>
       <ToggleButtonGroup

@@ -21,9 +21,10 @@ export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean
         position: 'sticky',
         bottom: 0,
         zIndex: 3,
-        pt: 0.5,
-        pb: 0.75,
+        pt: 0.25,
+        pb: 0.25,
         mb: -3,
+        displayPrint: 'none',
         bgcolor: 'background.default',
       }}
     >
@@ -33,15 +34,16 @@ export function PinnedBar({ brief, canAdopt }: { brief: Brief; canAdopt: boolean
           alignItems: 'center',
           flexWrap: 'wrap',
           columnGap: 2,
-          rowGap: 1,
-          px: 2,
-          py: 0.5,
+          rowGap: 0.5,
+          px: 1.5,
+          py: 0.25,
+          '& .MuiButton-root': { minHeight: 28, py: 0 },
           bgcolor: 'background.paper',
           border: '1px solid',
           borderColor: 'secondary.main',
         }}
       >
-        <Typography component="p" sx={{ flex: '1 1 220px', minWidth: 0 }}>
+        <Typography component="p" variant="body2" sx={{ flex: '1 1 220px', minWidth: 0 }}>
           <Box component="strong" sx={{ fontWeight: 600, mr: 1.5 }}>
             {pins.length} pinned
           </Box>

@@ -62,7 +62,12 @@ export function OutcomeLine({ search, shown }: { search: Search; shown: number }
   const total = outcome.options.length;
   const count = shown === total ? optionCount(total) : `${shown} of ${optionCount(total)}`;
   return (
-    <Typography component="p" role="status" sx={{ flex: '1 1 320px', color: 'text.secondary' }}>
+    <Typography
+      component="p"
+      variant="body2"
+      role="status"
+      sx={{ flex: '1 1 320px', color: 'text.secondary' }}
+    >
       <Box component="strong" sx={{ fontWeight: 600, color: 'text.primary', mr: 1.5 }}>
         {count}
       </Box>

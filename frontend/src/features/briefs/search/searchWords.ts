@@ -42,7 +42,7 @@ export function outcomeWords(search: SearchAsked, outcome: SearchOutcome): strin
 function claim({ bestOf, limit, stages }: SearchAsked['request'], { options }: SearchOutcome): string {
   if (options.length === 0) return 'No train meets every limit of this brief.';
   if (bestOf !== 'each-count' || stages.min === stages.max) return 'Nothing better exists inside this brief.';
-  return `The best ${limit ?? 50} of each stage count; nothing better exists inside this brief.`;
+  return `The best ${limit ?? 50} of each stage count; nothing better inside this brief.`;
 }
 
 function seconds(ms: number): string {
