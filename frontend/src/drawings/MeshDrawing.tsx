@@ -19,6 +19,18 @@ interface MeshDrawingProps {
   view?: 'mesh' | 'whole';
 }
 
+/** Beside the drawing, not on it: across the teeth it could not be read, and on a phone it would shrink with them. */
+const CAPTION = {
+  display: 'flex',
+  flexWrap: 'wrap',
+  justifyContent: 'space-between',
+  columnGap: 24,
+  padding: '8px 14px',
+  fontSize: '0.75rem',
+  lineHeight: 1.4,
+  color: INK.text,
+} as const;
+
 type Drawn = { mesh: MeshGeometry; pinion: Point[]; wheel: Point[] } | { refused: string };
 
 function draw(pinion: GearInput, wheel: GearInput, centreDistance: number | undefined): Drawn {
@@ -79,72 +91,63 @@ export function MeshDrawing(props: MeshDrawingProps) {
   const angle = formatFixed(drawn.mesh.operatingPressureAngleDeg, 2);
   const name = title ?? `Pinion with ${pinion.teeth} teeth driving a wheel with ${wheel.teeth}`;
   return (
-    <svg
-      role="img"
-      aria-label={`${name}; contact runs from A to E over ${formatFixed(drawn.mesh.pathOfContact, 2)} mm`}
-      viewBox={`0 0 ${width} ${height}`}
-      style={{ display: 'block', width: '100%', height: 'auto', background: INK.sheet }}
-    >
-      <clipPath id={clip}>
-        <rect width={width} height={height} />
-      </clipPath>
-      <g clipPath={`url(#${clip})`}>
-        <path
-          d={place(drawn.wheel, pose.wheelCentre, pose.wheelTurn)}
-          fill={INK.wheel}
-          stroke={INK.outline}
-          strokeWidth={1.1}
-        />
-        <path
-          d={place(drawn.pinion, pose.pinionCentre, pose.pinionTurn)}
-          fill={INK.pinion}
-          fillOpacity={0.85}
-          stroke={INK.outline}
-          strokeWidth={1.1}
-        />
-        {circle(pose.pinionCentre, tipDiameter, false, INK.faint)}
-        {circle(pose.wheelCentre, wheelTip, false, INK.faint)}
-        {circle(pose.pinionCentre, drawn.mesh.gear.pinion.baseDiameter, false, INK.centre)}
-        {circle(pose.wheelCentre, drawn.mesh.gear.wheel.baseDiameter, false, INK.centre)}
-        {circle(pose.pinionCentre, 2 * pose.pinionPitchRadius, true, INK.centre)}
-        {circle(pose.wheelCentre, 2 * pose.wheelPitchRadius, true, INK.centre)}
-        <line
-          x1={width / 2}
-          x2={width / 2}
-          y1={0}
-          y2={height}
-          stroke={INK.centre}
-          strokeWidth={0.8}
-          strokeDasharray={DASH_DOT}
-        />
-        <line x1={t1.x} y1={t1.y} x2={t2.x} y2={t2.y} stroke={INK.dimension} strokeWidth={1} />
-        {drawn.mesh.pathOfContact > 0 && (
-          <>
-            <line x1={a.x} y1={a.y} x2={e.x} y2={e.y} stroke={INK.dimension} strokeWidth={4} />
-            <Letter at={a} letter="A" side={1} />
-            <Letter at={e} letter="E" side={-1} />
-          </>
-        )}
-      </g>
-      <g
-        fontSize={12.5}
-        fill={INK.text}
-        stroke={INK.sheet}
-        strokeWidth={3}
-        paintOrder="stroke"
-        strokeLinejoin="round"
+    <figure style={{ margin: 0 }}>
+      <figcaption style={CAPTION}>
+        <span>{`Pinion above, ${pinion.teeth} teeth, drives clockwise; wheel below, ${wheel.teeth} teeth. Pitch circles dash-dot.`}</span>
+        <span style={{ color: INK.dimension }}>
+          {`Line of action at ${angle}°, path of contact A to E ${formatFixed(drawn.mesh.pathOfContact, 2)} mm`}
+        </span>
+      </figcaption>
+      <svg
+        role="img"
+        aria-label={`${name}; contact runs from A to E over ${formatFixed(drawn.mesh.pathOfContact, 2)} mm`}
+        viewBox={`0 0 ${width} ${height}`}
+        style={{ display: 'block', width: '100%', height: 'auto', background: INK.sheet }}
       >
-        <text x={14} y={22}>{`Pinion, ${pinion.teeth} teeth, turns clockwise`}</text>
-        <text x={14} y={height - 14}>{`Wheel, ${wheel.teeth} teeth`}</text>
-        <text x={width - 14} y={22} textAnchor="end">
-          tip and base circles thin, pitch circles dash-dot
-        </text>
-        <text x={width - 14} y={40} textAnchor="end" fill={INK.dimension}>
-          {`line of action, ${angle}°; path of contact A–E, ${formatFixed(drawn.mesh.pathOfContact, 2)} mm`}
-        </text>
-      </g>
-      <ScaleBar x={width - 14} y={height - 16} pxPerMm={scale} />
-    </svg>
+        <clipPath id={clip}>
+          <rect width={width} height={height} />
+        </clipPath>
+        <g clipPath={`url(#${clip})`}>
+          <path
+            d={place(drawn.wheel, pose.wheelCentre, pose.wheelTurn)}
+            fill={INK.wheel}
+            stroke={INK.outline}
+            strokeWidth={1.1}
+          />
+          <path
+            d={place(drawn.pinion, pose.pinionCentre, pose.pinionTurn)}
+            fill={INK.pinion}
+            fillOpacity={0.85}
+            stroke={INK.outline}
+            strokeWidth={1.1}
+          />
+          {circle(pose.pinionCentre, tipDiameter, false, INK.faint)}
+          {circle(pose.wheelCentre, wheelTip, false, INK.faint)}
+          {circle(pose.pinionCentre, drawn.mesh.gear.pinion.baseDiameter, false, INK.centre)}
+          {circle(pose.wheelCentre, drawn.mesh.gear.wheel.baseDiameter, false, INK.centre)}
+          {circle(pose.pinionCentre, 2 * pose.pinionPitchRadius, true, INK.centre)}
+          {circle(pose.wheelCentre, 2 * pose.wheelPitchRadius, true, INK.centre)}
+          <line
+            x1={width / 2}
+            x2={width / 2}
+            y1={0}
+            y2={height}
+            stroke={INK.centre}
+            strokeWidth={0.8}
+            strokeDasharray={DASH_DOT}
+          />
+          <line x1={t1.x} y1={t1.y} x2={t2.x} y2={t2.y} stroke={INK.dimension} strokeWidth={1} />
+          {drawn.mesh.pathOfContact > 0 && (
+            <>
+              <line x1={a.x} y1={a.y} x2={e.x} y2={e.y} stroke={INK.dimension} strokeWidth={4} />
+              <Letter at={a} letter="A" side={1} />
+              <Letter at={e} letter="E" side={-1} />
+            </>
+          )}
+        </g>
+        <ScaleBar x={width - 14} y={height - 16} pxPerMm={scale} />
+      </svg>
+    </figure>
   );
 }
 

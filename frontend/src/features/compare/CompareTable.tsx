@@ -27,6 +27,9 @@ const DRAWING_WIDTHS = [0, 620, 400, 286, 222];
 /** What the drawing keeps free at its sides without dimensions, px. */
 const DRAWING_SIDES = 40;
 const MOST_TALL = 300;
+const LABEL_WIDTH = 168;
+/** Between the margins of an upright A4 sheet, px. */
+const PAPER_WIDTH = 700;
 
 /** Up to four options side by side: drawings on one scale, figures with the better one marked. */
 export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: CompareTableProps) {
@@ -37,7 +40,14 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
   const scale = useMemo(() => scaleFor(options, width), [options, width]);
   return (
     <Box
-      sx={{ bgcolor: 'background.paper', border: '1px solid', borderColor: 'line.rule', overflowX: 'auto' }}
+      sx={{
+        bgcolor: 'background.paper',
+        border: '1px solid',
+        borderColor: 'line.rule',
+        overflowX: 'auto',
+        // The whole table shrinks, not each drawing for itself: they stay on one scale.
+        '@media print': { zoom: Math.min(1, PAPER_WIDTH / (LABEL_WIDTH + pins.length * (width + 20))) },
+      }}
     >
       <Table
         aria-label="Options side by side"
@@ -45,7 +55,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
       >
         <TableHead>
           <TableRow>
-            <TableCell sx={{ verticalAlign: 'bottom', minWidth: { xs: 110, sm: 168 } }}>
+            <TableCell sx={{ verticalAlign: 'bottom', minWidth: { xs: 110, sm: LABEL_WIDTH } }}>
               <Typography variant="body2" color="textSecondary">
                 All drawn on one scale
               </Typography>
@@ -90,7 +100,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
                   sx={cell.better ? { bgcolor: 'wash.green', fontWeight: 600 } : undefined}
                 >
                   {cell.words}
-                  {cell.better && <Better />}
+                  {cell.better && <Better word={pins.length > 2 ? 'best' : 'better'} />}
                 </TableCell>
               ))}
             </TableRow>
@@ -106,7 +116,8 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
   );
 }
 
-function Better() {
+/** Of two one is better; of three or four one is best. */
+function Better({ word }: { word: 'better' | 'best' }) {
   return (
     <Box
       component="span"
@@ -120,7 +131,7 @@ function Better() {
       }}
     >
       <CheckIcon aria-hidden />
-      better
+      {word}
     </Box>
   );
 }

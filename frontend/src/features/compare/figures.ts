@@ -114,7 +114,7 @@ const RULES: FigureRule[] = [
   },
   {
     label: 'Backlash at the output',
-    unit: '′',
+    unit: 'arcmin',
     prefers: 'less',
     judged: (option) => option.backlashArcmin,
     words: (option) => formatNumber(option.backlashArcmin, 1),

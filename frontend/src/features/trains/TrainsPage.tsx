@@ -32,7 +32,7 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
     {
       field: 'strip',
       headerName: 'One scale',
-      width: 120,
+      width: 112,
       sortable: false,
       renderCell: ({ row }) => (
         <Box sx={{ height: '100%', display: 'flex', alignItems: 'center' }}>
@@ -40,56 +40,63 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
         </Box>
       ),
     },
-    { field: 'code', headerName: 'Train', width: 84, cellClassName: 'part-number' },
-    { field: 'title', headerName: 'Title', flex: 2, minWidth: 160 },
+    { field: 'code', headerName: 'Train', width: 72, cellClassName: 'part-number' },
+    {
+      field: 'title',
+      headerName: 'Title',
+      flex: 2,
+      minWidth: 140,
+      renderCell: ({ value }) => <TitleCell title={String(value)} />,
+    },
     {
       field: 'revision',
       headerName: 'Revision',
-      width: 110,
+      width: 90,
       sortable: false,
       valueGetter: (_, row) => `${row.revision}, ${row.state}`,
     },
     {
       field: 'teeth',
-      headerName: 'Teeth',
-      width: 170,
+      headerName: 'Teeth, module',
+      width: 154,
       sortable: false,
-      valueGetter: (_, { spec }) => `${specTeethWords(spec)}  ${moduleWords(spec.stages)}`,
+      valueGetter: (_, { spec }) => `${specTeethWords(spec)} ${moduleWords(spec.stages)}`,
+      renderCell: ({ row: { spec } }) => <TeethCell spec={spec} />,
     },
     {
       field: 'ratio',
       headerName: 'Ratio',
-      width: 84,
+      width: 74,
       ...right,
       valueGetter: (_, { ratio }) => ratioWords(ratio.value),
     },
     {
       field: 'error',
       headerName: 'Error %',
-      width: 80,
+      width: 74,
       ...right,
       valueGetter: (_, { ratio }) => errorWords(ratio.errorPercent),
     },
-    { field: 'box', headerName: 'Box mm', width: 126, ...right, valueGetter: (_, { box }) => boxWords(box) },
+    { field: 'box', headerName: 'Box mm', width: 118, ...right, valueGetter: (_, { box }) => boxWords(box) },
     {
       field: 'mass',
       headerName: 'Mass kg',
-      width: 80,
+      width: 74,
       ...right,
       valueGetter: (_, { mass }) => formatFixed(mass, 2),
     },
     {
       field: 'checks',
       headerName: 'Checks',
-      width: 130,
+      width: 116,
       sortable: false,
       renderCell: ({ row }) => <ChecksCell fails={row.fails} marginals={row.marginals} />,
     },
-    { field: 'owner', headerName: 'Owner', width: 110 },
+    { field: 'owner', headerName: 'Owner', width: 96 },
     {
       field: 'updatedAt',
       headerName: 'Changed',
-      width: 108,
+      width: 100,
       align: 'right',
       headerAlign: 'right',
       valueFormatter: (iso: string) => formatDay(iso),
@@ -97,8 +104,36 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
   ];
 }
 
+/** Left out where the screen is a laptop's: everything else then stands whole. */
+const LAPTOP = { error: false, mass: false, owner: false };
+
 /** Left out where the screen is a phone's. */
-const NARROW = { revision: false, error: false, box: false, mass: false, owner: false, updatedAt: false };
+const NARROW = { ...LAPTOP, revision: false, box: false, updatedAt: false };
+
+/** A long title takes a second line. */
+function TitleCell({ title }: { title: string }) {
+  return (
+    <Box
+      sx={{ lineHeight: 1.25, height: '100%', display: 'grid', alignContent: 'center', whiteSpace: 'normal' }}
+    >
+      <Box component="span" title={title} sx={{ maxHeight: '2.5em', overflow: 'hidden' }}>
+        {title}
+      </Box>
+    </Box>
+  );
+}
+
+/** Teeth over the module, as in the option table. */
+function TeethCell({ spec }: { spec: TrainSummary['spec'] }) {
+  return (
+    <Box sx={{ lineHeight: 1.25, height: '100%', display: 'grid', alignContent: 'center' }}>
+      <span>{specTeethWords(spec)}</span>
+      <Box component="span" sx={{ color: 'text.secondary', fontSize: '0.6875rem' }}>
+        {moduleWords(spec.stages)}
+      </Box>
+    </Box>
+  );
+}
 
 function ChecksCell({ fails, marginals }: { fails: number; marginals: number }) {
   if (fails > 0)
@@ -131,6 +166,7 @@ export default function TrainsPage() {
     ...(mine ? { mine: true } : {}),
   });
   const narrow = useMediaQuery('(max-width: 600px)');
+  const laptop = useMediaQuery('(max-width: 1399px)');
   const items = data?.items;
   const columns = useMemo(
     () =>
@@ -174,7 +210,7 @@ export default function TrainsPage() {
       <DataTable
         label="Trains"
         columns={columns}
-        hidden={narrow ? NARROW : undefined}
+        hidden={narrow ? NARROW : laptop ? LAPTOP : undefined}
         rows={items}
         total={data?.total}
         getRowId={(row) => row.code}

@@ -50,7 +50,7 @@ export function BomTab({ train, canExport }: { train: Train; canExport: boolean 
           </Box>
           {`${totals.made} to be made, ${totals.bought} to be bought; ${formatFixed(totals.massKg, 2)} kg${unknown}.`}
         </Typography>
-        <Button variant="text" onClick={() => void copy()} sx={{ fontWeight: 500 }}>
+        <Button variant="text" onClick={() => void copy()} sx={{ fontWeight: 500, displayPrint: 'none' }}>
           Copy table
         </Button>
         {!canExport && (

@@ -9,6 +9,20 @@ import type { BomLine } from '../../../api/types';
 import { PartLink } from '../PartLink';
 import { massWords, partNumberWords, quantityWords } from './bomCells';
 
+/** Columns of the printed table, per cent of the sheet's width. */
+const PAPER_COLUMNS = [5, 11, 32, 8, 11, 14, 7, 12];
+
+const ON_PAPER = {
+  minWidth: 0,
+  tableLayout: 'fixed',
+  '& td, & th': { px: 0.5, fontSize: '0.6875rem', whiteSpace: 'normal' },
+  '& td *': { fontSize: '0.6875rem' },
+  '& tr': { breakInside: 'avoid' },
+  ...Object.fromEntries(
+    PAPER_COLUMNS.map((width, index) => [`& th:nth-of-type(${index + 1})`, { width: `${width}%` }]),
+  ),
+} as const;
+
 /** Lines of a bill of materials; flags stand under the description they concern. */
 export function BomTable({ lines }: { lines: readonly BomLine[] }) {
   return (
@@ -18,7 +32,7 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
       role="region"
       aria-label="Bill of materials, scrolls sideways"
     >
-      <Table aria-label="Bill of materials" sx={{ minWidth: 860 }}>
+      <Table aria-label="Bill of materials" sx={{ minWidth: 860, '@media print': ON_PAPER }}>
         <TableHead>
           <TableRow>
             <TableCell align="right">Find</TableCell>

@@ -5,7 +5,9 @@ import { formatFixed } from '../../../components/figures';
 import { errorWords, exactRatioWords } from '../../../components/optionWords';
 import { Sheet } from '../../../components/Sheet';
 import { TrainDrawing } from '../../../drawings/TrainDrawing';
+import { DrawingFrame } from '../DrawingFrame';
 import { ChecksTable } from '../stages/ChecksTable';
+import { FindingsList } from '../stages/FindingsList';
 import { ShaftsTable } from './ShaftsTable';
 
 /** The train to scale, its figures as a whole, its shafts. */
@@ -23,7 +25,9 @@ export function DrawingTab({ train, canEdit }: { train: Train; canEdit: boolean 
     >
       <Box sx={{ display: 'grid', gap: 2, minWidth: 0 }}>
         <Sheet flush>
-          <TrainDrawing train={spec} figures={figures} shaftDiameters={diameters} />
+          <DrawingFrame label="Drawing of the train">
+            <TrainDrawing train={spec} figures={figures} shaftDiameters={diameters} />
+          </DrawingFrame>
         </Sheet>
         <ShaftsTable train={train} canEdit={canEdit} />
         <Sheet title="Checks of the whole" flush>
@@ -59,7 +63,7 @@ export function DrawingTab({ train, canEdit }: { train: Train; canEdit: boolean 
               },
               {
                 label: 'Backlash at the output',
-                unit: '′',
+                unit: 'arcmin',
                 values: [formatFixed(figures.backlashArcmin, 1)],
               },
               {
@@ -69,6 +73,7 @@ export function DrawingTab({ train, canEdit }: { train: Train; canEdit: boolean 
             ]}
           />
         </Sheet>
+        <FindingsList findings={figures.findings} none="The geometry has nothing to remark." />
       </Box>
     </Box>
   );

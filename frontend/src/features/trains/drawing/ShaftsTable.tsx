@@ -21,8 +21,9 @@ const BASIS_WORDS: Record<Train['spec']['shafts'][number]['basis'], string> = {
   typed: 'chosen',
 };
 
+/** `Shaft 0, input`: the number that the drawing, the checks and the bill of materials go by. */
 const shaftName = (index: number, count: number): string =>
-  index === 0 ? 'Input' : index === count - 1 ? 'Output' : `Shaft ${index}`;
+  `Shaft ${index}${index === 0 ? ', input' : index === count - 1 ? ', output' : ''}`;
 
 /** Speed, torque and diameter of every shaft; the diameter can be chosen. */
 export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean }) {
@@ -42,7 +43,7 @@ export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean
       aside={
         canEdit &&
         !editing && (
-          <Button variant="text" onClick={() => setEditing(true)}>
+          <Button variant="text" onClick={() => setEditing(true)} sx={{ displayPrint: 'none' }}>
             Change diameters
           </Button>
         )
@@ -74,15 +75,17 @@ export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean
                 const issue = form.issues[shaft.index];
                 return (
                   <TableRow key={shaft.index}>
-                    <TableCell component="th" scope="row">
+                    <TableCell component="th" scope="row" sx={{ whiteSpace: 'nowrap' }}>
                       {shaftName(shaft.index, shafts.length)}
                     </TableCell>
-                    <TableCell>{shaft.direction === 1 ? 'with the input' : 'against it'}</TableCell>
+                    <TableCell sx={{ whiteSpace: 'nowrap' }}>
+                      {shaft.direction === 1 ? 'with the input' : 'against it'}
+                    </TableCell>
                     <TableCell align="right">{formatFixed(shaft.speed, 1)}</TableCell>
                     <TableCell align="right">{formatFixed(shaft.torque, 2)}</TableCell>
                     <TableCell align="right">{formatFixed(shaft.power, 3)}</TableCell>
                     <TableCell align="right">{formatPlain(shaft.leastDiameter, 1)}</TableCell>
-                    <TableCell align="right">
+                    <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
                       {editing ? (
                         <TextField
                           value={form.typed[shaft.index] ?? ''}
@@ -91,7 +94,7 @@ export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean
                           helperText={issue}
                           slotProps={{
                             htmlInput: {
-                              'aria-label': `Diameter of ${shaftName(shaft.index, shafts.length)}, mm`,
+                              'aria-label': `${shaftName(shaft.index, shafts.length)}: diameter, mm`,
                               inputMode: 'decimal',
                               className: 'number',
                             },

@@ -6,13 +6,19 @@ import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import Typography from '@mui/material/Typography';
 import type { Train } from '../../../api/types';
-import { formatPlain } from '../../../components/figures';
+import { formatFixed, formatPlain } from '../../../components/figures';
 import { VerdictWord } from '../../../components/VerdictWord';
 
 type Check = Train['figures']['checks'][number];
 
 /** Decimals a check's figures are read with, by unit. */
 const DECIMALS: Record<string, number> = { mm: 3, '%': 3, '': 3, kg: 3, '′': 1 };
+
+/** Figure and limit with the same decimals, so that they can be read against each other; whole ones stay whole. */
+function figureOf({ value, limit, unit }: Check, decimals: number): (figure: number | null) => string {
+  const whole = unit !== '' && unit !== '%' && [value, limit].every((each) => Number.isInteger(each));
+  return (figure) => (whole ? formatPlain(figure) : formatFixed(figure, decimals));
+}
 
 /** Requirements held against the train: figure, limit, verdict in words and by how much. */
 export function ChecksTable({ checks }: { checks: readonly Check[] }) {
@@ -37,19 +43,21 @@ export function ChecksTable({ checks }: { checks: readonly Check[] }) {
         <TableBody>
           {checks.map((check, index) => {
             const decimals = DECIMALS[check.unit] ?? 2;
+            const figure = figureOf(check, decimals);
+            const judged = check.value !== null || check.limit !== null;
             return (
               <TableRow key={`${check.code}-${index}`} sx={{ '&:last-of-type > *': { borderBottom: 0 } }}>
                 <TableCell component="th" scope="row" sx={{ fontWeight: 400, minWidth: 130 }}>
                   {check.label}
-                  {check.unit && (
+                  {check.unit && judged && (
                     <Box component="span" sx={{ color: 'text.secondary' }}>{`, ${check.unit}`}</Box>
                   )}
                   {check.verdict !== 'passes' && (
                     <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{check.message}</Box>
                   )}
                 </TableCell>
-                <TableCell align="right">{formatPlain(check.value, decimals)}</TableCell>
-                <TableCell align="right">{formatPlain(check.limit, decimals)}</TableCell>
+                <TableCell align="right">{figure(check.value)}</TableCell>
+                <TableCell align="right">{figure(check.limit)}</TableCell>
                 <TableCell>
                   <VerdictWord
                     verdict={check.verdict}

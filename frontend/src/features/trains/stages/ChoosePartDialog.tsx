@@ -10,7 +10,7 @@ import Radio from '@mui/material/Radio';
 import RadioGroup from '@mui/material/RadioGroup';
 import Typography from '@mui/material/Typography';
 import { useState, type FormEvent } from 'react';
-import { gearPlace, useFittingGears } from '../../../api/hooks/useFittingGears';
+import { gearPlace, useFittingGears, type GearPlace } from '../../../api/hooks/useFittingGears';
 import { saveTrain } from '../../../api/hooks/useTrain';
 import { asProblem } from '../../../api/problem';
 import type { Part, Train } from '../../../api/types';
@@ -21,7 +21,7 @@ import { useNotices } from '../../../components/Notices';
 import { useTrainSaving } from '../useTrainSaving';
 
 interface ChoosePartDialogProps {
-  train: Train;
+  train: Pick<Train, 'code' | 'version' | 'spec'>;
   stage: number;
   role: 'pinion' | 'wheel';
   onClose: () => void;
@@ -60,7 +60,7 @@ export function ChoosePartDialog({ train, stage, role, onClose }: ChoosePartDial
           )}
           {place && (
             <Typography color="textSecondary" sx={{ mb: 1 }}>
-              {`Cleared gears with ${place.teeth} teeth, m ${formatPlain(place.module)}, shift ${formatPlain(place.profileShift)}, at least ${formatPlain(place.faceWidth)} mm wide.`}
+              {`Cleared gears with ${place.teeth} teeth, m ${formatPlain(place.module)}, shift ${formatPlain(place.profileShift)}${helixWords(place)}, at least ${formatPlain(place.faceWidth)} mm wide.`}
             </Typography>
           )}
           {error !== undefined && (
@@ -96,6 +96,9 @@ export function ChoosePartDialog({ train, stage, role, onClose }: ChoosePartDial
     </Dialog>
   );
 }
+
+const helixWords = ({ helixAngleDeg, hand }: GearPlace): string =>
+  helixAngleDeg > 0 ? `, helix ${formatPlain(helixAngleDeg)}° ${hand ?? ''}`.trimEnd() : '';
 
 function GearLine({ gear }: { gear: Pick<Part, 'number' | 'description' | 'attributes' | 'material'> }) {
   const { faceWidth, bore } = gear.attributes as { faceWidth?: number; bore?: number };

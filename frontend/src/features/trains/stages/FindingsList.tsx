@@ -5,14 +5,20 @@ import { VerdictWord } from '../../../components/VerdictWord';
 
 const VERDICTS = { fail: 'fails', marginal: 'marginal', note: 'note' } as const;
 
-/** Everything the geometry has to say about the pair, worst first. */
-export function FindingsList({ findings }: { findings: readonly Train['figures']['findings'][number][] }) {
+interface FindingsListProps {
+  findings: readonly Train['figures']['findings'][number][];
+  /** Said when there are none. */
+  none: string;
+}
+
+/** Everything the geometry and the chosen parts have to say, worst first. */
+export function FindingsList({ findings, none }: FindingsListProps) {
   const order = ['fail', 'marginal', 'note'];
   const sorted = [...findings].sort((a, b) => order.indexOf(a.severity) - order.indexOf(b.severity));
   return (
     <Sheet title="Findings">
       {sorted.length === 0 ? (
-        <Box sx={{ color: 'text.secondary' }}>The geometry has nothing to remark on this pair.</Box>
+        <Box sx={{ color: 'text.secondary' }}>{none}</Box>
       ) : (
         <Box component="ul" sx={{ m: 0, p: 0, listStyle: 'none', display: 'grid', rowGap: 0.75 }}>
           {sorted.map(({ code, severity, message }) => (

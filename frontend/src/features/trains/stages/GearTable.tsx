@@ -24,7 +24,9 @@ export function GearTable({ train, stage, canEdit }: GearTableProps) {
     const number = spec[role].partNumber;
     return (
       <>
-        {number === null ? 'to be made' : <PartLink number={number} />}
+        <span style={{ whiteSpace: 'nowrap' }}>
+          {number === null ? 'to be made' : <PartLink number={number} />}
+        </span>
         {canEdit && (
           <>
             <br />
@@ -32,7 +34,7 @@ export function GearTable({ train, stage, canEdit }: GearTableProps) {
               variant="text"
               onClick={() => setChoosing(role)}
               aria-label={`Choose the part of the ${role}`}
-              sx={{ minHeight: 24, py: 0, mr: -1, fontWeight: 500 }}
+              sx={{ minHeight: 24, py: 0, mr: -1, fontWeight: 500, displayPrint: 'none' }}
             >
               Choose
             </Button>
@@ -68,14 +70,14 @@ function gearRows(train: Train, stage: number, pinion: GearGeometry, wheel: Gear
     {
       label: 'Module',
       unit: 'mm',
-      values: ['', formatTrimmed(spec.module, 4)],
+      values: both(() => formatTrimmed(spec.module, 4)),
       note: `diametral pitch ${formatTrimmed(moduleToDiametralPitch(spec.module), 3)}`,
     },
-    { label: 'Pressure angle', unit: '°', values: ['', formatTrimmed(train.spec.pressureAngleDeg, 3)] },
+    { label: 'Pressure angle', unit: '°', values: both(() => formatTrimmed(train.spec.pressureAngleDeg, 3)) },
   ];
   if (train.spec.helixAngleDeg > 0) {
     rows.push(
-      { label: 'Helix angle', unit: '°', values: ['', formatTrimmed(train.spec.helixAngleDeg, 4)] },
+      { label: 'Helix angle', unit: '°', values: both(() => formatTrimmed(train.spec.helixAngleDeg, 4)) },
       { label: 'Hand', values: [spec.pinion.hand ?? '–', spec.wheel.hand ?? '–'] },
     );
   }

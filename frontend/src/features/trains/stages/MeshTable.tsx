@@ -30,8 +30,8 @@ export function meshRows(
   const rows: FigureRow[] = [
     { label: 'Ratio', values: [`${z2}/${z1} = ${formatFixed(mesh.ratio, 4)}`] },
     { label: 'Centre distance', unit: 'mm', values: [mm(mesh.centreDistance)] },
-    { label: 'without backlash', unit: 'mm', values: [mm(mesh.zeroBacklashCentreDistance)] },
-    { label: 'reference', unit: 'mm', values: [mm(mesh.referenceCentreDistance)] },
+    { label: 'Centre distance without backlash', unit: 'mm', values: [mm(mesh.zeroBacklashCentreDistance)] },
+    { label: 'Reference centre distance', unit: 'mm', values: [mm(mesh.referenceCentreDistance)] },
     {
       label: 'Operating pressure angle',
       unit: '°',
@@ -45,7 +45,7 @@ export function meshRows(
   ];
   if (mesh.contactRatioLimitedBy !== null) {
     rows.push({
-      label: 'from the tip circles alone',
+      label: 'Contact ratio from the tip circles alone',
       values: [formatFixed(mesh.contactRatioIgnoringUndercut, 3)],
       note: mesh.contactRatioLimitedBy,
     });
@@ -57,21 +57,25 @@ export function meshRows(
     );
   }
   rows.push(
-    { label: 'Path of contact', unit: 'mm', values: [mm(mesh.pathOfContact)] },
-    { label: 'approach A–C', unit: 'mm', values: [mm(mesh.approachLength)] },
-    { label: 'recess C–E', unit: 'mm', values: [mm(mesh.recessLength)] },
-    { label: 'Length T1–T2', unit: 'mm', values: [mm(mesh.tangentPointDistance)] },
+    { label: 'Path of contact, A to E', unit: 'mm', values: [mm(mesh.pathOfContact)] },
+    { label: 'Approach, A to C', unit: 'mm', values: [mm(mesh.approachLength)] },
+    { label: 'Recess, C to E', unit: 'mm', values: [mm(mesh.recessLength)] },
+    { label: 'Between the base tangent points', unit: 'mm', values: [mm(mesh.tangentPointDistance)] },
     { label: 'Transverse base pitch', unit: 'mm', values: [mm(mesh.basePitch)] },
     { label: 'Backlash, circumferential', unit: 'mm', values: [mm(mesh.circumferentialBacklash)] },
     { label: 'Backlash, normal', unit: 'mm', values: [mm(mesh.normalBacklash)] },
-    { label: 'Backlash at the wheel', unit: '′', values: [formatFixed(mesh.angularBacklashArcmin, 2)] },
+    {
+      label: 'Backlash at the wheel',
+      unit: 'arcmin',
+      values: [formatFixed(mesh.angularBacklashArcmin, 2)],
+    },
     { label: 'Tip clearance, pinion', unit: 'mm', values: [mm(mesh.tipClearancePinion)] },
     { label: 'Tip clearance, wheel', unit: 'mm', values: [mm(mesh.tipClearanceWheel)] },
     {
       label: 'Room to the least contact ratio',
       unit: 'modules',
       values: [formatSigned(mesh.allowanceAtLeastContactRatio, 4)],
-      note: 'widest distance past the one without backlash',
+      note: 'how far the axes may move apart, from the distance without backlash',
     },
     {
       label: 'Room to contact ratio 1',

@@ -39,7 +39,7 @@ export function StagesTab({ train, canEdit }: { train: Train; canEdit: boolean }
 
   return (
     <>
-      <Box sx={{ display: 'flex', gap: 2, mb: 1, flexWrap: 'wrap' }}>
+      <Box sx={{ display: 'flex', gap: 2, mb: 1, flexWrap: 'wrap', displayPrint: 'none' }}>
         <ToggleButtonGroup
           exclusive
           size="small"
@@ -102,7 +102,10 @@ export function StagesTab({ train, canEdit }: { train: Train; canEdit: boolean }
               <Sheet title="Checks of this stage" flush>
                 <ChecksTable checks={ofStage(train.figures.checks)} />
               </Sheet>
-              <FindingsList findings={ofStage(train.figures.findings)} />
+              <FindingsList
+                findings={ofStage(train.figures.findings)}
+                none="The geometry has nothing to remark on this pair."
+              />
             </Box>
           </Box>
         </Box>
