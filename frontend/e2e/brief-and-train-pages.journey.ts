@@ -66,6 +66,79 @@ test.describe('as purchaser', () => {
   });
 });
 
+test.describe('as designer', () => {
+  test.use({ role: 'designer' });
+
+  test('chooses what a helical gear is: made to order, then the stock part again', async ({ page }) => {
+    await page.goto('/trains/T-0002?tab=stages');
+    const choose = page.getByRole('button', { name: 'Choose the part of the pinion' });
+    const gears = page.getByRole('table', { name: 'Gears of stage 1' });
+    await choose.click();
+    const dialog = page.getByRole('dialog', { name: 'Part for the pinion of stage 1' });
+    await expect(dialog.getByText(/helix 15° right/)).toBeVisible();
+    const stock = dialog.getByRole('radio', { name: /^KW-/ }).first();
+    await expect(stock).toBeChecked();
+    const number = (await stock.getAttribute('value')) ?? '';
+    await expectAccessible(page);
+    await dialog.getByRole('radio', { name: 'Made to order' }).check();
+    await dialog.getByRole('button', { name: 'Choose' }).click();
+    await expect(dialog).toHaveCount(0);
+    await expect(gears.getByRole('link', { name: number })).toHaveCount(0);
+    await choose.click();
+    await dialog.getByRole('radio', { name: new RegExp(number) }).check();
+    await dialog.getByRole('button', { name: 'Choose' }).click();
+    await expect(gears.getByRole('link', { name: number })).toBeVisible();
+    await page.getByRole('tab', { name: 'Bill of materials' }).click();
+    await expect(page.getByRole('table', { name: 'Bill of materials' })).toContainText(number);
+  });
+
+  test('is told on the page when the workbook cannot be had', async ({ page }) => {
+    await page.route('**/bom.xlsx', (route) =>
+      route.fulfill({ status: 503, json: { statusCode: 503, code: 'busy', message: 'Try again shortly.' } }),
+    );
+    await page.goto('/trains/T-0001?tab=bom');
+    await page.getByRole('link', { name: 'Download BOM (.xlsx)' }).click();
+    await expect(page.getByText('The workbook could not be downloaded. Try again shortly.')).toBeVisible();
+    await expect(page.getByRole('table', { name: 'Bill of materials' })).toBeVisible();
+  });
+
+  test('prints pages without the frame round them, whole in width', async ({ page }) => {
+    // An upright A4 sheet between its margins.
+    await page.setViewportSize({ width: 718, height: 1020 });
+    for (const [path, table] of [
+      ['/trains/T-0002?tab=bom', 'Bill of materials'],
+      ['/briefs/3/compare', 'Options side by side'],
+    ] as const) {
+      await page.goto(path);
+      const shown = page.getByRole('table', { name: table });
+      await expect(shown).toBeVisible();
+      await page.emulateMedia({ media: 'print' });
+      await expect(page.getByRole('banner')).toBeHidden();
+      await expect(page.getByRole('link', { name: 'Skip to the page' })).toBeHidden();
+      const { right } = await shown.evaluate((each) => each.getBoundingClientRect());
+      expect(right).toBeLessThanOrEqual(718);
+      await page.emulateMedia({ media: 'screen' });
+    }
+  });
+});
+
+test.describe('on a laptop', () => {
+  test.use({ role: 'viewer', viewport: { width: 1280, height: 800 } });
+
+  test('fifteen options stand above what is pinned', async ({ page }) => {
+    await page.goto(TURNTABLE);
+    await expect(page.getByRole('grid', { name: 'Options' })).toBeVisible();
+    const foot = await page
+      .getByRole('region', { name: 'Pinned options' })
+      .evaluate((bar) => bar.getBoundingClientRect().top);
+    const ends = await page
+      .getByRole('grid', { name: 'Options' })
+      .getByRole('row')
+      .evaluateAll((rows) => rows.slice(1).map((row) => row.getBoundingClientRect().bottom));
+    expect(ends.filter((end) => end <= foot).length).toBeGreaterThanOrEqual(15);
+  });
+});
+
 const pages = [
   ['/briefs', 'Briefs'],
   ['/briefs/3', 'turntable'],

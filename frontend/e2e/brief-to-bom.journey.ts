@@ -91,7 +91,7 @@ test.describe.serial('from the winch brief to its spreadsheet', () => {
     await expect(page.getByRole('table', { name: 'Changes' }).getByRole('row')).toHaveCount(3);
     await page.getByRole('tab', { name: 'Drawing' }).click();
     await page.getByRole('button', { name: 'Change diameters' }).click();
-    const output = page.getByLabel('Diameter of Output, mm');
+    const output = page.getByLabel(/^Shaft \d, output: diameter, mm$/);
     await output.fill('900');
     await page.getByRole('button', { name: 'Save diameters' }).click();
     await expect(page.getByText(/from 2 to 500 mm/).first()).toBeVisible();
