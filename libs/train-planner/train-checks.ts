@@ -183,7 +183,7 @@ function undercutCheck(mesh: MeshGeometry, role: Role, stage: number): TrainChec
   const words = `The stage ${stage + 1} ${role}`;
   return {
     code: `undercut-${role}`,
-    label: `Undercut, ${role}`,
+    label: `Profile shift against undercut, ${role}`,
     value,
     limit,
     unit: 'modules',
