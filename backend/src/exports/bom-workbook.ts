@@ -1,9 +1,9 @@
 import ExcelJS from 'exceljs';
 import { type TrainRecord } from '../trains/bom.service.js';
-import { writeBomSheet } from './bom-sheet.js';
-import { writeChecksSheet } from './checks-sheet.js';
+import { BOM_COLUMNS, writeBomSheet } from './bom-sheet.js';
+import { CHECK_COLUMNS, writeChecksSheet } from './checks-sheet.js';
 import { addHeadedSheet, HEAD_ROW } from './sheet-heading.js';
-import { stageColumns, writeStagesSheet } from './stages-sheet.js';
+import { stageWidths, writeStagesSheet } from './stages-sheet.js';
 import { stripPicture } from './strip-picture.js';
 
 export const XLSX_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
@@ -34,13 +34,16 @@ export async function bomWorkbook({ train, bom, gearData }: TrainRecord, date: D
   const imageId = workbook.addImage({ base64: png.toString('base64'), extension: 'png' });
   const heading = { train, date, picture: { ...PICTURE, imageId } };
   const tableHead = `${HEAD_ROW}:${HEAD_ROW}`;
-  const lines = { subject: 'Bill of materials', pictureColumn: 11.5, repeatedRows: tableHead };
+  const lines = { subject: 'Bill of materials', widths: widthsOf(BOM_COLUMNS), repeatedRows: tableHead };
   writeBomSheet(addHeadedSheet(workbook, 'BOM', { ...heading, ...lines }), bom);
-  // Three tables stand on this sheet, so that a page repeats what it is about and not the head of one table.
-  const pictureColumn = stageColumns(gearData.length) - 3;
-  const stages = { subject: 'Stages', pictureColumn, repeatedRows: '1:3' };
+  // Three tables stand on this sheet, so that no page repeats the head of one.
+  const stages = { subject: 'Stages', widths: stageWidths(gearData.length) };
   writeStagesSheet(addHeadedSheet(workbook, 'Stages', { ...heading, ...stages }), train, gearData);
-  const checks = { subject: 'Checks', pictureColumn: 6.35, repeatedRows: tableHead };
+  const checks = { subject: 'Checks', widths: widthsOf(CHECK_COLUMNS), repeatedRows: tableHead };
   writeChecksSheet(addHeadedSheet(workbook, 'Checks', { ...heading, ...checks }), train);
   return Buffer.from(await workbook.xlsx.writeBuffer());
+}
+
+function widthsOf(columns: readonly { width: number }[]): number[] {
+  return columns.map(({ width }) => width);
 }

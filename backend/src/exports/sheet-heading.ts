@@ -2,6 +2,7 @@ import { type Workbook, type Worksheet } from 'exceljs';
 import { formatErrorPercent, formatRatio, ratio } from '@stageyard/libs/units';
 import { type TrainDto } from '../trains/dto/train.dto.js';
 import { CAUTION_LINE } from './cautions.js';
+import { columnPixels, MARGINS } from './page-layout.js';
 import { type Picture } from './strip-picture.js';
 import { COLOUR, dress, font } from './workbook-style.js';
 
@@ -23,10 +24,10 @@ export interface Heading {
   date: Date;
   /** The train to scale, already in the workbook. */
   picture: Pick<Picture, 'width' | 'height'> & { imageId: number };
-  /** Column over which the picture's left edge stands, from 0; the head's text keeps to the columns before it. */
-  pictureColumn: number;
-  /** Rows that every printed page repeats, such as `7:7`. */
-  repeatedRows: string;
+  /** Characters, column by column. The picture ends with the last one; the head's text keeps left of it. */
+  widths: readonly number[];
+  /** Rows that every printed page repeats, such as `7:7`; none where a sheet holds several tables. */
+  repeatedRows?: string;
 }
 
 /** Adds a sheet with its head: what train, which revision, when, the exact ratio, and the train to scale. */
@@ -40,28 +41,25 @@ export function addHeadedSheet(workbook: Workbook, name: string, heading: Headin
       fitToWidth: 1,
       fitToHeight: 0,
       horizontalCentered: true,
-      printTitlesRow: heading.repeatedRows,
-      margins: { left: 0.4, right: 0.4, top: 0.5, bottom: 0.6, header: 0.25, footer: 0.3 },
+      ...(heading.repeatedRows ? { printTitlesRow: heading.repeatedRows } : {}),
+      margins: MARGINS,
     },
     headerFooter: { oddFooter: footer(heading) },
   });
+  heading.widths.forEach((width, index) => (sheet.getColumn(index + 1).width = width));
+  const place = picturePlace(heading);
   headLines(heading).forEach((text, index) => {
     const row = index + 1;
     const { height, look } = TITLE_ROWS[index] ?? TITLE_ROWS[4];
     sheet.getRow(row).height = height;
-    sheet.mergeCells(row, 1, row, Math.floor(heading.pictureColumn));
+    sheet.mergeCells(row, 1, row, Math.max(1, place.nativeCol));
     const cell = sheet.getCell(row, 1);
     cell.value = text;
     dress(cell, { ...look, alignment: { vertical: 'middle', horizontal: 'left', shrinkToFit: true } });
   });
   sheet.getRow(6).height = 8;
-  addPicture(sheet, heading);
+  addPicture(sheet, heading, place);
   return sheet;
-}
-
-/** Everything from the first cell to this column and row is printed. The writer adds the column's dollar sign itself. */
-export function setPrintArea(sheet: Worksheet, column: string, row: number): void {
-  sheet.pageSetup.printArea = `A$1:${column}$${row}`;
 }
 
 function headLines({ train, subject, date }: Heading): string[] {
@@ -100,9 +98,29 @@ function footer({ train, subject, date }: Heading): string {
   return `&L&8${train.code} revision ${train.revision}: ${subject.toLowerCase()}&C&8Page &P of &N&R&8Stageyard, ${day}`;
 }
 
-function addPicture(sheet: Worksheet, { picture, pictureColumn }: Heading): void {
+const EMU_A_PIXEL = 9525;
+
+/** Where the picture begins so that it ends with the last column. */
+function picturePlace({ picture, widths }: Heading): { nativeCol: number; nativeColOff: number } {
+  let left = widths.reduce((sum, width) => sum + columnPixels(width), 0) - picture.width;
+  let column = 0;
+  for (; column < widths.length - 1; column += 1) {
+    const wide = columnPixels(widths[column] ?? 0);
+    if (left < wide) break;
+    left -= wide;
+  }
+  return { nativeCol: column, nativeColOff: Math.max(0, Math.round(left * EMU_A_PIXEL)) };
+}
+
+function addPicture(
+  sheet: Worksheet,
+  { picture }: Heading,
+  place: { nativeCol: number; nativeColOff: number },
+): void {
+  // The writer knows a whole anchor too, and takes it before the plain column and row of its types.
+  const corner = { ...place, nativeRow: 0, nativeRowOff: 5 * EMU_A_PIXEL, col: place.nativeCol, row: 0 };
   sheet.addImage(picture.imageId, {
-    tl: { col: pictureColumn, row: 0.15 },
+    tl: corner,
     ext: { width: picture.width, height: picture.height },
     editAs: 'oneCell',
   });

@@ -3,7 +3,8 @@ import { type MeshGeometry } from '@stageyard/libs/gear-geometry';
 import { type TrainShaft } from '@stageyard/libs/train-planner';
 import { type Worksheet } from 'exceljs';
 import { type TrainDto } from '../trains/dto/train.dto.js';
-import { HEAD_ROW, setPrintArea } from './sheet-heading.js';
+import { setPrintArea } from './page-layout.js';
+import { HEAD_ROW } from './sheet-heading.js';
 import { type Column, writeTable } from './table.js';
 import { COLOUR, dress, font } from './workbook-style.js';
 
@@ -16,9 +17,18 @@ const GROUP_TITLES: Record<GearDataRow['group'], string> = {
 /** Text among figures, such as the basic rack, is longer than they are. */
 const WRAPPED = { horizontal: 'right', vertical: 'top', wrapText: true } as const;
 
-/** Columns of the sheet: three of words, then one a gear, with room for the picture above the last three. */
-export function stageColumns(gears: number): number {
-  return Math.max(8, 3 + gears);
+/** Characters of the columns of words: what a figure is, its symbol, its unit. */
+const WORDS = [36, 10, 8] as const;
+/**
+ * Characters of all columns of figures together, at least five of them. So wide, a page fitted to the width of the
+ * sheet holds the whole of the gear data; and the picture has room above them.
+ */
+const FIGURES = 120;
+
+/** Widths of the columns of the sheet, in characters. */
+export function stageWidths(gears: number): number[] {
+  const count = Math.max(5, gears);
+  return [...WORDS, ...Array.from({ length: count }, () => FIGURES / count)];
 }
 
 /** Gear data of every gear side by side in the order of ISO 1340, then the meshes, then the shafts. */
@@ -27,19 +37,22 @@ export function writeStagesSheet(
   train: TrainDto,
   gearData: readonly TrainGearData[],
 ): void {
-  const width = stageColumns(gearData.length);
-  for (let column = 1; column <= width; column += 1) {
-    sheet.getColumn(column).width = [32, 10, 8][column - 1] ?? 17;
-  }
-  const table = writeTable(sheet, HEAD_ROW, gearColumns(gearData), gearRows(gearData));
+  const widths = stageWidths(gearData.length);
+  const table = writeTable(sheet, HEAD_ROW, gearColumns(gearData, widths), gearRows(gearData));
   sheet.getRow(table.lastRow + 1).addPageBreak();
-  const meshes = writeBlock(sheet, table.lastRow + 2, 'Meshes', meshColumns(train.figures.meshes), MESH_ROWS);
+  const meshes = writeBlock(
+    sheet,
+    table.lastRow + 2,
+    'Meshes',
+    meshColumns(train.figures.meshes, widths),
+    MESH_ROWS,
+  );
   const shafts = train.spec.shafts.map(({ diameter }, index) => ({
     diameter,
     figures: train.figures.shafts[index],
   }));
-  const last = writeBlock(sheet, meshes + 2, 'Shafts', shaftColumns(shafts), SHAFT_ROWS);
-  setPrintArea(sheet, sheet.getColumn(width).letter, last);
+  const last = writeBlock(sheet, meshes + 2, 'Shafts', shaftColumns(shafts, widths), SHAFT_ROWS);
+  setPrintArea(sheet, sheet.getColumn(widths.length).letter, last);
 }
 
 /** One row of gear data over all gears. */
@@ -58,19 +71,19 @@ function gearRows(gearData: readonly TrainGearData[]): GearRow[] {
   }));
 }
 
-function gearColumns(gearData: readonly TrainGearData[]): Column<GearRow>[] {
+function gearColumns(gearData: readonly TrainGearData[], widths: readonly number[]): Column<GearRow>[] {
   return [
     {
       title: 'Gear data (ISO 1340)',
-      width: 32,
+      width: WORDS[0],
       kind: 'words',
       value: ({ group, first }) => labelOf(group, first),
     },
-    { title: 'Symbol', width: 10, kind: 'words', value: ({ first }) => first.symbol },
-    { title: 'Unit', width: 8, kind: 'words', value: ({ first }) => first.unit },
+    { title: 'Symbol', width: WORDS[1], kind: 'words', value: ({ first }) => first.symbol },
+    { title: 'Unit', width: WORDS[2], kind: 'words', value: ({ first }) => first.unit },
     ...gearData.map(({ stage, role, partNumber }, index): Column<GearRow> => ({
       title: `Stage ${stage} ${role}\n${partNumber ?? 'to be made'}`,
-      width: 17,
+      width: widths[WORDS.length + index] ?? 0,
       kind: 'figure',
       value: ({ values }) => values[index] ?? 'not given',
       look: ({ first, values }) => ({
@@ -160,26 +173,37 @@ const SHAFT_ROWS: FigureRow<ShaftItem>[] = [
   },
 ];
 
-function meshColumns(meshes: readonly MeshGeometry[]): Column<FigureRow<MeshGeometry>>[] {
-  return figureColumns(meshes, (index) => `Stage ${index + 1}`);
+function meshColumns(
+  meshes: readonly MeshGeometry[],
+  widths: readonly number[],
+): Column<FigureRow<MeshGeometry>>[] {
+  return figureColumns(meshes, widths, (index) => `Stage ${index + 1}`);
 }
 
-function shaftColumns(shafts: readonly ShaftItem[]): Column<FigureRow<ShaftItem>>[] {
+function shaftColumns(
+  shafts: readonly ShaftItem[],
+  widths: readonly number[],
+): Column<FigureRow<ShaftItem>>[] {
   const last = shafts.length - 1;
   return figureColumns(
     shafts,
+    widths,
     (index) => `Shaft ${index}${index === 0 ? ', input' : index === last ? ', output' : ''}`,
   );
 }
 
-function figureColumns<T>(items: readonly T[], title: (index: number) => string): Column<FigureRow<T>>[] {
+function figureColumns<T>(
+  items: readonly T[],
+  widths: readonly number[],
+  title: (index: number) => string,
+): Column<FigureRow<T>>[] {
   return [
-    { title: 'Figure', width: 32, kind: 'words', value: (row) => row.label },
-    { title: 'Symbol', width: 10, kind: 'words', value: (row) => row.symbol },
-    { title: 'Unit', width: 8, kind: 'words', value: (row) => row.unit },
+    { title: 'Figure', width: WORDS[0], kind: 'words', value: (row) => row.label },
+    { title: 'Symbol', width: WORDS[1], kind: 'words', value: (row) => row.symbol },
+    { title: 'Unit', width: WORDS[2], kind: 'words', value: (row) => row.unit },
     ...items.map((item, index): Column<FigureRow<T>> => ({
       title: title(index),
-      width: 17,
+      width: widths[WORDS.length + index] ?? 0,
       kind: 'figure',
       value: (row) => row.of(item) ?? 'not known',
       look: (row) => {

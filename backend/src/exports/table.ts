@@ -1,4 +1,5 @@
 import { type CellValue, type Worksheet } from 'exceljs';
+import { fitRowHeight } from './row-height.js';
 import { type CellLook, dress, font, HEAD_LOOK, RULE_BELOW } from './workbook-style.js';
 
 /** One column of a table in a sheet. */
@@ -20,24 +21,34 @@ export interface PlacedTable {
   lastRow: number;
 }
 
+/** Points below the words of a table's head. */
+const FILTER_BUTTON = 14;
+const HEAD_AIR = 4;
+
 /**
  * Writes a table with its head at `headRow` and one row an item.
  * Text goes in as text: whatever it begins with, it never becomes a formula.
+ * @param filtered leaves room below the head's words for the buttons that open a filter
  */
 export function writeTable<Row>(
   sheet: Worksheet,
   headRow: number,
   columns: readonly Column<Row>[],
   rows: readonly Row[],
+  filtered = false,
 ): PlacedTable {
+  const widths = columns.map(({ width }) => width);
   columns.forEach(({ title, kind }, index) => {
     const cell = sheet.getCell(headRow, index + 1);
     cell.value = title;
     const horizontal = kind === 'figure' ? 'right' : 'left';
     const indent = kind === 'figure' ? 0 : 1;
-    dress(cell, { ...HEAD_LOOK, alignment: { ...HEAD_LOOK.alignment, horizontal, indent } });
+    const vertical = filtered ? 'top' : 'middle';
+    dress(cell, { ...HEAD_LOOK, alignment: { ...HEAD_LOOK.alignment, horizontal, indent, vertical } });
   });
-  sheet.getRow(headRow).height = 30;
+  const head = sheet.getRow(headRow);
+  fitRowHeight(head, widths);
+  head.height = (head.height ?? 0) + (filtered ? FILTER_BUTTON : HEAD_AIR);
   rows.forEach((row, offset) => {
     const rowNumber = headRow + 1 + offset;
     columns.forEach((column, index) => {
@@ -45,6 +56,7 @@ export function writeTable<Row>(
       cell.value = column.value(row, rowNumber);
       dress(cell, { ...plainLook(column), ...column.look?.(row) });
     });
+    fitRowHeight(sheet.getRow(rowNumber), widths);
   });
   return { headRow, firstRow: headRow + 1, lastRow: headRow + rows.length };
 }
