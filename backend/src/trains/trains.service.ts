@@ -68,7 +68,7 @@ export class TrainsService {
         action: 'adopted',
         entity: 'train',
         entityId: train.code,
-        summary: `Adopted ${option.key} of ${brief.code} as ${train.code}`,
+        summary: `Adopted ${teethOf(option)} of ${brief.code} as ${train.code}`,
         after: audited(train),
       });
       return train.code;
@@ -145,4 +145,9 @@ async function findOption(
 
 function audited({ title, note, spec, version }: Pick<Train, 'title' | 'note' | 'spec' | 'version'>) {
   return { title, note, spec, version };
+}
+
+/** `18/66 · 18/72`: the option as the screens write it; its key is for programs. */
+function teethOf({ stages }: Pick<TrainOption, 'stages'>): string {
+  return stages.map(({ pinionTeeth, wheelTeeth }) => `${pinionTeeth}/${wheelTeeth}`).join(' · ');
 }
