@@ -69,8 +69,8 @@ describe('gear data on the bill of materials', () => {
       line?.gearData?.filter((row) => row.group === 'mate').map((row) => row.value),
     );
     expect(mates).toEqual([
-      [60, 60, null],
-      [60, 20, null],
+      [60, 60, 'to be made'],
+      [60, 20, 'to be made'],
     ]);
   });
 
@@ -85,7 +85,7 @@ describe('gear data on the bill of materials', () => {
     const pinion = lines.find((line) => line.source.includes('Stage 2 pinion'));
     expect(pinion).toMatchObject({ quantity: 2, source: ['Stage 1 pinion', 'Stage 2 pinion'] });
     const mate = pinion?.gearData?.filter((row) => row.group === 'mate').map((row) => row.value);
-    expect(mate).toEqual(['60; 52.5', '60; 50', null]);
+    expect(mate).toEqual(['60; 52.5', '60; 50', 'to be made']);
   });
 });
 
@@ -103,5 +103,24 @@ describe('trainGearData', () => {
     ]);
     const mateNumber = data[0]?.rows.find((row) => row.label === 'Mating gear, part number');
     expect(mateNumber?.value).toBe('KW-00060');
+    const ofWheel = data[1]?.rows.find((row) => row.label === 'Mating gear, part number');
+    expect(ofWheel?.value).toBe('to be made');
+  });
+
+  it('takes material and heat treatment of a stock gear from the library', () => {
+    const sizes = {
+      teeth: 60,
+      module: 1.5,
+      pressureAngleDeg: 20,
+      helixAngleDeg: 0,
+      profileShift: 0,
+      faceWidth: 15,
+    };
+    const gear = { ...sizes, hand: null, bore: 15, thicknessAllowance: null, heatTreatment: 'case-hardened' };
+    const part = newPartRef({ number: 'KW-00060', kind: 'gear', material: '16MnCr5', gear });
+    const library = libraryOf({ gear: (need) => (need.teeth === 60 ? part : null) });
+    const wheel = trainGearData(twoStageKit(), library)[1]?.rows ?? [];
+    const value = (label: string) => wheel.find((row) => row.label === label)?.value;
+    expect([value('Material'), value('Heat treatment')]).toEqual(['16MnCr5', 'case-hardened']);
   });
 });

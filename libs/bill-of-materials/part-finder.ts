@@ -96,6 +96,7 @@ export interface PartGear {
   /** Length of the bore, face width and hub together; the face width when left out. */
   hubLength?: number | null;
   thicknessAllowance: { upper: number; lower: number } | null;
+  heatTreatment?: string | null;
 }
 
 /** A part the library holds, as far as a bill of materials needs it. */

@@ -31,10 +31,12 @@ export function trainGearData(request: KitRequest, library: PartFinder): TrainGe
 export function dataOf(own: MountedGear, mate: MountedGear | undefined, request: KitRequest): GearDataRow[] {
   return gearDataRows({
     ...own.gear,
+    material: own.part?.material ?? own.gear.material ?? null,
+    heatTreatment: own.part?.gear?.heatTreatment ?? own.gear.heatTreatment ?? null,
     bore: own.bore,
     mate: {
       teeth: mate?.gear.teeth ?? null,
-      partNumber: mate ? numberOf(mate) : null,
+      partNumber: mate ? (numberOf(mate) ?? 'to be made') : null,
       centreDistance: request.centreDistances?.[own.gear.stage - 1] ?? null,
     },
   });

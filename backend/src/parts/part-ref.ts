@@ -39,5 +39,6 @@ function toPartGear(attributes: ToothedAttributes, bore: number | null): PartGea
     // The library states the hub beyond the face; a key may be as long as both together.
     hubLength: hubLength === null ? null : attributes.faceWidth + hubLength,
     thicknessAllowance: upper === null || lower === null ? null : { upper, lower },
+    heatTreatment: attributes.heatTreatment,
   };
 }
