@@ -18,12 +18,17 @@ export function createLogger(level: LogLevel): FastifyBaseLogger {
   });
 }
 
+type Level = 'fatal' | 'error' | 'warn' | 'info' | 'debug' | 'trace';
+
 /** Nest's own messages, on the same log. What it says about each module and route at start is for debugging. */
 export function nestLogger(log: FastifyBaseLogger): LoggerService {
+  // Why the server cannot start is said in one sentence by the entry; the stack is for debugging.
+  const levelOf = (level: Level, place: unknown) => (place === 'ExceptionHandler' ? 'debug' : level);
   const write =
-    (level: 'fatal' | 'error' | 'warn' | 'info' | 'debug' | 'trace') =>
+    (given: Level) =>
     (message: unknown, ...rest: unknown[]) => {
       const place = typeof rest.at(-1) === 'string' ? rest.at(-1) : undefined;
+      const level = levelOf(given, place);
       if (message instanceof Error) log[level]({ err: message, place }, message.message);
       else log[level]({ place, ...(rest.length > 1 && { detail: rest[0] }) }, String(message));
     };
