@@ -46,8 +46,8 @@ export function meshGeometry(input: MeshInput): MeshGeometry {
   const ratioLabel = 'Least contact ratio';
   checks.optionalNumber('leastContactRatio', leastContactRatio, ratioLabel, INPUT_LIMITS.leastContactRatio);
   if (centreDistance !== undefined && allowance !== undefined) {
-    const mend = 'and an allowance are both given. Give one of them, or neither for zero backlash.';
-    checks.refuse('allowance', allowance, 'Distance allowance: a centre distance', mend);
+    const mend = 'is given together with a centre distance. Give one of them, or neither for zero backlash.';
+    checks.refuse('allowance', allowance, 'Distance allowance', mend);
   }
   checks.finish();
   if (gears === null) throw new Error('A pair without issues must resolve.');

@@ -110,7 +110,7 @@ function shown(value: unknown): unknown {
   if (typeof value === 'number') return Number.isFinite(value) ? value : String(value);
   if (typeof value === 'boolean' || value === null) return value;
   if (value === undefined) return null;
-  return Array.isArray(value) ? `a list of ${value.length}` : `a ${typeof value}`;
+  return Array.isArray(value) ? `a list of ${value.length}` : 'an object';
 }
 
 function plain(value: RatioInput): string {

@@ -6,7 +6,7 @@ import { type FastifyInstance, type FastifyReply, type FastifyRequest } from 'fa
 /** Where the front end's build lies, seen from `backend/src/http` and `backend/dist/http` alike. */
 const SCREENS = fileURLToPath(new URL('../../../frontend/dist', import.meta.url));
 
-const NOT_BUILT = 'The screens are not built yet. Run npm start, or pnpm build, then reload.';
+const NOT_BUILT = 'The screens are not built yet. Run npm start, or npm run build, then reload.';
 
 /** Serves the built front end: its files, and the one page for every address that is not the API's. */
 export async function serveScreens(server: FastifyInstance, root = SCREENS): Promise<void> {
