@@ -1,3 +1,4 @@
+import { rmSync } from 'node:fs';
 import { request } from 'node:http';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { startServer, type TestServer } from './harness.js';
@@ -62,6 +63,8 @@ describe('demo mode', () => {
     const { createApp } = await import('../src/app.js');
     const first = await startServer();
     const designer = await first.anonymous().signIn('designer@brackenbay.example');
+    // One server at a time holds the folder.
+    await first.app.close();
     const second = await createApp({ ...first.settings, demo: false });
     await second.listen({ host: '127.0.0.1', port: 0 });
     const url = await second.getUrl();
@@ -71,7 +74,7 @@ describe('demo mode', () => {
     const me = await fetch(`${url}/api/auth/me`, { headers: { cookie: designer.cookie ?? '' } });
     const path = await second.get(OpeningService).firstAdminPath();
     await second.close();
-    await first.close();
+    rmSync(first.settings.dataDir, { recursive: true, force: true });
     expect([signIn.status, me.status]).toEqual([401, 401]);
     expect(path).toMatch(/^\/accept-invite\?token=/);
   });
