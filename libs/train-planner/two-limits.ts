@@ -1,5 +1,5 @@
 import { type CheckedRequest } from './option-request.js';
-import { Explanation } from './explanation.js';
+import { countOf, Explanation } from './explanation.js';
 import { RELAXATIONS, type Relaxation } from './relaxations.js';
 import { type StagePairs } from './stage-pairs.js';
 import { type WhyNot } from './train-option.js';
@@ -13,8 +13,8 @@ const [leading, following] = [RELAXATIONS, RELAXATIONS].map((all, index) =>
 ) as [Relaxation[], Relaxation[]];
 
 /**
- * For a stage count that no single limit keeps out: the least figure of one limit with room and stage ratio left
- * free, and then the least room and stage ratio at that figure, one after the other.
+ * For a stage count that no single limit keeps out: the least room and stage ratio, one after the other with the later
+ * ones left free; or, where more must give, first the least figure of one other limit with all of those left free.
  * @returns null when that does not help either
  */
 export function explainTogether(
@@ -25,33 +25,55 @@ export function explainTogether(
 ): WhyNot | null {
   const explain = (variant: CheckedRequest) => new Explanation(stages, variant, stagePairs, watch);
   const limited = following.filter((relaxation) => relaxation.current(request) !== null);
-  const roomy = limited.reduce(freed, wideEnough(request, explain(request).neededWidth()));
-  const free = explain(roomy);
-  for (const attempt of [...leading.map((limit) => () => free.limit(limit)), () => free.tolerance()]) {
-    const reason = attempt();
-    if (!reason) continue;
-    let settled = {
-      ...wideEnough(request, explain(request).neededWidth()),
-      ...reason.relaxed,
-    } as CheckedRequest;
-    const also = settled.envelope?.width === request.envelope?.width ? [] : [widthWords(settled, request)];
-    limited.forEach((relaxation, index) => {
-      const variant = limited.slice(index + 1).reduce(freed, settled);
-      if (explain(variant).works()) return;
-      const figure = explain(variant).limit(relaxation)?.nearest;
-      if (typeof figure !== 'number') return;
-      settled = { ...settled, ...relaxation.change(settled, figure) } as CheckedRequest;
-      also.push(relaxation.words(figure, request).rest.replace(/\.$/, ''));
+  const wide = wideEnough(request, explain(request).neededWidth());
+  const free = explain(limited.reduce(freed, wide));
+  const leadingReason = (): WhyNot | null => {
+    for (const relaxation of leading) {
+      const reason = free.limit(relaxation);
+      if (reason) return reason;
+    }
+    return free.tolerance();
+  };
+  const reason = free.works() ? null : leadingReason();
+  let settled = { ...wide, ...reason?.relaxed } as CheckedRequest;
+  const needs: Need[] = wide === request ? [] : [widthNeed(wide, request)];
+  limited.forEach((relaxation, index) => {
+    const variant = limited.slice(index + 1).reduce(freed, settled);
+    if (explain(variant).works()) return;
+    const figure = explain(variant).limit(relaxation)?.nearest;
+    if (typeof figure !== 'number') return;
+    settled = { ...settled, ...relaxation.change(settled, figure) } as CheckedRequest;
+    needs.push({
+      limit: relaxation.limit,
+      figure,
+      words: relaxation.words(figure, request).rest.slice(0, -1),
     });
-    if (also.length === 0 || !explain(settled).works()) continue;
-    const { envelope, stageRatio } = settled;
-    return {
-      ...reason,
-      message: `${reason.message} That also takes ${also.join(', and ')}.`,
-      relaxed: { ...reason.relaxed, stageRatio, ...(envelope ? { envelope } : {}) },
-    };
-  }
-  return null;
+  });
+  const [first] = needs;
+  if (!first || !explain(settled).works()) return null;
+  const { envelope, stageRatio } = settled;
+  const room = needs.map(({ words }) => words).join(', and ');
+  return {
+    stages,
+    limit: reason?.limit ?? first.limit,
+    message: reason
+      ? `${reason.message} That also takes ${room}.`
+      : `${countOf(stages)} ${stages === 1 ? 'needs' : 'need'} ${room}.`,
+    nearest: reason?.nearest ?? first.figure,
+    relaxed: {
+      ...reason?.relaxed,
+      stages: { min: stages, max: stages },
+      stageRatio,
+      ...(envelope ? { envelope } : {}),
+    },
+  };
+}
+
+/** A limit that must give, and what it must become. */
+interface Need {
+  limit: string;
+  figure: number;
+  words: string;
 }
 
 function freed(request: CheckedRequest, relaxation: Relaxation): CheckedRequest {
@@ -65,6 +87,8 @@ function wideEnough(request: CheckedRequest, needed: number): CheckedRequest {
   return { ...request, envelope: { ...envelope, width: needed } };
 }
 
-function widthWords({ envelope }: CheckedRequest, before: CheckedRequest): string {
-  return `a width of at least ${envelope?.width?.toFixed(2)} mm; the box allows ${before.envelope?.width} mm`;
+function widthNeed({ envelope }: CheckedRequest, before: CheckedRequest): Need {
+  const figure = envelope?.width ?? 0;
+  const words = `a width of at least ${figure.toFixed(2)} mm; the box allows ${before.envelope?.width} mm`;
+  return { limit: 'envelope.width', figure, words };
 }

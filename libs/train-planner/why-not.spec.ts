@@ -64,6 +64,30 @@ describe('why not', () => {
     expect(searchOptions(withLimit(again, 'teeth.wheel.max', 631)).options).toEqual([]);
   });
 
+  it('names every side of a box that is too small in all of them', () => {
+    const request = winchRequest({
+      stages: { min: 2, max: 2 },
+      envelope: { length: 3, width: 3, height: 3, wall: 1 },
+    });
+    const [reason, ...others] = searchOptions(request).whyNot;
+    expect(others).toEqual([]);
+    // Two planes of 10 mm, 5 mm between them and two walls of 1 mm.
+    expect(reason).toMatchObject({ stages: 2, limit: 'envelope.width', nearest: 27 });
+    expect(reason?.message).toMatch(
+      /^Two stages need a width of at least 27\.00 mm; .*, and a length of at least .*, and a height of at least /,
+    );
+    const again = { ...request, ...reason?.relaxed };
+    expect(searchOptions(again).options.length).toBeGreaterThan(0);
+    for (const side of ['length', 'width', 'height'] as const) {
+      const less = withLimit(
+        again,
+        `envelope.${side}`,
+        Number(((again.envelope?.[side] ?? 0) - 0.01).toFixed(2)),
+      );
+      expect(searchOptions(less).options).toEqual([]);
+    }
+  });
+
   it('says so when loosening a limit and the room for it does not help', () => {
     const found = reasons({ stages: { min: 1, max: 1 }, leastContactRatio: 4 });
     expect(found).toHaveLength(1);

@@ -41,13 +41,11 @@ export function explainStages(
     else if (reason) found.push(reason);
   }
   if (found.length > 0) return found;
-  if (!unsettled) {
-    const together = watch.withStepLimit(STEPS_PER_LIMIT, () =>
-      explainTogether(stages, search.request, stagePairs, watch),
-    );
-    if (together === 'over-budget') unsettled = true;
-    else if (together) return [together];
-  }
+  const together = watch.withStepLimit(STEPS_PER_STAGE_COUNT, () =>
+    explainTogether(stages, search.request, stagePairs, watch),
+  );
+  if (together === 'over-budget') unsettled = true;
+  else if (together) return [together];
   const message = unsettled
     ? `${countOf(stages)}: no option within these limits; how far one of them would have to give was too long to settle.`
     : `${countOf(stages)}: no option, and loosening one limit alone does not help. Loosen several.`;
