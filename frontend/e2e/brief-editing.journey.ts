@@ -20,15 +20,15 @@ test('a new brief is warned about, saved, searched and stopped', async ({ page }
 
   // A space big enough that the search is still running when Stop is pressed.
   const figures = {
-    Ratio: '797.3651',
+    Ratio: '79736.51',
     Tolerance: '10',
     'Pinion from': '10',
-    'Pinion to': '150',
+    'Pinion to': '500',
     'Wheel from': '20',
-    'Wheel to': '300',
-    Length: '230',
+    'Wheel to': '1000',
+    Length: '900',
     'Width along shafts': '60',
-    Height: '100',
+    Height: '700',
     Wall: '5',
   };
   for (const [label, figure] of Object.entries(figures)) {
