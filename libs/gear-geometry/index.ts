@@ -1,4 +1,4 @@
-export { HOUSE_LIMITS, INPUT_LIMITS, PRESSURE_ANGLES_DEG, DEFAULT_TIP_RADIUS } from './limits.js';
+export { HOUSE_LIMITS, INPUT_LIMITS, PRESSURE_ANGLES_DEG } from './limits.js';
 export {
   type GearFigures,
   type GearInput,
@@ -25,5 +25,6 @@ export {
 } from './shift.js';
 export { spanMeasurement, type SpanMeasurement } from './span.js';
 export { overPins, type PinMeasurement } from './pins.js';
+export { standardRack } from './resolve.js';
 export { toothOutline, type OutlinePoint } from './outline.js';
 export { BASIC_RACKS, STANDARD_MODULES } from './standards.js';

@@ -37,6 +37,14 @@ export function resolveGear(input: GearInput): ResolvedGear {
   };
 }
 
+/**
+ * The rack that a gear gets when none is given: ISO 53 type A, in modules; the tip radius gives way where the flank
+ * leaves no room. Pressure angle in degrees.
+ */
+export function standardRack(pressureAngleDeg: number): Rack {
+  return resolveRack(degToRad(pressureAngleDeg));
+}
+
 function resolveRack(alpha: number, rack: Partial<Rack> = {}): Rack {
   const dedendum = rack.dedendum ?? 1.25;
   return {

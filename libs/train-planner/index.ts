@@ -21,4 +21,5 @@ export { trainStrip, type StripGear, type StripShape } from './train-strip.js';
 export { REQUEST_BOUNDS, validateOptionRequest } from './validate-request.js';
 export { searchOptions } from './search-options.js';
 export { describeTrain } from './describe-train.js';
+export { leastTrain, type LeastTrain } from './least-train.js';
 export { leastShaftDiameter } from './train-shafts.js';

@@ -1,19 +1,10 @@
 import { type KitGear, type KitRequest } from '@stageyard/libs/bill-of-materials';
-import { DEFAULT_TIP_RADIUS } from '@stageyard/libs/gear-geometry';
+import { standardRack } from '@stageyard/libs/gear-geometry';
 import { describeTrain, type TrainFigures } from '@stageyard/libs/train-planner';
 import { type AdoptedSpec, gearsOf } from './adopted-spec.js';
 
 /** Wall of a housing when the brief says nothing of it, mm. */
 export const STARTING_WALL = 5;
-
-/** ISO 53 profile A as the planner cuts it, in modules; the tip radius gives way where the flank leaves no room. */
-function standardRack(pressureAngleDeg: number) {
-  const alpha = (pressureAngleDeg * Math.PI) / 180;
-  const dedendum = 1.25;
-  // ρ_max = (π/4 − h_f tan α) cos α/(1 − sin α)
-  const largest = ((Math.PI / 4 - dedendum * Math.tan(alpha)) * Math.cos(alpha)) / (1 - Math.sin(alpha));
-  return { addendum: 1, dedendum, tipRadius: Math.min(DEFAULT_TIP_RADIUS, largest) };
-}
 
 /** What the kit rules need to know of a train. */
 export function kitOf(title: string, spec: AdoptedSpec, figures: TrainFigures): KitRequest {

@@ -1,4 +1,5 @@
 import { gearGeometry } from '@stageyard/libs/gear-geometry';
+import { leastTrain, type LeastTrain } from '@stageyard/libs/train-planner';
 import { figure, stageCount, type Hint, type HintBasis } from './hint';
 
 /** Does anything at all fit the box? Only figures that every possible train exceeds are held against it. */
@@ -20,7 +21,7 @@ function heightHint(basis: HintBasis, height: number | undefined, wall: number, 
   const { teeth, stages } = basis.requirement;
   const wheelTeeth = Math.min(
     teeth.wheel.max,
-    Math.max(teeth.wheel.min, Math.ceil(teeth.pinion.min * basis.least ** (1 / stages.max) - 1e-9)),
+    Math.max(teeth.wheel.min, bound(basis, stages.max).wheelTeeth),
   );
   const tip = tipDiameter(basis, wheelTeeth);
   const need = tip + 2 * wall;
@@ -36,12 +37,10 @@ function heightHint(basis: HintBasis, height: number | undefined, wall: number, 
 function lengthHint(basis: HintBasis, length: number | undefined, wall: number, walls: string): Hint | null {
   if (length === undefined) return null;
   const { teeth, stages } = basis.requirement;
-  const cosHelix = Math.cos((basis.helixAngleDeg * Math.PI) / 180);
   const ends = (tipDiameter(basis, teeth.pinion.min) + tipDiameter(basis, teeth.wheel.min)) / 2;
   let best = { need: Infinity, count: stages.min };
   for (let count = stages.min; count <= stages.max; count += 1) {
-    const teethSum = count * teeth.pinion.min * (1 + basis.least ** (1 / count));
-    const need = (basis.smallestModule * teethSum) / (2 * cosHelix) + ends + 2 * wall;
+    const need = bound(basis, count).centreDistanceSum + ends + 2 * wall;
     if (need < best.need) best = { need, count };
   }
   if (best.need <= length) return null;
@@ -64,6 +63,10 @@ function widthHint(basis: HintBasis, width: number | undefined, wall: number, wa
     kind: 'crossed',
     message: `Width ${figure(width)} mm: ${stageCount(stages.min)} of ${face} mm face width${walls} need at least ${figure(need)} mm.`,
   };
+}
+
+function bound({ requirement, least, smallestModule, helixAngleDeg }: HintBasis, stages: number): LeastTrain {
+  return leastTrain(stages, least, requirement.teeth.pinion.min, smallestModule, helixAngleDeg);
 }
 
 function tipDiameter(basis: HintBasis, teeth: number): number {
