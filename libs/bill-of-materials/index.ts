@@ -15,3 +15,4 @@ export {
 } from './parallel-key.js';
 export { retainingRingBelow, retainingRingForShaft, type RetainingRing } from './retaining-ring.js';
 export { bearingBoreFor, isBearingBore } from './bearing-bore.js';
+export type { OfferTerms, PriceBreak } from './prices/offer-terms.js';

@@ -9,6 +9,11 @@ export const PERMISSIONS = [
   'trains.read',
   'trains.edit',
   'bom.export',
+  'prices.read',
+  'prices.edit',
+  'offers.choose',
+  'stock.read',
+  'stock.book',
   'calc.use',
   'people.manage',
   'audit.read',
@@ -20,6 +25,7 @@ const LOOKING: readonly Permission[] = [
   'parts.read',
   'briefs.read',
   'trains.read',
+  'stock.read',
   'audit.read',
   'rules.read',
   'calc.use',
@@ -28,9 +34,9 @@ const LOOKING: readonly Permission[] = [
 /** What each role may do. A person holds what any of their roles gives. */
 export const ROLE_PERMISSIONS: Readonly<Record<Role, readonly Permission[]>> = {
   admin: PERMISSIONS,
-  designer: [...LOOKING, 'briefs.edit', 'trains.edit', 'bom.export'],
-  librarian: [...LOOKING, 'parts.edit', 'bom.export'],
-  purchaser: [...LOOKING, 'bom.export'],
+  designer: [...LOOKING, 'briefs.edit', 'trains.edit', 'bom.export', 'prices.read', 'offers.choose'],
+  librarian: [...LOOKING, 'parts.edit', 'bom.export', 'prices.read', 'prices.edit', 'stock.book'],
+  purchaser: [...LOOKING, 'bom.export', 'prices.read', 'prices.edit', 'offers.choose', 'stock.book'],
   viewer: LOOKING,
 };
 

@@ -4,8 +4,12 @@ import { SessionEntity } from '../auth/entities/session.entity.js';
 import { Brief } from '../briefs/entities/brief.entity.js';
 import { Pin } from '../briefs/entities/pin.entity.js';
 import { OptionSearch } from '../option-searches/entities/option-search.entity.js';
+import { Offer } from '../offers/entities/offer.entity.js';
 import { PartNumberSeries } from '../parts/entities/part-number-series.entity.js';
 import { Part } from '../parts/entities/part.entity.js';
+import { StockLevel } from '../stock/entities/stock-level.entity.js';
+import { StockMovement } from '../stock/entities/stock-movement.entity.js';
+import { Supplier } from '../suppliers/entities/supplier.entity.js';
 import { Train } from '../trains/entities/train.entity.js';
 import { UserEntity } from '../users/entities/user.entity.js';
 
@@ -21,4 +25,8 @@ export const ENTITIES = [
   OptionSearch,
   Pin,
   Train,
+  Supplier,
+  Offer,
+  StockMovement,
+  StockLevel,
 ];

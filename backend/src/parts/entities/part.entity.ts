@@ -106,6 +106,11 @@ export class Part {
   @Column({ type: 'real', nullable: true })
   height!: number | null;
 
+  /** Whole thousandths of the unit below which the shelf is low; null when nobody watches it. */
+  @Index('part_least_stock', { where: '"leastStock" IS NOT NULL' })
+  @Column({ type: 'integer', nullable: true })
+  leastStock!: number | null;
+
   /** Grows by one with every change; an edit names the version it saw. */
   @Column({ type: 'integer' })
   version!: number;

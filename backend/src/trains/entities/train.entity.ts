@@ -1,5 +1,6 @@
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
 import { Brief } from '../../briefs/entities/brief.entity.js';
+import { type BomEdits } from '../bom-edits.js';
 import { UserEntity } from '../../users/entities/user.entity.js';
 import { type AdoptedSpec } from '../adopted-spec.js';
 
@@ -45,6 +46,18 @@ export class Train {
 
   @Column({ type: 'simple-json' })
   spec!: AdoptedSpec;
+
+  /** How many are built at once; null: one. */
+  @Column({ type: 'integer', nullable: true })
+  buildQuantity!: number | null;
+
+  /** What people changed on the bill of materials beside the gears; null: nothing. */
+  @Column({ type: 'simple-json', nullable: true })
+  bomEdits!: BomEdits | null;
+
+  /** Offer chosen by a person for a part, by part number; null: none, the rule chooses. */
+  @Column({ type: 'simple-json', nullable: true })
+  offerChoices!: Record<string, number> | null;
 
   @Index('train_owner')
   @Column({ type: 'varchar' })

@@ -1,0 +1,57 @@
+/** Suppliers and their offers. */
+export const SUPPLIERS = [
+  `CREATE TABLE "supplier" (
+    "id" integer PRIMARY KEY AUTOINCREMENT NOT NULL,
+    "code" text NOT NULL,
+    "name" text COLLATE NOCASE NOT NULL,
+    "standing" text NOT NULL,
+    "currency" text NOT NULL,
+    "language" text NOT NULL,
+    "contacts" text NOT NULL,
+    "address" text NOT NULL,
+    "freight" text NOT NULL,
+    "leastOrderValue" integer,
+    "leadTimeDays" integer,
+    "note" text NOT NULL,
+    "version" integer NOT NULL,
+    "createdAt" text NOT NULL,
+    "updatedAt" text NOT NULL,
+    "updatedBy" text NOT NULL
+  )`,
+  `CREATE UNIQUE INDEX "supplier_code" ON "supplier" ("code")`,
+  `CREATE UNIQUE INDEX "supplier_name" ON "supplier" ("name")`,
+  `CREATE INDEX "supplier_standing_name" ON "supplier" ("standing", "name")`,
+  `CREATE TABLE "offer" (
+    "id" integer PRIMARY KEY AUTOINCREMENT NOT NULL,
+    "partId" integer NOT NULL,
+    "supplierId" integer NOT NULL,
+    "supplierPartNumber" text COLLATE NOCASE NOT NULL,
+    "standing" text NOT NULL,
+    "currency" text NOT NULL,
+    "per" integer NOT NULL,
+    "breaks" text NOT NULL,
+    "pack" real NOT NULL,
+    "leastQuantity" real NOT NULL,
+    "leadTimeDays" integer,
+    "validFrom" text NOT NULL,
+    "validUntil" text,
+    "pricedOn" text NOT NULL,
+    "source" text NOT NULL,
+    "note" text NOT NULL,
+    "version" integer NOT NULL,
+    "createdAt" text NOT NULL,
+    "updatedAt" text NOT NULL,
+    "updatedBy" text NOT NULL,
+    CONSTRAINT "offer_part_row" FOREIGN KEY ("partId") REFERENCES "part" ("id"),
+    CONSTRAINT "offer_supplier_row" FOREIGN KEY ("supplierId") REFERENCES "supplier" ("id")
+  )`,
+  `CREATE INDEX "offer_part" ON "offer" ("partId", "standing")`,
+  `CREATE INDEX "offer_supplier_part" ON "offer" ("supplierId", "partId")`,
+  `CREATE INDEX "offer_supplier_number" ON "offer" ("supplierId", "supplierPartNumber")`,
+  `CREATE INDEX "offer_valid_until" ON "offer" ("validUntil")`,
+  `CREATE INDEX "offer_priced_on" ON "offer" ("pricedOn")`,
+  `CREATE INDEX "offer_updated" ON "offer" ("updatedAt")`,
+];
+
+/** In the order they are dropped. */
+export const SUPPLIERS_TABLES = ['offer', 'supplier'];
