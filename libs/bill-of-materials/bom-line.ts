@@ -4,6 +4,11 @@ import { type BomKind } from './part-kinds.js';
 /** One line of a bill of materials. */
 export interface BomLine {
   findNumber: number;
+  /**
+   * Names the line for as long as its kit asks for the same: the part number that the kit rules found, else kind and
+   * description. Find numbers shift when lines come and go; what people decide for a line is kept under its key.
+   */
+  key: string;
   /** The library's number, or the number chosen although the library does not hold it; null when there is none. */
   partNumber: string | null;
   kind: BomKind;
@@ -24,8 +29,8 @@ export interface BomLine {
   gearData?: GearDataRow[];
 }
 
-/** A line before roll-up: no find number yet. */
-export type KitItem = Omit<BomLine, 'findNumber'>;
+/** A line before roll-up: no find number yet, and a key only where another part took the place of the kit's own. */
+export type KitItem = Omit<BomLine, 'findNumber' | 'key'> & Partial<Pick<BomLine, 'key'>>;
 
 export interface BomTotals {
   lines: number;

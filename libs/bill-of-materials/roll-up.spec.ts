@@ -55,12 +55,49 @@ describe('rollUp', () => {
     );
   });
 
+  it('gives every line a key: its part number, else kind and description, with a count where those meet', () => {
+    const one = (changes: Partial<KitItem>): KitItem => ({
+      kind: 'key',
+      partNumber: null,
+      description: 'Parallel key 6 × 6 × 20',
+      quantity: 1,
+      unit: 'pcs',
+      material: null,
+      supply: 'bought',
+      supplier: null,
+      mass: null,
+      source: ['Shaft 1'],
+      note: '',
+      flags: [],
+      ...changes,
+    });
+    const lines = rollUp([
+      one({}),
+      one({ partNumber: 'KW-00007' }),
+      one({ material: 'steel' }),
+      one({}),
+      one({ partNumber: 'KW-00009', key: 'KW-00008' }),
+    ]);
+    expect(lines.map(({ key, quantity }) => [key, quantity])).toEqual([
+      ['key: Parallel key 6 × 6 × 20', 2],
+      ['KW-00007', 1],
+      ['key: Parallel key 6 × 6 × 20 (2)', 1],
+      ['KW-00008', 1],
+    ]);
+    // Nothing but the item's own words decides: the same kit in another build has the same keys.
+    expect(rollUp([one({ quantity: 5 })])[0]?.key).toBe(lines[0]?.key);
+  });
+
   it('numbers one kind whatever stands in another', () => {
     fc.assert(
       fc.property(fc.array(item, { maxLength: 30 }), fc.array(item, { maxLength: 30 }), (items, others) => {
         const keys = items.filter((one) => one.kind === 'key');
         const alone = rollUp(keys);
-        const among = rollUp([...others.filter((one) => one.kind !== 'key'), ...keys]);
+        // A part number belongs to one kind.
+        const seals = others
+          .filter((one) => one.kind === 'seal')
+          .map((one) => ({ ...one, partNumber: one.partNumber && 'KW-00002' }));
+        const among = rollUp([...seals, ...keys]);
         expect(among.filter((line) => line.kind === 'key')).toEqual(alone);
       }),
     );

@@ -5,7 +5,7 @@ import { BOM_KINDS } from './part-kinds.js';
 /**
  * Merges equal parts and numbers the lines. Equal means the same number, make, material, supply, mass and gear data
  * (the mate aside); quantities add up, sources, notes and flags are kept. Lines stand by kind in the declared order
- * and, within a kind, in the order in which they first came.
+ * and, within a kind, in the order in which they first came. Every line gets a key of its own.
  */
 export function rollUp(items: readonly KitItem[]): BomLine[] {
   const merged = new Map<string, KitItem>();
@@ -14,12 +14,24 @@ export function rollUp(items: readonly KitItem[]): BomLine[] {
     const line = merged.get(key);
     merged.set(key, line ? joined(line, item) : item);
   }
-  const lines = [...merged.values()];
+  const lines = withKeys([...merged.values()]);
   return BOM_KINDS.flatMap((kind, block) =>
     lines
       .filter((line) => line.kind === kind)
       .map((line, index) => ({ findNumber: (block + 1) * 100 + index + 1, ...line })),
   );
+}
+
+/** Where lines share a part number or a description, all but the first are told apart by a count. */
+function withKeys(items: readonly KitItem[]): Omit<BomLine, 'findNumber'>[] {
+  const taken = new Set<string>();
+  return items.map((item) => {
+    const name = item.key ?? item.partNumber ?? `${item.kind}: ${item.description}`;
+    let key = name;
+    for (let count = 2; taken.has(key); count += 1) key = `${name} (${count})`;
+    taken.add(key);
+    return { ...item, key };
+  });
 }
 
 function identity(item: KitItem): string {

@@ -35,6 +35,9 @@ export class BomLineDto implements BomLine {
   @ApiProperty({ type: 'integer' })
   findNumber!: number;
 
+  @ApiProperty({ type: 'string', description: 'Stays with the line while its kit asks for the same' })
+  key!: string;
+
   @ApiProperty({ type: 'string', nullable: true, description: 'Null: to be made, or to be chosen' })
   partNumber!: string | null;
 
