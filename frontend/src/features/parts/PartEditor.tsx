@@ -1,14 +1,13 @@
-import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
-import Button from '@mui/material/Button';
-import { useDeferredValue, useEffect, useMemo, useState, type ReactNode } from 'react';
+import { useDeferredValue, useMemo, type ReactNode } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
-import { asProblem } from '../../api/problem';
 import type { Part } from '../../api/types';
-import { applyProblem } from '../../components/applyProblem';
+import { ConflictNotice } from '../../components/ConflictNotice';
+import { FormFoot } from '../../components/FormFoot';
 import { numberOrNull } from '../../components/NumberField';
 import { UnsavedWarning } from '../../components/UnsavedWarning';
-import { ConflictNotice } from './ConflictNotice';
+import { useVersionedForm } from '../../components/useVersionedForm';
+import { differences } from './differences';
 import { GeometryPanel } from './GeometryPanel';
 import { liveGeometry } from './liveGeometry';
 import { fieldOf, formOfPart, type PartForm } from './partForm';
@@ -35,67 +34,50 @@ interface PartEditorProps {
  * meanwhile shows how, and the person decides.
  */
 export function PartEditor({ start, part, onSave, onCancel, saveName, head }: PartEditorProps) {
-  const [refusal, setRefusal] = useState<string | null>(null);
-  const [base, setBase] = useState(part);
-  const [theirs, setTheirs] = useState<Part | null>(null);
-  const [next, setNext] = useState<(() => void) | null>(null);
-  const { control, handleSubmit, setError, reset, formState } = useForm<PartForm>({ defaultValues: start });
-  const { isDirty, isSubmitting } = formState;
+  const form = useForm<PartForm>({ defaultValues: start });
+  const { control, formState } = form;
+  const saving = useVersionedForm({
+    form,
+    stored: part,
+    onSave,
+    fieldOf: (path, { kind: sent }) => fieldOf(sent, path),
+    formOf: formOfPart,
+  });
+  const { conflict } = saving;
   const kind = useWatch({ control, name: 'kind' });
   const typed = useWatch({ control, name: 'attr' });
   const attr = useDeferredValue(typed);
   const live = useMemo(() => liveGeometry(attr), [attr]);
 
-  const send = async (form: PartForm, version: number) => {
-    setRefusal(null);
-    try {
-      const then = await onSave(form, version);
-      setNext(() => then);
-    } catch (error) {
-      const problem = asProblem(error);
-      if (problem.changedMeanwhile && problem.current !== undefined) setTheirs(problem.current as Part);
-      else setRefusal(applyProblem(problem, setError, (path) => fieldOf(form.kind, path)));
-    }
-  };
-  // Runs after the warning below has learned that nothing is unsaved any more.
-  useEffect(() => next?.(), [next]);
-  const submit = handleSubmit((form) => send(form, base?.version ?? 0));
-
   return (
-    <Box component="form" noValidate onSubmit={(event) => void submit(event)}>
-      <UnsavedWarning dirty={isDirty && next === null} what="this part" />
+    <Box
+      component="form"
+      noValidate
+      onSubmit={(event) => {
+        event.preventDefault();
+        saving.submit();
+      }}
+    >
+      <UnsavedWarning dirty={saving.unsaved} what="this part" />
       {head}
-      {theirs !== null && base !== undefined && (
+      {conflict !== null && (
         <ConflictNotice
-          base={base}
-          theirs={theirs}
-          onKeepMine={() => {
-            setBase(theirs);
-            setTheirs(null);
-            void handleSubmit((form) => send(form, theirs.version))();
-          }}
-          onTakeTheirs={() => {
-            setBase(theirs);
-            setTheirs(null);
-            reset(formOfPart(theirs));
-          }}
+          what="this part"
+          theirs={conflict.theirs}
+          differences={differences(conflict.base, conflict.theirs)}
+          onKeepMine={saving.keepMine}
+          onTakeTheirs={saving.takeTheirs}
         />
       )}
       <Box sx={isToothed(kind) ? layoutSx : undefined}>
         <Box sx={{ display: 'flex', flexDirection: 'column', gap: 1.5, minWidth: 0 }}>
           <PartFormFields control={control} kind={kind} isNew={part === undefined} />
-          <Box sx={barSx}>
-            {/* Here, beside the button that was pressed: the head of a long form is out of sight. */}
-            {refusal !== null && (
-              <Alert severity="error" sx={{ flexBasis: '100%' }}>
-                {refusal}
-              </Alert>
-            )}
-            <Button type="submit" variant="contained" disabled={isSubmitting}>
-              {isSubmitting ? 'Saving…' : saveName}
-            </Button>
-            <Button onClick={onCancel}>Cancel</Button>
-          </Box>
+          <FormFoot
+            refusal={saving.refusal}
+            saveName={saveName}
+            saving={formState.isSubmitting}
+            onCancel={onCancel}
+          />
         </Box>
         {isToothed(kind) && (
           <Box sx={{ position: { lg: 'sticky' }, top: 68, minWidth: 0 }}>
@@ -116,17 +98,4 @@ const layoutSx = {
   gridTemplateColumns: { xs: '1fr', lg: 'minmax(0, 1fr) 360px' },
   gap: 2,
   alignItems: 'start',
-} as const;
-
-const barSx = {
-  display: 'flex',
-  flexWrap: 'wrap',
-  gap: 1,
-  position: 'sticky',
-  bottom: 0,
-  py: 1.25,
-  bgcolor: 'background.default',
-  borderTop: '1px solid',
-  borderColor: 'line.rule',
-  zIndex: 2,
 } as const;

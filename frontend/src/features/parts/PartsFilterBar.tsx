@@ -9,7 +9,7 @@ import type { PartKind } from '../../api/types';
 import { formatPlain } from '../../components/figures';
 import { FilterBar } from '../../components/FilterBar';
 import type { ListState } from '../../components/useListState';
-import { ChoiceFilter, TypedFilter } from './FilterFields';
+import { ChoiceFilter, TypedFilter } from '../../components/FilterFields';
 import { PART_FILTERS, type PartFilter } from './partFilters';
 import { KIND_NAMES, PART_KINDS, STANDINGS } from './partKinds';
 import { SecondSort } from './SecondSort';

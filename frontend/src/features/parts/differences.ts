@@ -1,11 +1,6 @@
+import type { Difference } from '../../components/DifferenceList';
 import { shownValue } from './attributes';
 import { ATTRIBUTES } from './partKinds';
-
-export interface Difference {
-  field: string;
-  before: string;
-  after: string;
-}
 
 const FIELD_NAMES: Record<string, string> = {
   number: 'Number',

@@ -1,5 +1,11 @@
 import Box from '@mui/material/Box';
-import type { Difference } from './differences';
+
+/** One field that changed, in the words of the screens. */
+export interface Difference {
+  field: string;
+  before: string;
+  after: string;
+}
 
 /** "Mass, kg: 0.18 → 0.21", one line a field. */
 export function DifferenceList({ differences }: { differences: readonly Difference[] }) {
@@ -7,12 +13,12 @@ export function DifferenceList({ differences }: { differences: readonly Differen
   return (
     <Box component="ul" sx={{ m: 0, p: 0, listStyle: 'none', fontSize: '0.8125rem' }}>
       {differences.map(({ field, before, after }) => (
-        <li key={field}>
+        <Box component="li" key={field} sx={{ overflowWrap: 'anywhere' }}>
           <Box component="span" sx={{ color: 'text.secondary' }}>
             {field}:{' '}
           </Box>
           {before} <span aria-label="became">→</span> <b>{after}</b>
-        </li>
+        </Box>
       ))}
     </Box>
   );
