@@ -15,4 +15,5 @@ export {
 } from './parallel-key.js';
 export { retainingRingBelow, retainingRingForShaft, type RetainingRing } from './retaining-ring.js';
 export { bearingBoreFor, isBearingBore } from './bearing-bore.js';
-export type { OfferTerms, PriceBreak } from './prices/offer-terms.js';
+export * from './paste/index.js';
+export * from './prices/index.js';

@@ -1,0 +1,13 @@
+export { addDays, daysBetween, isCalendarDate } from './calendar-date.js';
+export { checkOfferTerms, OFFER_LIMITS } from './check-offer.js';
+export {
+  chooseOffer,
+  type ChoiceRules,
+  type OfferCandidate,
+  type OfferChoice,
+  type PricedOffer,
+} from './choose-offer.js';
+export { offerState, priceAge, type OfferState } from './offer-state.js';
+export type { OfferTerms, PriceBreak } from './offer-terms.js';
+export { orderQuantity, priceAt, type PricedQuantity, type PriceTerms, type QuantityTerms } from './price.js';
+export { fromThousandths, MOST_QUANTITY, toThousandths } from './thousandths.js';
