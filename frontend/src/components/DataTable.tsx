@@ -1,20 +1,25 @@
 import Box from '@mui/material/Box';
+import useMediaQuery from '@mui/material/useMediaQuery';
 import {
   DataGrid,
-  type GridColDef,
   type GridRowId,
   type GridRowSelectionModel,
   type GridSortModel,
   type GridValidRowModel,
+  useGridApiRef,
 } from '@mui/x-data-grid';
-import { useMemo, useRef, useState, type ReactNode } from 'react';
+import { useMemo, useRef, useState, type KeyboardEvent, type ReactNode } from 'react';
 import type { Problem } from '../api/problem';
+import { copiedWords, copyTsv } from './copyTsv';
 import { ErrorState } from './ErrorState';
+import { gridText, type CopiedCell, type DataColumn } from './gridText';
+import { useNotices } from './Notices';
+import { SelectableFooter } from './SelectableFooter';
 import type { ListState } from './useListState';
 
 interface DataTableProps<Row extends GridValidRowModel> {
   label: string;
-  columns: GridColDef<Row>[];
+  columns: DataColumn<Row>[];
   rows: readonly Row[] | undefined;
   /** Rows in all, as the server counts; undefined while not known. */
   total: number | undefined;
@@ -26,9 +31,8 @@ interface DataTableProps<Row extends GridValidRowModel> {
   onOpen: (row: Row) => void;
   /** Stands in place of rows when there are none. */
   empty: ReactNode;
-  /** Tick boxes for copying rows; the parent holds the selection. */
-  selection?: GridRowSelectionModel;
-  onSelection?: (model: GridRowSelectionModel) => void;
+  /** Heads and rows for the clipboard where they are more than the columns on the screen. */
+  copied?: (rows: readonly Row[]) => CopiedCell[][];
   hidden?: Record<string, boolean>;
   height?: string;
   /** px; 32 unless the rows carry a drawing. */
@@ -36,6 +40,7 @@ interface DataTableProps<Row extends GridValidRowModel> {
 }
 
 const NO_SORT = { field: '', down: false };
+const NONE: GridRowSelectionModel = { type: 'include', ids: new Set() };
 
 /**
  * A server-side table on the community data grid. Filters and the second sort key live outside (the grid has one of
@@ -65,13 +70,39 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
     () => ({ page: state.page - 1, pageSize: state.size }),
     [state.page, state.size],
   );
+  const grid = useGridApiRef();
+  const { tell } = useNotices();
+  const [selection, setSelection] = useState(NONE);
+  const narrow = useMediaQuery('(max-width: 600px)');
+  const chosen = (props.rows ?? []).filter(
+    (row) => selection.ids.has(props.getRowId(row)) === (selection.type === 'include'),
+  );
+
+  async function copy(): Promise<void> {
+    if (!grid.current) return;
+    const rows = props.copied ? props.copied(chosen) : gridText(grid.current, chosen.map(props.getRowId));
+    tell(copiedWords(await copyTsv(rows), chosen.length));
+  }
+
+  // Ahead of the grid's own copying, which leaves out the heads.
+  function copyOnKey(event: KeyboardEvent): void {
+    const asked = (event.ctrlKey || event.metaKey) && !event.shiftKey && event.key.toLowerCase() === 'c';
+    if (!asked || chosen.length === 0 || document.getSelection()?.toString()) return;
+    event.preventDefault();
+    event.stopPropagation();
+    void copy();
+  }
+
   if (problem !== null && props.rows === undefined) {
     return <ErrorState problem={problem} onRetry={props.onRetry} what={props.label.toLowerCase()} />;
   }
   return (
     <Box
       onClickCapture={touch}
-      onKeyDownCapture={touch}
+      onKeyDownCapture={(event) => {
+        touch();
+        copyOnKey(event);
+      }}
       sx={{ height: props.height ?? 'calc(100dvh - 204px)', minHeight: 380, bgcolor: 'background.paper' }}
     >
       <DataGrid<Row>
@@ -103,15 +134,17 @@ export function DataTable<Row extends GridValidRowModel>(props: DataTableProps<R
         disableColumnFilter
         disableColumnMenu
         disableRowSelectionOnClick
-        checkboxSelection={props.selection !== undefined}
-        rowSelectionModel={props.selection}
-        onRowSelectionModelChange={props.onSelection}
+        apiRef={grid}
+        checkboxSelection={!narrow}
+        rowSelectionModel={selection}
+        onRowSelectionModelChange={setSelection}
         onRowClick={({ row }) => props.onOpen(row as Row)}
         onCellKeyDown={({ row, field }, event) => {
           if (event.key === 'Enter' && field !== '__check__') props.onOpen(row as Row);
         }}
-        slots={{ noRowsOverlay: EmptyOverlay, noResultsOverlay: EmptyOverlay }}
+        slots={{ noRowsOverlay: EmptyOverlay, noResultsOverlay: EmptyOverlay, footer: SelectableFooter }}
         slotProps={{
+          footer: { count: chosen.length, onCopy: () => void copy(), onClear: () => setSelection(NONE) },
           noRowsOverlay: { children: props.empty },
           loadingOverlay: { variant: 'skeleton', noRowsVariant: 'skeleton' },
         }}

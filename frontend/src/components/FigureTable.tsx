@@ -1,11 +1,11 @@
 import Box from '@mui/material/Box';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableContainer from '@mui/material/TableContainer';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import type { ReactNode } from 'react';
+import { CopyTable } from './CopyTable';
 
 export interface FigureRow {
   label: ReactNode;
@@ -28,7 +28,7 @@ interface FigureTableProps {
 export function FigureTable({ label, head, rows }: FigureTableProps) {
   return (
     <TableContainer>
-      <Table aria-label={label}>
+      <CopyTable label={label}>
         {head !== undefined && (
           <TableHead>
             <TableRow>
@@ -62,7 +62,7 @@ export function FigureTable({ label, head, rows }: FigureTableProps) {
             </TableRow>
           ))}
         </TableBody>
-      </Table>
+      </CopyTable>
     </TableContainer>
   );
 }

@@ -1,7 +1,6 @@
 import CheckIcon from '@mui/icons-material/Check';
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
@@ -10,6 +9,7 @@ import Typography from '@mui/material/Typography';
 import { trainStrip } from '@stageyard/libs/train-planner';
 import { useMemo } from 'react';
 import type { Pin } from '../../api/types';
+import { CopyTable } from '../../components/CopyTable';
 import { moduleWords, stageCountWords, teethWords } from '../../components/optionWords';
 import { TrainDrawing } from '../../drawings/TrainDrawing';
 import { comparedFigures } from './figures';
@@ -49,8 +49,8 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
         '@media print': { zoom: Math.min(1, PAPER_WIDTH / (LABEL_WIDTH + pins.length * (width + 20))) },
       }}
     >
-      <Table
-        aria-label="Options side by side"
+      <CopyTable
+        label="Options side by side"
         sx={{ width: pins.length < 3 ? 'auto' : '100%', minWidth: { md: '100%' } }}
       >
         <TableHead>
@@ -111,7 +111,7 @@ export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: Compar
             </TableRow>
           )}
         </TableBody>
-      </Table>
+      </CopyTable>
     </Box>
   );
 }

@@ -1,4 +1,3 @@
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableContainer from '@mui/material/TableContainer';
@@ -6,6 +5,7 @@ import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import type { ReactNode } from 'react';
 import { useNavigate } from 'react-router-dom';
+import { CopyTable } from '../../components/CopyTable';
 
 export interface RowColumn<Row> {
   name: string;
@@ -33,7 +33,7 @@ export function RowTable<Row>({ label, columns, rows, keyOf, pathOf }: RowTableP
   });
   return (
     <TableContainer>
-      <Table aria-label={label}>
+      <CopyTable label={label} opens>
         <TableHead>
           <TableRow>
             {columns.map((column) => (
@@ -62,7 +62,7 @@ export function RowTable<Row>({ label, columns, rows, keyOf, pathOf }: RowTableP
             </TableRow>
           ))}
         </TableBody>
-      </Table>
+      </CopyTable>
     </TableContainer>
   );
 }

@@ -17,7 +17,6 @@ import { SecondSort } from './SecondSort';
 interface PartsFilterBarProps {
   state: ListState<PartFilter>;
   result: ReactNode;
-  aside: ReactNode;
 }
 
 const MORE: readonly PartFilter[] = [
@@ -31,7 +30,7 @@ const MORE: readonly PartFilter[] = [
 ];
 
 /** The library's filters; the rarer ones fold away until one of them is set. */
-export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
+export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
   const { facets } = usePartFacets();
   const narrow = useMediaQuery(useTheme().breakpoints.down('sm'));
   // A second sort key shows itself, too: an order that nobody can see looks like none.
@@ -69,7 +68,7 @@ export function PartsFilterBar({ state, result, aside }: PartsFilterBarProps) {
   }));
   const shown = open || rareSet;
   return (
-    <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result} aside={aside}>
+    <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result}>
       <TypedFilter label="Number or words" width={130} {...bind('text')} />
       {(!narrow || shown) && (
         <>

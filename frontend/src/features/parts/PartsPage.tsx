@@ -2,17 +2,14 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useTheme } from '@mui/material/styles';
 import useMediaQuery from '@mui/material/useMediaQuery';
-import type { GridRowSelectionModel } from '@mui/x-data-grid';
-import { useMemo, useState } from 'react';
+import { useMemo } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { useMe } from '../../api/hooks/useMe';
 import { useParts } from '../../api/hooks/useParts';
 import type { PartSummary } from '../../api/types';
-import { copyTsv } from '../../components/copyTsv';
 import { DataTable } from '../../components/DataTable';
 import { EmptyState } from '../../components/EmptyState';
 import { formatCount } from '../../components/figures';
-import { useNotices } from '../../components/Notices';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState } from '../../components/useListState';
 import { attributeOf, figureOf } from './attributes';
@@ -20,7 +17,6 @@ import { columnsFor, hiddenColumns, type TableWidth } from './partColumns';
 import { PART_FILTERS, PART_SORTS, partQuery } from './partFilters';
 import { PartsFilterBar } from './PartsFilterBar';
 
-const NONE: GridRowSelectionModel = { type: 'include', ids: new Set() };
 const COPY_HEAD = [
   'Number',
   'Description',
@@ -31,6 +27,9 @@ const COPY_HEAD = [
   'Hand',
   'Face mm',
   'Bore mm',
+  'Material',
+  'Mass kg',
+  'Standing',
 ];
 
 /** A copied figure keeps a plain point and minus, so that a spreadsheet reads it as a number. */
@@ -57,23 +56,9 @@ export default function PartsPage() {
   const full = useMediaQuery('(min-width: 1700px)');
   const width: TableWidth = narrow ? 'narrow' : full ? 'full' : wide ? 'wide' : 'middle';
   const { can } = useMe();
-  const { tell } = useNotices();
   const state = useListState(PART_FILTERS, PART_SORTS);
   const query = useMemo(() => partQuery(state), [state]);
   const { page, problem, isLoading, mutate } = useParts(query);
-  const [selection, setSelection] = useState(NONE);
-  const chosen = (page?.items ?? []).filter((part) =>
-    selection.type === 'include' ? selection.ids.has(part.id) : !selection.ids.has(part.id),
-  );
-
-  const copy = async () => {
-    const done = await copyTsv([[...COPY_HEAD, 'Material', 'Mass kg', 'Standing'], ...chosen.map(copyRow)]);
-    tell(
-      done
-        ? `${chosen.length === 1 ? 'One row' : `${chosen.length} rows`} copied; paste into a spreadsheet.`
-        : 'The browser does not let this page use the clipboard.',
-    );
-  };
 
   const add = can('parts.edit') ? (
     <Button variant="contained" component={Link} to="/add-part">
@@ -88,13 +73,6 @@ export default function PartsPage() {
         state={state}
         result={
           page === undefined ? undefined : `${formatCount(page.total)} ${page.total === 1 ? 'part' : 'parts'}`
-        }
-        aside={
-          chosen.length > 0 && (
-            <Button variant="outlined" onClick={() => void copy()}>
-              Copy {chosen.length}
-            </Button>
-          )
         }
       />
       <Box sx={{ flex: '1 1 0', minHeight: 380 }}>
@@ -111,8 +89,7 @@ export default function PartsPage() {
           problem={problem}
           onRetry={() => void mutate()}
           onOpen={(part) => void navigate(`/parts/${encodeURIComponent(part.number)}`)}
-          selection={narrow ? undefined : selection}
-          onSelection={setSelection}
+          copied={(parts) => [COPY_HEAD, ...parts.map(copyRow)]}
           hidden={hiddenColumns(width)}
           empty={
             filtered ? (

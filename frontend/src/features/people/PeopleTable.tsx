@@ -1,6 +1,5 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableContainer from '@mui/material/TableContainer';
@@ -12,6 +11,7 @@ import { answer, api } from '../../api/client';
 import { asProblem } from '../../api/problem';
 import type { User } from '../../api/types';
 import { ConfirmDialog } from '../../components/ConfirmDialog';
+import { CopyTable } from '../../components/CopyTable';
 import { formatDay } from '../../components/figures';
 import { useNotices } from '../../components/Notices';
 import { roleWords } from './roleNames';
@@ -41,7 +41,7 @@ export function PeopleTable({ users, myId, onEdit, onChanged }: PeopleTableProps
 
   return (
     <TableContainer>
-      <Table aria-label="People">
+      <CopyTable label="People">
         <TableHead>
           <TableRow>
             <TableCell>Name</TableCell>
@@ -97,7 +97,7 @@ export function PeopleTable({ users, myId, onEdit, onChanged }: PeopleTableProps
             </TableRow>
           ))}
         </TableBody>
-      </Table>
+      </CopyTable>
       <ConfirmDialog
         open={leaving !== null}
         title={`Switch off ${leaving?.name ?? ''}?`}

@@ -2,7 +2,6 @@ import Box from '@mui/material/Box';
 import MuiLink from '@mui/material/Link';
 import FormControlLabel from '@mui/material/FormControlLabel';
 import Switch from '@mui/material/Switch';
-import type { GridColDef } from '@mui/x-data-grid';
 import useMediaQuery from '@mui/material/useMediaQuery';
 import { useMemo } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
@@ -14,6 +13,7 @@ import { EmptyState } from '../../components/EmptyState';
 import { FilterBar } from '../../components/FilterBar';
 import { FilterText } from '../../components/FilterText';
 import { formatDay, formatFixed } from '../../components/figures';
+import type { DataColumn } from '../../components/gridText';
 import { boxWords, errorWords, moduleWords, ratioWords } from '../../components/optionWords';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState, writeSort } from '../../components/useListState';
@@ -27,13 +27,14 @@ const STRIP = { width: 100, height: 36 };
 
 const right = { align: 'right', headerAlign: 'right', sortable: false } as const;
 
-function columnsFor(scale: number): GridColDef<TrainSummary>[] {
+function columnsFor(scale: number): DataColumn<TrainSummary>[] {
   return [
     {
       field: 'strip',
       headerName: 'One scale',
       width: 112,
       sortable: false,
+      copied: false,
       renderCell: ({ row }) => (
         <Box sx={{ height: '100%', display: 'flex', alignItems: 'center' }}>
           <TrainStrip train={row.spec} {...STRIP} mmPerPixel={scale} />
@@ -90,6 +91,8 @@ function columnsFor(scale: number): GridColDef<TrainSummary>[] {
       headerName: 'Checks',
       width: 116,
       sortable: false,
+      copied: ({ fails, marginals }) =>
+        fails > 0 ? `${fails} fails` : marginals > 0 ? `${marginals} marginal` : 'passes',
       renderCell: ({ row }) => <ChecksCell fails={row.fails} marginals={row.marginals} />,
     },
     { field: 'owner', headerName: 'Owner', width: 96 },

@@ -1,11 +1,11 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import Typography from '@mui/material/Typography';
+import { CopyTable } from '../../../components/CopyTable';
 import { formatWhen } from '../../../components/figures';
 import type { Meanwhile } from './useBriefForm';
 
@@ -30,7 +30,7 @@ export function MeanwhilePanel({ meanwhile, onTakeTheirs, onKeepMine }: Meanwhil
       </Typography>
       {changes.length > 0 && (
         <Box sx={{ overflowX: 'auto' }}>
-          <Table>
+          <CopyTable label="Changed meanwhile">
             <TableHead>
               <TableRow>
                 <TableCell>Field</TableCell>
@@ -52,7 +52,7 @@ export function MeanwhilePanel({ meanwhile, onTakeTheirs, onKeepMine }: Meanwhil
                 </TableRow>
               ))}
             </TableBody>
-          </Table>
+          </CopyTable>
         </Box>
       )}
       <Box sx={{ display: 'flex', gap: 1, mt: 1.5, flexWrap: 'wrap' }}>

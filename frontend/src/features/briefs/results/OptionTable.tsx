@@ -15,7 +15,7 @@ import { OptionTableRow, STRIP } from './OptionTableRow';
 import type { OptionOrder, OptionSort } from './optionOrder';
 import { OPTION_HEADS, optionRow } from './optionRows';
 import { stageOrders } from './stageOrders';
-import { useRowSelection } from './useRowSelection';
+import { useRowSelection } from '../../../components/useRowSelection';
 
 interface OptionTableProps {
   options: readonly TrainOption[];

@@ -1,7 +1,6 @@
 import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
@@ -9,6 +8,7 @@ import TableRow from '@mui/material/TableRow';
 import TextField from '@mui/material/TextField';
 import { useState, type FormEvent } from 'react';
 import type { Train } from '../../../api/types';
+import { CopyTable } from '../../../components/CopyTable';
 import { formatFixed, formatPlain } from '../../../components/figures';
 import { Sheet } from '../../../components/Sheet';
 import { UnsavedWarning } from '../../../components/UnsavedWarning';
@@ -57,7 +57,7 @@ export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean
           </Alert>
         )}
         <Box sx={{ overflowX: 'auto' }}>
-          <Table aria-label="Shafts">
+          <CopyTable label="Shafts">
             <TableHead>
               <TableRow>
                 <TableCell>Shaft</TableCell>
@@ -119,7 +119,7 @@ export function ShaftsTable({ train, canEdit }: { train: Train; canEdit: boolean
                 );
               })}
             </TableBody>
-          </Table>
+          </CopyTable>
         </Box>
         {editing && (
           <Box sx={{ display: 'flex', gap: 1, justifyContent: 'flex-end', px: 1.75, py: 1.25 }}>

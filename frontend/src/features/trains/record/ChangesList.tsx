@@ -1,11 +1,11 @@
 import Box from '@mui/material/Box';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import { useTrainChanges } from '../../../api/hooks/useTrain';
 import { asProblem } from '../../../api/problem';
+import { CopyTable } from '../../../components/CopyTable';
 import { EmptyState } from '../../../components/EmptyState';
 import { ErrorState } from '../../../components/ErrorState';
 import { formatWhen } from '../../../components/figures';
@@ -24,7 +24,7 @@ export function ChangesList({ code }: { code: string }) {
       {data?.items.length === 0 && <EmptyState title="Nothing has been changed yet" />}
       {data && data.items.length > 0 && (
         <Box sx={{ overflowX: 'auto' }}>
-          <Table aria-label="Changes">
+          <CopyTable label="Changes">
             <TableHead>
               <TableRow>
                 <TableCell>When</TableCell>
@@ -41,7 +41,7 @@ export function ChangesList({ code }: { code: string }) {
                 </TableRow>
               ))}
             </TableBody>
-          </Table>
+          </CopyTable>
         </Box>
       )}
     </Sheet>

@@ -1,11 +1,11 @@
 import Box from '@mui/material/Box';
-import Table from '@mui/material/Table';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import Typography from '@mui/material/Typography';
 import type { Train } from '../../../api/types';
+import { CopyTable } from '../../../components/CopyTable';
 import { formatFixed, formatPlain } from '../../../components/figures';
 import { VerdictWord } from '../../../components/VerdictWord';
 
@@ -31,7 +31,7 @@ export function ChecksTable({ checks }: { checks: readonly Check[] }) {
   }
   return (
     <Box sx={{ overflowX: 'auto' }}>
-      <Table aria-label="Checks">
+      <CopyTable label="Checks">
         <TableHead>
           <TableRow>
             <TableCell>Check</TableCell>
@@ -71,7 +71,7 @@ export function ChecksTable({ checks }: { checks: readonly Check[] }) {
             );
           })}
         </TableBody>
-      </Table>
+      </CopyTable>
     </Box>
   );
 }

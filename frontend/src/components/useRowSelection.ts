@@ -1,6 +1,6 @@
 import { useRef, useState, type KeyboardEvent, type MouseEvent } from 'react';
-import { copyTsv } from '../../../components/copyTsv';
-import { useNotices } from '../../../components/Notices';
+import { copiedWords, copyTsv } from './copyTsv';
+import { useNotices } from './Notices';
 import { NO_ROWS, rowAfterKey, selectRow } from './rowSelection';
 
 interface RowSelectionOptions {
@@ -11,8 +11,8 @@ interface RowSelectionOptions {
   /** Cells of one row for the clipboard. */
   cellsOf: (row: number) => string[];
   heads: string[];
-  /** Space on a row. */
-  onSpace: (row: number) => void;
+  /** Space on a row; selects it where nothing else is meant. */
+  onSpace?: (row: number) => void;
 }
 
 /** Keyboard reach and selection for a plain table: arrows move, Shift extends, Ctrl+A all, Ctrl+C copies. */
@@ -25,24 +25,30 @@ export function useRowSelection({ rows, allRows, cellsOf, heads, onSpace }: RowS
   async function copy(): Promise<void> {
     const chosen = [...selection.chosen].filter((row) => row < rows).sort((a, b) => a - b);
     const copied = chosen.length > 0 ? chosen : Array.from({ length: allRows }, (_, row) => row);
-    const done = await copyTsv([heads, ...copied.map(cellsOf)]);
-    const what = copied.length === 1 ? '1 row' : `${copied.length} rows`;
-    tell(done ? `${what} copied; paste into a spreadsheet.` : 'The browser did not allow copying.');
+    tell(copiedWords(await copyTsv([heads, ...copied.map(cellsOf)]), copied.length));
   }
 
   function onKeyDown(event: KeyboardEvent<HTMLElement>, row: number): void {
     const command = event.ctrlKey || event.metaKey;
+    const target = event.target as HTMLElement;
+    const onRow = target === event.currentTarget || target.matches('input[type="checkbox"]');
     if (command && event.key === 'c' && document.getSelection()?.toString() === '') {
       void copy();
+    } else if (!onRow) {
+      // A field, link or button in the row has its own keys.
+      return;
     } else if (command && event.key === 'a') {
       setSelection({ anchor: 0, at: row, chosen: new Set(Array.from({ length: rows }, (_, each) => each)) });
-    } else if (event.key === ' ' && event.target === event.currentTarget) {
-      onSpace(row);
+    } else if (event.key === ' ') {
+      // The tick box itself is ticked by its own key.
+      if (target !== event.currentTarget) return;
+      if (onSpace) onSpace(row);
+      else setSelection((before) => selectRow(before, row, { toggle: true }));
     } else {
       const next = rowAfterKey(event.key, row, rows);
       if (next === null) return;
       setSelection((before) => selectRow(before, next, { range: event.shiftKey }));
-      body.current?.querySelectorAll('tr')[next]?.focus();
+      body.current?.querySelectorAll<HTMLElement>(':scope > tr')[next]?.focus();
     }
     event.preventDefault();
   }
@@ -60,5 +66,5 @@ export function useRowSelection({ rows, allRows, cellsOf, heads, onSpace }: RowS
     },
   });
 
-  return { body, rowProps, copy, selected: selection.chosen };
+  return { body, rowProps, copy, selected: selection.chosen, clear: () => setSelection(NO_ROWS) };
 }
