@@ -132,6 +132,7 @@ describe('parseQuantity', () => {
     ['mm', 'length'],
     ['12 kg', 'length'],
     ['1,5 mm', 'length'],
+    ['0,125 mm', 'length'],
     ['1.2.3', 'length'],
     ['NaN', 'torque'],
     ['Infinity', 'torque'],

@@ -53,6 +53,7 @@ describe('money', () => {
   it.each([
     ['1,5 EUR', undefined],
     ['1.234,50 EUR', undefined],
+    ['0,125 KWD', undefined],
     ['1.005 EUR', undefined],
     ['1.5 JPY', undefined],
     ['12.50', undefined],

@@ -9,7 +9,7 @@ export interface Money {
   readonly currency: string;
 }
 
-const AMOUNT = /^([-\u2212]?)(\d{1,3}(?:,\d{3})+|\d+)(?:\.(\d+))?$/;
+const AMOUNT = /^([-\u2212]?)([1-9]\d{0,2}(?:,\d{3})+|\d+)(?:\.(\d+))?$/;
 
 /**
  * @param minor whole minor units, a safe integer; 1,250 means 12.50 EUR or 1,250 JPY

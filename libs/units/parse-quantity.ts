@@ -43,7 +43,7 @@ const UNITS: Record<QuantityKind, { base: string; factors: Record<string, number
   percent: { base: '%', factors: { '%': 1, '‰': 0.1, ppm: 1e-4 } },
 };
 
-const FIGURE = /^([+-]?)(\d{1,3}(?:,\d{3})+(?!\d)|\d*)(\.\d*)?(e[+-]?\d{1,3})?\s*(.*)$/i;
+const FIGURE = /^([+-]?)([1-9]\d{0,2}(?:,\d{3})+(?!\d)|\d*)(\.\d*)?(e[+-]?\d{1,3})?\s*(.*)$/i;
 const MODULE_WORDS = /^m\s*([\d.]+)\s*(?:\(.*\))?$/i;
 const PITCH_WORDS = /^(?:dp\s*([\d.]+)|([\d.]+)\s*dp)$/i;
 

@@ -12,7 +12,7 @@ export interface CellBounds {
 }
 
 const PLAIN = /^[-\u2212+]?\d+(\.\d+)?$/;
-const GROUPED = /^[-\u2212+]?\d{1,3}(,\d{3})+(\.\d+)?$/;
+const GROUPED = /^[-\u2212+]?[1-9]\d{0,2}(,\d{3})+(\.\d+)?$/;
 /** `1,500` is one and a half in one country and fifteen hundred in the next. */
 const EITHER_WAY = /^[-\u2212+]?[1-9]\d{0,2},\d{3}$/;
 const SLASHED = /^(\d{1,2})\/(\d{1,2})\/(\d{4})$/;

@@ -97,7 +97,7 @@ function namedColumn<K extends string>(
   specs: readonly ColumnSpec<K>[],
 ): MappedColumn<K> | null {
   for (const { key, label, synonyms = [], series = false } of specs) {
-    const name = series ? (/^(.*\D)\s*?(\d[\d.,]*)$/s.exec(cell)?.[1] ?? '') : cell;
+    const name = series ? (/^(.*?\D)(\d[\d.,]*)$/s.exec(cell)?.[1] ?? '') : cell;
     if (![label, ...synonyms].some((known) => plainHead(known) === plainHead(name))) continue;
     return { key, index, label, from: cell, figure: series ? cell.slice(name.length).trim() : null };
   }
