@@ -9,11 +9,16 @@ import { ExportsModule } from './exports/exports.module.js';
 import { FinderModule } from './finder/finder.module.js';
 import { HealthModule } from './health/health.module.js';
 import { HouseRulesModule } from './house-rules/house-rules.module.js';
+import { OffersModule } from './offers/offers.module.js';
+import { OptionSupplyModule } from './option-supply/option-supply.module.js';
 import { OptionSearchesModule } from './option-searches/option-searches.module.js';
 import { OverviewModule } from './overview/overview.module.js';
 import { PartsModule } from './parts/parts.module.js';
 import { type Settings } from './settings/settings.js';
 import { SettingsModule } from './settings/settings.module.js';
+import { StockModule } from './stock/stock.module.js';
+import { SuppliersModule } from './suppliers/suppliers.module.js';
+import { TrainPricesModule } from './train-prices/train-prices.module.js';
 import { TrainsModule } from './trains/trains.module.js';
 import { UsersModule } from './users/users.module.js';
 
@@ -28,10 +33,15 @@ import { UsersModule } from './users/users.module.js';
     HealthModule,
     HouseRulesModule,
     PartsModule,
+    StockModule,
+    SuppliersModule,
+    OffersModule,
     CalcModule,
     BriefsModule,
     OptionSearchesModule,
     TrainsModule,
+    TrainPricesModule,
+    OptionSupplyModule,
     ExportsModule,
     FinderModule,
     OverviewModule,

@@ -12,7 +12,7 @@ import { ChangeQuery } from './dto/change-query.js';
 export class AuditController {
   constructor(private readonly audit: AuditService) {}
 
-  /** Every change, newest first; accounts and sign-ins only for those who manage people. */
+  /** Every change, newest first; accounts and sign-ins only for those who manage people, suppliers and offers only for those who read prices. */
   @Get()
   @Allow('audit.read')
   @ApiOkResponse({ type: ChangePage })

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { type EntityManager, Repository } from 'typeorm';
+import { type Permission } from '../auth/permissions.js';
 import { type SignedInUser } from '../auth/signed-in-user.js';
 import { Clock } from '../common/clock.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery } from '../common/list-query.js';
@@ -8,9 +9,26 @@ import { type Change, toChange } from './dto/change.js';
 import { type ChangeQuery } from './dto/change-query.js';
 import { AuditEntry } from './entities/audit-entry.js';
 
-export type AuditedEntity = 'part' | 'brief' | 'search' | 'train' | 'user' | 'session';
+export type AuditedEntity =
+  | 'part'
+  | 'stock'
+  | 'brief'
+  | 'search'
+  | 'train'
+  | 'user'
+  | 'session'
+  | 'supplier'
+  | 'offer'
+  | 'offer-choice';
 
-const ABOUT_PEOPLE: readonly AuditedEntity[] = ['user', 'session'];
+/** What each of these permissions opens in the record; everybody who reads it sees the rest. */
+const CLOSED: readonly [Permission, readonly AuditedEntity[]][] = [
+  ['people.manage', ['user', 'session']],
+  ['prices.read', ['supplier', 'offer', 'offer-choice']],
+];
+
+/** Rows written by one statement. */
+const ROWS_AT_ONCE = 100;
 
 /** The server acting by itself. */
 export interface SystemActor {
@@ -41,15 +59,32 @@ export class AuditService {
   ) {}
 
   /** Adds one row to the record, in the transaction of the change it tells of. */
-  async record(manager: EntityManager, { actor, before, after, ...entry }: AuditRecord): Promise<void> {
-    await manager.insert(AuditEntry, {
-      ...entry,
-      at: this.clock.iso(),
-      actorId: actor.id,
-      actorName: actor.name,
-      before: toJson(before),
-      after: toJson(after),
-    });
+  async record(manager: EntityManager, record: AuditRecord): Promise<void> {
+    await this.recordMany(manager, [record]);
+  }
+
+  /** Adds many rows to the record, a hundred a statement, in the order given. */
+  async recordMany(manager: EntityManager, records: readonly AuditRecord[]): Promise<void> {
+    const at = this.clock.iso();
+    for (let start = 0; start < records.length; start += ROWS_AT_ONCE) {
+      const entries = records
+        .slice(start, start + ROWS_AT_ONCE)
+        .map(({ actor, before, after, ...entry }) => ({
+          ...entry,
+          at,
+          actorId: actor.id,
+          actorName: actor.name,
+          before: toJson(before),
+          after: toJson(after),
+        }));
+      await manager
+        .createQueryBuilder()
+        .insert()
+        .into(AuditEntry)
+        .values(entries)
+        .updateEntity(false)
+        .execute();
+    }
   }
 
   /** The changes of one thing, newest first. */
@@ -57,9 +92,12 @@ export class AuditService {
     return this.search({ ...query, entity, entityId });
   }
 
-  /** What the person may see: accounts and sign-ins are for those who manage people. */
+  /** What the person may see: accounts and sign-ins are for those who manage people, prices for those who read them. */
   visibleTo({ permissions }: SignedInUser, query: ChangeQuery): Promise<Page<Change>> {
-    return this.search(query, permissions.includes('people.manage') ? [] : ABOUT_PEOPLE);
+    const hidden = CLOSED.flatMap(([permission, entities]) =>
+      permissions.includes(permission) ? [] : entities,
+    );
+    return this.search(query, hidden);
   }
 
   /** All changes that match, newest first unless the query sorts by `at`. */

@@ -26,6 +26,10 @@ export const HOUSE_RULES = {
   searchTimeLimitMs: 20_000,
   /** An option search of a brief stops after this many milliseconds. */
   briefSearchTimeLimitMs: 120_000,
+  /** A price that a supplier stated longer ago than this is marked as too old, days. */
+  priceAgeDays: 180,
+  /** Prices in this currency come first, since there are no exchange rates. ISO 4217. */
+  currency: 'EUR',
 } as const;
 
 export type HouseRuleFigures = typeof HOUSE_RULES;

@@ -40,4 +40,10 @@ export class HouseRules {
 
   @ApiProperty({ type: Number, description: 'ms' })
   briefSearchTimeLimitMs!: number;
+
+  @ApiProperty({ type: Number, description: 'A price stated longer ago than this is too old, days.' })
+  priceAgeDays!: number;
+
+  @ApiProperty({ type: String, description: 'Prices in it come first. ISO 4217.' })
+  currency!: string;
 }

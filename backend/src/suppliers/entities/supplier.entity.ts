@@ -1,5 +1,5 @@
 import { Column, Entity, Index, PrimaryGeneratedColumn } from 'typeorm';
-import type { FreightRule, SupplierContact, SupplierStanding } from '../supplier-terms.js';
+import type { FreightRule, SupplierContact, SupplierLanguage, SupplierStanding } from '../supplier-terms.js';
 
 /** A firm that parts are bought from. */
 @Entity('supplier')
@@ -27,7 +27,7 @@ export class Supplier {
 
   /** BCP 47 tag of the language that enquiries are written in. */
   @Column({ type: 'text' })
-  language!: string;
+  language!: SupplierLanguage;
 
   @Column({ type: 'simple-json' })
   contacts!: SupplierContact[];
