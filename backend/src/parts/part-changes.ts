@@ -14,7 +14,7 @@ interface PartChange {
 
 /** What an edit changed, field by field, for the record of changes. */
 export function partChange(before: Part, after: Part): PartChange {
-  const [old, now] = [toPartSummaryDto(before), toPartSummaryDto(after)];
+  const [old, now] = [toPartSummaryDto(before, null), toPartSummaryDto(after, null)];
   const fields = (Object.keys(now) as (keyof PartSummaryDto)[]).filter(
     (field) => !OF_EVERY_EDIT.has(field) && !isDeepStrictEqual(old[field], now[field]),
   );

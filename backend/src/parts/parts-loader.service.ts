@@ -1,8 +1,8 @@
-import { setImmediate as nextTurn } from 'node:timers/promises';
 import { Injectable } from '@nestjs/common';
 import { plainToInstance } from 'class-transformer';
 import { validateSync } from 'class-validator';
 import { badInput, ProblemError } from '../common/errors.js';
+import { politePause } from '../common/polite-pause.js';
 import { validationProblem } from '../common/validation.js';
 import { under } from './under.js';
 import { WriteQueue } from '../database/write-queue.js';
@@ -14,9 +14,6 @@ import { type Actor, PartsService } from './parts.service.js';
 
 /** Parts written in one transaction: other writers wait that long. */
 const CHUNK = 25;
-
-/** Work done before other requests get their turn, ms. */
-const TURN_MS = 15;
 
 interface CheckedPart {
   input: PartInputDto;
@@ -57,16 +54,6 @@ export class PartsLoader {
     }
     return numbers;
   }
-}
-
-/** Gives others their turn once enough work was done since the last time. */
-function politePause(): () => Promise<void> {
-  let since = performance.now();
-  return async () => {
-    if (performance.now() - since < TURN_MS) return;
-    await nextTurn();
-    since = performance.now();
-  };
 }
 
 function checkPart(raw: PartInputDto, index: number): CheckedPart {

@@ -5,6 +5,8 @@ import { AuditService } from '../audit/audit.service.js';
 import { type Change } from '../audit/dto/change.js';
 import { notFound } from '../common/errors.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery, type SortKey } from '../common/list-query.js';
+import { hasStock, isLow } from '../stock/shelf-conditions.js';
+import { StockLevels } from '../stock/stock-levels.service.js';
 import { type PartFacetsDto } from './dto/part-facets.dto.js';
 import { PART_SORTS, type PartListQueryDto, type PartSort } from './dto/part-list-query.dto.js';
 import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js';
@@ -31,6 +33,7 @@ export class PartsReader {
   constructor(
     @InjectRepository(Part) private readonly parts: Repository<Part>,
     private readonly audit: AuditService,
+    private readonly levels: StockLevels,
   ) {}
 
   /** One page of the library; sorted by number when nothing else is asked for. */
@@ -46,7 +49,7 @@ export class PartsReader {
       .offset(list.skip)
       .limit(list.size)
       .getRawMany<{ id: number }>();
-    return pageOf((await this.byIds(ids.map(({ id }) => id))).map(toPartSummaryDto), total, list);
+    return pageOf(await this.withShelf(await this.byIds(ids.map(({ id }) => id))), total, list);
   }
 
   /** What the library holds, counted for the choices of the filter bar. */
@@ -72,7 +75,8 @@ export class PartsReader {
 
   /** @throws ProblemError 404 */
   async get(number: string): Promise<PartDto> {
-    return toPartDto(await this.entity(number));
+    const part = await this.entity(number);
+    return toPartDto(part, await this.levels.totalOf(part.id));
   }
 
   /** @throws ProblemError 404 */
@@ -105,7 +109,12 @@ export class PartsReader {
   /** Parts of one standing, the last changed first. */
   async latest(standing: PartStanding, limit: number): Promise<PartSummaryDto[]> {
     const rows = await this.parts.find({ where: { standing }, order: { updatedAt: 'DESC' }, take: limit });
-    return rows.map(toPartSummaryDto);
+    return this.withShelf(rows);
+  }
+
+  private async withShelf(parts: Part[]): Promise<PartSummaryDto[]> {
+    const shelves = await this.levels.ofPartIds(parts.map(({ id }) => id));
+    return parts.map((part) => toPartSummaryDto(part, shelves.get(part.id)?.total ?? null));
   }
 
   /** Parts in the order of the ids. */
@@ -126,6 +135,8 @@ export class PartsReader {
       const value = query[field];
       if (value !== undefined) rows.andWhere(`part.${condition} :${field}`, { [field]: value });
     }
+    if (query.onShelf) hasStock(rows);
+    if (query.low) isLow(rows);
     return rows;
   }
 }

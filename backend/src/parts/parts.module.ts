@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
+import { StockModule } from '../stock/stock.module.js';
 import { Part } from './entities/part.entity.js';
 import { PartNumbers } from './part-numbers.service.js';
 import { PartSuccessors } from './part-successors.service.js';
@@ -10,7 +11,7 @@ import { PartsService } from './parts.service.js';
 import { StockFinder } from './stock-finder.service.js';
 
 @Module({
-  imports: [TypeOrmModule.forFeature([Part])],
+  imports: [TypeOrmModule.forFeature([Part]), StockModule],
   controllers: [PartsController],
   providers: [PartsReader, PartsService, PartsLoader, PartNumbers, PartSuccessors, StockFinder],
   exports: [PartsReader, PartsService, PartsLoader, StockFinder],

@@ -5,6 +5,7 @@ import { Clock } from '../common/clock.js';
 import { ChangedMeanwhileError, notFound } from '../common/errors.js';
 import { updateVersioned } from '../database/update-versioned.js';
 import { WriteQueue } from '../database/write-queue.js';
+import { StockLevels } from '../stock/stock-levels.service.js';
 import { checkAttributes } from './check-attributes.js';
 import { type PartAttributes } from './dto/attributes/part-attributes.js';
 import { type PartInputDto } from './dto/part-input.dto.js';
@@ -29,6 +30,7 @@ export class PartsService {
     private readonly clock: Clock,
     private readonly numbers: PartNumbers,
     private readonly successors: PartSuccessors,
+    private readonly levels: StockLevels,
   ) {}
 
   /**
@@ -37,7 +39,8 @@ export class PartsService {
    */
   async create(actor: Actor, input: PartInputDto): Promise<PartDto> {
     const attributes = checkAttributes(input.kind, input.attributes);
-    return toPartDto(await this.queue.run((manager) => this.insert(manager, actor, input, attributes)));
+    const part = await this.queue.run((manager) => this.insert(manager, actor, input, attributes));
+    return toPartDto(part, null);
   }
 
   /** Adds a part inside a running transaction; the attributes must come from `checkAttributes`. */
@@ -83,27 +86,26 @@ export class PartsService {
    * @throws ProblemError 404; 400 for what makes no sense; 409 with `current` when it changed meanwhile
    */
   async update(actor: Actor, number: string, patch: PartPatchDto): Promise<PartDto> {
-    return toPartDto(
-      await this.queue.run(async (manager) => {
-        const before = await manager.findOneBy(Part, { number: number.trim() });
-        if (!before) throw notFound('part', number);
-        // A stale edit is told so first: its other faults may come from what the person could not see.
-        if (before.version !== patch.version) throw new ChangedMeanwhileError(toPartDto(before));
-        const change = await this.changedColumns(manager, before, patch);
-        // Nothing changed: nothing to count up or to put on record.
-        if (partChange(before, { ...before, ...change }).fields.length === 0) return before;
-        const after = await updateVersioned(
-          manager,
-          Part,
-          { id: before.id },
-          patch.version,
-          { ...change, updatedAt: this.clock.iso(), updatedBy: actor.name },
-          toPartDto,
-        );
-        await this.recordChange(manager, actor, before, after);
-        return after;
-      }),
-    );
+    return this.queue.run(async (manager) => {
+      const shown = async (part: Part) => toPartDto(part, await this.levels.totalOf(part.id, manager));
+      const before = await manager.findOneBy(Part, { number: number.trim() });
+      if (!before) throw notFound('part', number);
+      // A stale edit is told so first: its other faults may come from what the person could not see.
+      if (before.version !== patch.version) throw new ChangedMeanwhileError(await shown(before));
+      const change = await this.changedColumns(manager, before, patch);
+      // Nothing changed: nothing to count up or to put on record.
+      if (partChange(before, { ...before, ...change }).fields.length === 0) return shown(before);
+      const after = await updateVersioned(
+        manager,
+        Part,
+        { id: before.id },
+        patch.version,
+        { ...change, updatedAt: this.clock.iso(), updatedBy: actor.name },
+        shown,
+      );
+      await this.recordChange(manager, actor, before, after);
+      return shown(after);
+    });
   }
 
   private async changedColumns(

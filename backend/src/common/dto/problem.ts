@@ -40,7 +40,8 @@ export class Problem {
   @ApiPropertyOptional({
     type: 'object',
     additionalProperties: true,
-    description: 'Of a stale edit (code changed-meanwhile): the thing as it stands now.',
+    description:
+      'Of a stale edit (code changed-meanwhile) or of what the shelf cannot give: the thing as it stands now.',
   })
   current?: Record<string, unknown>;
 

@@ -1,8 +1,8 @@
 import { applyDecorators } from '@nestjs/common';
 import { ApiPropertyOptional, ApiSchema } from '@nestjs/swagger';
 import { Transform } from 'class-transformer';
-import { IsIn, IsNumber, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
-import { ListQueryDto, numberFromQuery } from '../../common/list-query.js';
+import { IsBoolean, IsIn, IsNumber, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { booleanFromQuery, ListQueryDto, numberFromQuery } from '../../common/list-query.js';
 import {
   HANDS,
   PART_KINDS,
@@ -27,6 +27,14 @@ const FilterChoice = (description: string, values: readonly string[]): PropertyD
     ApiPropertyOptional({ enum: values, description }),
     IsOptional(),
     IsIn(values, { message: ({ property }) => `${property} must be one of: ${values.join(', ')}.` }),
+  );
+
+const FilterFlag = (description: string): PropertyDecorator =>
+  applyDecorators(
+    ApiPropertyOptional({ type: 'boolean', description }),
+    IsOptional(),
+    Transform(booleanFromQuery),
+    IsBoolean(),
   );
 
 /** Fields that the list of parts can be sorted by. */
@@ -88,4 +96,10 @@ export class PartListQueryDto extends ListQueryDto {
 
   @FilterFigure('Greatest face width (mm)')
   faceWidthMax?: number;
+
+  @FilterFlag('Only those of which something lies on the shelf')
+  onShelf?: boolean;
+
+  @FilterFlag('Only those below their least stock')
+  low?: boolean;
 }

@@ -8,6 +8,8 @@ import {
   type PartStanding,
   type PartSupply,
 } from '../part-kinds.js';
+import { fromThousandths } from '../../stock/thousandths.js';
+import { PART_UNITS, type PartUnit, unitOf } from '../part-unit.js';
 import { ATTRIBUTE_CLASSES, type PartAttributes } from './attributes/part-attributes.js';
 
 /** One row of the library: everything that is stored about a part. */
@@ -50,6 +52,23 @@ export class PartSummaryDto {
   @ApiProperty({ anyOf: refs(...ATTRIBUTE_CLASSES), description: 'The attributes of the kind' })
   attributes!: PartAttributes;
 
+  @ApiProperty({
+    type: 'number',
+    nullable: true,
+    description: "What lies on the shelf over all places, in the part's unit; null: never booked",
+  })
+  shelf!: number | null;
+
+  @ApiProperty({
+    type: 'number',
+    nullable: true,
+    description: 'Below this the shelf is low; null: not watched',
+  })
+  leastStock!: number | null;
+
+  @ApiProperty({ enum: PART_UNITS, enumName: 'PartUnit', description: 'What it is counted in' })
+  unit!: PartUnit;
+
   @ApiProperty({ type: 'integer', description: 'Send it back with an edit' })
   version!: number;
 
@@ -63,8 +82,11 @@ export class PartSummaryDto {
   updatedBy!: string;
 }
 
-/** What people see of a stored part; the index columns stay inside. */
-export function toPartSummaryDto(part: Part): PartSummaryDto {
+/**
+ * What people see of a stored part; the index columns stay inside.
+ * @param shelf what lies on the shelf, in the part's unit; null when it never lay there (see `StockLevels`)
+ */
+export function toPartSummaryDto(part: Part, shelf: number | null): PartSummaryDto {
   return {
     id: String(part.id),
     number: part.number,
@@ -78,6 +100,9 @@ export function toPartSummaryDto(part: Part): PartSummaryDto {
     supplier: part.supplier,
     note: part.note,
     attributes: part.attributes,
+    shelf,
+    leastStock: part.leastStock === null ? null : fromThousandths(part.leastStock),
+    unit: unitOf(part.kind),
     version: part.version,
     createdAt: part.createdAt,
     updatedAt: part.updatedAt,

@@ -15,6 +15,7 @@ export class PartDto extends PartSummaryDto {
   computed!: GearGeometryDto | null;
 }
 
-export function toPartDto(part: Part): PartDto {
-  return { ...toPartSummaryDto(part), computed: toothedGeometry(part.kind, part.attributes) };
+/** @param shelf as for `toPartSummaryDto` */
+export function toPartDto(part: Part, shelf: number | null): PartDto {
+  return { ...toPartSummaryDto(part, shelf), computed: toothedGeometry(part.kind, part.attributes) };
 }
