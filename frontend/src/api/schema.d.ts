@@ -228,6 +228,134 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/stock': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Stock_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock/places': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Stock_places'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock/movements': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Stock_movements'];
+    put?: never;
+    post: operations['Stock_book'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock/items/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Stock_item'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock/items/{number}/least': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['Stock_setLeast'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/suppliers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_list'];
+    put?: never;
+    post: operations['Suppliers_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/suppliers/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Suppliers_update'];
+    trace?: never;
+  };
+  '/api/suppliers/{code}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/calc/gear': {
     parameters: {
       query?: never;
@@ -593,7 +721,7 @@ export interface components {
       errors?: components['schemas']['ProblemField'][];
       /** @description Also in the server log, to find the request again. */
       requestId: string;
-      /** @description Of a stale edit (code changed-meanwhile): the thing as it stands now. */
+      /** @description Of a stale edit (code changed-meanwhile) or of what the shelf cannot give: the thing as it stands now. */
       current?: {
         [key: string]: unknown;
       };
@@ -632,6 +760,11 @@ export interface components {
       | 'trains.read'
       | 'trains.edit'
       | 'bom.export'
+      | 'prices.read'
+      | 'prices.edit'
+      | 'offers.choose'
+      | 'stock.read'
+      | 'stock.book'
       | 'calc.use'
       | 'people.manage'
       | 'audit.read'
@@ -718,6 +851,10 @@ export interface components {
       searchTimeLimitMs: number;
       /** @description ms */
       briefSearchTimeLimitMs: number;
+      /** @description A price stated longer ago than this is too old, days. */
+      priceAgeDays: number;
+      /** @description Prices in it come first. ISO 4217. */
+      currency: string;
     };
     GearAttributes: {
       /**
@@ -994,6 +1131,11 @@ export interface components {
     PartStanding: 'draft' | 'cleared' | 'withdrawn';
     /** @enum {string} */
     PartSupply: 'made' | 'bought';
+    /**
+     * @description What it is counted in
+     * @enum {string}
+     */
+    PartUnit: 'pcs' | 'l';
     PartSummary: {
       /** @description Stays for good, whatever happens to the part */
       id: string;
@@ -1023,6 +1165,12 @@ export interface components {
         | components['schemas']['FastenerAttributes']
         | components['schemas']['LubricantAttributes']
         | components['schemas']['OtherAttributes'];
+      /** @description What lies on the shelf over all places, in the part's unit; null: never booked */
+      shelf: number | null;
+      /** @description Below this the shelf is low; null: not watched */
+      leastStock: number | null;
+      /** @description What it is counted in */
+      unit: components['schemas']['PartUnit'];
       /** @description Send it back with an edit */
       version: number;
       /** Format: date-time */
@@ -1126,6 +1274,12 @@ export interface components {
         | components['schemas']['FastenerAttributes']
         | components['schemas']['LubricantAttributes']
         | components['schemas']['OtherAttributes'];
+      /** @description What lies on the shelf over all places, in the part's unit; null: never booked */
+      shelf: number | null;
+      /** @description Below this the shelf is low; null: not watched */
+      leastStock: number | null;
+      /** @description What it is counted in */
+      unit: components['schemas']['PartUnit'];
       /** @description Send it back with an edit */
       version: number;
       /** Format: date-time */
@@ -1221,6 +1375,259 @@ export interface components {
         | components['schemas']['FastenerAttributes']
         | components['schemas']['LubricantAttributes']
         | components['schemas']['OtherAttributes'];
+    };
+    StockPlace: {
+      /**
+       * @description Rack, shelf, drawer
+       * @example Rack B 3
+       */
+      place: string;
+      /** @description In the part's unit */
+      quantity: number;
+      /** @description The latest movement there; a count may name the one it saw */
+      lastMovementId: number;
+      /**
+       * Format: date-time
+       * @description Null: never counted
+       */
+      countedAt: string | null;
+    };
+    StockItem: {
+      /** @example KW-00417 */
+      number: string;
+      description: string;
+      kind: components['schemas']['PartKind'];
+      standing: components['schemas']['PartStanding'];
+      unit: components['schemas']['PartUnit'];
+      /** @description The sum over all places */
+      quantity: number;
+      /** @description Below this the shelf is low; null: not watched */
+      leastStock: number | null;
+      low: boolean;
+      /** @description Every place it ever lay at, also those with none left */
+      places: components['schemas']['StockPlace'][];
+      /** @description The part's version; send it back with the least stock */
+      version: number;
+    };
+    StockPage: {
+      items: components['schemas']['StockItem'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    PlaceCount: {
+      /** @example Rack B 3 */
+      place: string;
+      /** @description Parts of which something lies there now */
+      parts: number;
+    };
+    /** @enum {string} */
+    MovementKind: 'received' | 'issued' | 'counted' | 'corrected';
+    Movement: {
+      id: number;
+      /** @example KW-00417 */
+      number: string;
+      description: string;
+      unit: components['schemas']['PartUnit'];
+      kind: components['schemas']['MovementKind'];
+      /** @description What the shelf gained or, below zero, lost */
+      change: number;
+      /** @description What a count found there */
+      counted: number | null;
+      /** @description What lay at the place afterwards */
+      after: number;
+      place: string;
+      /** @description Why, in words; may be empty */
+      reason: string;
+      /** Format: date-time */
+      at: string;
+      /** @description The person's name at that time */
+      by: string;
+    };
+    MovementPage: {
+      items: components['schemas']['Movement'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    MovementInput: {
+      /**
+       * @description Part number, whatever the case of its letters
+       * @example KW-00417
+       */
+      number: string;
+      /** @description Why the quantity changes */
+      kind: components['schemas']['MovementKind'];
+      /** @description In the part's unit. Received or issued: how much, above 0. Counted: what is there, from 0. Corrected: what is added or, below zero, taken off */
+      quantity: number;
+      /**
+       * @description Rack, shelf, drawer
+       * @example Rack B 3
+       */
+      place: string;
+      /** @description Why, in words; a correction needs it */
+      reason?: string;
+      /** @description Chosen by the sender, a new one for each movement: the same request sent twice books once */
+      requestKey?: string;
+      /** @description The latest movement at the place that the sender saw, 0 for none; refused when there was another since */
+      seenMovementId?: number;
+    };
+    LeastStockInput: {
+      /** @description Below this quantity, in the part's unit, the shelf is low; null: nobody watches it */
+      leastStock?: number | null;
+      /** @description The part's version that was seen before */
+      version: number;
+    };
+    /** @enum {string} */
+    SupplierStanding: 'active' | 'closed';
+    /** @enum {string} */
+    SupplierLanguage:
+      | 'en'
+      | 'de'
+      | 'fr'
+      | 'it'
+      | 'es'
+      | 'pt'
+      | 'nl'
+      | 'da'
+      | 'sv'
+      | 'nb'
+      | 'fi'
+      | 'pl'
+      | 'cs'
+      | 'ja'
+      | 'zh'
+      | 'ko'
+      | 'ar'
+      | 'tr';
+    SupplierContact: {
+      /** @description Name */
+      name: string;
+      /**
+       * @description What the person does there
+       * @example Sales
+       */
+      role: string;
+      /** @description E-mail address; blank when it is not known */
+      email: string;
+      /** @description Telephone */
+      phone: string;
+    };
+    /**
+     * @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before
+     * @enum {string}
+     */
+    FreightKind: 'included' | 'flat' | 'free-from' | 'as-charged';
+    FreightRule: {
+      /** @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before */
+      kind: components['schemas']['FreightKind'];
+      /** @description Charge of one order, minor units; only of flat and free-from */
+      charge?: number | null;
+      /** @description Order value from which freight is free, minor units; only of free-from */
+      freeFrom?: number | null;
+    };
+    SupplierOffers: {
+      /** @description Open offers that have not ended */
+      open: number;
+      /** @description Open offers that have ended */
+      expired: number;
+      /**
+       * Format: date
+       * @description Day of the oldest price among the open offers that have not ended
+       */
+      oldestPricedOn: string | null;
+    };
+    Supplier: {
+      id: string;
+      /** @example S-0001 */
+      code: string;
+      name: string;
+      standing: components['schemas']['SupplierStanding'];
+      /**
+       * @description ISO 4217
+       * @example EUR
+       */
+      currency: string;
+      language: components['schemas']['SupplierLanguage'];
+      contacts: components['schemas']['SupplierContact'][];
+      address: string;
+      freight: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units */
+      leastOrderValue: number | null;
+      /** @description Usual lead time, calendar days */
+      leadTimeDays: number | null;
+      note: string;
+      offers: components['schemas']['SupplierOffers'];
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+    };
+    SupplierPage: {
+      items: components['schemas']['Supplier'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    SupplierInput: {
+      /** @description Name, unlike that of any other supplier */
+      name: string;
+      /**
+       * @description What enquiries ask for and new offers start with (ISO 4217)
+       * @example EUR
+       */
+      currency: string;
+      /**
+       * @description Language that enquiries are written in; English when left out
+       * @default en
+       */
+      language: components['schemas']['SupplierLanguage'];
+      /** @description People to send enquiries to */
+      contacts?: components['schemas']['SupplierContact'][];
+      /** @description Postal address */
+      address?: string;
+      /** @description Freight; as charged when left out */
+      freight?: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units; null when there is none */
+      leastOrderValue?: number | null;
+      /** @description Usual lead time, calendar days; null when it is not known */
+      leadTimeDays?: number | null;
+      /** @description Note */
+      note?: string;
+    };
+    SupplierPatch: {
+      /** @description Version that was seen before the edit */
+      version: number;
+      /** @description Name, unlike that of any other supplier */
+      name?: string;
+      /** @description active, or closed: no new offers, and none of theirs is chosen any more */
+      standing?: components['schemas']['SupplierStanding'];
+      /**
+       * @description What enquiries ask for and new offers start with; offers that are there keep theirs (ISO 4217)
+       * @example EUR
+       */
+      currency?: string;
+      /** @description Language that enquiries are written in */
+      language?: components['schemas']['SupplierLanguage'];
+      /** @description People to send enquiries to */
+      contacts?: components['schemas']['SupplierContact'][];
+      /** @description Postal address */
+      address?: string;
+      /** @description Freight, the whole rule in place of the old one */
+      freight?: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units; null when there is none */
+      leastOrderValue?: number | null;
+      /** @description Usual lead time, calendar days; null when it is not known */
+      leadTimeDays?: number | null;
+      /** @description Note */
+      note?: string;
     };
     Rack: {
       /**
@@ -2167,7 +2574,9 @@ export interface components {
       | 'retaining-ring'
       | 'seal'
       | 'housing'
-      | 'lubricant';
+      | 'lubricant'
+      | 'fastener'
+      | 'other';
     GearDataRow: {
       /** @enum {string} */
       group: 'blank' | 'teeth' | 'mate';
@@ -2181,6 +2590,8 @@ export interface components {
     };
     BomLine: {
       findNumber: number;
+      /** @description Stays with the line while its kit asks for the same */
+      key: string;
       /** @description Null: to be made, or to be chosen */
       partNumber: string | null;
       kind: components['schemas']['BomKind'];
@@ -2760,6 +3171,10 @@ export interface operations {
         faceWidthMin?: number;
         /** @description Greatest face width (mm) */
         faceWidthMax?: number;
+        /** @description Only those of which something lies on the shelf */
+        onShelf?: boolean;
+        /** @description Only those below their least stock */
+        low?: boolean;
       };
       header?: never;
       path?: never;
@@ -3070,6 +3485,729 @@ export interface operations {
       header?: never;
       path: {
         number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Place, whole, whatever its case */
+        place?: string;
+        /** @description Only those below their least stock */
+        low?: boolean;
+        kind?: components['schemas']['PartKind'];
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_places: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PlaceCount'][];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_movements: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Part number, whole, whatever its case */
+        part?: string;
+        /** @description Place, whole, whatever its case */
+        place?: string;
+        kind?: components['schemas']['MovementKind'];
+        /** @description First day (UTC) */
+        from?: string;
+        /** @description Last day (UTC) */
+        until?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MovementPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_book: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MovementInput'];
+      };
+    };
+    responses: {
+      /** @description It had been booked before. */
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Movement'];
+        };
+      };
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Movement'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description not-enough-there, too-much-there, or changed-meanwhile: `current` is the shelf as it stands. request-key-used: the key belongs to another movement. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_item: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockItem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Stock_setLeast: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['LeastStockInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockItem'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Somebody else changed the part meanwhile. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Standing */
+        standing?: 'active' | 'closed';
+        /** @description Currency (ISO 4217) */
+        currency?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The name belongs to another supplier. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_update: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Somebody else changed it meanwhile, or has the name. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        code: string;
       };
       cookie?: never;
     };
