@@ -50,10 +50,17 @@ export default tseslint.config(
   { files: ['frontend/public/**/*.js'], languageOptions: { globals: globals.browser, sourceType: 'script' } },
   {
     files: ['libs/units/**/*.ts'],
-    rules: forbid([NODE_OR_FRAMEWORK, inside('gear-geometry', 'train-planner', 'bill-of-materials')], PURE),
+    rules: forbid(
+      [NODE_OR_FRAMEWORK, inside('gear-geometry', 'gear-rating', 'train-planner', 'bill-of-materials')],
+      PURE,
+    ),
   },
   {
     files: ['libs/gear-geometry/**/*.ts'],
+    rules: forbid([NODE_OR_FRAMEWORK, inside('gear-rating', 'train-planner', 'bill-of-materials')], PURE),
+  },
+  {
+    files: ['libs/gear-rating/**/*.ts'],
     rules: forbid([NODE_OR_FRAMEWORK, inside('train-planner', 'bill-of-materials')], PURE),
   },
   {
@@ -62,7 +69,7 @@ export default tseslint.config(
   },
   {
     files: ['libs/bill-of-materials/**/*.ts'],
-    rules: forbid([NODE_OR_FRAMEWORK, inside('gear-geometry', 'train-planner')], PURE),
+    rules: forbid([NODE_OR_FRAMEWORK, inside('gear-geometry', 'gear-rating', 'train-planner')], PURE),
   },
   {
     files: ['backend/src/**/*.ts'],

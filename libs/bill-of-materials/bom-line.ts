@@ -1,4 +1,5 @@
 import { type GearDataRow } from './gear-data.js';
+import { type PartNeed } from './part-finder.js';
 import { type BomKind } from './part-kinds.js';
 
 /** One line of a bill of materials. */
@@ -27,6 +28,12 @@ export interface BomLine {
   flags: string[];
   /** For a gear to be made: its data in the order of ISO 1340. */
   gearData?: GearDataRow[];
+  /** What the places of the line ask the library for. */
+  needs?: PartNeed[];
+  /** The kit's own part or need, where a person chose another part for the line. */
+  replaces?: { partNumber: string | null; description: string };
+  /** Of a line that a person added. */
+  extraLineId?: string;
 }
 
 /** A line before roll-up: no find number yet, and a key only where another part took the place of the kit's own. */

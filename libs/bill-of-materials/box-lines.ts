@@ -15,7 +15,8 @@ export function boxItems(request: KitRequest, library: PartFinder): KitItem[] {
 function housingItem(box: KitBox, library: PartFinder): KitItem {
   const { length, width, height, wall } = box;
   const sizes = [length, width, height].map((size) => formatTrimmed(size, 1)).join(' × ');
-  const part = library.find({ kind: 'housing', length, width, height, wall });
+  const need = { kind: 'housing' as const, length, width, height, wall };
+  const part = library.find(need);
   const density = box.density ?? ALUMINIUM_DENSITY;
   const estimated = !part || part.mass === null;
   return kitItem(
@@ -29,6 +30,7 @@ function housingItem(box: KitBox, library: PartFinder): KitItem {
       source: 'Housing',
       note: estimated ? `Mass as a closed box of ${density.toLocaleString('en-GB')} kg/m³.` : '',
       flags: estimated ? [FLAG.massEstimated] : [],
+      need,
     },
     part,
   );
@@ -37,7 +39,8 @@ function housingItem(box: KitBox, library: PartFinder): KitItem {
 /** A third of the inside, rounded up to 0.1 l: a first figure for splash lubrication, to be settled on the drawing. */
 function lubricantItem(request: KitRequest, library: PartFinder): KitItem {
   const viscosityGrade = request.viscosityGrade ?? 'ISO VG 220';
-  const part = library.find({ kind: 'lubricant', viscosityGrade });
+  const need = { kind: 'lubricant' as const, viscosityGrade };
+  const part = library.find(need);
   const pack = part?.packVolume ?? null;
   const perLitre = part && part.mass !== null && pack ? { ...part, mass: part.mass / pack } : null;
   const packNote = pack ? ` Packs of ${formatTrimmed(pack, 2)} l.` : '';
@@ -53,6 +56,7 @@ function lubricantItem(request: KitRequest, library: PartFinder): KitItem {
       source: 'Housing',
       note: `A third of the inside of the housing.${packNote}`,
       flags: [FLAG.quantityEstimated],
+      need,
     },
     perLitre ?? (part && { ...part, mass: null }),
   );

@@ -1,4 +1,4 @@
-import { type BomLine } from './bom-line.js';
+import { type BomLine, type KitItem } from './bom-line.js';
 import { boxItems } from './box-lines.js';
 import { checkKit } from './check-kit.js';
 import { gearItems } from './gear-lines.js';
@@ -20,11 +20,16 @@ import { shaftItems } from './shaft-lines.js';
  * @throws InputError naming every field that has no meaning
  */
 export function buildBom(request: KitRequest, library: PartFinder): BomLine[] {
+  return rollUp(kitItems(request, library));
+}
+
+/** The kit before roll-up. @throws InputError as `buildBom` */
+export function kitItems(request: KitRequest, library: PartFinder): KitItem[] {
   checkKit(request);
   const mounted = mountGears(request, library);
-  return rollUp([
+  return [
     ...gearItems(mounted, request),
     ...shaftItems(request, mounted, library),
     ...boxItems(request, library),
-  ]);
+  ];
 }

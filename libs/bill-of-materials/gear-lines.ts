@@ -35,6 +35,7 @@ function gearItem(own: MountedGear, mate: MountedGear | undefined, request: KitR
       source: onShaft ? `${own.source}, shaft ${shaft.index}` : own.source,
       note: onShaft ? `Cut on shaft ${shaft.index}; seats and shaft ends as drawn.` : '',
       flags: [...stockFlags(own), ...fitFlags(own), ...handFlags(own, mate)],
+      need: own.need,
     },
     part,
   );

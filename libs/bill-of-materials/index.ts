@@ -17,3 +17,21 @@ export { retainingRingBelow, retainingRingForShaft, type RetainingRing } from '.
 export { bearingBoreFor, isBearingBore } from './bearing-bore.js';
 export * from './paste/index.js';
 export * from './prices/index.js';
+export {
+  buildEditedBom,
+  type AddedLine,
+  type ChosenPart,
+  type EditedBom,
+  type KitEdits,
+} from './edited-bom.js';
+export { fitAsSubstitute } from './substitutes/fit-as-substitute.js';
+export { placeOf, placePart } from './substitutes/place-part.js';
+export type {
+  Fit,
+  FitPlace,
+  RatedStrength,
+  SizesOf,
+  SubstitutePart,
+  SubstituteSizes,
+  SubstituteTeeth,
+} from './substitutes/substitute-part.js';

@@ -1,12 +1,20 @@
 import { keyLengthForHub, parallelKeyForBore } from './parallel-key.js';
 import { type KitGear, type KitRequest, type KitShaft } from './kit.js';
-import { type PartFinder, type PartGear, type PartRef } from './part-finder.js';
+import {
+  type GearNeed,
+  type PartFinder,
+  type PartGear,
+  type PartRef,
+  type PinionShaftNeed,
+} from './part-finder.js';
 
 /** A gear on its shaft, with the library part that stands for it, if any. Lengths mm. */
 export interface MountedGear {
   gear: KitGear;
   shaft: KitShaft;
   part: PartRef | null;
+  /** What the library was asked for. */
+  need: GearNeed | PinionShaftNeed;
   /** null when the pinion is cut on its shaft. */
   bore: number | null;
   /** Length of hub that a key can use. */
@@ -24,17 +32,19 @@ export function mountGears(request: KitRequest, library: PartFinder): MountedGea
 function mountGear(gear: KitGear, shaft: KitShaft, library: PartFinder): MountedGear {
   const source = `Stage ${gear.stage} ${gear.role}`;
   if (isCutOnShaft(gear, shaft)) {
-    const need = { ...toothNeed(gear), shaftDiameter: shaft.diameter, shaftLength: shaft.length };
-    const part = library.find({ kind: 'pinion-shaft', ...need });
-    return { gear, shaft, part, bore: null, hubLength: gear.faceWidth, source };
+    const own = { shaftDiameter: shaft.diameter, shaftLength: shaft.length };
+    const need = { kind: 'pinion-shaft' as const, ...toothNeed(gear), ...own };
+    const part = library.find(need);
+    return { gear, shaft, part, need, bore: null, hubLength: gear.faceWidth, source };
   }
-  const part = library.find({ kind: 'gear', ...toothNeed(gear), bore: shaft.diameter });
+  const need = { kind: 'gear' as const, ...toothNeed(gear), bore: shaft.diameter };
+  const part = library.find(need);
   if (part?.kind === 'pinion-shaft') {
-    return { gear, shaft, part, bore: null, hubLength: gear.faceWidth, source };
+    return { gear, shaft, part, need, bore: null, hubLength: gear.faceWidth, source };
   }
   // A smaller stock bore is bored out to the shaft; a larger one stays as it is and is flagged.
   const bore = Math.max(part?.gear?.bore ?? 0, shaft.diameter);
-  return { gear, shaft, part, bore, hubLength: part?.gear?.hubLength ?? gear.faceWidth, source };
+  return { gear, shaft, part, need, bore, hubLength: part?.gear?.hubLength ?? gear.faceWidth, source };
 }
 
 /**

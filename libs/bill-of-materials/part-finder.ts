@@ -1,4 +1,4 @@
-import { type Hand } from './part-kinds.js';
+import { type BomKind, type Hand } from './part-kinds.js';
 
 /** What the kit needs of one gear. Lengths mm, angles degrees, shift in modules. */
 export interface GearNeed {
@@ -99,10 +99,19 @@ export interface PartGear {
   heatTreatment?: string | null;
 }
 
+/** A part that a person chose for a line: the line it stands on, and what the kit rules would have taken. */
+export interface ChosenInstead {
+  lineKey: string;
+  partNumber: string | null;
+  description: string;
+  /** Why it does not fit the place as it now is; empty when it does. */
+  misfits: string[];
+}
+
 /** A part the library holds, as far as a bill of materials needs it. */
 export interface PartRef {
   number: string;
-  kind: PartNeed['kind'];
+  kind: BomKind;
   description: string;
   material: string | null;
   supply: 'made' | 'bought';
@@ -116,6 +125,7 @@ export interface PartRef {
   length?: number | null;
   /** Lubricants: litres per pack. */
   packVolume?: number | null;
+  instead?: ChosenInstead;
 }
 
 /** Looks parts up. It answers at once: the caller loads what it may need beforehand. */

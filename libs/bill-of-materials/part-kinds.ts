@@ -12,6 +12,8 @@ export const BOM_KINDS = [
   'seal',
   'housing',
   'lubricant',
+  'fastener',
+  'other',
 ] as const;
 
 export type BomKind = (typeof BOM_KINDS)[number];

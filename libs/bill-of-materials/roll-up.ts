@@ -1,10 +1,11 @@
 import { type BomLine, type KitItem } from './bom-line.js';
 import { type GearDataRow } from './gear-data.js';
+import { type PartNeed } from './part-finder.js';
 import { BOM_KINDS } from './part-kinds.js';
 
 /**
  * Merges equal parts and numbers the lines. Equal means the same number, make, material, supply, mass and gear data
- * (the mate aside); quantities add up, sources, notes and flags are kept. Lines stand by kind in the declared order
+ * (the mate aside), and no key of their own or the same; quantities add up, sources, notes and flags are kept. Lines stand by kind in the declared order
  * and, within a kind, in the order in which they first came. Every line gets a key of its own.
  */
 export function rollUp(items: readonly KitItem[]): BomLine[] {
@@ -36,8 +37,8 @@ function withKeys(items: readonly KitItem[]): Omit<BomLine, 'findNumber'>[] {
 
 function identity(item: KitItem): string {
   const teeth = item.gearData?.filter((row) => row.group !== 'mate').map((row) => row.value);
-  const { kind, partNumber, description, unit, material, supply, supplier, mass } = item;
-  return JSON.stringify([kind, partNumber, description, unit, material, supply, supplier, mass, teeth]);
+  const { key = null, kind, partNumber, description, unit, material, supply, supplier, mass } = item;
+  return JSON.stringify([key, kind, partNumber, description, unit, material, supply, supplier, mass, teeth]);
 }
 
 function joined(line: KitItem, item: KitItem): KitItem {
@@ -48,6 +49,7 @@ function joined(line: KitItem, item: KitItem): KitItem {
     source: union(line.source, item.source),
     note: union([line.note], [item.note]).filter(Boolean).join(' '),
     flags: union(line.flags, item.flags),
+    ...(line.needs && item.needs ? { needs: distinct([...line.needs, ...item.needs]) } : {}),
   };
   if (!line.gearData || !item.gearData) return whole;
   return { ...whole, gearData: joinedGearData(line.gearData, item.gearData) };
@@ -61,6 +63,11 @@ function joinedGearData(rows: GearDataRow[], others: GearDataRow[]): GearDataRow
     const values = union(String(row.value ?? 'to be made').split('; '), [String(other ?? 'to be made')]);
     return { ...row, value: values.join('; ') };
   });
+}
+
+/** Needs that are the same are asked once. */
+function distinct(needs: readonly PartNeed[]): PartNeed[] {
+  return [...new Map(needs.map((need) => [JSON.stringify(need), need])).values()];
 }
 
 function union(first: readonly string[], second: readonly string[]): string[] {

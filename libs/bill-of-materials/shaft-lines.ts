@@ -41,7 +41,8 @@ export function shaftItems(
 
 function shaftItem(shaft: KitShaft, library: PartFinder): KitItem {
   const { diameter, length } = shaft;
-  const part = library.find({ kind: 'shaft', partNumber: shaft.partNumber ?? null, diameter, length });
+  const need = { kind: 'shaft' as const, partNumber: shaft.partNumber ?? null, diameter, length };
+  const part = library.find(need);
   const stockLength = part?.length ?? null;
   const flags: string[] = [];
   // The span is between the bearing faces: a shaft no longer than that has nothing for the bearings to sit on.
@@ -64,6 +65,7 @@ function shaftItem(shaft: KitShaft, library: PartFinder): KitItem {
         ? `Cut from stock: ${formatTrimmed(length, 2)} mm between bearing faces, and seats and shaft ends as drawn.`
         : 'Length between bearing faces; seats and shaft ends as drawn.',
       flags,
+      need,
     },
     part,
   );
@@ -76,6 +78,7 @@ function bearingItem({ diameter, index }: KitShaft, library: PartFinder): KitIte
     const advice = next === null ? 'choose a bearing by hand' : `the next bearing bore is ${next} mm`;
     flags.push(`${formatTrimmed(diameter, 3)} mm is no bearing bore; ${advice}`);
   }
+  const need = { kind: 'bearing' as const, bore: diameter };
   return kitItem(
     {
       kind: 'bearing',
@@ -86,8 +89,9 @@ function bearingItem({ diameter, index }: KitShaft, library: PartFinder): KitIte
       mass: null,
       source: `Shaft ${index}`,
       flags,
+      need,
     },
-    library.find({ kind: 'bearing', bore: diameter }),
+    library.find(need),
   );
 }
 
@@ -106,9 +110,10 @@ function keyItem(gear: MountedGear & { bore: number }, library: PartFinder): Kit
   const description = `Parallel key DIN 6885-1 A ${width} × ${height} × ${length}`;
   const mass = keyVolume(width, height, length) * STEEL_DENSITY * 1e-9;
   const note = `Keyway: t1 ${key.shaftDepth.toFixed(1)} mm in the shaft, t2 ${key.hubDepth.toFixed(1)} mm in the hub.`;
+  const need = { kind: 'key' as const, width, height, length };
   return kitItem(
-    { ...boughtSteel('key', description, gear.source), mass, note, flags },
-    library.find({ kind: 'key', width, height, length }),
+    { ...boughtSteel('key', description, gear.source), mass, note, flags, need },
+    library.find(need),
   );
 }
 
@@ -127,13 +132,15 @@ function ringItem(seat: number, source: string, library: PartFinder): KitItem {
   const { shaftDiameter, thickness } = ring;
   const description = `Retaining ring DIN 471 ${shaftDiameter} × ${thickness}`;
   const note = `Groove Ø${ring.grooveDiameter} mm, ${ring.grooveWidth} mm wide.`;
+  const need = { kind: 'retaining-ring' as const, shaftDiameter, thickness };
   return kitItem(
-    { ...boughtSteel('retaining-ring', description, source), mass: null, note },
-    library.find({ kind: 'retaining-ring', shaftDiameter, thickness }),
+    { ...boughtSteel('retaining-ring', description, source), mass: null, note, need },
+    library.find(need),
   );
 }
 
 function sealItem({ diameter }: KitShaft, source: string, library: PartFinder): KitItem {
+  const need = { kind: 'seal' as const, shaftDiameter: diameter };
   return kitItem(
     {
       kind: 'seal',
@@ -143,8 +150,9 @@ function sealItem({ diameter }: KitShaft, source: string, library: PartFinder): 
       supply: 'bought',
       mass: null,
       source,
+      need,
     },
-    library.find({ kind: 'seal', shaftDiameter: diameter }),
+    library.find(need),
   );
 }
 

@@ -8,8 +8,7 @@ import { isToothed } from './part-kinds.js';
 export function toPartRef(part: Part): PartRef {
   return {
     number: part.number,
-    // A kit never asks for fasteners and others; a part chosen by number is passed on as what it is.
-    kind: part.kind as PartRef['kind'],
+    kind: part.kind,
     description: part.description,
     material: part.material,
     supply: part.supply,
