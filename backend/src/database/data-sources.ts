@@ -1,15 +1,11 @@
 import { chmodSync, mkdirSync } from 'node:fs';
 import path from 'node:path';
-import type BetterSqlite3 from 'better-sqlite3';
 import { DataSource, type DataSourceOptions } from 'typeorm';
+import { setUpReading, setUpWriting } from './connection.js';
 import { ENTITIES } from './entities.js';
 import { MIGRATIONS } from './migrations.js';
 
 export const DATABASE_FILE = 'stageyard.db';
-
-const BUSY_TIMEOUT_MS = 5000;
-/** 64 MiB: with the driver's 2 MiB, lists over 300,000 parts take three times as long (negative means KiB). */
-const CACHE_SIZE = -64 * 1024;
 
 /** Creates the data folder when it is missing; nobody but the owner of the process may look into it. */
 export function makeDataFolder(dataDir: string): void {
@@ -34,11 +30,7 @@ export function readingOptions(dataDir: string): DataSourceOptions {
   return {
     ...sharedOptions(path.join(dataDir, DATABASE_FILE)),
     readonly: true,
-    prepareDatabase: (database: BetterSqlite3.Database) => {
-      database.pragma(`busy_timeout = ${BUSY_TIMEOUT_MS}`);
-      database.pragma(`cache_size = ${CACHE_SIZE}`);
-      database.pragma('query_only = ON');
-    },
+    prepareDatabase: setUpReading,
   };
 }
 
@@ -47,12 +39,7 @@ function writingOptions(file: string): DataSourceOptions {
     ...sharedOptions(file),
     enableWAL: true,
     migrations: MIGRATIONS,
-    prepareDatabase: (database: BetterSqlite3.Database) => {
-      database.pragma(`busy_timeout = ${BUSY_TIMEOUT_MS}`);
-      database.pragma(`cache_size = ${CACHE_SIZE}`);
-      // In WAL mode the weaker setting may lose the last commits when the power fails.
-      database.pragma('synchronous = FULL');
-    },
+    prepareDatabase: setUpWriting,
   };
 }
 

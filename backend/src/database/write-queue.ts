@@ -35,11 +35,24 @@ export class WriteQueue implements OnApplicationShutdown {
    * @throws Error when called from inside another work: that would wait for itself for ever
    */
   async run<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
+    return this.#enqueue((write) => this.#running.run(write, () => this.#source.transaction(work)));
+  }
+
+  /**
+   * Keeps every other write waiting while a thread writes on a connection of its own. Resolves when the turn is over.
+   * @param turn settles once the thread has committed or rolled back
+   * @throws Error when called from inside another work: that would wait for itself for ever
+   */
+  async lease<T>(turn: () => Promise<T>): Promise<T> {
+    return this.#enqueue((write) => this.#running.run(write, turn));
+  }
+
+  async #enqueue<T>(work: (write: RunningWrite) => Promise<T>): Promise<T> {
     if (this.#running.getStore()?.open) {
       throw new Error('WriteQueue.run was called inside a write. Pass the manager on instead.');
     }
     if (this.#closed) throw new Error('The database is closed.');
-    const result = this.#tail.then(() => this.#transaction(work));
+    const result = this.#tail.then(() => this.#timed(work));
     this.#tail = result.catch(() => undefined);
     return result;
   }
@@ -51,11 +64,11 @@ export class WriteQueue implements OnApplicationShutdown {
     this.#afterClose();
   }
 
-  async #transaction<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
+  async #timed<T>(work: (write: RunningWrite) => Promise<T>): Promise<T> {
     const write: RunningWrite = { open: true };
     const start = performance.now();
     try {
-      return await this.#running.run(write, () => this.#source.transaction(work));
+      return await work(write);
     } finally {
       write.open = false;
       const elapsed = performance.now() - start;

@@ -28,7 +28,7 @@ afterAll(() => library.close());
 /** Numbers found when words of that many matches count as common. */
 async function found(text: string, many?: number): Promise<string[]> {
   const rows = source.getRepository(Part).createQueryBuilder('part').orderBy('part.number');
-  await narrowToText(rows, text, many);
+  await narrowToText(rows, text, many === undefined ? {} : { many });
   return (await rows.getMany()).map(({ number }) => number);
 }
 

@@ -1,4 +1,5 @@
-import { Brackets, type SelectQueryBuilder } from 'typeorm';
+import { Brackets, type DataSource, type SelectQueryBuilder } from 'typeorm';
+import { type ReadStatement } from '../database/read-task.js';
 import { type Part } from './entities/part.entity.js';
 
 /** Words beyond these are left out of account: they would only slow the search down. */
@@ -22,16 +23,33 @@ const isIndexed = (word: string) => [...word].length >= SHORTEST_INDEXED;
 /** Beyond these letters only the index takes capitals and small letters for the same. */
 const isPlain = (word: string) => /^[ -~]*$/.test(word);
 
+export interface TextSearchOptions {
+  many?: number;
+  countOf?: (statement: ReadStatement) => Promise<number>;
+}
+
+const countBy =
+  (source: DataSource) =>
+  async ({ sql, params }: ReadStatement): Promise<number> => {
+    const [found] = await source.query<{ count: number }[]>(sql, [...params]);
+    return found?.count ?? 0;
+  };
+
 /**
  * Narrows a query over parts (alias `part`) to those whose number or description holds every word of the text,
  * wherever it stands and whatever its case. Rare words are looked up in the trigram index; common and short ones are
  * looked for part by part.
- * @param many matches from which on words count as common
+ * @param options `many`: matches from which on words count as common; `countOf`: counts by a statement whose one answer
+ * is `count`, here and now when left out
  */
-export async function narrowToText(rows: SelectQueryBuilder<Part>, text: string, many = MANY): Promise<void> {
+export async function narrowToText(
+  rows: SelectQueryBuilder<Part>,
+  text: string,
+  { many = MANY, countOf = countBy(rows.connection) }: TextSearchOptions = {},
+): Promise<void> {
   const words = wordsOf(text);
   const indexed = words.filter(isIndexed);
-  if (indexed.length > 0 && !(indexed.every(isPlain) && (await matchesOf(rows, indexed, many)) >= many)) {
+  if (indexed.length > 0 && !(indexed.every(isPlain) && (await countOf(matchesOf(indexed, many))) >= many)) {
     matchIndexed(rows, indexed);
     matchPartByPart(
       rows,
@@ -51,13 +69,12 @@ export function narrowToAnyOf(rows: SelectQueryBuilder<Part>, text: string, enou
   rows.limit(enough);
 }
 
-/** How many parts the index finds, counted no further than `most`. */
-async function matchesOf(rows: SelectQueryBuilder<Part>, words: string[], most: number): Promise<number> {
-  const [found] = await rows.connection.query<{ count: number }[]>(
-    `SELECT COUNT(*) AS "count" FROM (SELECT 1 FROM "part_search" WHERE "part_search" MATCH ? LIMIT ?)`,
-    [matchOf(words), most],
-  );
-  return found?.count ?? 0;
+/** Counts the parts that the index finds, no further than `most`. */
+function matchesOf(words: string[], most: number): ReadStatement {
+  return {
+    sql: `SELECT COUNT(*) AS "count" FROM (SELECT 1 FROM "part_search" WHERE "part_search" MATCH ? LIMIT ?)`,
+    params: [matchOf(words), most],
+  };
 }
 
 function matchIndexed(rows: SelectQueryBuilder<Part>, words: string[], enough?: number): void {

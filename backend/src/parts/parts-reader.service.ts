@@ -1,13 +1,16 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { In, Repository, type SelectQueryBuilder } from 'typeorm';
+import { Repository, type SelectQueryBuilder } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import { type Change } from '../audit/dto/change.js';
 import { notFound } from '../common/errors.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery, type SortKey } from '../common/list-query.js';
+import { type ReadStatement, type Row } from '../database/read-task.js';
+import { ReadThreads } from '../database/read-threads.js';
 import { hasStock, isLow } from '../stock/shelf-conditions.js';
 import { StockLevels } from '../stock/stock-levels.service.js';
-import { type PartFacetsDto } from './dto/part-facets.dto.js';
+import { type FigureCountDto, type PartFacetsDto, type TextCountDto } from './dto/part-facets.dto.js';
+import { type PartAttributes } from './dto/attributes/part-attributes.js';
 import { PART_SORTS, type PartListQueryDto, type PartSort } from './dto/part-list-query.dto.js';
 import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js';
 import { type PartDto, toPartDto } from './dto/part.dto.js';
@@ -34,42 +37,48 @@ export class PartsReader {
     @InjectRepository(Part) private readonly parts: Repository<Part>,
     private readonly audit: AuditService,
     private readonly levels: StockLevels,
+    private readonly threads: ReadThreads,
   ) {}
 
   /** One page of the library; sorted by number when nothing else is asked for. */
   async list(query: PartListQueryDto): Promise<Page<PartSummaryDto>> {
     const list = parseListQuery(query, PART_SORTS);
     const rows = this.filtered(query);
-    if (list.text) await narrowToText(rows, list.text);
-    const total = await rows.getCount();
+    if (list.text) await narrowToText(rows, list.text, { countOf: (statement) => this.countOf(statement) });
+    const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     order(rows, list.sorts.length > 0 ? list.sorts : [{ field: 'number', direction: 'ASC' }]);
     // Sorting ids alone keeps the sort small: whole rows are read for this page only.
-    const ids = await rows
-      .select('part.id', 'id')
-      .offset(list.skip)
-      .limit(list.size)
-      .getRawMany<{ id: number }>();
-    return pageOf(await this.withShelf(await this.byIds(ids.map(({ id }) => id))), total, list);
+    const page = rows.select('part.id', 'id').offset(list.skip).limit(list.size);
+    const [counted, found] = await this.threads.read(count, statementOf(page, { whole: WHOLE_PART }));
+    return pageOf(await this.withShelf((found ?? []).map(partOf)), countIn(counted), list);
   }
 
   /** What the library holds, counted for the choices of the filter bar. */
   async facets(): Promise<PartFacetsDto> {
-    const counts = <T>(column: string, limit?: number) =>
-      this.parts
+    const counts = (column: keyof Part, limit?: number) => {
+      const rows = this.parts
         .createQueryBuilder('part')
         .select(`part.${column}`, 'value')
         .addSelect('COUNT(*)', 'count')
         .where(`part.${column} IS NOT NULL`)
         .groupBy(`part.${column}`)
         .orderBy(limit ? 'count' : 'value', limit ? 'DESC' : 'ASC')
-        .limit(limit)
-        .getRawMany<{ value: T; count: number }>();
-    const materials = await counts<string>('material', MOST_MATERIALS);
+        .limit(limit);
+      return statementOf(rows, { keep: true });
+    };
+    const [kinds, standings, modules, materials] = await this.threads.read(
+      counts('kind'),
+      counts('standing'),
+      counts('module'),
+      counts('material', MOST_MATERIALS),
+    );
     return {
-      kinds: await counts<string>('kind'),
-      standings: await counts<string>('standing'),
-      modules: await counts<number>('module'),
-      materials: materials.sort((a, b) => a.value.localeCompare(b.value, 'en')),
+      kinds: kinds as unknown as TextCountDto[],
+      standings: standings as unknown as TextCountDto[],
+      modules: modules as unknown as FigureCountDto[],
+      materials: (materials as unknown as TextCountDto[]).sort((a, b) =>
+        a.value.localeCompare(b.value, 'en'),
+      ),
     };
   }
 
@@ -102,8 +111,10 @@ export class PartsReader {
     return [...found.values()].slice(0, limit).map(({ number, description }) => ({ number, description }));
   }
 
-  count(standing?: PartStanding): Promise<number> {
-    return this.parts.countBy(standing ? { standing } : {});
+  async count(standing?: PartStanding): Promise<number> {
+    const rows = this.parts.createQueryBuilder('part').select('COUNT(*)', 'count');
+    if (standing) rows.where({ standing });
+    return this.countOf(statementOf(rows));
   }
 
   /** Parts of one standing, the last changed first. */
@@ -117,10 +128,9 @@ export class PartsReader {
     return parts.map((part) => toPartSummaryDto(part, shelves.get(part.id)?.total ?? null));
   }
 
-  /** Parts in the order of the ids. */
-  private async byIds(ids: number[]): Promise<Part[]> {
-    const found = new Map((await this.parts.findBy({ id: In(ids) })).map((part) => [part.id, part]));
-    return ids.flatMap((id) => found.get(id) ?? []);
+  private async countOf(statement: ReadStatement): Promise<number> {
+    const [counted] = await this.threads.read({ ...statement, keep: true });
+    return countIn(counted);
   }
 
   private async entity(number: string): Promise<Part> {
@@ -139,6 +149,26 @@ export class PartsReader {
     if (query.low) isLow(rows);
     return rows;
   }
+}
+
+/** A part as a reading thread finds it by its id. */
+const WHOLE_PART = 'SELECT * FROM "part" WHERE "id" = ?';
+
+function statementOf(
+  rows: SelectQueryBuilder<Part>,
+  options: Pick<ReadStatement, 'keep' | 'whole'> = {},
+): ReadStatement {
+  const [sql, params] = rows.getQueryAndParameters();
+  return { sql, params: params as unknown[], ...options };
+}
+
+function countIn(rows: Row[] | undefined): number {
+  return Number(rows?.[0]?.count ?? 0);
+}
+
+/** The columns of the table are the entity's fields; only the attributes are text there. */
+function partOf(row: Row): Part {
+  return { ...(row as unknown as Part), attributes: JSON.parse(String(row.attributes)) as PartAttributes };
 }
 
 /** Each filter with the column and comparison it stands for. */
