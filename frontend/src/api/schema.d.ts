@@ -356,6 +356,54 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/offers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Offers_list'];
+    put?: never;
+    post: operations['Offers_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/offers/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Offers_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Offers_update'];
+    trace?: never;
+  };
+  '/api/offers/{id}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Offers_changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/calc/gear': {
     parameters: {
       query?: never;
@@ -620,6 +668,54 @@ export interface paths {
       cookie?: never;
     };
     get: operations['Trains_bom'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/prices': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['TrainPrices_read'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/buying': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['TrainPrices_choose'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/searches/{id}/supply': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OptionSupply_read'];
     put?: never;
     post?: never;
     delete?: never;
@@ -1629,6 +1725,199 @@ export interface components {
       /** @description Note */
       note?: string;
     };
+    OfferedPart: {
+      /** @example KW-00417 */
+      number: string;
+      description: string;
+      kind: components['schemas']['PartKind'];
+      standing: components['schemas']['PartStanding'];
+      /** @description All quantities of the offer are in it */
+      unit: components['schemas']['PartUnit'];
+    };
+    OfferingSupplier: {
+      /** @example S-0001 */
+      code: string;
+      name: string;
+      standing: components['schemas']['SupplierStanding'];
+    };
+    /** @enum {string} */
+    OfferStanding: 'open' | 'closed';
+    /**
+     * @description Today
+     * @enum {string}
+     */
+    OfferState: 'valid' | 'not-yet' | 'expired' | 'closed';
+    PriceBreak: {
+      /** @description From this quantity on, in the part's unit */
+      quantity: number;
+      /** @description Price of `per` units, minor units of the offer's currency */
+      unitPrice: number;
+    };
+    Offer: {
+      id: string;
+      part: components['schemas']['OfferedPart'];
+      supplier: components['schemas']['OfferingSupplier'];
+      /** @description The supplier's own number; blank when it is not known */
+      supplierPartNumber: string;
+      standing: components['schemas']['OfferStanding'];
+      /** @description Today */
+      state: components['schemas']['OfferState'];
+      /**
+       * @description ISO 4217
+       * @example EUR
+       */
+      currency: string;
+      /**
+       * @description Prices are for this many
+       * @enum {integer}
+       */
+      per: 1 | 10 | 100 | 1000;
+      /** @description The smallest quantity first */
+      breaks: components['schemas']['PriceBreak'][];
+      /** @description Sold in multiples of this */
+      pack: number;
+      leastQuantity: number;
+      /** @description Calendar days, as the offer states it */
+      leadTimeDays: number | null;
+      /** @description Calendar days; the supplier's usual ones where the offer states none */
+      effectiveLeadTimeDays: number | null;
+      /** Format: date */
+      validFrom: string;
+      /**
+       * Format: date
+       * @description Last day; null: until further notice
+       */
+      validUntil: string | null;
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the price
+       */
+      pricedOn: string;
+      /** @description Days since the supplier stated the price */
+      ageDays: number;
+      /** @description The price is older than the house rule allows */
+      tooOld: boolean;
+      source: string;
+      note: string;
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+    };
+    OfferPage: {
+      items: components['schemas']['Offer'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    OfferInput: {
+      /**
+       * @description Part that is offered
+       * @example KW-00417
+       */
+      partNumber: string;
+      /**
+       * @description Code of the supplier
+       * @example S-0001
+       */
+      supplierCode: string;
+      /** @description The supplier's own number for the part */
+      supplierPartNumber?: string;
+      /**
+       * @description Currency of the prices; the supplier's when left out (ISO 4217)
+       * @example EUR
+       */
+      currency?: string;
+      /**
+       * @description Prices are for this many; 1 when left out
+       * @default 1
+       * @enum {number}
+       */
+      per: 1 | 10 | 100 | 1000;
+      /** @description Price breaks, the smallest quantity first */
+      breaks: components['schemas']['PriceBreak'][];
+      /** @description Sold in multiples of this; 1 when left out */
+      pack?: number;
+      /** @description Least quantity of one order; the smallest price break when left out */
+      leastQuantity?: number;
+      /** @description Lead time, calendar days; null: the supplier's usual one */
+      leadTimeDays?: number | null;
+      /**
+       * Format: date
+       * @description First day on which it can be ordered; today when left out
+       * @example 2026-03-31
+       */
+      validFrom?: string;
+      /**
+       * Format: date
+       * @description Last day; null: until further notice
+       * @example 2026-03-31
+       */
+      validUntil?: string | null;
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the price; today when left out
+       * @example 2026-03-31
+       */
+      pricedOn?: string;
+      /** @description Where the price comes from: a quotation, a price list, a call */
+      source?: string;
+      /** @description Note */
+      note?: string;
+    };
+    OfferPatch: {
+      /** @description Version that was seen before the edit */
+      version: number;
+      /** @description The supplier's own number for the part */
+      supplierPartNumber?: string;
+      /** @description open, or closed: kept for the record and never chosen */
+      standing?: components['schemas']['OfferStanding'];
+      /**
+       * @description Currency of the prices (ISO 4217)
+       * @example EUR
+       */
+      currency?: string;
+      /**
+       * @description Prices are for this many
+       * @enum {number}
+       */
+      per?: 1 | 10 | 100 | 1000;
+      /** @description Price breaks, the smallest quantity first */
+      breaks?: components['schemas']['PriceBreak'][];
+      /** @description Sold in multiples of this */
+      pack?: number;
+      /** @description Least quantity of one order */
+      leastQuantity?: number;
+      /** @description Lead time, calendar days; null: the supplier's usual one */
+      leadTimeDays?: number | null;
+      /**
+       * Format: date
+       * @description First day on which it can be ordered
+       * @example 2026-03-31
+       */
+      validFrom?: string;
+      /**
+       * Format: date
+       * @description Last day; null: until further notice
+       * @example 2026-03-31
+       */
+      validUntil?: string | null;
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the price
+       * @example 2026-03-31
+       */
+      pricedOn?: string;
+      /** @description Where the price comes from: a quotation, a price list, a call */
+      source?: string;
+      /** @description Note */
+      note?: string;
+    };
     Rack: {
       /**
        * @description Addendum (modules)
@@ -2219,6 +2508,8 @@ export interface components {
       bestOf: 'all' | 'each-count';
       /** @description Recorded; used for shaft speeds and sizes. Strength is not rated from it yet. */
       duty?: components['schemas']['Duty'];
+      /** @description Trains to be built at once; options are priced for so many */
+      buildQuantity?: number;
     };
     BriefInput: {
       /**
@@ -2446,6 +2737,11 @@ export interface components {
       /** @description The brief's title when left out */
       title?: string;
     };
+    OfferChoice: {
+      partNumber: string;
+      /** @description Id of the offer */
+      offerId: string;
+    };
     TrainShaft: {
       /** @description 0 is the input */
       index: number;
@@ -2540,6 +2836,10 @@ export interface components {
       note: string;
       /** @description Key of the option it was taken from */
       optionKey: string;
+      /** @description Trains built at once */
+      buildQuantity: number;
+      /** @description Parts whose offer a person chose */
+      offerChoices: components['schemas']['OfferChoice'][];
       figures: components['schemas']['TrainFigures'];
     };
     GearChoice: {
@@ -2628,6 +2928,173 @@ export interface components {
       totals: components['schemas']['BomTotals'];
       /** @description Every flag that stands on a line, once */
       flags: string[];
+    };
+    PriceSupplier: {
+      /** @example S-0001 */
+      code: string;
+      name: string;
+    };
+    CheaperOrder: {
+      /** @description In the line's unit */
+      orderQuantity: number;
+      /** @description Minor units of the currency of the price */
+      lineTotal: number;
+      /** @description Minor units less than what is needed costs */
+      saves: number;
+    };
+    LinePrice: {
+      offerId: string;
+      supplier: components['schemas']['PriceSupplier'];
+      /** @description Blank when it is not known */
+      supplierPartNumber: string;
+      /** @description ISO 4217 */
+      currency: string;
+      /**
+       * @description The unit price is for this many
+       * @enum {integer}
+       */
+      per: 1 | 10 | 100 | 1000;
+      /** @description Minor units, at the break that the order reaches */
+      unitPrice: number;
+      /** @description Whole packs, at least the least quantity */
+      orderQuantity: number;
+      /** @description Minor units: order quantity × unit price ÷ per, rounded once */
+      lineTotal: number;
+      /** @description Ordered beyond the need */
+      surplus: number;
+      cheaperAt: components['schemas']['CheaperOrder'] | null;
+      /** @description Calendar days; the supplier's usual lead time where the offer has none; null: not known */
+      leadTimeDays: number | null;
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the price
+       */
+      pricedOn: string;
+      /** @description Age of the price, calendar days */
+      ageDays: number;
+      /** @description Older than the house rule allows */
+      tooOld: boolean;
+      /**
+       * Format: date
+       * @description Last day; null: until further notice
+       */
+      validUntil: string | null;
+      /** @enum {string} */
+      chosenBy: 'rule' | 'person';
+    };
+    TrainPriceLine: {
+      /** @description Key of the line of the bill of materials */
+      key: string;
+      findNumber: number;
+      partNumber: string | null;
+      /** @description Quantity of the line × build quantity */
+      needed: number;
+      /** @enum {string} */
+      unit: 'pcs' | 'l' | 'm';
+      /** @description Null: it has no place on a shelf */
+      onShelf: number | null;
+      price: components['schemas']['LinePrice'] | null;
+      /** @enum {string|null} */
+      reason: 'made' | 'no-part' | 'no-offers' | 'none-valid' | null;
+      /** @description Further offers that could be used */
+      otherOffers: number;
+    };
+    PriceTotal: {
+      /** @description ISO 4217 */
+      currency: string;
+      /** @description Minor units */
+      minor: number;
+      /** @description Lines in the sum */
+      lines: number;
+    };
+    UnpricedLine: {
+      findNumber: number;
+      key: string;
+      /** @enum {string} */
+      reason: 'made' | 'no-part' | 'no-offers' | 'none-valid';
+    };
+    LostChoice: {
+      partNumber: string;
+      offerId: string;
+      /** @description Key of the line; null: the part is on no line */
+      key: string | null;
+      /** @description What is the matter and what stands in its place */
+      message: string;
+    };
+    ShelfCover: {
+      /** @description Lines whose whole need lies on the shelf */
+      covered: number;
+      /** @description Lines with a part of the library */
+      lines: number;
+    };
+    TrainPrices: {
+      buildQuantity: number;
+      /**
+       * Format: date
+       * @description The day that offers are held against
+       */
+      on: string;
+      /** @description Every line of the bill of materials, in its order */
+      lines: components['schemas']['TrainPriceLine'][];
+      /** @description The house currency first; never added to each other */
+      totals: components['schemas']['PriceTotal'][];
+      /** @description Lines to be bought without a price */
+      unpriced: components['schemas']['UnpricedLine'][];
+      /** @description Offers chosen by a person that are not used */
+      lostChoices: components['schemas']['LostChoice'][];
+      /** Format: date */
+      oldestPricedOn: string | null;
+      /** @description Prices older than the house rule allows */
+      tooOld: number;
+      /** @description Of the lead times that are known (days) */
+      longestLeadTimeDays: number | null;
+      shelf: components['schemas']['ShelfCover'];
+    };
+    OfferChoiceInput: {
+      /** @description A part on the bill of materials */
+      partNumber: string;
+      /** @description Id of an offer for it; null: the rule chooses */
+      offerId?: string | null;
+    };
+    BuyingInput: {
+      /** @description The version that was seen */
+      version: number;
+      /** @description Trains built at once */
+      buildQuantity?: number;
+      /** @description Parts whose offer changes; the others keep theirs */
+      choices?: components['schemas']['OfferChoiceInput'][];
+    };
+    OptionCost: {
+      /** @description ISO 4217 */
+      currency: string;
+      /** @description Minor units */
+      minor: number;
+    };
+    OptionSupply: {
+      /** @description The option's key */
+      key: string;
+      /** @description Gear lines: equal gears count once */
+      gears: number;
+      /** @description Lines that the library has a gear for */
+      fromStock: number;
+      /** @description Lines whose whole need lies on the shelf */
+      onShelf: number;
+      /** @description Lines to be made: the library has no such gear */
+      toMake: number;
+      /** @description Of the priced lines, the house currency first; what lies on the shelf is not taken off */
+      costs: components['schemas']['OptionCost'][];
+      /** @description Lines in the costs */
+      priced: number;
+      /** @description Lines that no cost holds: to be made, or without a valid offer */
+      unpriced: number;
+      /** @description Of the priced lines, where known (days) */
+      longestLeadTimeDays: number | null;
+    };
+    SearchSupply: {
+      /** @description Builds counted with */
+      quantity: number;
+      /** @description In the order of the options; empty until the search ended */
+      options: components['schemas']['OptionSupply'][];
     };
     FoundPart: {
       number: string;
@@ -4258,6 +4725,340 @@ export interface operations {
       };
     };
   };
+  Offers_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Code of the supplier */
+        supplier?: string;
+        /** @description Part number, whole */
+        part?: string;
+        /** @description Currency (ISO 4217) */
+        currency?: string;
+        /** @description State today */
+        state?: 'valid' | 'not-yet' | 'expired' | 'closed';
+        /** @description true: the price is older than the house rule allows */
+        tooOld?: boolean;
+        /** @description Valid today, with a last day at or before this one */
+        endsBy?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OfferPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Offers_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OfferInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Offer'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The very same offer is open already. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Offers_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Offer'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Offers_update: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OfferPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Offer'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Somebody else changed it meanwhile. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Offers_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
   Calc_gear: {
     parameters: {
       query?: never;
@@ -5476,6 +6277,171 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Bom'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  TrainPrices_read: {
+    parameters: {
+      query?: {
+        /** @description Builds to count with; the build quantity that was named when left out, else 1 */
+        quantity?: number;
+        /** @description What ranks the offers */
+        prefer?: 'price' | 'arrival';
+      };
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TrainPrices'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  TrainPrices_choose: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BuyingInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Train'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description It changed since; `current` is how it stands now. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OptionSupply_read: {
+    parameters: {
+      query?: {
+        /** @description Builds to count with; the build quantity that was named when left out, else 1 */
+        quantity?: number;
+      };
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SearchSupply'];
         };
       };
       /** @description Nobody is signed in. */
