@@ -12,7 +12,7 @@ import { type BriefDto } from './dto/brief.dto.js';
 import { type BriefInputDto } from './dto/brief-input.dto.js';
 import { type BriefPatchDto } from './dto/brief-patch.dto.js';
 import { Brief } from './entities/brief.entity.js';
-import { checkRequirement } from './requirement.js';
+import { checkRequirement, findsTheSame } from './requirement.js';
 
 type Person = Pick<SignedInUser, 'id' | 'name'>;
 
@@ -56,6 +56,7 @@ export class BriefsService {
 
   /**
    * Changes what the patch names. A new requirement makes the brief `open` again: what was found belongs to the old one.
+   * Another build quantity alone does not: the options stay, only their prices change.
    * @throws ProblemError 400, 404, or 409 when the brief changed since the version that was seen
    */
   async edit(id: string, patch: BriefPatchDto, actor: Person): Promise<BriefDto> {
@@ -63,7 +64,8 @@ export class BriefsService {
     const requirement = patch.requirement && checkRequirement(patch.requirement);
     return this.writes.run(async (manager) => {
       const before = await this.reader.describe(manager, where.id);
-      const reopens = requirement !== undefined && before.standing === 'searched';
+      const changesSearch = requirement !== undefined && !findsTheSame(before.requirement, requirement);
+      const reopens = changesSearch && before.standing === 'searched';
       const change = {
         ...(patch.title === undefined ? {} : { title: patch.title }),
         ...(patch.note === undefined ? {} : { note: patch.note }),

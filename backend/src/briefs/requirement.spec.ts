@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { ProblemError } from '../common/errors.js';
 import { newRequirement } from '../testing/new-brief.js';
-import { checkRequirement, optionRequestOf } from './requirement.js';
+import { checkRequirement, findsTheSame, optionRequestOf } from './requirement.js';
 
 function fieldsRefused(input: object): string[] {
   try {
@@ -35,6 +35,22 @@ describe('a requirement', () => {
     expect(optionRequestOf(kept)).not.toHaveProperty('duty');
   });
 
+  it('keeps the build quantity apart from what is searched, and an emptied one not at all', () => {
+    const kept = checkRequirement(newRequirement({ buildQuantity: 25 }));
+    expect(kept.buildQuantity).toBe(25);
+    expect(optionRequestOf(kept)).not.toHaveProperty('buildQuantity');
+    expect(checkRequirement({ ...newRequirement(), buildQuantity: null })).not.toHaveProperty(
+      'buildQuantity',
+    );
+  });
+
+  it('finds the same whatever the build quantity, and nothing else may differ', () => {
+    const kept = checkRequirement(newRequirement({ buildQuantity: 25 }));
+    expect(findsTheSame(kept, checkRequirement(newRequirement()))).toBe(true);
+    expect(findsTheSame(kept, checkRequirement(newRequirement({ modules: [2] })))).toBe(false);
+    expect(findsTheSame(kept, checkRequirement(newRequirement({ duty: { inputSpeed: 1400 } })))).toBe(false);
+  });
+
   it('drops fields of the duty that a form has emptied', () => {
     const emptied = { inputSpeed: 1400, outputTorque: null };
     expect(checkRequirement({ ...newRequirement(), duty: emptied }).duty).toEqual({ inputSpeed: 1400 });
@@ -59,6 +75,10 @@ describe('a requirement', () => {
     ['an application factor below 1', { duty: { applicationFactor: 0.5 } }, 'duty.applicationFactor'],
     ['a torque in words', { duty: { outputTorque: 'much' } }, 'duty.outputTorque'],
     ['an unknown duty', { duty: { temper: 3 } }, 'duty.temper'],
+    ['a build quantity of 0', { buildQuantity: 0 }, 'buildQuantity'],
+    ['a build quantity of one and a half', { buildQuantity: 1.5 }, 'buildQuantity'],
+    ['a build quantity of 1e9', { buildQuantity: 1e9 }, 'buildQuantity'],
+    ['a build quantity in words', { buildQuantity: 'many' }, 'buildQuantity'],
     ['a duty that is a list', { duty: [] }, 'duty'],
   ])('refuses %s', (_, changes, field) => {
     expect(fieldsRefused({ ...newRequirement(), ...changes })).toEqual([`requirement.${field}`]);

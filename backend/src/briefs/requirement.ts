@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from 'node:util';
 import { type OptionRequest, validateOptionRequest } from '@stageyard/libs/train-planner';
 import { type FieldIssue, InputError } from '@stageyard/libs/units';
 import { badInput } from '../common/errors.js';
@@ -12,9 +13,17 @@ export interface Duty {
   applicationFactor?: number;
 }
 
-/** What a brief asks for: an option request, and the duty beside it. */
+/** How many trains may be built at once. */
+export const BUILD_QUANTITY = { min: 1, max: 100_000 } as const;
+
+/** One is built where nobody says otherwise. */
+export const DEFAULT_BUILD_QUANTITY = 1;
+
+/** What a brief asks for: an option request, with the duty and the build quantity beside it. */
 export interface Requirement extends OptionRequest {
   duty?: Duty;
+  /** Trains to be built at once; options are priced for so many. Nothing is searched by it. */
+  buildQuantity?: number;
 }
 
 interface DutyBound {
@@ -36,12 +45,15 @@ const DUTY_BOUNDS: Record<keyof Duty, DutyBound> = {
  * @throws ProblemError 400 naming every field at fault, paths beginning with `requirement.`
  */
 export function checkRequirement(input: object): Requirement {
-  const { duty, ...request } = input as Record<string, unknown>;
-  const issues = dutyIssues(duty);
+  const { duty, buildQuantity, ...request } = input as Record<string, unknown>;
+  const issues = [...dutyIssues(duty), ...buildQuantityIssues(buildQuantity)];
   try {
     // A brief compares stage counts side by side, so each keeps its own best unless told otherwise.
     const checked = validateOptionRequest({ bestOf: 'each-count', ...request });
-    if (issues.length === 0) return keptForm(checked, duty as Duty | null | undefined);
+    if (issues.length === 0) {
+      const kept = keptForm(checked, duty as Duty | null | undefined);
+      return typeof buildQuantity === 'number' ? { ...kept, buildQuantity } : kept;
+    }
   } catch (error) {
     if (!(error instanceof InputError)) throw error;
     issues.unshift(...error.errors);
@@ -65,8 +77,27 @@ function isGiven(value: unknown): boolean {
 }
 
 /** The part of a requirement that the planner searches by. */
-export function optionRequestOf({ duty: _duty, ...request }: Requirement): OptionRequest {
+export function optionRequestOf({
+  duty: _duty,
+  buildQuantity: _quantity,
+  ...request
+}: Requirement): OptionRequest {
   return request;
+}
+
+/** Whether what was found for one requirement still answers to the other: they differ in the build quantity at most. */
+export function findsTheSame(one: Requirement, other: Requirement): boolean {
+  const searched = (requirement: Requirement) => ({ ...requirement, buildQuantity: undefined });
+  return isDeepStrictEqual(searched(one), searched(other));
+}
+
+function buildQuantityIssues(value: unknown): FieldIssue[] {
+  if (!isGiven(value)) return [];
+  const { min, max } = BUILD_QUANTITY;
+  if (typeof value === 'number' && Number.isInteger(value) && value >= min && value <= max) return [];
+  const limit = typeof value === 'number' && value > max ? max : min;
+  const message = `The build quantity must be a whole number from ${min} to ${max.toLocaleString('en-GB')}.`;
+  return [{ field: 'buildQuantity', value, limit, message }];
 }
 
 function dutyIssues(duty: unknown): FieldIssue[] {

@@ -1,51 +1,82 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { In, Repository } from 'typeorm';
+import { Clock } from '../common/clock.js';
+import { politePause } from '../common/polite-pause.js';
 import { Part } from '../parts/entities/part.entity.js';
-import { type AdoptedSpec, gearsOf, type PlacedGear } from './adopted-spec.js';
-import { type StockGear } from './train-figures.js';
+import { fromThousandths, toThousandths } from '@stageyard/libs/bill-of-materials';
+import { type AdoptedSpec, gearsOf } from './adopted-spec.js';
+import { BEST_GEARS, GEAR_MODULES } from './stock-gear-query.js';
 
 /** Figures of the library and of a train that differ by less are the same; both come from decimals. */
 const SAME = 1e-6;
 /** A stock gear is taken by itself only while it is at most this much wider than asked for. */
 const WIDEST = 1.5;
+/** Needs answered by one query: other requests wait that long. */
+const NEEDS_AT_ONCE = 50;
+
+/** A gear that a train asks for, and how many of it. Lengths mm, angles degrees, shift in modules. */
+export interface GearNeed {
+  module: number;
+  teeth: number;
+  pressureAngleDeg: number;
+  helixAngleDeg: number;
+  /** null: a spur gear. */
+  hand: 'left' | 'right' | null;
+  profileShift: number;
+  faceWidth: number;
+  wanted: number;
+}
+
+/** The stock gear taken for a need. */
+export interface MatchedGear {
+  number: string;
+  /** mm */
+  bore: number | null;
+  /** Pieces; null when it never lay on a shelf. */
+  onShelf: number | null;
+}
+
+interface MatchRow {
+  need: number;
+  number: string;
+  bore: number | null;
+  shelf: number | null;
+}
 
 /** Stock gears that can stand in a train. */
 @Injectable()
 export class StockGears {
-  constructor(@InjectRepository(Part) private readonly parts: Repository<Part>) {}
+  constructor(
+    @InjectRepository(Part) private readonly parts: Repository<Part>,
+    private readonly clock: Clock,
+  ) {}
 
   /**
-   * A cleared gear with the very data asked for and at least its face width, the narrowest first; null when there
-   * is none. A shift the library does not know counts as 0.
+   * For each need a cleared gear with the very data asked for and at least its face width, or null. A shift the library
+   * does not know counts as 0. Among equal gears: one whose shelf covers what is wanted, then one with a valid offer,
+   * then the narrowest, then the lowest number. One query for many needs, and others get their turn between queries.
+   * @returns in the order of the needs
    */
-  async match(angles: GearAngles, { gear, module }: PlacedGear): Promise<StockGear | null> {
-    const rows = this.parts
-      .createQueryBuilder('part')
-      .where("part.kind = 'gear' AND part.standing = 'cleared'")
-      .andWhere('part.teeth = :teeth', { teeth: gear.teeth });
-    const same = { module, pressureAngleDeg: angles.pressureAngleDeg, helixAngleDeg: angles.helixAngleDeg };
-    for (const [column, value] of Object.entries(same)) {
-      rows.andWhere(`part.${column} BETWEEN :${column}Low AND :${column}High`, {
-        [`${column}Low`]: value - SAME,
-        [`${column}High`]: value + SAME,
-      });
+  async matchMany(needs: readonly GearNeed[]): Promise<(MatchedGear | null)[]> {
+    const found: (MatchedGear | null)[] = needs.map(() => null);
+    if (needs.length === 0) return found;
+    const modules = await this.parts.query<{ module: number }[]>(GEAR_MODULES);
+    const asked = needs.flatMap((need, index) => questionsOf(need, index, modules));
+    const on = this.clock.iso().slice(0, 10);
+    const pause = politePause();
+    for (let start = 0; start < asked.length; start += NEEDS_AT_ONCE) {
+      const chunk = JSON.stringify(asked.slice(start, start + NEEDS_AT_ONCE));
+      for (const { need, number, bore, shelf } of await this.parts.query<MatchRow[]>(BEST_GEARS, [
+        chunk,
+        on,
+        on,
+      ])) {
+        found[need] ??= { number, bore, onShelf: shelf === null ? null : fromThousandths(shelf) };
+      }
+      await pause();
     }
-    if (angles.helixAngleDeg > 0) rows.andWhere('part.hand = :hand', { hand: gear.hand });
-    const found = await rows
-      .andWhere('COALESCE(part.profileShift, 0) BETWEEN :shiftLow AND :shiftHigh', {
-        shiftLow: gear.profileShift - SAME,
-        shiftHigh: gear.profileShift + SAME,
-      })
-      .andWhere('part.faceWidth BETWEEN :narrow AND :wide', {
-        narrow: gear.faceWidth - SAME,
-        wide: gear.faceWidth * WIDEST,
-      })
-      .orderBy('part.faceWidth', 'ASC')
-      .addOrderBy('part.number', 'ASC')
-      .limit(1)
-      .getOne();
-    return found && { number: found.number, bore: found.bore, standing: found.standing };
+    return found;
   }
 
   /** The chosen parts of any number of trains, by number, in one query. */
@@ -70,4 +101,20 @@ export class StockGears {
   }
 }
 
-type GearAngles = Pick<AdoptedSpec, 'pressureAngleDeg' | 'helixAngleDeg'>;
+/** What the query asks for one need: once for each module of the library that is the need's. */
+function questionsOf(need: GearNeed, index: number, modules: readonly { module: number }[]): object[] {
+  const near = (value: number) => [value - SAME, value + SAME];
+  return modules
+    .filter(({ module }) => Math.abs(module - need.module) <= SAME)
+    .map(({ module }) => ({
+      need: index,
+      module,
+      teeth: need.teeth,
+      pressure: near(need.pressureAngleDeg),
+      helix: near(need.helixAngleDeg),
+      hand: need.hand,
+      shift: near(need.profileShift),
+      width: [need.faceWidth - SAME, need.faceWidth * WIDEST],
+      wanted: toThousandths(need.wanted),
+    }));
+}

@@ -13,6 +13,6 @@ import { TrainsService } from './trains.service.js';
   imports: [TypeOrmModule.forFeature([Train, Part]), PartsModule],
   controllers: [TrainsController],
   providers: [BomService, StockGears, TrainReader, TrainsService],
-  exports: [BomService, TrainReader, TrainsService],
+  exports: [BomService, StockGears, TrainReader, TrainsService],
 })
 export class TrainsModule {}

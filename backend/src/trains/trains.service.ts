@@ -5,7 +5,7 @@ import { AuditService } from '../audit/audit.service.js';
 import { type SignedInUser } from '../auth/signed-in-user.js';
 import { Brief } from '../briefs/entities/brief.entity.js';
 import { Pin } from '../briefs/entities/pin.entity.js';
-import { type Requirement } from '../briefs/requirement.js';
+import { DEFAULT_BUILD_QUANTITY, type Requirement } from '../briefs/requirement.js';
 import { Clock } from '../common/clock.js';
 import { notFound } from '../common/errors.js';
 import { nextCode } from '../common/next-code.js';
@@ -19,6 +19,7 @@ import { type TrainDto } from './dto/train.dto.js';
 import { type TrainInputDto } from './dto/train-input.dto.js';
 import { type TrainPatchDto } from './dto/train-patch.dto.js';
 import { Train } from './entities/train.entity.js';
+import { gearLinesOf } from './gear-lines.js';
 import { patchSpec } from './patch-spec.js';
 import { chooseShaftDiameters } from './shaft-diameters.js';
 import { StockGears } from './stock-gears.service.js';
@@ -38,7 +39,8 @@ export class TrainsService {
   ) {}
 
   /**
-   * Makes a train of an option, revision A, with stock gears where the library has the very same and shafts sized.
+   * Makes a train of an option, revision A, with stock gears where the library has the very same, and shafts sized.
+   * It takes the brief's build quantity along.
    * @throws ProblemError 404 for an unknown brief, search or option
    */
   async adopt(input: TrainInputDto, actor: Person): Promise<TrainDto> {
@@ -48,6 +50,7 @@ export class TrainsService {
       const brief = await manager.findOneBy(Brief, { id: briefId });
       if (!brief) throw notFound('brief', input.briefId);
       const { option, requirement } = await findOption(manager, briefId, input);
+      const buildQuantity = brief.requirement.buildQuantity ?? null;
       const train = await manager.save(Train, {
         code: await nextCode(manager, Train, 'T'),
         title: input.title ?? brief.title,
@@ -56,7 +59,10 @@ export class TrainsService {
         state: 'working' as const,
         briefId,
         optionKey: option.key,
-        spec: await this.completeSpec(specFromOption(option, requirement)),
+        spec: await this.completeSpec(specFromOption(option, requirement), buildQuantity),
+        buildQuantity,
+        bomEdits: null,
+        offerChoices: null,
         ownerId: actor.id,
         version: 1,
         createdAt: now,
@@ -106,13 +112,15 @@ export class TrainsService {
   }
 
   /** Adds what the option does not say: stock parts that are exactly its gears, and shaft diameters. */
-  private async completeSpec(spec: AdoptedSpec): Promise<AdoptedSpec> {
+  private async completeSpec(spec: AdoptedSpec, buildQuantity: number | null): Promise<AdoptedSpec> {
     const bores = new Map<string, number>();
-    for (const placed of gearsOf(spec)) {
-      const match = await this.stock.match(spec, placed);
-      placed.gear.partNumber = match?.number ?? null;
+    const lines = gearLinesOf(spec, buildQuantity ?? DEFAULT_BUILD_QUANTITY);
+    const matches = await this.stock.matchMany(lines.map(({ need }) => need));
+    lines.forEach(({ places }, index) => {
+      const match = matches[index];
+      for (const { gear } of places) gear.partNumber = match?.number ?? null;
       if (match?.bore) bores.set(match.number, match.bore);
-    }
+    });
     const demands = describeTrain(spec).shafts.map(({ leastDiameter, index }) => ({
       leastDiameter,
       bores: gearsOnShaft(spec, index).flatMap(({ gear }) => bores.get(gear.partNumber ?? '') ?? []),

@@ -11,3 +11,11 @@ export { offerState, priceAge, type OfferState } from './offer-state.js';
 export type { OfferTerms, PriceBreak } from './offer-terms.js';
 export { orderQuantity, priceAt, type PricedQuantity, type PriceTerms, type QuantityTerms } from './price.js';
 export { fromThousandths, MOST_QUANTITY, toThousandths } from './thousandths.js';
+export {
+  neededQuantity,
+  priceNeed,
+  totalsByCurrency,
+  type CurrencyTotal,
+  type Need,
+  type PricedNeed,
+} from './price-need.js';

@@ -1,7 +1,7 @@
 import { ApiSchema } from '@nestjs/swagger';
 import { LibraryFigure, LibraryObject } from '../../calc/dto/library-field.decorator.js';
 import { OptionRequestDto } from '../../calc/dto/option-request.dto.js';
-import { type Duty } from '../requirement.js';
+import { BUILD_QUANTITY, type Duty } from '../requirement.js';
 
 @ApiSchema({ name: 'Duty' })
 export class DutyDto implements Duty {
@@ -30,7 +30,7 @@ export class DutyDto implements Duty {
   applicationFactor?: number;
 }
 
-/** What a brief asks for: the request of an option search, and the duty beside it. */
+/** What a brief asks for: the request of an option search, with the duty and the build quantity beside it. */
 @ApiSchema({ name: 'Requirement' })
 export class RequirementDto extends OptionRequestDto {
   @LibraryObject(
@@ -38,4 +38,12 @@ export class RequirementDto extends OptionRequestDto {
     'Recorded; used for shaft speeds and sizes. Strength is not rated from it yet.',
   )
   duty?: DutyDto;
+
+  @LibraryFigure({
+    description: 'Trains to be built at once; options are priced for so many',
+    bounds: BUILD_QUANTITY,
+    whole: true,
+    optional: true,
+  })
+  buildQuantity?: number;
 }
