@@ -32,6 +32,10 @@ export const STOCK = [
   `CREATE INDEX "stock_level_place" ON "stock_level" ("place")`,
   `CREATE TRIGGER "stock_movement_keep" BEFORE UPDATE ON "stock_movement"
     BEGIN SELECT RAISE(ABORT, 'stock movements are never changed'); END`,
+  // INSERT OR REPLACE would take an older row away without a word.
+  `CREATE TRIGGER "stock_movement_only_new" BEFORE INSERT ON "stock_movement"
+    WHEN EXISTS (SELECT 1 FROM "stock_movement" WHERE "id" = new."id" OR "requestKey" = new."requestKey")
+    BEGIN SELECT RAISE(ABORT, 'stock movements are never replaced'); END`,
   `CREATE TRIGGER "stock_movement_stay" BEFORE DELETE ON "stock_movement"
     BEGIN SELECT RAISE(ABORT, 'stock movements are never deleted'); END`,
   `CREATE TRIGGER "stock_movement_level" AFTER INSERT ON "stock_movement" BEGIN
