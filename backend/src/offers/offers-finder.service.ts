@@ -4,9 +4,6 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { type SupplierStanding } from '../suppliers/supplier-terms.js';
 import { type OfferStanding, type PricePer } from './offer-terms.js';
 
-/** Part numbers looked up by one query. */
-const MOST_ASKED_AT_ONCE = 500;
-
 /** An offer ready to be priced and chosen among others. */
 export interface PartOffer extends OfferCandidate {
   supplierCode: string;
@@ -48,11 +45,11 @@ export class OffersFinder {
   ): Promise<Map<string, PartOffer[]>> {
     const asked = [...new Set(numbers)];
     const byKey = new Map<string, PartOffer[]>();
-    for (let start = 0; start < asked.length; start += MOST_ASKED_AT_ONCE) {
-      for (const row of await this.rowsOf(manager, asked.slice(start, start + MOST_ASKED_AT_ONCE))) {
-        const key = keyOf(row.partNumber);
-        byKey.set(key, [...(byKey.get(key) ?? []), toCandidate(row)]);
-      }
+    for (const row of await this.rowsOf(manager, asked)) {
+      const key = keyOf(row.partNumber);
+      const known = byKey.get(key);
+      if (known) known.push(toCandidate(row));
+      else byKey.set(key, [toCandidate(row)]);
     }
     const found = new Map<string, PartOffer[]>();
     for (const number of asked) {
@@ -63,7 +60,6 @@ export class OffersFinder {
   }
 
   private rowsOf(manager: EntityManager, numbers: string[]): Promise<CandidateRow[]> {
-    const marks = numbers.map(() => '?').join(', ');
     return manager.query<CandidateRow[]>(
       `SELECT "p"."number" AS "partNumber", "o"."id", "s"."code" AS "supplierCode", "s"."name" AS "supplierName",
               "s"."standing" AS "supplierStanding", "s"."leadTimeDays" AS "supplierLeadTimeDays",
@@ -72,9 +68,9 @@ export class OffersFinder {
        FROM "part" "p"
        JOIN "offer" "o" ON "o"."partId" = "p"."id"
        JOIN "supplier" "s" ON "s"."id" = "o"."supplierId"
-       WHERE "p"."number" IN (${marks})
+       WHERE "p"."number" IN (SELECT "value" FROM json_each(?))
        ORDER BY "o"."id"`,
-      numbers.map(keyOf),
+      [JSON.stringify(numbers.map(keyOf))],
     );
   }
 }

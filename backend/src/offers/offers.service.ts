@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { type EntityManager } from 'typeorm';
 import { type AuditRecord } from '../audit/audit.service.js';
-import { badInput, ChangedMeanwhileError, conflict, type FieldIssue } from '../common/errors.js';
+import { badInput, ChangedMeanwhileError, conflict } from '../common/errors.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { Part } from '../parts/entities/part.entity.js';
 import { Supplier } from '../suppliers/entities/supplier.entity.js';
@@ -10,9 +10,10 @@ import { type OfferPatchDto } from './dto/offer-patch.dto.js';
 import { type OfferDto, toOfferDto } from './dto/offer.dto.js';
 import { Offer } from './entities/offer.entity.js';
 import { offerChange, type OfferContent, storedContent } from './offer-changes.js';
-import { checkContent, closedReasons, contentOf } from './offer-content.js';
+import { checkContent, closedReasons } from './offer-content.js';
 import { OfferReader } from './offer-reader.js';
 import { type NewOffer, OfferWriter } from './offer-writer.js';
+import { resolvedOffer } from './resolved-offer.js';
 
 type Actor = AuditRecord['actor'];
 
@@ -69,7 +70,7 @@ export class OffersService {
       manager.findOneBy(Part, { number: input.partNumber.trim() }),
       manager.findOneBy(Supplier, { code: input.supplierCode.trim().toUpperCase() }),
     ]);
-    return resolved(input, part ?? undefined, supplier ?? undefined, this.reader.today());
+    return resolvedOffer(input, part, supplier, this.reader.today());
   }
 
   /** A form sent twice must not become two offers. */
@@ -83,33 +84,6 @@ export class OffersService {
     const message = `${supplier.code} has this very offer for ${part.number} already, so nothing was added. Change that one if its terms changed.`;
     throw conflict('offer-doubled', message, { current });
   }
-}
-
-/**
- * An input with the part and the supplier it names, checked.
- * @throws ProblemError or InputError listing the fields at fault
- */
-export function resolved(
-  input: OfferInputDto,
-  part: Part | undefined,
-  supplier: Supplier | undefined,
-  today: string,
-): NewOffer {
-  const unknown: FieldIssue[] = [];
-  if (!part) {
-    const message = `There is no part “${input.partNumber}”. Check the number, or add the part first.`;
-    unknown.push({ field: 'partNumber', value: input.partNumber, message });
-  }
-  if (!supplier) {
-    const message = `There is no supplier “${input.supplierCode}”. Check the code, or add the supplier first.`;
-    unknown.push({ field: 'supplierCode', value: input.supplierCode, message });
-  }
-  if (!part || !supplier) throw badInput(unknown);
-  const closed = closedReasons(part, supplier);
-  if (closed.length > 0) throw badInput(closed);
-  const content = contentOf(input, supplier, today);
-  checkContent(content, part);
-  return { part, supplier, content };
 }
 
 function patched(before: Offer, { breaks, ...patch }: Omit<OfferPatchDto, 'version'>): OfferContent {

@@ -404,6 +404,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/parts/{number}/offers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['PartOffers_of'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/calc/gear': {
     parameters: {
       query?: never;
@@ -1917,6 +1933,110 @@ export interface components {
       source?: string;
       /** @description Note */
       note?: string;
+    };
+    Money: {
+      /** @description Whole minor units: 1250 is 12.50 EUR or 1,250 JPY */
+      minor: number;
+      /**
+       * @description ISO 4217
+       * @example EUR
+       */
+      currency: string;
+    };
+    LargerOrder: {
+      orderQuantity: number;
+      lineTotal: components['schemas']['Money'];
+      saves: components['schemas']['Money'];
+    };
+    PricedQuantity: {
+      needed: number;
+      /** @description Whole packs, at least the least quantity and the first break */
+      orderQuantity: number;
+      /** @description Ordered beyond the need */
+      surplus: number;
+      /** @description Minor units for `per` units, at the break that is reached */
+      unitPrice: number;
+      /** @enum {integer} */
+      per: 1 | 10 | 100 | 1000;
+      /** @description From this quantity on the price holds */
+      breakQuantity: number;
+      /** @description Order quantity × unit price ÷ per, rounded once */
+      lineTotal: components['schemas']['Money'];
+      /** @description A larger order that costs less in total */
+      cheaperAt: components['schemas']['LargerOrder'] | null;
+    };
+    PartOffer: {
+      id: string;
+      part: components['schemas']['OfferedPart'];
+      supplier: components['schemas']['OfferingSupplier'];
+      /** @description The supplier's own number; blank when it is not known */
+      supplierPartNumber: string;
+      standing: components['schemas']['OfferStanding'];
+      /** @description Today */
+      state: components['schemas']['OfferState'];
+      /**
+       * @description ISO 4217
+       * @example EUR
+       */
+      currency: string;
+      /**
+       * @description Prices are for this many
+       * @enum {integer}
+       */
+      per: 1 | 10 | 100 | 1000;
+      /** @description The smallest quantity first */
+      breaks: components['schemas']['PriceBreak'][];
+      /** @description Sold in multiples of this */
+      pack: number;
+      leastQuantity: number;
+      /** @description Calendar days, as the offer states it */
+      leadTimeDays: number | null;
+      /** @description Calendar days; the supplier's usual ones where the offer states none */
+      effectiveLeadTimeDays: number | null;
+      /** Format: date */
+      validFrom: string;
+      /**
+       * Format: date
+       * @description Last day; null: until further notice
+       */
+      validUntil: string | null;
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the price
+       */
+      pricedOn: string;
+      /** @description Days since the supplier stated the price */
+      ageDays: number;
+      /** @description The price is older than the house rule allows */
+      tooOld: boolean;
+      source: string;
+      note: string;
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+      /** @description Null when the total is too large to be reckoned */
+      price: components['schemas']['PricedQuantity'] | null;
+      /** @description Calendar days until it arrives; null: not known */
+      arrivalDays: number | null;
+      /** @description The one that the rule chooses */
+      chosen: boolean;
+    };
+    PartOffers: {
+      quantity: number;
+      unit: components['schemas']['PartUnit'];
+      /** @description On the shelf; null when it never lay there */
+      onShelf: number | null;
+      offers: components['schemas']['PartOffer'][];
+      /**
+       * @description Why none is chosen
+       * @enum {string|null}
+       */
+      reason: 'no-offers' | 'none-valid' | null;
     };
     Rack: {
       /**
@@ -5020,6 +5140,75 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['ChangePage'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  PartOffers_of: {
+    parameters: {
+      query?: {
+        /** @description Needed, in the part's unit: whole pieces, or litres with at most three decimals */
+        quantity?: number;
+        /** @description What the best offer is chosen by */
+        prefer?: 'price' | 'arrival';
+      };
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartOffers'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
         };
       };
       /** @description Nobody is signed in. */
