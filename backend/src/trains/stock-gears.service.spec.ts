@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { PartsLoader } from '../parts/parts-loader.service.js';
 import { StockService } from '../stock/stock.service.js';
-import { addOffer, addSupplier } from '../testing/new-offer.js';
+import { addOffer, addSupplier } from '../testing/add-offer.js';
 import { LIBRARIAN, newGear } from '../testing/new-part.js';
 import { openTempApp, type TempApp } from '../testing/temp-app.js';
 import { type GearNeed, StockGears } from './stock-gears.service.js';
