@@ -17,6 +17,7 @@ import { PartsModule } from './parts/parts.module.js';
 import { type Settings } from './settings/settings.js';
 import { SettingsModule } from './settings/settings.module.js';
 import { StockModule } from './stock/stock.module.js';
+import { SubstitutesModule } from './substitutes/substitutes.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
 import { TrainPricesModule } from './train-prices/train-prices.module.js';
 import { TrainsModule } from './trains/trains.module.js';
@@ -34,6 +35,7 @@ import { UsersModule } from './users/users.module.js';
     HouseRulesModule,
     PartsModule,
     StockModule,
+    SubstitutesModule,
     SuppliersModule,
     OffersModule,
     CalcModule,

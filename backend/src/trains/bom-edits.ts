@@ -1,3 +1,5 @@
+export const EXTRA_LINE_UNITS = ['pcs', 'l', 'm'] as const;
+
 /** A line that a person added: a part of the library, or something without a number yet. */
 export interface ExtraLine {
   /** Stays with the line for good. */
@@ -6,7 +8,7 @@ export interface ExtraLine {
   description: string;
   /** At most three decimals. */
   quantity: number;
-  unit: 'pcs' | 'l' | 'm';
+  unit: (typeof EXTRA_LINE_UNITS)[number];
   note: string;
 }
 

@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
+import { type TrainFigures } from '@stageyard/libs/train-planner';
 import { type EntityManager, Repository } from 'typeorm';
 import { notFound } from '../common/errors.js';
 import { containing } from '../common/like-text.js';
@@ -76,6 +77,11 @@ export class TrainReader {
     return this.describe(await this.load(this.trains.manager, code));
   }
 
+  /** The row, to be changed or looked at as a whole. @throws ProblemError 404 */
+  row(code: string): Promise<Train> {
+    return this.load(this.trains.manager, code);
+  }
+
   /** @throws ProblemError 404 */
   async load(manager: EntityManager, code: string): Promise<Train> {
     const train = await manager.findOne(Train, { where: { code }, relations: { owner: true, brief: true } });
@@ -85,7 +91,11 @@ export class TrainReader {
 
   /** @param train with its `owner` and `brief` loaded */
   async describe(train: Train): Promise<TrainDto> {
-    return toTrainDto(train, trainFigures(train.spec, await this.stock.chosenIn([train.spec])));
+    return toTrainDto(train, await this.figures(train));
+  }
+
+  async figures({ spec }: Pick<Train, 'spec'>): Promise<TrainFigures> {
+    return trainFigures(spec, await this.stock.chosenIn([spec]));
   }
 
   private async summarise(trains: Train[]): Promise<TrainSummaryDto[]> {

@@ -308,46 +308,14 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
-  '/api/suppliers': {
+  '/api/parts/{number}/substitutes': {
     parameters: {
       query?: never;
       header?: never;
       path?: never;
       cookie?: never;
     };
-    get: operations['Suppliers_list'];
-    put?: never;
-    post: operations['Suppliers_create'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/suppliers/{code}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Suppliers_get'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch: operations['Suppliers_update'];
-    trace?: never;
-  };
-  '/api/suppliers/{code}/changes': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Suppliers_changes'];
+    get: operations['Substitutes_ofPart'];
     put?: never;
     post?: never;
     delete?: never;
@@ -412,6 +380,54 @@ export interface paths {
       cookie?: never;
     };
     get: operations['PartOffers_of'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/suppliers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_list'];
+    put?: never;
+    post: operations['Suppliers_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/suppliers/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Suppliers_update'];
+    trace?: never;
+  };
+  '/api/suppliers/{code}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_changes'];
     put?: never;
     post?: never;
     delete?: never;
@@ -686,6 +702,86 @@ export interface paths {
     get: operations['Trains_bom'];
     put?: never;
     post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/substitutes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['BomEdits_substitutes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/swaps': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['BomEdits_swap'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/extra-lines': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['BomEdits_setExtraLines'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/bom-paste': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['BomEdits_previewPaste'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trains/{code}/bom-paste/book': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['BomEdits_bookPaste'];
     delete?: never;
     options?: never;
     head?: never;
@@ -1592,154 +1688,40 @@ export interface components {
       /** @description The part's version that was seen before */
       version: number;
     };
-    /** @enum {string} */
-    SupplierStanding: 'active' | 'closed';
-    /** @enum {string} */
-    SupplierLanguage:
-      | 'en'
-      | 'de'
-      | 'fr'
-      | 'it'
-      | 'es'
-      | 'pt'
-      | 'nl'
-      | 'da'
-      | 'sv'
-      | 'nb'
-      | 'fi'
-      | 'pl'
-      | 'cs'
-      | 'ja'
-      | 'zh'
-      | 'ko'
-      | 'ar'
-      | 'tr';
-    SupplierContact: {
-      /** @description Name */
-      name: string;
-      /**
-       * @description What the person does there
-       * @example Sales
-       */
-      role: string;
-      /** @description E-mail address; blank when it is not known */
-      email: string;
-      /** @description Telephone */
-      phone: string;
-    };
-    /**
-     * @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before
-     * @enum {string}
-     */
-    FreightKind: 'included' | 'flat' | 'free-from' | 'as-charged';
-    FreightRule: {
-      /** @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before */
-      kind: components['schemas']['FreightKind'];
-      /** @description Charge of one order, minor units; only of flat and free-from */
-      charge?: number | null;
-      /** @description Order value from which freight is free, minor units; only of free-from */
-      freeFrom?: number | null;
-    };
-    SupplierOffers: {
-      /** @description Open offers that have not ended */
-      open: number;
-      /** @description Open offers that have ended */
-      expired: number;
-      /**
-       * Format: date
-       * @description Day of the oldest price among the open offers that have not ended
-       */
-      oldestPricedOn: string | null;
-    };
-    Supplier: {
-      id: string;
-      /** @example S-0001 */
-      code: string;
-      name: string;
-      standing: components['schemas']['SupplierStanding'];
-      /**
-       * @description ISO 4217
-       * @example EUR
-       */
+    SubstituteOffer: {
+      /** @description Name of the supplier */
+      supplier: string;
+      /** @description ISO 4217 */
       currency: string;
-      language: components['schemas']['SupplierLanguage'];
-      contacts: components['schemas']['SupplierContact'][];
-      address: string;
-      freight: components['schemas']['FreightRule'];
-      /** @description Least value of one order, minor units */
-      leastOrderValue: number | null;
-      /** @description Usual lead time, calendar days */
+      /** @description Price of what has to be ordered, minor units */
+      lineTotal: number;
+      /** @description What has to be ordered: packs and least quantity counted in */
+      orderQuantity: number;
+      /** @description Calendar days */
       leadTimeDays: number | null;
-      note: string;
-      offers: components['schemas']['SupplierOffers'];
-      /** @description Send it back with an edit */
-      version: number;
-      /** Format: date-time */
-      createdAt: string;
-      /** Format: date-time */
-      updatedAt: string;
-      /** @description Name of the person who changed it last */
-      updatedBy: string;
     };
-    SupplierPage: {
-      items: components['schemas']['Supplier'][];
-      /** @description How many there are over all pages. */
-      total: number;
-      page: number;
-      size: number;
+    Substitute: {
+      part: components['schemas']['PartSummary'];
+      /** @description Where it is not the same, though it fits */
+      differences: string[];
+      /** @description What the library cannot tell and a person must look at */
+      toCheck: string[];
+      /** @description Named as the part to use instead of the withdrawn one */
+      successor: boolean;
+      /** @description On the shelf; null when it was never booked */
+      onShelf: number | null;
+      /** @description Null: no valid offer, or the person may not see prices */
+      offer: components['schemas']['SubstituteOffer'] | null;
+      /** @description Calendar days until the quantity is there: 0 when the shelf covers it; null: not known */
+      arrivalDays: number | null;
     };
-    SupplierInput: {
-      /** @description Name, unlike that of any other supplier */
-      name: string;
-      /**
-       * @description What enquiries ask for and new offers start with (ISO 4217)
-       * @example EUR
-       */
-      currency: string;
-      /**
-       * @description Language that enquiries are written in; English when left out
-       * @default en
-       */
-      language: components['schemas']['SupplierLanguage'];
-      /** @description People to send enquiries to */
-      contacts?: components['schemas']['SupplierContact'][];
-      /** @description Postal address */
-      address?: string;
-      /** @description Freight; as charged when left out */
-      freight?: components['schemas']['FreightRule'];
-      /** @description Least value of one order, minor units; null when there is none */
-      leastOrderValue?: number | null;
-      /** @description Usual lead time, calendar days; null when it is not known */
-      leadTimeDays?: number | null;
-      /** @description Note */
-      note?: string;
-    };
-    SupplierPatch: {
-      /** @description Version that was seen before the edit */
-      version: number;
-      /** @description Name, unlike that of any other supplier */
-      name?: string;
-      /** @description active, or closed: no new offers, and none of theirs is chosen any more */
-      standing?: components['schemas']['SupplierStanding'];
-      /**
-       * @description What enquiries ask for and new offers start with; offers that are there keep theirs (ISO 4217)
-       * @example EUR
-       */
-      currency?: string;
-      /** @description Language that enquiries are written in */
-      language?: components['schemas']['SupplierLanguage'];
-      /** @description People to send enquiries to */
-      contacts?: components['schemas']['SupplierContact'][];
-      /** @description Postal address */
-      address?: string;
-      /** @description Freight, the whole rule in place of the old one */
-      freight?: components['schemas']['FreightRule'];
-      /** @description Least value of one order, minor units; null when there is none */
-      leastOrderValue?: number | null;
-      /** @description Usual lead time, calendar days; null when it is not known */
-      leadTimeDays?: number | null;
-      /** @description Note */
-      note?: string;
+    Substitutes: {
+      /** @description What arrival and price were asked for */
+      quantity: number;
+      /** @description By arrival, price and number; those to check come last */
+      items: components['schemas']['Substitute'][];
+      /** @description Parts that drop in beyond those listed */
+      leftOut: number;
     };
     OfferedPart: {
       /** @example KW-00417 */
@@ -1750,6 +1732,8 @@ export interface components {
       /** @description All quantities of the offer are in it */
       unit: components['schemas']['PartUnit'];
     };
+    /** @enum {string} */
+    SupplierStanding: 'active' | 'closed';
     OfferingSupplier: {
       /** @example S-0001 */
       code: string;
@@ -2037,6 +2021,153 @@ export interface components {
        * @enum {string|null}
        */
       reason: 'no-offers' | 'none-valid' | null;
+    };
+    /** @enum {string} */
+    SupplierLanguage:
+      | 'en'
+      | 'de'
+      | 'fr'
+      | 'it'
+      | 'es'
+      | 'pt'
+      | 'nl'
+      | 'da'
+      | 'sv'
+      | 'nb'
+      | 'fi'
+      | 'pl'
+      | 'cs'
+      | 'ja'
+      | 'zh'
+      | 'ko'
+      | 'ar'
+      | 'tr';
+    SupplierContact: {
+      /** @description Name */
+      name: string;
+      /**
+       * @description What the person does there
+       * @example Sales
+       */
+      role: string;
+      /** @description E-mail address; blank when it is not known */
+      email: string;
+      /** @description Telephone */
+      phone: string;
+    };
+    /**
+     * @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before
+     * @enum {string}
+     */
+    FreightKind: 'included' | 'flat' | 'free-from' | 'as-charged';
+    FreightRule: {
+      /** @description included: in the prices; flat: charge on every order; free-from: charge below the order value freeFrom; as-charged: not known before */
+      kind: components['schemas']['FreightKind'];
+      /** @description Charge of one order, minor units; only of flat and free-from */
+      charge?: number | null;
+      /** @description Order value from which freight is free, minor units; only of free-from */
+      freeFrom?: number | null;
+    };
+    SupplierOffers: {
+      /** @description Open offers that have not ended */
+      open: number;
+      /** @description Open offers that have ended */
+      expired: number;
+      /**
+       * Format: date
+       * @description Day of the oldest price among the open offers that have not ended
+       */
+      oldestPricedOn: string | null;
+    };
+    Supplier: {
+      id: string;
+      /** @example S-0001 */
+      code: string;
+      name: string;
+      standing: components['schemas']['SupplierStanding'];
+      /**
+       * @description ISO 4217
+       * @example EUR
+       */
+      currency: string;
+      language: components['schemas']['SupplierLanguage'];
+      contacts: components['schemas']['SupplierContact'][];
+      address: string;
+      freight: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units */
+      leastOrderValue: number | null;
+      /** @description Usual lead time, calendar days */
+      leadTimeDays: number | null;
+      note: string;
+      offers: components['schemas']['SupplierOffers'];
+      /** @description Send it back with an edit */
+      version: number;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      updatedAt: string;
+      /** @description Name of the person who changed it last */
+      updatedBy: string;
+    };
+    SupplierPage: {
+      items: components['schemas']['Supplier'][];
+      /** @description How many there are over all pages. */
+      total: number;
+      page: number;
+      size: number;
+    };
+    SupplierInput: {
+      /** @description Name, unlike that of any other supplier */
+      name: string;
+      /**
+       * @description What enquiries ask for and new offers start with (ISO 4217)
+       * @example EUR
+       */
+      currency: string;
+      /**
+       * @description Language that enquiries are written in; English when left out
+       * @default en
+       */
+      language: components['schemas']['SupplierLanguage'];
+      /** @description People to send enquiries to */
+      contacts?: components['schemas']['SupplierContact'][];
+      /** @description Postal address */
+      address?: string;
+      /** @description Freight; as charged when left out */
+      freight?: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units; null when there is none */
+      leastOrderValue?: number | null;
+      /** @description Usual lead time, calendar days; null when it is not known */
+      leadTimeDays?: number | null;
+      /** @description Note */
+      note?: string;
+    };
+    SupplierPatch: {
+      /** @description Version that was seen before the edit */
+      version: number;
+      /** @description Name, unlike that of any other supplier */
+      name?: string;
+      /** @description active, or closed: no new offers, and none of theirs is chosen any more */
+      standing?: components['schemas']['SupplierStanding'];
+      /**
+       * @description What enquiries ask for and new offers start with; offers that are there keep theirs (ISO 4217)
+       * @example EUR
+       */
+      currency?: string;
+      /** @description Language that enquiries are written in */
+      language?: components['schemas']['SupplierLanguage'];
+      /** @description People to send enquiries to */
+      contacts?: components['schemas']['SupplierContact'][];
+      /** @description Postal address */
+      address?: string;
+      /** @description Freight, the whole rule in place of the old one */
+      freight?: components['schemas']['FreightRule'];
+      /** @description Least value of one order, minor units; null when there is none */
+      leastOrderValue?: number | null;
+      /** @description Usual lead time, calendar days; null when it is not known */
+      leadTimeDays?: number | null;
+      /** @description Note */
+      note?: string;
     };
     Rack: {
       /**
@@ -2997,6 +3128,11 @@ export interface components {
       | 'lubricant'
       | 'fastener'
       | 'other';
+    ReplacedPart: {
+      /** @description Null: the library holds none */
+      partNumber: string | null;
+      description: string;
+    };
     GearDataRow: {
       /** @enum {string} */
       group: 'blank' | 'teeth' | 'mate';
@@ -3030,6 +3166,10 @@ export interface components {
       note: string;
       /** @description What a person must look at before ordering */
       flags: string[];
+      /** @description The kit’s own part, where a person chose another for the line */
+      replaces: components['schemas']['ReplacedPart'] | null;
+      /** @description Of a line that a person added */
+      extraLineId: string | null;
       /** @description For a gear to be made */
       gearData?: components['schemas']['GearDataRow'][];
     };
@@ -3043,11 +3183,164 @@ export interface components {
       massKg: number;
       linesWithoutMass: number;
     };
+    /** @enum {string} */
+    LineUnit: 'pcs' | 'l' | 'm';
+    ExtraLine: {
+      /** @description Stays with the line for good */
+      id: string;
+      partNumber: string | null;
+      description: string;
+      quantity: number;
+      unit: components['schemas']['LineUnit'];
+      note: string;
+    };
+    IdleSwap: {
+      key: string;
+      partNumber: string;
+    };
     Bom: {
       lines: components['schemas']['BomLine'][];
       totals: components['schemas']['BomTotals'];
       /** @description Every flag that stands on a line, once */
       flags: string[];
+      /** @description The added lines as they were typed, to be edited */
+      extraLines: components['schemas']['ExtraLine'][];
+      /** @description Kept in case their lines come back */
+      idleSwaps: components['schemas']['IdleSwap'][];
+    };
+    SwapInput: {
+      /** @description The version of the train that was seen */
+      version: number;
+      /** @description Key of the line */
+      key: string;
+      /** @description The part to take; null puts the kit’s own back */
+      partNumber?: string | null;
+      /** @description Only says what would change */
+      dryRun: boolean;
+    };
+    SwapChange: {
+      /** @description `Part`, `Mass`, `Flag`, `Finding`, `Price`, `Arrival` … */
+      what: string;
+      /** @description Blank: there was none */
+      before: string;
+      /** @description Blank: there is none */
+      after: string;
+      /**
+       * @description Null where it is neither
+       * @enum {string|null}
+       */
+      verdict: 'better' | 'worse' | 'same' | null;
+    };
+    SwapCheckState: {
+      value: number | null;
+      verdict: components['schemas']['Verdict'];
+    };
+    SwapCheck: {
+      label: string;
+      /** @description 0 for the first stage; null: the whole train */
+      stage: number | null;
+      unit: string;
+      /** @description Null: there was no such check */
+      before: components['schemas']['SwapCheckState'] | null;
+      /** @description Null: there is no such check */
+      after: components['schemas']['SwapCheckState'] | null;
+    };
+    SwapResult: {
+      /** @description Null after a dry run */
+      train: components['schemas']['Train'] | null;
+      changes: components['schemas']['SwapChange'][];
+      /** @description Only checks that change */
+      checks: components['schemas']['SwapCheck'][];
+    };
+    ExtraLineInput: {
+      /** @description Of a line that stands already; null or left out: a new line */
+      id?: string | null;
+      /** @description A cleared part; null: something without a number yet */
+      partNumber?: string | null;
+      /** @description What it is; may be blank where a part is named */
+      description?: string;
+      /** @description At most three decimals; pieces are whole */
+      quantity: number;
+      /**
+       * @description That of the part, where one is named
+       * @default pcs
+       */
+      unit: components['schemas']['LineUnit'];
+      /** @description Anything worth knowing */
+      note?: string;
+    };
+    ExtraLinesInput: {
+      /** @description The version of the train that was seen */
+      version: number;
+      lines: components['schemas']['ExtraLineInput'][];
+    };
+    BomPasteInput: {
+      /** @description Tab-separated rows: find number, part number, quantity, unit, description, note; a head row may name the columns in any order */
+      text: string;
+    };
+    BomPasteColumn: {
+      /** @description What it is taken for */
+      name: string;
+      /** @description Its own heading, or its place where there is no head row */
+      from: string;
+    };
+    /**
+     * @description choose: another part or quantity for a line; add: a new line
+     * @enum {string}
+     */
+    BomPasteAction: 'choose' | 'add' | 'same' | 'wrong';
+    BomPasteProblem: {
+      /** @description Name of the column */
+      column: string;
+      /** @description The cell, cut short */
+      value: string;
+      message: string;
+    };
+    BomPasteRow: {
+      /** @description Row of the pasted text, from 1; the head counts */
+      row: number;
+      /** @description choose: another part or quantity for a line; add: a new line */
+      action: components['schemas']['BomPasteAction'];
+      findNumber: number | null;
+      partNumber: string | null;
+      partDescription: string | null;
+      /** @description What happens, in one sentence */
+      summary: string;
+      changes: string[];
+      problems: components['schemas']['BomPasteProblem'][];
+    };
+    BomPasteCounts: {
+      choose: number;
+      add: number;
+      same: number;
+      wrong: number;
+    };
+    BomPastePreview: {
+      columns: components['schemas']['BomPasteColumn'][];
+      rows: components['schemas']['BomPasteRow'][];
+      counts: components['schemas']['BomPasteCounts'];
+      /** @description The version of the train that was looked at */
+      version: number;
+      /** @description Send it back to book exactly this */
+      token: string;
+    };
+    BomPasteBookInput: {
+      /** @description Tab-separated rows: find number, part number, quantity, unit, description, note; a head row may name the columns in any order */
+      text: string;
+      /** @description From the preview */
+      token: string;
+      /** @description The version of the train, from the preview */
+      version: number;
+      /** @description Books the rest; otherwise one wrong row refuses them all */
+      leaveOutWrong: boolean;
+    };
+    BomPasteBooked: {
+      /** @description Lines with another part or quantity */
+      chosen: number;
+      added: number;
+      same: number;
+      leftOut: number;
+      train: components['schemas']['Train'];
     };
     PriceSupplier: {
       /** @example S-0001 */
@@ -4519,143 +4812,15 @@ export interface operations {
       };
     };
   };
-  Suppliers_list: {
+  Substitutes_ofPart: {
     parameters: {
       query?: {
-        page?: number;
-        size?: number;
-        /** @description At most two fields; a leading minus sorts downwards. */
-        sort?: string;
-        text?: string;
-        /** @description Standing */
-        standing?: 'active' | 'closed';
-        /** @description Currency (ISO 4217) */
-        currency?: string;
+        /** @description In the unit of the part, at most three decimals; 1 when left out */
+        quantity?: number;
       };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SupplierPage'];
-        };
-      };
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description Nobody is signed in. */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description The roles do not allow it. */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description A refusal. */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-    };
-  };
-  Suppliers_create: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SupplierInput'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Supplier'];
-        };
-      };
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description Nobody is signed in. */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description The roles do not allow it. */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description The name belongs to another supplier. */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description A refusal. */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-    };
-  };
-  Suppliers_get: {
-    parameters: {
-      query?: never;
       header?: never;
       path: {
-        code: string;
+        number: string;
       };
       cookie?: never;
     };
@@ -4666,67 +4831,7 @@ export interface operations {
           [name: string]: unknown;
         };
         content: {
-          'application/json': components['schemas']['Supplier'];
-        };
-      };
-      /** @description Nobody is signed in. */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description The roles do not allow it. */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description A refusal. */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-    };
-  };
-  Suppliers_update: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        code: string;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SupplierPatch'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Supplier'];
+          'application/json': components['schemas']['Substitutes'];
         };
       };
       400: {
@@ -4735,77 +4840,6 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description Nobody is signed in. */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description The roles do not allow it. */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description Somebody else changed it meanwhile, or has the name. */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-      /** @description A refusal. */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Problem'];
-        };
-      };
-    };
-  };
-  Suppliers_changes: {
-    parameters: {
-      query?: {
-        page?: number;
-        size?: number;
-        /** @description At most two fields; a leading minus sorts downwards. */
-        sort?: string;
-        text?: string;
-      };
-      header?: never;
-      path: {
-        code: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ChangePage'];
         };
       };
       /** @description Nobody is signed in. */
@@ -5209,6 +5243,332 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+        /** @description Standing */
+        standing?: 'active' | 'closed';
+        /** @description Currency (ISO 4217) */
+        currency?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierPage'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_create: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The name belongs to another supplier. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_update: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Supplier'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Somebody else changed it meanwhile, or has the name. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  Suppliers_changes: {
+    parameters: {
+      query?: {
+        page?: number;
+        size?: number;
+        /** @description At most two fields; a leading minus sorts downwards. */
+        sort?: string;
+        text?: string;
+      };
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ChangePage'];
         };
       };
       /** @description Nobody is signed in. */
@@ -6479,6 +6839,334 @@ export interface operations {
       };
       /** @description The roles do not allow it. */
       403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  BomEdits_substitutes: {
+    parameters: {
+      query: {
+        /** @description In the unit of the part, at most three decimals; 1 when left out */
+        quantity?: number;
+        /** @description Key of the line */
+        key: string;
+      };
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Substitutes'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  BomEdits_swap: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SwapInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SwapResult'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description It changed since; `current` is how it stands now. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  BomEdits_setExtraLines: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ExtraLinesInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Train'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description It changed since; `current` is how it stands now. */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  BomEdits_previewPaste: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BomPasteInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BomPastePreview'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  BomEdits_bookPaste: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BomPasteBookInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BomPasteBooked'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description preview-outdated: `current` is the new preview; changed-meanwhile: it is the train. */
+      409: {
         headers: {
           [name: string]: unknown;
         };

@@ -10,8 +10,11 @@ const COLUMNS: [table: string, column: string, type: string][] = [
   ['train', 'offerChoices', 'text'],
 ];
 
-/** Parts whose shelf is watched are few among many. */
-const INDEXES = [`CREATE INDEX "part_least_stock" ON "part" ("leastStock") WHERE "leastStock" IS NOT NULL`];
+/** Parts whose shelf is watched are few among many; substitutes of keys, screws and housings are found by length. */
+const INDEXES: [name: string, on: string][] = [
+  ['part_least_stock', '"part" ("leastStock") WHERE "leastStock" IS NOT NULL'],
+  ['part_kind_length', '"part" ("kind", "length")'],
+];
 
 /** Suppliers, offers and stock; trains remember how many are built and what a person chose for their lines. */
 export class Supply1764700000000 implements MigrationInterface {
@@ -22,11 +25,11 @@ export class Supply1764700000000 implements MigrationInterface {
     for (const [table, column, type] of COLUMNS) {
       await runner.query(`ALTER TABLE "${table}" ADD COLUMN "${column}" ${type}`);
     }
-    for (const statement of INDEXES) await runner.query(statement);
+    for (const [name, on] of INDEXES) await runner.query(`CREATE INDEX "${name}" ON ${on}`);
   }
 
   async down(runner: QueryRunner): Promise<void> {
-    await runner.query('DROP INDEX "part_least_stock"');
+    for (const [name] of INDEXES) await runner.query(`DROP INDEX "${name}"`);
     for (const [table, column] of [...COLUMNS].reverse()) {
       await runner.query(`ALTER TABLE "${table}" DROP COLUMN "${column}"`);
     }

@@ -1,9 +1,12 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
+import { type BomEdits } from '../bom-edits.js';
+import { ExtraLineDto } from '../bom-edits/dto/extra-line.dto.js';
 import {
   BOM_KINDS,
   type BomKind,
   type BomLine,
   bomTotals,
+  type EditedBom,
   type GearDataRow,
 } from '@stageyard/libs/bill-of-materials';
 
@@ -29,9 +32,29 @@ export class GearDataRowDto implements GearDataRow {
   digits!: number;
 }
 
+/** What a line would hold if nobody had chosen another part for it. */
+@ApiSchema({ name: 'ReplacedPart' })
+export class ReplacedPartDto {
+  @ApiProperty({ type: 'string', nullable: true, description: 'Null: the library holds none' })
+  partNumber!: string | null;
+
+  @ApiProperty({ type: 'string' })
+  description!: string;
+}
+
+/** A chosen part whose line the kit no longer has. */
+@ApiSchema({ name: 'IdleSwap' })
+export class IdleSwapDto {
+  @ApiProperty({ type: 'string' })
+  key!: string;
+
+  @ApiProperty({ type: 'string' })
+  partNumber!: string;
+}
+
 /** One line of a bill of materials. */
 @ApiSchema({ name: 'BomLine' })
-export class BomLineDto implements BomLine {
+export class BomLineDto implements Omit<BomLine, 'needs' | 'replaces' | 'extraLineId'> {
   @ApiProperty({ type: 'integer' })
   findNumber!: number;
 
@@ -74,6 +97,16 @@ export class BomLineDto implements BomLine {
   @ApiProperty({ type: [String], description: 'What a person must look at before ordering' })
   flags!: string[];
 
+  @ApiProperty({
+    type: ReplacedPartDto,
+    nullable: true,
+    description: 'The kit’s own part, where a person chose another for the line',
+  })
+  replaces!: ReplacedPartDto | null;
+
+  @ApiProperty({ type: 'string', nullable: true, description: 'Of a line that a person added' })
+  extraLineId!: string | null;
+
   @ApiProperty({ type: [GearDataRowDto], required: false, description: 'For a gear to be made' })
   gearData?: GearDataRowDto[];
 }
@@ -107,8 +140,26 @@ export class BomDto {
 
   @ApiProperty({ type: [String], description: 'Every flag that stands on a line, once' })
   flags!: string[];
+
+  @ApiProperty({ type: [ExtraLineDto], description: 'The added lines as they were typed, to be edited' })
+  extraLines!: ExtraLineDto[];
+
+  @ApiProperty({ type: [IdleSwapDto], description: 'Kept in case their lines come back' })
+  idleSwaps!: IdleSwapDto[];
 }
 
-export function toBomDto(lines: BomLine[]): BomDto {
-  return { lines, totals: bomTotals(lines), flags: [...new Set(lines.flatMap((line) => line.flags))] };
+/** @param edits of the train, as they are stored */
+export function toBomDto({ lines, idleKeys }: EditedBom, edits: BomEdits): BomDto {
+  return {
+    lines: lines.map(toBomLine),
+    totals: bomTotals(lines),
+    flags: [...new Set(lines.flatMap((line) => line.flags))],
+    extraLines: edits.extraLines,
+    idleSwaps: idleKeys.map((key) => ({ key, partNumber: edits.swaps[key] ?? '' })),
+  };
+}
+
+/** What its places ask for stays inside. */
+function toBomLine({ needs: _, ...line }: BomLine): BomLineDto {
+  return { ...line, replaces: line.replaces ?? null, extraLineId: line.extraLineId ?? null };
 }

@@ -4,9 +4,8 @@ import { ArrayMaxSize, IsArray, ValidateNested } from 'class-validator';
 import { FieldChoice } from '../../../common/field-choice.decorator.js';
 import { FieldFigure } from '../../../common/field-figure.decorator.js';
 import { FieldText } from '../../../common/field-text.decorator.js';
-import { type ExtraLine } from '../../bom-edits.js';
+import { EXTRA_LINE_UNITS, type ExtraLine } from '../../bom-edits.js';
 
-export const EXTRA_LINE_UNITS = ['pcs', 'l', 'm'] as const;
 /** Most lines that people add to one bill of materials. */
 export const MOST_EXTRA_LINES = 1000;
 /** Greatest quantity of an added line. */
@@ -74,26 +73,4 @@ export class ExtraLinesInputDto {
   @Type(() => ExtraLineInputDto)
   @ValidateNested({ each: true })
   lines!: ExtraLineInputDto[];
-}
-
-/** An added line as it is kept. */
-@ApiSchema({ name: 'ExtraLine' })
-export class ExtraLineDto implements ExtraLine {
-  @ApiProperty({ type: 'string', description: 'Stays with the line for good' })
-  id!: string;
-
-  @ApiProperty({ type: 'string', nullable: true })
-  partNumber!: string | null;
-
-  @ApiProperty({ type: 'string' })
-  description!: string;
-
-  @ApiProperty({ type: 'number' })
-  quantity!: number;
-
-  @ApiProperty({ enum: EXTRA_LINE_UNITS, enumName: 'LineUnit' })
-  unit!: ExtraLine['unit'];
-
-  @ApiProperty({ type: 'string' })
-  note!: string;
 }
