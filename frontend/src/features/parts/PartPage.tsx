@@ -1,3 +1,4 @@
+import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Link from '@mui/material/Link';
 import { Link as RouterLink, useParams, useSearchParams } from 'react-router-dom';
@@ -13,6 +14,7 @@ import { PartEditor } from './PartEditor';
 import { PartFacts } from './PartFacts';
 import { formOfPart, patchOf, type PartForm } from './partForm';
 import { PartHeadFacts } from './PartHeadFacts';
+import { PartOffers } from './PartOffers';
 import { StandingActions } from './StandingActions';
 import { useRefreshParts } from './useRefreshParts';
 
@@ -91,7 +93,15 @@ export default function PartPage() {
           )
         }
       />
-      <PartFacts part={part} below={<PartChanges number={part.number} version={part.version} />} />
+      <PartFacts
+        part={part}
+        below={
+          <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2 }}>
+            <PartOffers part={part} />
+            <PartChanges number={part.number} version={part.version} />
+          </Box>
+        }
+      />
     </>
   );
 }

@@ -1,0 +1,160 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import FormControlLabel from '@mui/material/FormControlLabel';
+import Switch from '@mui/material/Switch';
+import useMediaQuery from '@mui/material/useMediaQuery';
+import { useMemo, type ReactNode } from 'react';
+import { Link, useNavigate } from 'react-router-dom';
+import { useMe } from '../../api/hooks/useMe';
+import { useOffers } from '../../api/hooks/useOffers';
+import type { Offer } from '../../api/types';
+import { CURRENCY_CHOICES } from '../currencyChoices';
+import { DataTable } from '../DataTable';
+import { EmptyState } from '../EmptyState';
+import { formatCount } from '../figures';
+import { FilterBar } from '../FilterBar';
+import { ChoiceFilter } from '../FilterFields';
+import { FilterText } from '../FilterText';
+import { useListState } from '../useListState';
+import { hiddenOfferColumns, offerColumnsFor, type OffersRoom } from './offerColumns';
+import { ENDS_CHOICES, OFFER_FILTERS, OFFER_SORTS, offerQuery, STATE_CHOICES } from './offerFilters';
+
+interface OffersTableProps {
+  /** Code of the one supplier whose offers these are; all suppliers' where it is left out. */
+  supplier?: string;
+  height?: string;
+  /** Filters that only the whole list has. */
+  more?: ReactNode;
+}
+
+/** Offers with their filters; filters, order and page live in the address. */
+export function OffersTable({ supplier, height, more }: OffersTableProps) {
+  const navigate = useNavigate();
+  const { can } = useMe();
+  const state = useListState(OFFER_FILTERS, OFFER_SORTS);
+  const query = useMemo(() => offerQuery(state, supplier), [state, supplier]);
+  const { page, problem, isLoading, mutate } = useOffers(query);
+  const narrow = useMediaQuery('(max-width: 600px)');
+  const laptop = useMediaQuery('(max-width: 1399px)');
+  const room: OffersRoom = narrow ? 'narrow' : laptop ? 'laptop' : 'wide';
+  const ofOne = supplier !== undefined;
+  const { filters, setFilters } = state;
+  return (
+    <>
+      <FilterBar
+        filterCount={state.filterCount}
+        onClear={state.clearFilters}
+        result={page && (page.total === 1 ? '1 offer' : `${formatCount(page.total)} offers`)}
+      >
+        <FilterText
+          label="Part or supplier"
+          width={200}
+          value={filters.text ?? ''}
+          onChange={(text) => setFilters({ text })}
+        />
+        {more}
+        <ChoiceFilter
+          label="State"
+          width={108}
+          value={filters.state ?? ''}
+          onSet={(value) => setFilters({ state: value })}
+          choices={STATE_CHOICES}
+        />
+        <ChoiceFilter
+          label="Ends"
+          width={124}
+          value={filters.ends ?? ''}
+          onSet={(ends) => setFilters({ ends })}
+          choices={ENDS_CHOICES}
+        />
+        <ChoiceFilter
+          label="Currency"
+          width={104}
+          value={filters.currency ?? ''}
+          onSet={(currency) => setFilters({ currency })}
+          choices={CURRENCY_CHOICES}
+        />
+        <FormControlLabel
+          control={
+            <Switch
+              size="small"
+              checked={filters.tooOld === 'true'}
+              onChange={(_, on) => setFilters({ tooOld: on ? 'true' : '' })}
+            />
+          }
+          label="Price too old"
+          sx={{ minHeight: 34, ml: 0.5 }}
+        />
+      </FilterBar>
+      <Box sx={ofOne ? { border: '1px solid', borderColor: 'line.rule' } : undefined}>
+        <DataTable<Offer>
+          label="Offers"
+          columns={offerColumnsFor(room, ofOne)}
+          hidden={hiddenOfferColumns(room, ofOne)}
+          rowHeight={narrow ? 62 : 32}
+          height={height}
+          rows={page?.items}
+          total={page?.total}
+          getRowId={(row) => row.id}
+          state={state}
+          loading={isLoading}
+          problem={problem}
+          onRetry={() => void mutate()}
+          onOpen={(row) => void navigate(`/offers/${encodeURIComponent(row.id)}`)}
+          empty={
+            <NoOffers
+              filtered={state.filterCount > 0}
+              onClear={state.clearFilters}
+              supplier={supplier}
+              mayAdd={can('prices.edit')}
+            />
+          }
+        />
+      </Box>
+    </>
+  );
+}
+
+interface NoOffersProps {
+  filtered: boolean;
+  onClear: () => void;
+  supplier: string | undefined;
+  mayAdd: boolean;
+}
+
+function NoOffers({ filtered, onClear, supplier, mayAdd }: NoOffersProps) {
+  if (filtered) {
+    return (
+      <EmptyState
+        title="No offer meets these filters"
+        action={
+          <Button variant="outlined" onClick={onClear}>
+            Clear the filters
+          </Button>
+        }
+      >
+        Loosen one of them, or clear them all.
+      </EmptyState>
+    );
+  }
+  if (!mayAdd) return <EmptyState title="No offers yet">A purchaser or a librarian adds them.</EmptyState>;
+  const query = supplier === undefined ? '' : `?supplier=${encodeURIComponent(supplier)}`;
+  const paste = supplier === undefined ? '/offers?paste=1' : `/offers?paste=${encodeURIComponent(supplier)}`;
+  return (
+    <EmptyState
+      title="No offers yet"
+      action={
+        <Box sx={{ display: 'flex', gap: 1, flexWrap: 'wrap' }}>
+          <Button variant="outlined" component={Link} to={`/add-offer${query}`}>
+            Add an offer
+          </Button>
+          <Button variant="outlined" component={Link} to={paste}>
+            Paste rows
+          </Button>
+        </Box>
+      }
+    >
+      Add one by hand, or paste the rows of a price list from a spreadsheet.
+    </EmptyState>
+  );
+}

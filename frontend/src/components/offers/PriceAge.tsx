@@ -1,0 +1,22 @@
+import Box from '@mui/material/Box';
+import type { Offer } from '../../api/types';
+import { formatDay } from '../figures';
+import { ageWords } from './offerWords';
+
+interface PriceAgeProps {
+  offer: Pick<Offer, 'ageDays' | 'tooOld' | 'pricedOn'>;
+}
+
+/** How long ago the supplier stated the price; one older than the house rule allows says so. */
+export function PriceAge({ offer: { ageDays, tooOld, pricedOn } }: PriceAgeProps) {
+  return (
+    <Box
+      component="span"
+      title={`Priced on ${formatDay(pricedOn)}`}
+      sx={{ whiteSpace: 'nowrap', ...(tooOld ? { color: 'warning.main', fontWeight: 600 } : {}) }}
+    >
+      {ageWords(ageDays)}
+      {tooOld && ', too old'}
+    </Box>
+  );
+}

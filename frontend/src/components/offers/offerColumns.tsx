@@ -1,0 +1,130 @@
+import Box from '@mui/material/Box';
+import type { Offer } from '../../api/types';
+import type { DataColumn } from '../gridText';
+import { breaksWords, leadTimeWords, validityWords } from './offerWords';
+import { OfferStateWord } from './OfferStateWord';
+import { PriceAge } from './PriceAge';
+
+type Column = DataColumn<Offer>;
+
+/** Columns of every list of offers; `sortable` ones are those that the server sorts by. */
+const COLUMNS: Column[] = [
+  {
+    field: 'part',
+    headerName: 'Part',
+    width: 104,
+    cellClassName: 'part-number',
+    valueGetter: (_, { part }) => part.number,
+  },
+  {
+    field: 'description',
+    headerName: 'Description',
+    flex: 1.2,
+    minWidth: 130,
+    sortable: false,
+    valueGetter: (_, { part }) => part.description,
+    renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
+  },
+  {
+    field: 'supplier',
+    headerName: 'Supplier',
+    flex: 1,
+    minWidth: 120,
+    valueGetter: (_, { supplier }) => supplier.name,
+    renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
+  },
+  { field: 'supplierPartNumber', headerName: 'Their number', width: 130, cellClassName: 'part-number' },
+  {
+    field: 'breaks',
+    headerName: 'Price from a quantity',
+    flex: 1.8,
+    minWidth: 200,
+    sortable: false,
+    valueGetter: (_, offer) => breaksWords(offer),
+    renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
+  },
+  {
+    field: 'leadTimeDays',
+    headerName: 'Lead time',
+    width: 94,
+    align: 'right',
+    headerAlign: 'right',
+    valueGetter: (_, { effectiveLeadTimeDays }) => leadTimeWords(effectiveLeadTimeDays),
+  },
+  {
+    field: 'state',
+    headerName: 'State',
+    width: 92,
+    sortable: false,
+    renderCell: ({ row }) => <OfferStateWord state={row.state} />,
+  },
+  {
+    field: 'pricedOn',
+    headerName: 'Price',
+    width: 158,
+    renderCell: ({ row }) => <PriceAge offer={row} />,
+    copied: ({ pricedOn }) => pricedOn,
+  },
+  {
+    field: 'validUntil',
+    headerName: 'Holds',
+    width: 138,
+    valueGetter: (_, offer) => validityWords(offer),
+    copied: ({ validUntil }) => validUntil,
+  },
+];
+
+/** How much of a table a screen has room for. */
+export type OffersRoom = 'narrow' | 'laptop' | 'wide';
+
+/** Columns to leave out: what does not fit, and the supplier where all rows are one supplier's. */
+export function hiddenOfferColumns(room: OffersRoom, ofOneSupplier: boolean): Record<string, boolean> {
+  return {
+    supplier: !ofOneSupplier && room !== 'narrow',
+    supplierPartNumber: room === 'wide' || (ofOneSupplier && room === 'laptop'),
+    ...(room === 'wide' ? {} : { validUntil: false }),
+    ...(room === 'narrow' ? { description: false, leadTimeDays: false, state: false, pricedOn: false } : {}),
+  };
+}
+
+const STACKED = {
+  lineHeight: 1.3,
+  height: '100%',
+  display: 'grid',
+  alignContent: 'center',
+  whiteSpace: 'normal',
+} as const;
+
+const SMALL = { color: 'text.secondary', fontSize: '0.75rem' } as const;
+
+/** On a phone a row has two lines: the part over who offers it, the prices over whether they hold. */
+export function offerColumnsFor(room: OffersRoom, ofOneSupplier: boolean): Column[] {
+  if (room !== 'narrow') return COLUMNS;
+  return COLUMNS.map((column) => {
+    if (column.field === 'part') {
+      const renderCell: Column['renderCell'] = ({ row }) => (
+        <Box sx={STACKED}>
+          <span className="part-number">{row.part.number}</span>
+          <Box component="span" sx={{ ...SMALL, maxHeight: '2.6em', overflow: 'hidden' }}>
+            {ofOneSupplier ? row.part.description : row.supplier.name}
+          </Box>
+        </Box>
+      );
+      return { ...column, width: 136, renderCell };
+    }
+    if (column.field === 'breaks') {
+      const renderCell: Column['renderCell'] = ({ row }) => (
+        <Box sx={STACKED}>
+          <Box component="span" sx={{ maxHeight: '2.6em', overflow: 'hidden' }}>
+            {breaksWords(row)}
+          </Box>
+          <Box component="span" sx={SMALL}>
+            <OfferStateWord state={row.state} />, <PriceAge offer={row} />
+          </Box>
+        </Box>
+      );
+      return { ...column, minWidth: 150, renderCell };
+    }
+    return column;
+  });
+}

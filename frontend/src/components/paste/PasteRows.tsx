@@ -1,0 +1,111 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import TableBody from '@mui/material/TableBody';
+import TableCell from '@mui/material/TableCell';
+import TableContainer from '@mui/material/TableContainer';
+import TableHead from '@mui/material/TableHead';
+import TableRow from '@mui/material/TableRow';
+import ToggleButton from '@mui/material/ToggleButton';
+import ToggleButtonGroup from '@mui/material/ToggleButtonGroup';
+import Typography from '@mui/material/Typography';
+import { useState } from 'react';
+import { CopyTable } from '../CopyTable';
+import { formatCount, NOTHING } from '../figures';
+import { countsOf, type PastePreview, type PasteRow } from './pasteTypes';
+import { actionWords, problemWords } from './pasteWords';
+
+/** Rows drawn at a time: thousands at once would make the page slow. */
+const AT_A_TIME = 100;
+const ALL = 'all';
+
+/** Row by row what booking would do; wrong rows first, where there are any. */
+export function PasteRows({ preview }: { preview: PastePreview }) {
+  const { rows, columns } = preview;
+  const counts = countsOf(rows);
+  const [shown, setShown] = useState(counts.has('wrong') ? 'wrong' : ALL);
+  const [most, setMost] = useState(AT_A_TIME);
+  const chosen = shown === ALL ? rows : rows.filter(({ action }) => action === shown);
+  return (
+    <Box sx={{ mt: 1.5 }}>
+      <Box sx={{ display: 'flex', gap: 1.5, alignItems: 'center', flexWrap: 'wrap', mb: 0.75 }}>
+        <ToggleButtonGroup
+          exclusive
+          size="small"
+          value={shown}
+          aria-label="Rows to show"
+          onChange={(_, value: string | null) => {
+            if (value === null) return;
+            setShown(value);
+            setMost(AT_A_TIME);
+          }}
+          sx={{ flexWrap: 'wrap' }}
+        >
+          <ToggleButton value={ALL}>{formatCount(rows.length)} in all</ToggleButton>
+          {[...counts].map(([action, count]) => (
+            <ToggleButton key={action} value={action}>
+              {formatCount(count)} {actionWords(action)}
+            </ToggleButton>
+          ))}
+        </ToggleButtonGroup>
+      </Box>
+      <Typography variant="body2" color="textSecondary" sx={{ mb: 0.75 }}>
+        Read as: {columns.map(columnWords).join(', ')}.
+      </Typography>
+      <TableContainer sx={{ maxHeight: 420, border: '1px solid', borderColor: 'line.rule' }}>
+        <CopyTable label="What booking would do" stickyHeader>
+          <TableHead>
+            <TableRow>
+              <TableCell align="right" sx={{ width: 52 }}>
+                Row
+              </TableCell>
+              <TableCell sx={{ width: 120 }}>What happens</TableCell>
+              <TableCell sx={{ width: 220 }}>Part</TableCell>
+              <TableCell>Details</TableCell>
+            </TableRow>
+          </TableHead>
+          <TableBody>
+            {chosen.slice(0, most).map((row) => (
+              <Row key={row.row} row={row} />
+            ))}
+          </TableBody>
+        </CopyTable>
+      </TableContainer>
+      {chosen.length > most && (
+        <Button onClick={() => setMost(most + AT_A_TIME)} sx={{ mt: 0.5 }}>
+          Show more ({formatCount(chosen.length - most)} left)
+        </Button>
+      )}
+    </Box>
+  );
+}
+
+function Row({ row }: { row: PasteRow }) {
+  const wrong = row.action === 'wrong';
+  return (
+    <TableRow sx={{ '& > *': { verticalAlign: 'top' } }}>
+      <TableCell align="right">{row.row}</TableCell>
+      <TableCell sx={wrong ? { color: 'error.main', fontWeight: 600 } : undefined}>
+        {wrong && <span aria-hidden="true">✕ </span>}
+        {actionWords(row.action)}
+      </TableCell>
+      <TableCell>
+        <span className="part-number">{row.partNumber ?? NOTHING}</span>
+        {row.partDescription && (
+          <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{row.partDescription}</Box>
+        )}
+      </TableCell>
+      <TableCell sx={{ overflowWrap: 'anywhere' }}>
+        {row.problems.map((problem, index) => (
+          <div key={index}>{problemWords(problem)}</div>
+        ))}
+        {row.changes.map((change) => (
+          <div key={change}>{change}</div>
+        ))}
+        {row.problems.length === 0 && row.changes.length === 0 && row.summary}
+      </TableCell>
+    </TableRow>
+  );
+}
+
+const columnWords = ({ name, from }: PastePreview['columns'][number]): string =>
+  from === null || from.toLowerCase() === name.toLowerCase() ? name : `${name} (from “${from}”)`;
