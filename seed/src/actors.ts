@@ -3,7 +3,7 @@ import { type SignedInUser } from '@stageyard/backend/auth/signed-in-user';
 import { type UsersService } from '@stageyard/backend/users/users.service';
 
 /** The demo person of a role, as the services see somebody who is signed in. */
-export type Actors = Record<'designer' | 'librarian', SignedInUser>;
+export type Actors = Record<'designer' | 'librarian' | 'purchaser', SignedInUser>;
 
 /** @throws Error when the demo accounts are missing, which happens only outside demo mode */
 export async function demoActors(users: UsersService): Promise<Actors> {
@@ -15,5 +15,5 @@ export async function demoActors(users: UsersService): Promise<Actors> {
     const { id, name, email, roles } = person;
     return { id, name, email, roles, permissions: permissionsOf(roles), sessionId: 'demo-data' };
   };
-  return { designer: actor('designer'), librarian: actor('librarian') };
+  return { designer: actor('designer'), librarian: actor('librarian'), purchaser: actor('purchaser') };
 }

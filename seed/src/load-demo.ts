@@ -2,6 +2,7 @@ import 'reflect-metadata';
 import { existsSync, readdirSync, renameSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { NestFactory } from '@nestjs/core';
+import { Clock } from '@stageyard/backend/common/clock';
 import { AppModule } from '@stageyard/backend/app.module';
 import { DATABASE_FILE } from '@stageyard/backend/database/data-sources';
 import { LOCK_FILE, lockFolder } from '@stageyard/backend/database/folder-lock';
@@ -9,12 +10,22 @@ import { type Settings } from '@stageyard/backend/settings/settings';
 import { UsersService } from '@stageyard/backend/users/users.service';
 import { demoActors } from './actors.js';
 import { bookLibrary } from './book-library.js';
+import { bookStock } from './book-stock.js';
+import { bookSupply } from './book-supply.js';
 import { bookWork } from './book-work.js';
+import { dayOf } from './demo-days.js';
 
 /** Hidden, so that a loading cut short by a power failure leaves a data folder that still counts as empty. */
 const WORKSHOP = '.demo-loading';
 
-export type DemoLoad = { parts: number; briefs: number; trains: number } | null;
+export type DemoLoad = {
+  parts: number;
+  briefs: number;
+  trains: number;
+  suppliers: number;
+  offers: number;
+  movements: number;
+} | null;
 
 /**
  * Fills a data folder that has no database with the demo workshop: all of it or nothing. The data is booked beside the
@@ -53,8 +64,14 @@ async function book(settings: Settings): Promise<NonNullable<DemoLoad>> {
   });
   try {
     const actors = await demoActors(app.get(UsersService));
+    const today = dayOf(app.get(Clock).now());
     const parts = await bookLibrary(app, actors);
-    return { parts, ...(await bookWork(app, actors)) };
+    return {
+      parts: parts.length,
+      ...(await bookWork(app, actors)),
+      ...(await bookSupply(app, actors, parts, today)),
+      movements: await bookStock(app, actors, parts, today),
+    };
   } finally {
     await app.close();
   }

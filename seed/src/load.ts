@@ -13,8 +13,10 @@ function wordsFor(error: unknown): string {
 try {
   const booked = await loadDemo(loadSettings(process.env));
   if (booked !== null) {
+    const { parts, suppliers, offers, movements, briefs, trains } = booked;
     process.stdout.write(
-      `Booked ${booked.parts} parts, ${booked.briefs} briefs and ${booked.trains} trains.\n`,
+      `Booked ${parts} parts, ${offers} offers of ${suppliers} suppliers, ${movements} stock movements, ` +
+        `${briefs} briefs and ${trains} trains.\n`,
     );
   }
 } catch (error) {

@@ -23,6 +23,8 @@ export interface BriefRow {
     source: 'any';
     objective: 'centre-distance' | 'ratio-error' | 'mass';
     limit: number;
+    /** Drives of one batch. */
+    buildQuantity?: number;
     duty: { inputSpeed?: number; outputTorque?: number; applicationFactor?: number };
   };
 }
@@ -54,6 +56,7 @@ export const DEMO_BRIEFS: BriefRow[] = [
       modules: [1, 1.25, 1.5],
       envelope: { length: 220, width: 90, height: 140, wall: 6 },
       objective: 'centre-distance',
+      buildQuantity: 3,
       duty: { inputSpeed: 1400, outputTorque: 45, applicationFactor: 1.25 },
     },
   },
@@ -70,6 +73,7 @@ export const DEMO_BRIEFS: BriefRow[] = [
       stageRatio: { min: 1, max: 8 },
       direction: 'opposite',
       objective: 'mass',
+      buildQuantity: 8,
       duty: { inputSpeed: 900, outputTorque: 80, applicationFactor: 1.25 },
     },
   },
@@ -87,6 +91,7 @@ export const DEMO_BRIEFS: BriefRow[] = [
       faceWidthFactor: 12,
       direction: 'same',
       objective: 'ratio-error',
+      buildQuantity: 2,
       duty: { inputSpeed: 1400, outputTorque: 30, applicationFactor: 1 },
     },
   },

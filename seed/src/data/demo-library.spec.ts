@@ -1,30 +1,33 @@
 import { parallelKeyForBore } from '@stageyard/libs/bill-of-materials';
 import { gearGeometry } from '@stageyard/libs/gear-geometry';
 import { describe, expect, it } from 'vitest';
-import { demoGears } from './gears.js';
-import { demoOtherParts } from './other-parts.js';
+import { type GearRow } from './gears.js';
+import { demoLibrary, type LibraryRow } from './library.js';
+import { type OtherRow } from './other-parts.js';
 
-const gears = demoGears();
-const others = demoOtherParts();
+const isGear = (row: LibraryRow): row is GearRow => row.kind === 'gear';
+const isOther = (row: LibraryRow): row is OtherRow => row.kind !== 'gear';
+const library = demoLibrary();
+const gears = library.filter(isGear);
+const others = library.filter(isOther);
 
 describe('demo library', () => {
-  it('holds at least 400 gears and 100 other parts, each described once', () => {
-    expect(gears.length).toBeGreaterThanOrEqual(400);
-    expect(others.length).toBeGreaterThanOrEqual(100);
-    const texts = [
-      ...gears.map((row) => `${row.description} ${row.supplier}`),
-      ...others.map((row) => row.description),
-    ];
-    expect(new Set(texts).size).toBe(texts.length);
+  it('holds at least 1,500 gears and 300 other parts, nearly all cleared, none described twice', () => {
+    expect(gears.length).toBeGreaterThanOrEqual(1500);
+    expect(others.length).toBeGreaterThanOrEqual(300);
+    expect(new Set(library.map((row) => row.description)).size).toBe(library.length);
+    const cleared = library.filter((row) => row.standing === 'cleared');
+    expect(cleared.length / library.length).toBeGreaterThan(0.95);
+    expect(cleared.length).toBeLessThan(library.length);
   });
 
-  it('spans spur and helical, modules 0.5 to 5, 12 to 140 teeth and four materials', () => {
+  it('spans spur and helical, modules 0.5 to 5, 12 to 140 teeth and eight materials', () => {
     const modules = gears.map((row) => row.attributes.module);
     const teeth = gears.map((row) => row.attributes.teeth);
     expect([Math.min(...modules), Math.max(...modules)]).toEqual([0.5, 5]);
     expect([Math.min(...teeth), Math.max(...teeth)]).toEqual([12, 140]);
     expect(new Set(gears.map((row) => row.attributes.helixAngleDeg))).toEqual(new Set([0, 15]));
-    expect(new Set(gears.map((row) => row.material)).size).toBe(4);
+    expect(new Set(gears.map((row) => row.material)).size).toBe(8);
   });
 
   it('has no gear that the geometry library refuses', () => {

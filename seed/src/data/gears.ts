@@ -1,4 +1,5 @@
 import { boreFor, gearMass, hubFor } from './gear-blank.js';
+import { type GearFamily } from './gear-families.js';
 
 /** What the parts service needs to book one gear; attribute names are those of the part kind `gear`. */
 export interface GearRow {
@@ -25,119 +26,8 @@ export interface GearRow {
   };
 }
 
-/** One family of stock gears: same maker, material and form, over several modules and tooth counts. */
-interface Family {
-  word: string;
-  material: string;
-  density: number;
-  heatTreatment: string | null;
-  hardness: string | null;
-  supplier: string;
-  modules: number[];
-  teeth: number[];
-  /** Face width in modules. */
-  widthFactor: number;
-  helixAngleDeg: number;
-  hubbed: boolean;
-}
-
-const range = (from: number, to: number): number[] =>
-  Array.from({ length: to - from + 1 }, (_, i) => from + i);
-
-const SMALL = range(12, 30);
-const WHEELS = [
-  32, 34, 35, 36, 38, 40, 42, 44, 45, 48, 50, 52, 54, 55, 56, 57, 58, 60, 62, 64, 65, 66, 68, 70, 72, 75, 76,
-  78, 80, 84, 85, 88, 90, 95, 96, 100, 104, 108, 110, 112, 114, 116, 118, 120, 125, 130, 135, 140,
-];
-const EVERY_SECOND = WHEELS.filter((_, i) => i % 2 === 0);
-
-const MARROW = 'Marrow Sound Gear Works';
-const TIDEWRACK = 'Tidewrack Transmission Supply';
-const LARKSPIT = 'Larkspit Plastics & Brass';
-
-const FAMILIES: Family[] = [
-  {
-    word: 'Spur gear, steel',
-    material: 'C45',
-    density: 7850,
-    heatTreatment: null,
-    hardness: null,
-    supplier: MARROW,
-    modules: [0.5, 0.8, 1, 1.25, 1.5, 2],
-    teeth: [...SMALL, ...WHEELS],
-    widthFactor: 10,
-    helixAngleDeg: 0,
-    hubbed: true,
-  },
-  {
-    word: 'Spur gear, steel',
-    material: 'C45',
-    density: 7850,
-    heatTreatment: null,
-    hardness: null,
-    supplier: TIDEWRACK,
-    modules: [2.5, 3, 4, 5],
-    teeth: [...SMALL.filter((z) => z <= 25), ...EVERY_SECOND.filter((z) => z <= 90)],
-    widthFactor: 10,
-    helixAngleDeg: 0,
-    hubbed: true,
-  },
-  {
-    word: 'Spur pinion, hardened steel',
-    material: '16MnCr5',
-    density: 7850,
-    heatTreatment: 'case-hardened',
-    hardness: '58–62 HRC',
-    supplier: TIDEWRACK,
-    modules: [1, 1.5, 2, 2.5, 3],
-    teeth: range(15, 26),
-    widthFactor: 10,
-    helixAngleDeg: 0,
-    hubbed: false,
-  },
-  {
-    word: 'Helical gear, hardened steel',
-    material: '16MnCr5',
-    density: 7850,
-    heatTreatment: 'case-hardened',
-    hardness: '58–62 HRC',
-    supplier: MARROW,
-    modules: [1, 1.5, 2, 3],
-    teeth: [16, 18, 20, 22, 25, 30, 40, 50, 60, 75, 80, 100],
-    widthFactor: 12,
-    helixAngleDeg: 15,
-    hubbed: false,
-  },
-  {
-    word: 'Spur gear, brass',
-    material: 'CuZn39Pb3',
-    density: 8470,
-    heatTreatment: null,
-    hardness: null,
-    supplier: LARKSPIT,
-    modules: [0.5, 0.8, 1],
-    teeth: [...SMALL.filter((z) => z % 2 === 0), ...EVERY_SECOND.filter((z) => z <= 100)],
-    widthFactor: 8,
-    helixAngleDeg: 0,
-    hubbed: true,
-  },
-  {
-    word: 'Spur gear, acetal',
-    material: 'POM',
-    density: 1410,
-    heatTreatment: null,
-    hardness: null,
-    supplier: LARKSPIT,
-    modules: [0.5, 1, 1.5, 2],
-    teeth: [...SMALL.filter((z) => z % 3 === 0), ...EVERY_SECOND.filter((z) => z <= 80)],
-    widthFactor: 10,
-    helixAngleDeg: 0,
-    hubbed: true,
-  },
-];
-
 function gearRow(
-  family: Family,
+  family: GearFamily,
   module: number,
   teeth: number,
   hand: 'left' | 'right' | null,
@@ -174,10 +64,10 @@ function gearRow(
   };
 }
 
-/** All stock gears of the demo library, always in the same order. */
-export function demoGears(): GearRow[] {
+/** All stock gears of these families, always in the same order. */
+export function gearsOf(families: readonly GearFamily[]): GearRow[] {
   const rows: GearRow[] = [];
-  for (const family of FAMILIES) {
+  for (const family of families) {
     const hands = family.helixAngleDeg === 0 ? ([null] as const) : (['right', 'left'] as const);
     for (const module of family.modules)
       for (const teeth of family.teeth)

@@ -1,6 +1,9 @@
+import { SUPPLIER } from './supplier-names.js';
+
 /** A demo part that is no gear; `attributes` are those of its kind. */
 export interface OtherRow {
-  kind: 'bearing' | 'key' | 'retaining-ring' | 'seal' | 'shaft' | 'housing' | 'lubricant' | 'fastener';
+  kind:
+    'bearing' | 'key' | 'retaining-ring' | 'seal' | 'shaft' | 'housing' | 'lubricant' | 'fastener' | 'other';
   description: string;
   standing: 'cleared';
   material: string | null;
@@ -11,16 +14,15 @@ export interface OtherRow {
   attributes: Record<string, number | string | null>;
 }
 
-const CORRIE = 'Corrie Lane Bearings';
-const TIDEWRACK = 'Tidewrack Transmission Supply';
 const OWN_SHOP = null;
-const STEEL = 7850;
+export const STEEL = 7850;
 
-const cylinder = (diameter: number, length: number): number => (Math.PI / 4) * diameter ** 2 * length * 1e-9;
-const rounded = (kilograms: number): number => Number(kilograms.toPrecision(3));
+export const cylinder = (diameter: number, length: number): number =>
+  (Math.PI / 4) * diameter ** 2 * length * 1e-9;
+export const rounded = (kilograms: number): number => Number(kilograms.toPrecision(3));
 
 /** Boundary dimensions d × D × B in mm of ISO 15, dimension series 18, 10 and 02 (from memory). */
-const BEARINGS: [number, number, number][] = [
+export const BEARINGS: [number, number, number][] = [
   [3, 10, 4], [4, 13, 5], [5, 16, 5], [6, 19, 6], [8, 22, 7],
   [10, 19, 5], [12, 21, 5], [15, 24, 5], [17, 26, 5], [20, 32, 7], [25, 37, 7], [30, 42, 7],
   [10, 26, 8], [12, 28, 8], [15, 32, 9], [17, 35, 10], [20, 42, 12], [25, 47, 12], [30, 55, 13], [35, 62, 14],
@@ -29,7 +31,7 @@ const BEARINGS: [number, number, number][] = [
   [40, 80, 18],
 ]; // prettier-ignore
 
-function bearing([bore, outerDiameter, width]: [number, number, number]): OtherRow {
+export function bearing([bore, outerDiameter, width]: [number, number, number]): OtherRow {
   return {
     kind: 'bearing',
     description: `Deep-groove ball bearing ${bore} × ${outerDiameter} × ${width} mm`,
@@ -38,7 +40,7 @@ function bearing([bore, outerDiameter, width]: [number, number, number]): OtherR
     // About 0.6 of the ring's volume is steel; the rest is the space between balls and cage.
     mass: rounded((cylinder(outerDiameter, width) - cylinder(bore, width)) * STEEL * 0.6),
     supply: 'bought',
-    supplier: CORRIE,
+    supplier: SUPPLIER.corrie,
     // Load ratings come from the supplier's data sheet; the demo has none, and says so by leaving them empty.
     attributes: {
       bore,
@@ -64,7 +66,7 @@ const KEYS: [number, number, number[]][] = [
   [14, 9, [40, 50]],
 ];
 
-function key(width: number, height: number, length: number): OtherRow {
+export function key(width: number, height: number, length: number): OtherRow {
   return {
     kind: 'key',
     description: `Parallel key ${width} × ${height} × ${length} mm, DIN 6885 form A`,
@@ -72,7 +74,7 @@ function key(width: number, height: number, length: number): OtherRow {
     material: 'C45',
     mass: rounded(width * height * length * 1e-9 * STEEL),
     supply: 'bought',
-    supplier: TIDEWRACK,
+    supplier: SUPPLIER.tidewrack,
     attributes: { width, height, length },
   };
 }
@@ -84,7 +86,7 @@ const RINGS: [number, number, number][] = [
   [25, 1.2, 23.9], [28, 1.5, 26.6], [30, 1.5, 28.6], [35, 1.5, 33], [40, 1.75, 37.5], [45, 1.75, 42.5],
 ]; // prettier-ignore
 
-function ring([shaftDiameter, thickness, grooveDiameter]: [number, number, number]): OtherRow {
+export function ring([shaftDiameter, thickness, grooveDiameter]: [number, number, number]): OtherRow {
   return {
     kind: 'retaining-ring',
     description: `Retaining ring for a ${shaftDiameter} mm shaft, DIN 471`,
@@ -92,7 +94,7 @@ function ring([shaftDiameter, thickness, grooveDiameter]: [number, number, numbe
     material: 'spring steel',
     mass: rounded((cylinder(shaftDiameter * 1.25, thickness) - cylinder(shaftDiameter, thickness)) * STEEL),
     supply: 'bought',
-    supplier: CORRIE,
+    supplier: SUPPLIER.corrie,
     attributes: { shaftDiameter, thickness, grooveDiameter },
   };
 }
@@ -103,7 +105,7 @@ const SEALS: [number, number, number][] = [
   [35, 50, 8], [40, 55, 8],
 ]; // prettier-ignore
 
-function seal([shaftDiameter, outerDiameter, width]: [number, number, number]): OtherRow {
+export function seal([shaftDiameter, outerDiameter, width]: [number, number, number]): OtherRow {
   return {
     kind: 'seal',
     description: `Rotary shaft seal ${shaftDiameter} × ${outerDiameter} × ${width} mm`,
@@ -111,7 +113,7 @@ function seal([shaftDiameter, outerDiameter, width]: [number, number, number]): 
     material: 'NBR',
     mass: rounded((cylinder(outerDiameter, width) - cylinder(shaftDiameter, width)) * 1300),
     supply: 'bought',
-    supplier: CORRIE,
+    supplier: SUPPLIER.corrie,
     attributes: { shaftDiameter, outerDiameter, width },
   };
 }
@@ -120,7 +122,7 @@ const SHAFTS: [number, number][] = [
   [6, 120], [8, 120], [10, 150], [12, 150], [15, 200], [17, 200], [20, 250], [25, 250], [30, 300], [35, 300], [40, 300],
 ]; // prettier-ignore
 
-function shaft([diameter, length]: [number, number]): OtherRow {
+export function shaft([diameter, length]: [number, number]): OtherRow {
   return {
     kind: 'shaft',
     description: `Ground shaft ${diameter} h6 × ${length} mm`,
@@ -142,7 +144,7 @@ const HOUSINGS: [number, number, number, number][] = [
   [480, 160, 320, 10],
 ];
 
-function housing([length, width, height, wall]: [number, number, number, number]): OtherRow {
+export function housing([length, width, height, wall]: [number, number, number, number]): OtherRow {
   const hollow = (length - 2 * wall) * (width - 2 * wall) * (height - 2 * wall);
   return {
     kind: 'housing',
@@ -163,7 +165,7 @@ const LUBRICANTS: [string, number][] = [
   ['ISO VG 320', 5],
 ];
 
-function lubricant([viscosityGrade, packVolume]: [string, number]): OtherRow {
+export function lubricant([viscosityGrade, packVolume]: [string, number]): OtherRow {
   return {
     kind: 'lubricant',
     description: `Gear oil ${viscosityGrade}, ${packVolume} l can`,
@@ -171,7 +173,7 @@ function lubricant([viscosityGrade, packVolume]: [string, number]): OtherRow {
     material: 'mineral oil',
     mass: rounded(0.89 * packVolume),
     supply: 'bought',
-    supplier: TIDEWRACK,
+    supplier: SUPPLIER.tidewrack,
     attributes: { viscosityGrade, packVolume },
   };
 }
@@ -184,7 +186,7 @@ const FASTENERS: [string, number][] = [
   ['M10', 30],
 ];
 
-function fastener([thread, length]: [string, number]): OtherRow {
+export function fastener([thread, length]: [string, number]): OtherRow {
   const diameter = Number(thread.slice(1));
   return {
     kind: 'fastener',
@@ -193,13 +195,13 @@ function fastener([thread, length]: [string, number]): OtherRow {
     material: 'steel',
     mass: rounded((cylinder(diameter, length) + cylinder(diameter * 1.6, diameter)) * STEEL),
     supply: 'bought',
-    supplier: TIDEWRACK,
+    supplier: SUPPLIER.tidewrack,
     attributes: { thread, length, strengthClass: '8.8' },
   };
 }
 
-/** All demo parts that are no gears, always in the same order. */
-export function demoOtherParts(): OtherRow[] {
+/** The first parts that are no gears, always in the same order. */
+export function firstOtherParts(): OtherRow[] {
   return [
     ...BEARINGS.map(bearing),
     ...KEYS.flatMap(([width, height, lengths]) => lengths.map((length) => key(width, height, length))),
