@@ -11,8 +11,9 @@ import { BomEditing } from './bom-editing.service.js';
 import { type BomPasteBookedDto, type BomPastePreviewDto, type BomPasteRowDto } from './dto/bom-paste.dto.js';
 import { type BomPasteBookInputDto } from './dto/bom-paste-input.dto.js';
 import { type BomDraft, draftOf } from './line-choice.js';
+import { partNumberOf } from './paste-cells.js';
 import { PASTE_COLUMNS, type PasteColumn } from './paste-columns.js';
-import { partNumberOf, PastePlan } from './paste-plan.js';
+import { PastePlan } from './paste-plan.js';
 
 /** Wrong rows named by one refusal. */
 const MOST_NAMED = 20;

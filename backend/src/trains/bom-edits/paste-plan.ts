@@ -1,24 +1,13 @@
-import { type BomLine, cellDecimal, cellWhole, type MappedRow } from '@stageyard/libs/bill-of-materials';
+import { type BomLine, type MappedRow } from '@stageyard/libs/bill-of-materials';
 import { type Part } from '../../parts/entities/part.entity.js';
 import { unitOf } from '../../parts/part-unit.js';
 import { type ExtraLine } from '../bom-edits.js';
 import { type BomPasteRowDto } from './dto/bom-paste.dto.js';
-import {
-  DESCRIPTION_LENGTH,
-  LINE_NOTE_LENGTH,
-  MOST_EXTRA_LINES,
-  MOST_QUANTITY,
-} from './dto/extra-lines.dto.js';
+import { MOST_EXTRA_LINES } from './dto/extra-lines.dto.js';
 import { quantityProblem } from './extra-line-rules.js';
 import { type BomDraft, chooseForLine, refuseChoice } from './line-choice.js';
-import { PASTE_COLUMNS, type PasteColumn, unitOfWords } from './paste-columns.js';
-
-const MOST_FIND_NUMBER = 99_999;
-/** Longest text of a cell that is shown again. */
-const LONGEST_SHOWN = 80;
-
-/** What the screens write where a line has no part number. */
-const NO_PART = new Set(['to be made', 'to be chosen', '-', '–', '—']);
+import { LONGEST_SHOWN, type ReadCells, readCells, RowReader } from './paste-cells.js';
+import { type PasteColumn } from './paste-columns.js';
 
 /** What the rows are held against. */
 export interface PasteGround {
@@ -27,12 +16,6 @@ export interface PasteGround {
   parts: ReadonlyMap<string, Part>;
   /** Gives an added line its id. */
   newId: () => string;
-}
-
-/** The part number of a row; blank where it names none. */
-export function partNumberOf({ cells }: MappedRow<PasteColumn>): string {
-  const text = cells.partNumber?.trim() ?? '';
-  return NO_PART.has(text.toLowerCase()) ? '' : text;
 }
 
 /** Goes through pasted rows one by one, says what each does, and does the good ones to a draft. */
@@ -177,15 +160,6 @@ interface Outcome {
   do?: () => void;
 }
 
-interface ReadCells {
-  findNumber: number | null;
-  partNumber: string;
-  quantity: number | null;
-  unit: ExtraLine['unit'] | null;
-  description: string;
-  note: string;
-}
-
 const WORDS = {
   partNumber: 'part',
   description: 'description',
@@ -195,63 +169,6 @@ const WORDS = {
 } as const;
 
 const same = (summary: string): Outcome => ({ action: 'same', summary, changes: [] });
-
-/** The cells of one row, and what is wrong with them. */
-class RowReader {
-  readonly problems: BomPasteRowDto['problems'] = [];
-
-  constructor(readonly row: MappedRow<PasteColumn>) {}
-
-  text(column: PasteColumn): string {
-    return this.row.cells[column]?.trim() ?? '';
-  }
-
-  /** Always null, to be returned in place of an outcome or a value. */
-  wrong(column: PasteColumn | null, message: string, value = column ? this.text(column) : ''): null {
-    const label = PASTE_COLUMNS.find(({ key }) => key === column)?.label ?? '';
-    this.problems.push({ column: label, value: value.slice(0, LONGEST_SHOWN), message });
-    return null;
-  }
-}
-
-function readCells(reader: RowReader): ReadCells {
-  const find = cellWhole(reader.text('findNumber'), { min: 1, max: MOST_FIND_NUMBER });
-  const quantity = cellDecimal(reader.text('quantity'), { above: 0, max: MOST_QUANTITY });
-  if (find.problem !== null) reader.wrong('findNumber', find.problem);
-  if (quantity.problem !== null) reader.wrong('quantity', quantity.problem);
-  const unitText = reader.text('unit');
-  const unit = unitOfWords(unitText);
-  if (unitText !== '' && unit === null)
-    reader.wrong('unit', `“${unitText.slice(0, 20)}” is no unit. Use pcs, l or m.`);
-  for (const [column, longest] of [
-    ['description', DESCRIPTION_LENGTH],
-    ['note', LINE_NOTE_LENGTH],
-  ] as const) {
-    if (reader.text(column).length > longest)
-      reader.wrong(column, `At most ${longest} characters. Shorten it.`);
-  }
-  const [spare] = reader.row.spare;
-  if (spare !== undefined) {
-    reader.wrong(
-      null,
-      `The row has a cell beyond the ${PASTE_COLUMNS.length} columns. Name the columns in a head row.`,
-      spare,
-    );
-  }
-  return {
-    findNumber: find.value,
-    partNumber: partNumberOf(reader.row),
-    quantity: quantity.value,
-    unit,
-    description: oneLine(reader.text('description')),
-    note: oneLine(reader.text('note')),
-  };
-}
-
-/** Line breaks and tabs of a quoted cell become blanks. */
-function oneLine(text: string): string {
-  return text.replace(/\s+/g, ' ').trim();
-}
 
 function checkNewPart(reader: RowReader, { number, standing }: Part): void {
   if (standing !== 'cleared') reader.wrong('partNumber', `${number} is ${standing}. Choose a cleared part.`);
