@@ -14,7 +14,7 @@ const SUPPLIERS = [
   { name: '=cmd', total: '–', minor: '' },
 ];
 
-function show(opens = false, onOpen = vi.fn()) {
+function show(opens = false, onOpen = vi.fn<(name: string) => void>()) {
   const user = userEvent.setup();
   renderAt(
     '/',

@@ -17,7 +17,13 @@ export function useTrain(code: string): SWRResponse<Train, unknown> {
 /** Puts a train the server has sent in front of every screen that shows it. */
 export async function keepTrain(train: Train): Promise<Train> {
   await mutate(keyOf(train.code), train, { revalidate: false });
-  readAgain('/api/trains', '/api/trains/{code}/bom', '/api/trains/{code}/changes', '/api/overview');
+  readAgain(
+    '/api/trains',
+    '/api/trains/{code}/bom',
+    '/api/trains/{code}/prices',
+    '/api/trains/{code}/changes',
+    '/api/overview',
+  );
   return train;
 }
 

@@ -10,6 +10,11 @@ export function useTrainBom(code: string) {
   );
 }
 
+/** The bill of materials as it stands on the server now. @throws Problem */
+export function readBom(code: string): Promise<Bom> {
+  return answer(api.GET('/api/trains/{code}/bom', { params: { path: { code } } }));
+}
+
 /** Where the workbook is fetched from. */
 export const bomWorkbookUrl = (code: string): string => `/api/trains/${encodeURIComponent(code)}/bom.xlsx`;
 

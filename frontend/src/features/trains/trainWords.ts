@@ -1,14 +1,14 @@
 import type { Train, TrainSpec, TrainSummary } from '../../api/types';
 import { boxWords, errorWords, exactRatioWords, ratioWords } from '../../components/optionWords';
-import { formatFixed } from '../../components/figures';
+import { formatCount, formatFixed } from '../../components/figures';
 
 /** `18/110 · 19/116`. */
 export function specTeethWords(spec: Pick<TrainSpec, 'stages'>): string {
   return spec.stages.map(({ pinion, wheel }) => `${pinion.teeth}/${wheel.teeth}`).join(' · ');
 }
 
-/** `Revision A, working`, the exact ratio with its error, the box, the mass: what stands under the title. */
-export function trainFacts(train: TrainSummary): string[] {
+/** `Revision A, working`, the exact ratio with its error, box, mass, how many to build: what stands under the title. */
+export function trainFacts(train: TrainSummary & Pick<Train, 'buildQuantity'>): string[] {
   const { ratio } = train;
   const error = ratio.errorPercent === null ? '' : ` (${errorWords(ratio.errorPercent)} %)`;
   const exact = ratio.denominator === '1' ? '' : `${exactRatioWords(ratio).replace(' : 1', '')} = `;
@@ -17,6 +17,7 @@ export function trainFacts(train: TrainSummary): string[] {
     `${exact}${ratioWords(ratio.value)} : 1${error}`,
     `${boxWords(train.box)} mm`,
     `${formatFixed(train.mass, 2)} kg`,
+    `${formatCount(train.buildQuantity)} to build`,
   ];
 }
 

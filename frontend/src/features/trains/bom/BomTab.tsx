@@ -1,22 +1,26 @@
-import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { useMe } from '../../../api/hooks/useMe';
 import { useTrainBom } from '../../../api/hooks/useTrainBom';
 import { asProblem } from '../../../api/problem';
-import type { Train } from '../../../api/types';
-import { copyTsv } from '../../../components/copyTsv';
+import type { Bom, Train } from '../../../api/types';
 import { EmptyState } from '../../../components/EmptyState';
 import { ErrorState } from '../../../components/ErrorState';
 import { formatFixed } from '../../../components/figures';
 import { LoadingRows } from '../../../components/LoadingRows';
-import { useNotices } from '../../../components/Notices';
 import { BomTable } from './BomTable';
-import { BOM_HEADS, bomCells } from './bomCells';
+import { PricedBom } from './PricedBom';
+
+interface BomTabProps {
+  train: Train;
+  canExport: boolean;
+}
 
 /** The bill of materials: every line with where it is used, what to look at before ordering, and the export. */
-export function BomTab({ train, canExport }: { train: Train; canExport: boolean }) {
+export function BomTab({ train, canExport }: BomTabProps) {
   const { data: bom, error, mutate } = useTrainBom(train.code);
-  const { tell } = useNotices();
+  const { can } = useMe();
   if (!bom) {
     if (error === undefined) return <LoadingRows rows={14} label="Loading the bill of materials" />;
     return (
@@ -30,39 +34,52 @@ export function BomTab({ train, canExport }: { train: Train; canExport: boolean 
       </EmptyState>
     );
   }
-  const { totals } = bom;
-  async function copy(): Promise<void> {
-    const done = await copyTsv([BOM_HEADS, ...(bom?.lines ?? []).map(bomCells)]);
-    tell(
-      done ? `${totals.lines} lines copied; paste into a spreadsheet.` : 'The browser did not allow copying.',
+  if (can('prices.read')) {
+    return (
+      <PricedBom
+        train={train}
+        bom={bom}
+        canEdit={can('trains.edit')}
+        canChoose={can('offers.choose')}
+        canAddOffers={can('prices.edit')}
+      />
     );
   }
+  return (
+    <BomTable
+      lines={bom.lines}
+      frame={(table, copy) => (
+        <>
+          <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', columnGap: 2, mb: 0.75 }}>
+            <BomFacts totals={bom.totals} />
+            <Button variant="text" onClick={copy} sx={{ fontWeight: 500, displayPrint: 'none' }}>
+              Copy table
+            </Button>
+            {!canExport && (
+              <Typography variant="body2" color="textSecondary">
+                The workbook is for designers, librarians, purchasers and administrators.
+              </Typography>
+            )}
+          </Box>
+          {table}
+        </>
+      )}
+    />
+  );
+}
+
+/** `24 lines: 6 to be made, 18 to be bought; 12.40 kg.` */
+export function BomFacts({ totals }: Pick<Bom, 'totals'>) {
   const unknown =
     totals.linesWithoutMass === 0
       ? ''
       : ` without ${totals.linesWithoutMass === 1 ? '1 line' : `${totals.linesWithoutMass} lines`} of unknown mass`;
   return (
-    <>
-      <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', columnGap: 2, mb: 0.75 }}>
-        <Typography sx={{ flex: 1, minWidth: 240 }} color="textSecondary">
-          <Box component="strong" sx={{ fontWeight: 600, color: 'text.primary', mr: 1.5 }}>
-            {totals.lines} lines
-          </Box>
-          {`${totals.made} to be made, ${totals.bought} to be bought; ${formatFixed(totals.massKg, 2)} kg${unknown}.`}
-        </Typography>
-        <Button variant="text" onClick={() => void copy()} sx={{ fontWeight: 500, displayPrint: 'none' }}>
-          Copy table
-        </Button>
-        {!canExport && (
-          <Typography variant="body2" color="textSecondary">
-            The workbook is for designers, librarians, purchasers and administrators.
-          </Typography>
-        )}
+    <Typography sx={{ flex: 1, minWidth: 240 }} color="textSecondary">
+      <Box component="strong" sx={{ fontWeight: 600, color: 'text.primary', mr: 1.5 }}>
+        {totals.lines} lines
       </Box>
-      <BomTable lines={bom.lines} />
-      <Typography variant="body2" color="textSecondary" sx={{ mt: 1 }}>
-        Prices and lead times are not known yet; their columns in the workbook are empty.
-      </Typography>
-    </>
+      {`${totals.made} to be made, ${totals.bought} to be bought; ${formatFixed(totals.massKg, 2)} kg${unknown}.`}
+    </Typography>
   );
 }

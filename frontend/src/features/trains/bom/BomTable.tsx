@@ -5,9 +5,12 @@ import TableCell from '@mui/material/TableCell';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
 import WarningAmber from '@mui/icons-material/WarningAmberOutlined';
+import type { ReactNode } from 'react';
 import type { BomLine } from '../../../api/types';
+import { SelectionBar } from '../../../components/SelectionBar';
+import { useRowSelection } from '../../../components/useRowSelection';
 import { PartLink } from '../PartLink';
-import { massWords, partNumberWords, quantityWords } from './bomCells';
+import { BOM_HEADS, bomCells, massWords, partNumberWords, quantityWords } from './bomCells';
 
 /** Columns of the printed table, per cent of the sheet's width. */
 const PAPER_COLUMNS = [5, 11, 32, 8, 11, 14, 7, 12];
@@ -23,9 +26,21 @@ const ON_PAPER = {
   ),
 } as const;
 
-/** Lines of a bill of materials; flags stand under the description they concern. */
-export function BomTable({ lines }: { lines: readonly BomLine[] }) {
-  return (
+interface BomTableProps {
+  lines: readonly BomLine[];
+  /** Puts the table in its place, with what copies it. */
+  frame: (table: ReactNode, copy: () => void) => ReactNode;
+}
+
+/** Lines of a bill of materials without prices; flags stand under the description they concern. */
+export function BomTable({ lines, frame }: BomTableProps) {
+  const { body, rowProps, copy, selected, clear } = useRowSelection({
+    rows: lines.length,
+    allRows: lines.length,
+    heads: BOM_HEADS,
+    cellsOf: (row) => (lines[row] ? bomCells(lines[row]) : []),
+  });
+  const table = (
     <Box
       sx={{ bgcolor: 'background.paper', overflowX: 'auto' }}
       tabIndex={0}
@@ -47,9 +62,9 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
             <TableCell sx={{ minWidth: 150 }}>Used in</TableCell>
           </TableRow>
         </TableHead>
-        <TableBody>
-          {lines.map((line) => (
-            <TableRow key={line.findNumber} hover sx={{ verticalAlign: 'top' }}>
+        <TableBody ref={body}>
+          {lines.map((line, row) => (
+            <TableRow key={line.key} hover {...rowProps(row)} sx={rowSx}>
               <TableCell align="right">{line.findNumber}</TableCell>
               <TableCell sx={{ whiteSpace: 'nowrap' }}>
                 {line.partNumber === null ? (
@@ -93,4 +108,16 @@ export function BomTable({ lines }: { lines: readonly BomLine[] }) {
       </Table>
     </Box>
   );
+  return (
+    <>
+      {frame(table, () => void copy())}
+      <SelectionBar count={selected.size} onCopy={() => void copy()} onClear={clear} />
+    </>
+  );
 }
+
+const rowSx = {
+  verticalAlign: 'top',
+  outlineOffset: '-2px',
+  '&[aria-selected="true"], &[aria-selected="true"]:hover': { bgcolor: 'wash.brass' },
+} as const;
