@@ -96,5 +96,7 @@ function facts(requirement: Requirement): [string, string][] {
     list.push(['Output torque', `${formatTrimmed(duty.outputTorque, 2)} N·m`]);
   if (duty?.applicationFactor !== undefined)
     list.push(['Application factor', String(duty.applicationFactor)]);
+  if (requirement.buildQuantity !== undefined)
+    list.push(['Build quantity', `${formatCount(requirement.buildQuantity)} trains`]);
   return list;
 }

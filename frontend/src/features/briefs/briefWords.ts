@@ -20,6 +20,7 @@ export function briefWords(requirement: Requirement): string[] {
   if (helixAngleDeg) parts.push(`helix ${formatTrimmed(helixAngleDeg, 3)}°`);
   if (direction === 'same') parts.push('output with the input');
   if (direction === 'opposite') parts.push('output against the input');
+  if (requirement.buildQuantity !== undefined) parts.push(`${formatCount(requirement.buildQuantity)} to build`);
   return parts;
 }
 

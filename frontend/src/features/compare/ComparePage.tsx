@@ -4,12 +4,13 @@ import FormControlLabel from '@mui/material/FormControlLabel';
 import Switch from '@mui/material/Switch';
 import ToggleButton from '@mui/material/ToggleButton';
 import Typography from '@mui/material/Typography';
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { Link, useParams, useSearchParams } from 'react-router-dom';
 import { useBrief } from '../../api/hooks/useBrief';
 import { useBriefSearch } from '../../api/hooks/useBriefSearch';
 import { useMe } from '../../api/hooks/useMe';
 import { unpinOption } from '../../api/hooks/usePins';
+import { supplyByOption, useSearchSupply } from '../../api/hooks/useSearchSupply';
 import { asProblem } from '../../api/problem';
 import type { Brief, Pin } from '../../api/types';
 import { AdoptDialog } from '../../components/AdoptDialog';
@@ -40,6 +41,12 @@ function Compare({ brief }: { brief: Brief }) {
   const { tell } = useNotices();
   const [adopting, setAdopting] = useState<Pin | null>(null);
   const { data: search } = useBriefSearch(brief.latestSearch?.id ?? null);
+  const quantity = can('prices.read') ? (brief.requirement.buildQuantity ?? null) : null;
+  const { data: supplied } = useSearchSupply(brief.latestSearch?.id ?? null, quantity);
+  const supply = useMemo(
+    () => supplied && { quantity: supplied.quantity, byOption: supplyByOption(supplied) },
+    [supplied],
+  );
   const shown = shownPins(brief.pins, params.get('show'));
   const differencesOnly = params.has('differences');
   const home = `/briefs/${encodeURIComponent(brief.id)}`;
@@ -137,6 +144,7 @@ function Compare({ brief }: { brief: Brief }) {
           <CompareTable
             pins={shown}
             differencesOnly={differencesOnly && shown.length > 1}
+            supply={supply}
             onAdopt={can('trains.edit') ? setAdopting : undefined}
             onUnpin={can('briefs.edit') ? (pin) => void unpin(pin) : undefined}
           />

@@ -12,11 +12,13 @@ import type { Pin } from '../../api/types';
 import { CopyTable } from '../../components/CopyTable';
 import { moduleWords, stageCountWords, teethWords } from '../../components/optionWords';
 import { TrainDrawing } from '../../drawings/TrainDrawing';
-import { comparedFigures } from './figures';
+import { comparedFigures, type ComparedSupply } from './figures';
 
 interface CompareTableProps {
   pins: readonly Pin[];
   differencesOnly: boolean;
+  /** Cost and stock, once the brief names a build quantity and the answer is there. */
+  supply?: ComparedSupply;
   /** Left out for readers. */
   onAdopt?: (pin: Pin) => void;
   onUnpin?: (pin: Pin) => void;
@@ -32,9 +34,9 @@ const LABEL_WIDTH = 168;
 const PAPER_WIDTH = 700;
 
 /** Up to four options side by side: drawings on one scale, figures with the better one marked. */
-export function CompareTable({ pins, differencesOnly, onAdopt, onUnpin }: CompareTableProps) {
+export function CompareTable({ pins, differencesOnly, supply, onAdopt, onUnpin }: CompareTableProps) {
   const options = useMemo(() => pins.map(({ option }) => option), [pins]);
-  const figures = useMemo(() => comparedFigures(options), [options]);
+  const figures = useMemo(() => comparedFigures(options, supply), [options, supply]);
   const shown = figures.filter(({ same }) => !(differencesOnly && same));
   const width = DRAWING_WIDTHS[pins.length] ?? 222;
   const scale = useMemo(() => scaleFor(options, width), [options, width]);

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { optionOf } from '../../testing/options';
+import { newSupply } from '../../testing/supply';
 import { comparedFigures } from './figures';
 
 const two = optionOf(
@@ -65,5 +66,44 @@ describe('comparedFigures', () => {
   it('gives the error its sign and a real minus', () => {
     const error = comparedFigures([two, three]).find(({ label }) => label === 'Ratio error');
     expect(error?.cells.map(({ words }) => words)).toEqual(['\u22120.507', '+0.172']);
+  });
+});
+
+describe('cost and stock side by side', () => {
+  const EUR = (minor: number) => [{ currency: 'EUR', minor }];
+  const figure = (label: RegExp, a: Parameters<typeof newSupply>[0], b: Parameters<typeof newSupply>[0]) => {
+    const byOption = new Map([
+      [two.key, newSupply(a)],
+      [three.key, newSupply(b)],
+    ]);
+    return comparedFigures([two, three], { quantity: 25, byOption }).find((each) => label.test(each.label));
+  };
+
+  it('marks the lower of two whole sums', () => {
+    const cost = figure(/^Cost of the gears for 25/, { costs: EUR(41_250) }, { costs: EUR(40_000) });
+    expect(cost?.cells).toEqual([
+      { words: '412.50 EUR', better: false },
+      { words: '400.00 EUR', better: true },
+    ]);
+  });
+
+  it('marks nothing where one sum is only a part, or in another currency', () => {
+    const part = figure(/^Cost/, { costs: EUR(41_250) }, { costs: EUR(400), priced: 1, unpriced: 3 });
+    expect(part?.cells.map(({ better: marked }) => marked)).toEqual([false, false]);
+    expect(part?.cells[1]?.words).toBe('4.00 EUR, 1 of 4 priced');
+    const other = figure(/^Cost/, { costs: EUR(41_250) }, { costs: [{ currency: 'USD', minor: 400 }] });
+    expect(other?.cells.map(({ better: marked }) => marked)).toEqual([false, false]);
+  });
+
+  it('says how much lies on the shelf', () => {
+    const stock = figure(/shelf/, { gears: 4, onShelf: 4 }, { gears: 6, onShelf: 4, toMake: 1 });
+    expect(stock?.cells).toEqual([
+      { words: 'all 4 on the shelf', better: true },
+      { words: '4 of 6 on the shelf, 1 to make', better: false },
+    ]);
+  });
+
+  it('leaves the rows out without a build quantity', () => {
+    expect(comparedFigures([two, three]).some(({ label }) => label.startsWith('Cost'))).toBe(false);
   });
 });

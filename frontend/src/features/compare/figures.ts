@@ -1,5 +1,6 @@
 import { formatNumber, formatTrimmed } from '@stageyard/libs/units';
-import type { TrainOption } from '../../api/types';
+import type { SupplyByOption } from '../../api/hooks/useSearchSupply';
+import type { OptionSupply, TrainOption } from '../../api/types';
 import {
   boxVolume,
   boxWords,
@@ -10,6 +11,8 @@ import {
   ratioWords,
   teethWords,
 } from '../../components/optionWords';
+import { formatCount, NOTHING } from '../../components/figures';
+import { costInFull, costRank, stockInFull } from '../../components/supplyWords';
 
 /** Which way a figure is better; `none` where it is a matter of choice. */
 type Preference = 'less' | 'more' | 'none';
@@ -156,12 +159,62 @@ function largestWheel(option: TrainOption): number {
   return Math.max(...option.stages.map((stage) => stage.wheelTipDiameter));
 }
 
+/** Rows of cost and stock at a build quantity. */
+export interface ComparedSupply {
+  quantity: number;
+  byOption: SupplyByOption;
+}
+
+function supplyRules({ quantity, byOption }: ComparedSupply, options: readonly TrainOption[]): FigureRule[] {
+  const of = (option: TrainOption) => byOption.get(option.key);
+  const read = (words: (supply: OptionSupply) => string) => (option: TrainOption) => {
+    const supply = of(option);
+    return supply ? words(supply) : NOTHING;
+  };
+  const first = options.map((option) => of(option)?.costs[0]?.currency);
+  const comparable = new Set(first).size === 1;
+  return [
+    {
+      label: `Cost of the gears for ${formatCount(quantity)}`,
+      unit: '',
+      prefers: 'less',
+      // Only whole sums of one currency can be held against each other.
+      judged: (option) => {
+        const supply = of(option);
+        return supply && comparable && costRank(supply) === 0 ? (supply.costs[0]?.minor ?? null) : null;
+      },
+      words: read(costInFull),
+    },
+    {
+      label: 'Gears on the shelf',
+      unit: '',
+      prefers: 'more',
+      judged: (option) => {
+        const supply = of(option);
+        return supply && supply.gears > 0 ? supply.onShelf / supply.gears : null;
+      },
+      words: read(stockInFull),
+    },
+    {
+      label: 'Longest lead time',
+      unit: 'days',
+      prefers: 'less',
+      judged: (option) => {
+        const supply = of(option);
+        return supply?.unpriced === 0 ? supply.longestLeadTimeDays : null;
+      },
+      words: read(({ longestLeadTimeDays }) => String(longestLeadTimeDays ?? NOTHING)),
+    },
+  ];
+}
+
 /**
  * The options' figures side by side. A figure is marked better only when at least two can be judged, they read
  * differently, and this one is the best of them; equal bests are all marked.
  */
-export function comparedFigures(options: readonly TrainOption[]): ComparedFigure[] {
-  return RULES.map((rule) => {
+export function comparedFigures(options: readonly TrainOption[], supply?: ComparedSupply): ComparedFigure[] {
+  const rules = supply ? [...RULES, ...supplyRules(supply, options)] : RULES;
+  return rules.map((rule) => {
     const words = options.map(rule.words);
     const judged = options.map(rule.judged);
     const best = rule.prefers === 'none' ? null : bestOf(judged, rule.prefers);

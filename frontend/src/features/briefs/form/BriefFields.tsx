@@ -74,6 +74,12 @@ export function BriefFields() {
           <DutyLine />
         </WholeRow>
       </FormSection>
+      <FormSection
+        title="Buying"
+        remark="With a build quantity the options show what their gears cost and what lies on the shelf."
+      >
+        <FigureField field="buildQuantity" unit="trains" placeholder="not named" />
+      </FormSection>
     </>
   );
 }

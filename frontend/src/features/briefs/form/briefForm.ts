@@ -34,6 +34,8 @@ export interface BriefForm {
   inputSpeed: string;
   outputTorque: string;
   applicationFactor: string;
+  /** Trains to be built at once; blank: the options are not priced. */
+  buildQuantity: string;
 }
 
 export type BriefField = keyof BriefForm;
@@ -71,6 +73,7 @@ export const NEW_BRIEF: BriefForm = {
   inputSpeed: '',
   outputTorque: '',
   applicationFactor: '1.25',
+  buildQuantity: '',
 };
 
 const text = (value: number | string | null | undefined): string => (value == null ? '' : String(value));
@@ -113,5 +116,6 @@ export function formFromRequirement(requirement: Requirement): Omit<BriefForm, '
     inputSpeed: text(duty?.inputSpeed),
     outputTorque: text(duty?.outputTorque),
     applicationFactor: text(duty?.applicationFactor ?? 1.25),
+    buildQuantity: text(requirement.buildQuantity),
   };
 }

@@ -33,6 +33,7 @@ export const FIELD_NAMES: Record<BriefField, { path: string; label: string }> = 
   inputSpeed: { path: 'duty.inputSpeed', label: 'Input speed' },
   outputTorque: { path: 'duty.outputTorque', label: 'Output torque' },
   applicationFactor: { path: 'duty.applicationFactor', label: 'Application factor' },
+  buildQuantity: { path: 'buildQuantity', label: 'Build quantity' },
 };
 
 /** Whole groups and the field that stands for them on the screen. */

@@ -28,6 +28,7 @@ describe('requirementFromForm', () => {
     expect(requirement.envelope).toBeUndefined();
     expect(requirement.stageRatio).toEqual({ min: '1' });
     expect(requirement.duty).toEqual({ applicationFactor: 1.25 });
+    expect(requirement).not.toHaveProperty('buildQuantity');
   });
 
   it('limits only the sides of the box that were given', () => {
@@ -53,6 +54,15 @@ describe('requirementFromForm', () => {
     expect(issue?.message).toMatch(/1400.*1\.4/);
   });
 
+  it('takes only whole trains as a build quantity, and says a bad one once', () => {
+    expect(requirementOf({ ...filled, buildQuantity: '25' }).buildQuantity).toBe(25);
+    const issues = issuesOf({ ...filled, buildQuantity: '2.5' });
+    expect(issues).toEqual([{ field: 'buildQuantity', message: 'Build quantity must be a whole number.' }]);
+    expect(issuesOf({ ...filled, buildQuantity: 'some' }).map(({ field }) => field)).toEqual([
+      'buildQuantity',
+    ]);
+  });
+
   it('asks for a title', () => {
     expect(issuesOf({ ...filled, title: '   ' }).map(({ field }) => field)).toEqual(['title']);
   });
@@ -73,6 +83,7 @@ describe('requirementFromForm', () => {
       inputSpeed: '1400',
       outputTorque: '45',
       applicationFactor: '1.5',
+      buildQuantity: '25',
       note: 'For the raft.',
     };
     const brief = { title: form.title, note: form.note, requirement: requirementOf(form) };

@@ -44,6 +44,8 @@ export function requirementFromForm(form: BriefForm): RequirementReading {
     bestOf: form.bestOf,
     duty: readDuty(reader),
   };
+  const buildQuantity = reader.optionalWhole('buildQuantity');
+  if (buildQuantity !== null) requirement.buildQuantity = buildQuantity;
   const envelope = readEnvelope(reader);
   if (envelope) requirement.envelope = envelope;
 
@@ -107,6 +109,10 @@ class FieldReader {
       this.issues.push({ field, message: `${FIELD_NAMES[field].label} must be a whole number.` });
     }
     return value;
+  }
+
+  optionalWhole(field: BriefField): number | null {
+    return this.read(field) === null ? null : this.whole(field);
   }
 
   optionalText(field: BriefField): string | null {

@@ -10,12 +10,15 @@ import TableRow from '@mui/material/TableRow';
 import Button from '@mui/material/Button';
 import { useMemo, useState, type ReactNode } from 'react';
 import type { TrainOption } from '../../../api/types';
+import { formatCount } from '../../../components/figures';
+import { currenciesOf } from '../../../components/supplyWords';
+import { useRowSelection } from '../../../components/useRowSelection';
 import { commonScale } from '../../../drawings/TrainStrip';
 import { OptionTableRow, STRIP } from './OptionTableRow';
 import type { OptionOrder, OptionSort } from './optionOrder';
-import { OPTION_HEADS, optionRow } from './optionRows';
+import { OPTION_HEADS, optionRow, supplyCells, supplyHeads } from './optionRows';
 import { stageOrders } from './stageOrders';
-import { useRowSelection } from '../../../components/useRowSelection';
+import type { ShownSupply } from './SupplyCells';
 
 interface OptionTableProps {
   options: readonly TrainOption[];
@@ -26,6 +29,8 @@ interface OptionTableProps {
   onPin?: (option: TrainOption, pin: boolean) => void;
   order: OptionOrder | null;
   onSort: (by: OptionSort) => void;
+  /** Left out where the brief names no build quantity, and for people who do not see prices. */
+  supply?: ShownSupply;
   /** Puts the table in its place, with what copies it. */
   frame: (table: ReactNode, copy: () => void, selected: number) => ReactNode;
 }
@@ -51,19 +56,31 @@ const HEADS: Head[] = [
   { text: 'Backlash', unit: '′', unitName: 'arc minutes', sort: 'backlash' },
 ];
 
+const supplyColumns = (quantity: number): Head[] => [
+  { text: 'Cost', unit: `for ${formatCount(quantity)}`, sort: 'cost' },
+  { text: 'Stock', sort: 'stock', left: true },
+];
+
 /** Rows drawn before the reader asks for more: the drawings of thousands would stall the page. */
 const DRAWN_AT_ONCE = 200;
 
 /** The options, one row each, with the train drawn on one scale. Arrows move, Space pins, Ctrl+C copies. */
 export function OptionTable(props: OptionTableProps) {
-  const { options, pinned, onPin, order, onSort } = props;
+  const { options, pinned, onPin, order, onSort, supply } = props;
   const [room, setRoom] = useState(DRAWN_AT_ONCE);
   const drawn = options.slice(0, room);
+  const currencies = useMemo(() => currenciesOf(supply?.byOption.values() ?? []), [supply?.byOption]);
   const { body, rowProps, copy, selected } = useRowSelection({
     rows: drawn.length,
     allRows: options.length,
-    heads: OPTION_HEADS,
-    cellsOf: (row) => (options[row] ? optionRow(options[row]) : []),
+    heads: supply ? [...OPTION_HEADS, ...supplyHeads(supply.quantity, currencies)] : OPTION_HEADS,
+    cellsOf: (row) => {
+      const option = options[row];
+      if (!option) return [];
+      return supply
+        ? [...optionRow(option), ...supplyCells(supply.byOption.get(option.key), currencies)]
+        : optionRow(option);
+    },
     onSpace: (row) => {
       const option = options[row];
       if (option) onPin?.(option, !pinned.has(option.key));
@@ -93,7 +110,7 @@ export function OptionTable(props: OptionTableProps) {
             <TableCell scope="col" sx={{ width: 34 }}>
               Pin
             </TableCell>
-            {HEADS.map((head) => (
+            {[...HEADS, ...(supply ? supplyColumns(supply.quantity) : [])].map((head) => (
               <HeadCell key={head.text} head={head} order={order} onSort={onSort} />
             ))}
           </TableRow>
@@ -107,6 +124,7 @@ export function OptionTable(props: OptionTableProps) {
               order={orders.get(option.key)}
               pinned={pinned.has(option.key)}
               onPin={onPin}
+              supply={supply}
               rowProps={rowProps(row)}
             />
           ))}

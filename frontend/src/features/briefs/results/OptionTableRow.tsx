@@ -17,6 +17,7 @@ import {
 } from '../../../components/optionWords';
 import { TrainStrip } from '../../../drawings/TrainStrip';
 import { orderWords, type StageOrder } from './stageOrders';
+import { CostCell, StockCell, type ShownSupply } from './SupplyCells';
 
 /** The box a strip stands in, px. */
 export const STRIP = { width: 98, height: 36 } as const;
@@ -28,10 +29,13 @@ interface OptionTableRowProps {
   order?: StageOrder;
   pinned: boolean;
   onPin?: (option: TrainOption, pin: boolean) => void;
+  /** Cost and stock columns, where there are any. */
+  supply?: ShownSupply;
   rowProps: ComponentProps<typeof TableRow>;
 }
 
-export function OptionTableRow({ option, scale, order, pinned, onPin, rowProps }: OptionTableRowProps) {
+export function OptionTableRow(props: OptionTableRowProps) {
+  const { option, scale, order, pinned, onPin, supply, rowProps } = props;
   const teeth = teethWords(option.stages);
   return (
     <TableRow
@@ -86,6 +90,12 @@ export function OptionTableRow({ option, scale, order, pinned, onPin, rowProps }
       <TableCell align="right">{formatNumber(option.mass, 2)}</TableCell>
       <TableCell align="right">{leastContactWords(option)}</TableCell>
       <TableCell align="right">{formatNumber(option.backlashArcmin, 1)}</TableCell>
+      {supply && (
+        <>
+          <CostCell supply={supply.byOption.get(option.key)} loading={supply.loading} />
+          <StockCell supply={supply.byOption.get(option.key)} loading={supply.loading} />
+        </>
+      )}
     </TableRow>
   );
 }

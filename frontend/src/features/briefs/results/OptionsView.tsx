@@ -1,10 +1,13 @@
+import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import ToggleButton from '@mui/material/ToggleButton';
 import ToggleButtonGroup from '@mui/material/ToggleButtonGroup';
 import Typography from '@mui/material/Typography';
 import { useMemo } from 'react';
+import { useMe } from '../../../api/hooks/useMe';
 import { pinOption, unpinOption } from '../../../api/hooks/usePins';
+import { supplyByOption, useSearchSupply } from '../../../api/hooks/useSearchSupply';
 import { asProblem } from '../../../api/problem';
 import type { Brief, Search, TrainOption, WhyNot } from '../../../api/types';
 import { Cautions } from '../../../components/Cautions';
@@ -31,7 +34,12 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
   const view = useOptionView();
   const { tell } = useNotices();
   const all = useMemo(() => search.outcome?.options ?? [], [search.outcome]);
-  const shown = orderedOptions(all, view.stages, view.order);
+  const { can } = useMe();
+  const quantity = can('prices.read') ? (brief.requirement.buildQuantity ?? null) : null;
+  const answer = useSearchSupply(all.length > 0 ? search.id : null, quantity);
+  const byOption = useMemo(() => supplyByOption(answer.data), [answer.data]);
+  const supply = quantity === null ? undefined : { quantity, byOption, loading: answer.isLoading };
+  const shown = orderedOptions(all, view.stages, view.order, byOption);
   const whyNot = search.outcome?.whyNot ?? [];
   const pinned = useMemo(() => new Set(brief.pins.map(({ key }) => key)), [brief.pins]);
 
@@ -74,6 +82,7 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
       onPin={canEdit ? (option, on) => void pin(option, on) : undefined}
       order={view.order}
       onSort={view.sortBy}
+      supply={supply}
       frame={(table, copy, selected) => (
         <>
           <Box
@@ -93,7 +102,16 @@ export function OptionsView({ brief, search, canEdit, canAdopt, onTry }: Options
               {selected > 0 ? `Copy ${selected} selected` : 'Copy table'}
             </Button>
           </Box>
-          <Box sx={columns}>
+          {answer.error !== undefined && quantity !== null && (
+            <Alert
+              severity="warning"
+              sx={{ mb: 1 }}
+              action={<Button onClick={() => void answer.mutate()}>Try again</Button>}
+            >
+              Cost and stock could not be loaded. {asProblem(answer.error).message}
+            </Alert>
+          )}
+          <Box sx={supply ? roomyColumns : columns}>
             <Box sx={{ minWidth: 0 }}>
               {table}
               <PinnedBar brief={brief} canAdopt={canAdopt} />
@@ -112,6 +130,12 @@ const columns = {
   gap: 2,
   alignItems: 'start',
   '@media print': { gridTemplateColumns: 'minmax(0, 1fr)' },
+} as const;
+
+/** With cost and stock the table needs the room; what is said beside it stands below until there is enough. */
+const roomyColumns = {
+  ...columns,
+  gridTemplateColumns: { xs: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) 280px' },
 } as const;
 
 /** Nothing found: the reasons, as wide as the table would be; else what to do next. */

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { TrainOption } from '../../../api/types';
 import { optionOf } from '../../../testing/options';
+import { newSupply } from '../../../testing/supply';
 import { nextOrder, orderedOptions, readOrder, readStages, writeOrder } from './optionOrder';
 
 const keys = (options: readonly TrainOption[]) => options.map(({ key }) => key);
@@ -74,5 +75,49 @@ describe('the order in the address', () => {
 
   it('puts the greatest contact ratio first, because more is better', () => {
     expect(nextOrder(null, 'contact')).toEqual({ by: 'contact', down: true });
+  });
+});
+
+describe('the order by cost and stock', () => {
+  const EUR = (minor: number) => [{ currency: 'EUR', minor }];
+  const supply = new Map([
+    ['heavy', newSupply({ key: 'heavy', costs: EUR(90_000), onShelf: 4, gears: 4 })],
+    // Cheap only because half of it is not priced.
+    ['light', newSupply({ key: 'light', costs: EUR(10_000), unpriced: 2, onShelf: 3, gears: 6, toMake: 2 })],
+    ['exact', newSupply({ key: 'exact', costs: EUR(70_000), onShelf: 2, gears: 4 })],
+  ]);
+
+  it('never puts a part of a sum before a whole one, whichever way', () => {
+    expect(keys(orderedOptions(found, [], { by: 'cost', down: false }, supply))).toEqual([
+      'exact',
+      'heavy',
+      'light',
+    ]);
+    expect(keys(orderedOptions(found, [], { by: 'cost', down: true }, supply))).toEqual([
+      'heavy',
+      'exact',
+      'light',
+    ]);
+  });
+
+  it('puts the best covered first, and of two alike the one with less to make', () => {
+    expect(keys(orderedOptions(found, [], { by: 'stock', down: true }, supply))).toEqual([
+      'heavy',
+      'exact',
+      'light',
+    ]);
+    expect(nextOrder(null, 'stock')).toEqual({ by: 'stock', down: true });
+  });
+
+  it('leaves them as found until the figures are there, and puts an option without any last', () => {
+    expect(keys(orderedOptions(found, [], { by: 'cost', down: false }))).toEqual(['heavy', 'light', 'exact']);
+    const some = new Map([...supply].filter(([key]) => key !== 'heavy'));
+    expect(keys(orderedOptions(found, [], { by: 'cost', down: true }, some)).at(-1)).toBe('heavy');
+  });
+
+  it('is held in the address like any other', () => {
+    expect(readOrder('-stock')).toEqual({ by: 'stock', down: true });
+    expect(readOrder('cost')).toEqual({ by: 'cost', down: false });
+    expect(readOrder('price')).toBeNull();
   });
 });

@@ -4,8 +4,13 @@ import { FIELD_NAMES } from '../form/fieldNames';
 
 type SearchedField = keyof Omit<BriefForm, 'title' | 'note'>;
 
-/** The duty sizes shafts only; it changes no search. */
-const NOT_SEARCHED = new Set<SearchedField>(['inputSpeed', 'outputTorque', 'applicationFactor']);
+/** The duty sizes shafts only and the build quantity prices options only; neither changes a search. */
+const NOT_SEARCHED = new Set<SearchedField>([
+  'inputSpeed',
+  'outputTorque',
+  'applicationFactor',
+  'buildQuantity',
+]);
 
 /** Names of the fields in which the brief differs from what was searched; a field left out equals its default. */
 export function changedSince(searched: Requirement, now: Requirement): string[] {
