@@ -98,7 +98,7 @@ describe('parts without teeth', () => {
       fits: true,
       toCheck: ['dynamic load rating C is not stated; at least 7.28 kN is needed'],
     });
-    const unrated = { ...bearing, dynamicLoadRating: null, staticLoadRating: null };
+    const unrated: SizesOf<'bearing'> = { ...bearing, dynamicLoadRating: null, staticLoadRating: null };
     expect(fit(unrated, {}).toCheck).toHaveLength(2);
     expect(fit(unrated, { dynamicLoadRating: 7 }).toCheck).toHaveLength(2);
   });
