@@ -13,6 +13,7 @@ import { type Client, startServer, type TestServer } from './harness.js';
 
 interface Refusal {
   code: string;
+  message?: string;
   errors?: { field: string; message: string }[];
   current?: TrainDto;
 }
@@ -80,8 +81,8 @@ beforeAll(async () => {
   ).id;
   // 9.50 EUR for 100 keys, sold by the hundred. The rule for face widths of 20 mm gives one of the three lengths.
   for (const number of ['K-16', 'K-18', 'K-20']) {
-    const offer = { breaks: [{ quantity: 100, unitPrice: 950 }], per: 100, pack: 100 } as const;
-    keys = (await addOffer(app, number, first, offer)).id;
+    const breaks = [{ quantity: 100, unitPrice: 950 }];
+    keys = (await addOffer(app, number, first, { breaks, per: 100, pack: 100 })).id;
   }
   // 180 JPY from 1, 150 JPY from 40.
   await addOffer(app, 'W-12', third, {

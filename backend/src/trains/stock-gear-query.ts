@@ -8,11 +8,20 @@ export const GEAR_MODULES = `
   )
   SELECT "module" FROM "known" WHERE "module" IS NOT NULL`;
 
+/** Whether a part has an offer, valid on a day that is bound twice, of a supplier that is asked. */
+const isOffered = (partId: string) => `
+  EXISTS (
+    SELECT 1 FROM "offer" JOIN "supplier" ON "supplier"."id" = "offer"."supplierId"
+    WHERE "offer"."partId" = ${partId} AND "offer"."standing" = 'open' AND "supplier"."standing" = 'active'
+      AND "offer"."validFrom" <= ? AND ("offer"."validUntil" IS NULL OR "offer"."validUntil" >= ?)
+  )`;
+
 /**
- * The best gear for each of many needs. Parameters: the needs as JSON, and twice the day that offers are held against.
- * The library is entered by kind, module and teeth, once a need; shelf and offers are looked at only for gears that fit.
+ * The gears that fit many needs, bound as JSON, each with what lies on its shelf. The library is entered by kind, module
+ * and teeth, once a need.
+ * @param more a further column
  */
-export const BEST_GEARS = `
+const fitting = (more = '') => `
   WITH "asked" AS MATERIALIZED (
     SELECT
       "value" ->> '$.need' AS "need",
@@ -27,13 +36,9 @@ export const BEST_GEARS = `
     FROM json_each(?)
   ),
   "fitting" AS MATERIALIZED (
-    SELECT "asked"."need", "asked"."wanted", "part"."number", "part"."bore", "part"."faceWidth",
-      (SELECT SUM("level"."quantity") FROM "stock_level" "level" WHERE "level"."partId" = "part"."id") AS "shelf",
-      EXISTS (
-        SELECT 1 FROM "offer" JOIN "supplier" ON "supplier"."id" = "offer"."supplierId"
-        WHERE "offer"."partId" = "part"."id" AND "offer"."standing" = 'open' AND "supplier"."standing" = 'active'
-          AND "offer"."validFrom" <= ? AND ("offer"."validUntil" IS NULL OR "offer"."validUntil" >= ?)
-      ) AS "offered"
+    SELECT "asked"."need", "asked"."wanted", "part"."id", "part"."number", "part"."bore", "part"."faceWidth",
+      (SELECT SUM("level"."quantity") FROM "stock_level" "level" WHERE "level"."partId" = "part"."id") AS "shelf"
+      ${more}
     FROM "asked" CROSS JOIN "part"
     WHERE "part"."kind" = 'gear' AND "part"."module" = "asked"."module" AND "part"."teeth" = "asked"."teeth"
       AND "part"."standing" = 'cleared'
@@ -42,12 +47,28 @@ export const BEST_GEARS = `
       AND ("asked"."hand" IS NULL OR "part"."hand" = "asked"."hand")
       AND COALESCE("part"."profileShift", 0) BETWEEN "asked"."shiftLow" AND "asked"."shiftHigh"
       AND "part"."faceWidth" BETWEEN "asked"."widthLow" AND "asked"."widthHigh"
-  )
-  SELECT "need", "number", "bore", "shelf" FROM (
-    SELECT *, ROW_NUMBER() OVER (
-      PARTITION BY "need"
-      ORDER BY COALESCE("shelf", 0) >= "wanted" DESC, "offered" DESC, "faceWidth", "number"
-    ) AS "place"
+  )`;
+
+const COVERS = `COALESCE("shelf", 0) >= "wanted"`;
+
+/**
+ * For each need the gear that would be best if offers did not count, and whether it has one: then it is the best. Offers
+ * are looked at for these gears only. Parameters: the needs as JSON, and twice the day.
+ */
+export const FIRST_GEARS = `
+  ${fitting()}
+  SELECT "need", "number", "bore", "shelf", ${isOffered('"first"."id"')} AS "offered" FROM (
+    SELECT *, ROW_NUMBER() OVER (PARTITION BY "need" ORDER BY ${COVERS} DESC, "faceWidth", "number") AS "place"
+    FROM "fitting"
+  ) "first"
+  WHERE "place" = 1`;
+
+/** For each need the best gear, with the offers of every gear that fits looked at. Parameters as above. */
+export const BEST_GEARS = `
+  ${fitting(`, ${isOffered('"part"."id"')} AS "offered"`)}
+  SELECT "need", "number", "bore", "shelf", "offered" FROM (
+    SELECT *,
+      ROW_NUMBER() OVER (PARTITION BY "need" ORDER BY ${COVERS} DESC, "offered" DESC, "faceWidth", "number") AS "place"
     FROM "fitting"
   )
   WHERE "place" = 1`;

@@ -1,19 +1,18 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
+import { fromThousandths, toThousandths } from '@stageyard/libs/bill-of-materials';
 import { In, Repository } from 'typeorm';
 import { Clock } from '../common/clock.js';
-import { politePause } from '../common/polite-pause.js';
+import { type Row } from '../database/read-task.js';
+import { ReadThreads } from '../database/read-threads.js';
 import { Part } from '../parts/entities/part.entity.js';
-import { fromThousandths, toThousandths } from '@stageyard/libs/bill-of-materials';
 import { type AdoptedSpec, gearsOf } from './adopted-spec.js';
-import { BEST_GEARS, GEAR_MODULES } from './stock-gear-query.js';
+import { BEST_GEARS, FIRST_GEARS, GEAR_MODULES } from './stock-gear-query.js';
 
 /** Figures of the library and of a train that differ by less are the same; both come from decimals. */
 const SAME = 1e-6;
 /** A stock gear is taken by itself only while it is at most this much wider than asked for. */
 const WIDEST = 1.5;
-/** Needs answered by one query: other requests wait that long. */
-const NEEDS_AT_ONCE = 50;
 
 /** A gear that a train asks for, and how many of it. Lengths mm, angles degrees, shift in modules. */
 export interface GearNeed {
@@ -41,7 +40,15 @@ interface MatchRow {
   need: number;
   number: string;
   bore: number | null;
+  /** Whole thousandths. */
   shelf: number | null;
+  offered: 0 | 1;
+}
+
+/** A need as the query reads it. */
+interface Question {
+  /** Its place in the list of needs. */
+  need: number;
 }
 
 /** Stock gears that can stand in a train. */
@@ -49,34 +56,39 @@ interface MatchRow {
 export class StockGears {
   constructor(
     @InjectRepository(Part) private readonly parts: Repository<Part>,
+    private readonly threads: ReadThreads,
     private readonly clock: Clock,
   ) {}
 
   /**
    * For each need a cleared gear with the very data asked for and at least its face width, or null. A shift the library
    * does not know counts as 0. Among equal gears: one whose shelf covers what is wanted, then one with a valid offer,
-   * then the narrowest, then the lowest number. One query for many needs, and others get their turn between queries.
+   * then the narrowest, then the lowest number. A reading thread looks them up, in a few queries for any number of needs.
    * @returns in the order of the needs
    */
   async matchMany(needs: readonly GearNeed[]): Promise<(MatchedGear | null)[]> {
     const found: (MatchedGear | null)[] = needs.map(() => null);
     if (needs.length === 0) return found;
-    const modules = await this.parts.query<{ module: number }[]>(GEAR_MODULES);
+    const [modules = []] = await this.threads.read({ sql: GEAR_MODULES, params: [] });
     const asked = needs.flatMap((need, index) => questionsOf(need, index, modules));
-    const on = this.clock.iso().slice(0, 10);
-    const pause = politePause();
-    for (let start = 0; start < asked.length; start += NEEDS_AT_ONCE) {
-      const chunk = JSON.stringify(asked.slice(start, start + NEEDS_AT_ONCE));
-      for (const { need, number, bore, shelf } of await this.parts.query<MatchRow[]>(BEST_GEARS, [
-        chunk,
-        on,
-        on,
-      ])) {
-        found[need] ??= { number, bore, onShelf: shelf === null ? null : fromThousandths(shelf) };
-      }
-      await pause();
+    const firsts = await this.ask(FIRST_GEARS, asked);
+    // A gear without an offer may still have an equal one with: only then all offers are looked at.
+    const unsure = new Set(firsts.filter(({ offered }) => !offered).map(({ need }) => need));
+    const bests = await this.ask(
+      BEST_GEARS,
+      asked.filter(({ need }) => unsure.has(need)),
+    );
+    for (const { need, number, bore, shelf } of [...firsts, ...bests]) {
+      found[need] = { number, bore, onShelf: shelf === null ? null : fromThousandths(shelf) };
     }
     return found;
+  }
+
+  private async ask(sql: string, asked: readonly Question[]): Promise<MatchRow[]> {
+    if (asked.length === 0) return [];
+    const on = this.clock.iso().slice(0, 10);
+    const [rows = []] = await this.threads.read({ sql, params: [JSON.stringify(asked), on, on] });
+    return rows as unknown as MatchRow[];
   }
 
   /** The chosen parts of any number of trains, by number, in one query. */
@@ -102,10 +114,10 @@ export class StockGears {
 }
 
 /** What the query asks for one need: once for each module of the library that is the need's. */
-function questionsOf(need: GearNeed, index: number, modules: readonly { module: number }[]): object[] {
+function questionsOf(need: GearNeed, index: number, modules: readonly Row[]): Question[] {
   const near = (value: number) => [value - SAME, value + SAME];
   return modules
-    .filter(({ module }) => Math.abs(module - need.module) <= SAME)
+    .filter(({ module }) => Math.abs(Number(module) - need.module) <= SAME)
     .map(({ module }) => ({
       need: index,
       module,
