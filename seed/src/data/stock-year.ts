@@ -22,6 +22,9 @@ export interface PartYear {
   leastStock: number | null;
 }
 
+/** The van comes every fourth day, and shelves are looked over every other week. */
+const VAN_DAYS = 4;
+const LOOK_DAYS = 14;
 const OPENING_DAYS = [-364, -360] as const;
 const MIDYEAR_DAYS = [-184, -178] as const;
 /** Orders forgotten from here on leave shelves low today. */
@@ -72,7 +75,7 @@ class ShelfYear {
     this.count(this.random.whole(...OPENING_DAYS), this.usage.opening, 'Yearly count');
     if (this.random.chance(0.04)) this.overflow();
     const midyear = this.random.chance(0.3) ? this.random.whole(...MIDYEAR_DAYS) : null;
-    const mended = this.random.chance(0.05) ? this.random.whole(-330, -12) : null;
+    const mended = this.random.chance(0.05) ? this.random.whole(-24, -1) * LOOK_DAYS : null;
     const happenings = [
       ...builds.map((build) => ({ day: build.day, act: () => this.build(build) })),
       ...(midyear === null ? [] : [{ day: midyear, act: () => this.recount(midyear) }]),
@@ -100,7 +103,7 @@ class ShelfYear {
     const wanted = this.usage.reorderAt * 2 + this.usage.perDrive;
     const steps = Math.ceil(wanted / this.usage.pack) * this.usage.pack;
     const days = this.row.supply === 'made' ? this.random.whole(4, 12) : this.random.whole(3, 24);
-    this.delivery = { day: day + days, steps };
+    this.delivery = { day: Math.ceil((day + days) / VAN_DAYS) * VAN_DAYS, steps };
   }
 
   private arrivals(day: number): void {
