@@ -42,7 +42,10 @@ export function checkContent(content: OfferContent, part: Pick<Part, 'kind' | 'n
   const quantities: [field: string, quantity: number][] = [
     ...content.breaks.map(({ quantity }, index): [string, number] => [`breaks.${index}.quantity`, quantity]),
     ['pack', content.pack],
-    ['leastQuantity', content.leastQuantity],
+    // Where it was taken from the first break, that one is named alone.
+    ...(content.leastQuantity === content.breaks[0]?.quantity
+      ? []
+      : [['leastQuantity', content.leastQuantity] as [string, number]]),
   ];
   const broken = quantities.filter(([, quantity]) => !Number.isInteger(quantity));
   if (broken.length === 0) return;

@@ -324,6 +324,38 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/offers/paste': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['OfferPaste_preview'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/offers/paste/book': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['OfferPaste_book'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/offers': {
     parameters: {
       query?: never;
@@ -1721,6 +1753,110 @@ export interface components {
       /** @description By arrival, price and number; those to check come last */
       items: components['schemas']['Substitute'][];
       /** @description Parts that drop in beyond those listed */
+      leftOut: number;
+    };
+    OfferPasteDefaults: {
+      /**
+       * Format: date
+       * @description Day on which the supplier stated the prices; today when left out
+       * @example 2026-03-31
+       */
+      pricedOn?: string;
+      /**
+       * Format: date
+       * @description First day on which can be ordered
+       * @example 2026-03-31
+       */
+      validFrom?: string;
+      /**
+       * Format: date
+       * @description Last day
+       * @example 2026-03-31
+       */
+      validUntil?: string;
+      /** @description Where the prices come from */
+      source?: string;
+      /**
+       * @description Currency of bare figures; the supplier's when left out (ISO 4217)
+       * @example EUR
+       */
+      currency?: string;
+    };
+    OfferPasteInput: {
+      /** @description Tab-separated rows: part number, supplier part number, from quantity, price, currency, per, pack, least quantity, lead time, valid from, valid until, priced on, source, note; a head row may name the columns in any order, and several columns such as “Price from 10” give the price breaks */
+      text: string;
+      /**
+       * @description Code of the supplier
+       * @example S-0001
+       */
+      supplierCode: string;
+      /** @description For rows that do not say it */
+      defaults?: components['schemas']['OfferPasteDefaults'];
+    };
+    OfferPasteColumn: {
+      /** @description What it is taken for */
+      name: string;
+      /** @description Its own heading, or its place where there is no head row */
+      from: string;
+    };
+    /** @enum {string} */
+    OfferPasteAction: 'add' | 'change' | 'same' | 'wrong';
+    OfferPasteProblem: {
+      /** @description Name of the column; blank for the row as a whole */
+      column: string;
+      /** @description The cell, cut short */
+      value: string;
+      message: string;
+    };
+    OfferPasteRow: {
+      /** @description Row of the pasted text, from 1; the head counts */
+      row: number;
+      action: components['schemas']['OfferPasteAction'];
+      partNumber: string | null;
+      partDescription: string | null;
+      supplierPartNumber: string;
+      /** @description What happens, in one sentence */
+      summary: string;
+      /** @description What changes of the offer, one line each */
+      changes: string[];
+      problems: components['schemas']['OfferPasteProblem'][];
+    };
+    OfferPasteCounts: {
+      add: number;
+      change: number;
+      same: number;
+      wrong: number;
+    };
+    OfferPastePreview: {
+      columns: components['schemas']['OfferPasteColumn'][];
+      rows: components['schemas']['OfferPasteRow'][];
+      counts: components['schemas']['OfferPasteCounts'];
+      /** @description Send it back to book exactly this */
+      token: string;
+    };
+    OfferPasteBookInput: {
+      /** @description Tab-separated rows: part number, supplier part number, from quantity, price, currency, per, pack, least quantity, lead time, valid from, valid until, priced on, source, note; a head row may name the columns in any order, and several columns such as “Price from 10” give the price breaks */
+      text: string;
+      /**
+       * @description Code of the supplier
+       * @example S-0001
+       */
+      supplierCode: string;
+      /** @description For rows that do not say it */
+      defaults?: components['schemas']['OfferPasteDefaults'];
+      /** @description From the preview */
+      token: string;
+      /** @description Books the rest; otherwise one wrong row refuses them all */
+      leaveOutWrong: boolean;
+    };
+    OfferPasteBooked: {
+      /** @description Offers that are new */
+      added: number;
+      /** @description Offers that changed */
+      changed: number;
+      /** @description Offers that were like this already */
+      same: number;
+      /** @description Rows that are wrong and were left out */
       leftOut: number;
     };
     OfferedPart: {
@@ -4861,6 +4997,147 @@ export interface operations {
         };
       };
       404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OfferPaste_preview: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OfferPasteInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OfferPastePreview'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description A refusal. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+    };
+  };
+  OfferPaste_book: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OfferPasteBookInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OfferPasteBooked'];
+        };
+      };
+      400: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description Nobody is signed in. */
+      401: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The roles do not allow it. */
+      403: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      404: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Problem'];
+        };
+      };
+      /** @description The rows would now do something else. */
+      409: {
         headers: {
           [name: string]: unknown;
         };
