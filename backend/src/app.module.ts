@@ -1,6 +1,7 @@
 import { type DynamicModule, Module } from '@nestjs/common';
 import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
+import { BulkLoadingModule } from './bulk-loading/bulk-loading.module.js';
 import { CalcModule } from './calc/calc.module.js';
 import { BriefsModule } from './briefs/briefs.module.js';
 import { ClockModule } from './common/clock.js';
@@ -39,6 +40,7 @@ import { UsersModule } from './users/users.module.js';
     SuppliersModule,
     OffersModule,
     CalcModule,
+    BulkLoadingModule,
     BriefsModule,
     OptionSearchesModule,
     TrainsModule,

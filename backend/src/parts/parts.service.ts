@@ -12,6 +12,7 @@ import { type PartInputDto } from './dto/part-input.dto.js';
 import { type PartPatchDto } from './dto/part-patch.dto.js';
 import { type PartDto, toPartDto } from './dto/part.dto.js';
 import { Part } from './entities/part.entity.js';
+import { newPart } from './new-part.js';
 import { partChange } from './part-changes.js';
 import { indexColumns } from './part-columns.js';
 import { PartNumbers } from './part-numbers.service.js';
@@ -52,19 +53,8 @@ export class PartsService {
   ): Promise<Part> {
     const now = this.clock.iso();
     const part = manager.create(Part, {
+      ...newPart(input, attributes),
       number: await this.numbers.take(manager, input.number),
-      kind: input.kind,
-      description: input.description,
-      standing: input.standing ?? 'draft',
-      successorNumber: null,
-      material: input.material || null,
-      mass: input.mass ?? null,
-      supply: input.supply ?? 'bought',
-      supplier: input.supplier || null,
-      note: input.note ?? '',
-      attributes,
-      ...indexColumns(input.kind, attributes),
-      version: 1,
       createdAt: now,
       updatedAt: now,
       updatedBy: actor.name,
