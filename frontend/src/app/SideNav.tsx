@@ -18,6 +18,8 @@ const PLACES: Place[] = [
   { to: '/briefs', name: 'Briefs', needs: 'briefs.read', count: 'briefs' },
   { to: '/trains', name: 'Trains', needs: 'trains.read', count: 'trains' },
   { to: '/parts', name: 'Parts', needs: 'parts.read', count: 'parts' },
+  { to: '/suppliers', name: 'Suppliers', needs: 'prices.read', count: null },
+  { to: '/offers', name: 'Offers', needs: 'prices.read', count: null },
   { to: '/people', name: 'People', needs: 'people.manage', count: null },
 ];
 

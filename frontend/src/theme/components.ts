@@ -124,6 +124,8 @@ const surfaces: Look = {
   },
   MuiAutocomplete: {
     styleOverrides: {
+      // As high as the other fields.
+      inputRoot: { '&&.MuiInputBase-sizeSmall': { paddingBlock: 4 } },
       paper: ({ theme }) => ({
         marginTop: 2,
         border: `1px solid ${theme.vars.palette.line.rule}`,

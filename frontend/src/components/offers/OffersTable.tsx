@@ -1,23 +1,20 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import FormControlLabel from '@mui/material/FormControlLabel';
-import Switch from '@mui/material/Switch';
 import useMediaQuery from '@mui/material/useMediaQuery';
 import { useMemo, type ReactNode } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { useMe } from '../../api/hooks/useMe';
 import { useOffers } from '../../api/hooks/useOffers';
 import type { Offer } from '../../api/types';
-import { CURRENCY_CHOICES } from '../currencyChoices';
 import { DataTable } from '../DataTable';
 import { EmptyState } from '../EmptyState';
 import { formatCount } from '../figures';
 import { FilterBar } from '../FilterBar';
-import { ChoiceFilter } from '../FilterFields';
 import { FilterText } from '../FilterText';
 import { useListState } from '../useListState';
 import { hiddenOfferColumns, offerColumnsFor, type OffersRoom } from './offerColumns';
-import { ENDS_CHOICES, OFFER_FILTERS, OFFER_SORTS, offerQuery, STATE_CHOICES } from './offerFilters';
+import { OfferFilterFields } from './OfferFilterFields';
+import { OFFER_FILTERS, OFFER_SORTS, offerQuery } from './offerFilters';
 
 interface OffersTableProps {
   /** Code of the one supplier whose offers these are; all suppliers' where it is left out. */
@@ -47,44 +44,12 @@ export function OffersTable({ supplier, height, more }: OffersTableProps) {
         result={page && (page.total === 1 ? '1 offer' : `${formatCount(page.total)} offers`)}
       >
         <FilterText
-          label="Part or supplier"
+          label={ofOne ? 'Part or their number' : 'Part or supplier'}
           width={200}
           value={filters.text ?? ''}
           onChange={(text) => setFilters({ text })}
         />
-        {more}
-        <ChoiceFilter
-          label="State"
-          width={108}
-          value={filters.state ?? ''}
-          onSet={(value) => setFilters({ state: value })}
-          choices={STATE_CHOICES}
-        />
-        <ChoiceFilter
-          label="Ends"
-          width={124}
-          value={filters.ends ?? ''}
-          onSet={(ends) => setFilters({ ends })}
-          choices={ENDS_CHOICES}
-        />
-        <ChoiceFilter
-          label="Currency"
-          width={104}
-          value={filters.currency ?? ''}
-          onSet={(currency) => setFilters({ currency })}
-          choices={CURRENCY_CHOICES}
-        />
-        <FormControlLabel
-          control={
-            <Switch
-              size="small"
-              checked={filters.tooOld === 'true'}
-              onChange={(_, on) => setFilters({ tooOld: on ? 'true' : '' })}
-            />
-          }
-          label="Price too old"
-          sx={{ minHeight: 34, ml: 0.5 }}
-        />
+        <OfferFilterFields state={state} narrow={narrow} more={more} />
       </FilterBar>
       <Box sx={ofOne ? { border: '1px solid', borderColor: 'line.rule' } : undefined}>
         <DataTable<Offer>

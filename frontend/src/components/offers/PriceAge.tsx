@@ -5,17 +5,19 @@ import { ageWords } from './offerWords';
 
 interface PriceAgeProps {
   offer: Pick<Offer, 'ageDays' | 'tooOld' | 'pricedOn'>;
+  /** In a column of ages: "40 days" rather than "40 days old". */
+  short?: boolean;
 }
 
 /** How long ago the supplier stated the price; one older than the house rule allows says so. */
-export function PriceAge({ offer: { ageDays, tooOld, pricedOn } }: PriceAgeProps) {
+export function PriceAge({ offer: { ageDays, tooOld, pricedOn }, short = false }: PriceAgeProps) {
   return (
     <Box
       component="span"
       title={`Priced on ${formatDay(pricedOn)}`}
       sx={{ whiteSpace: 'nowrap', ...(tooOld ? { color: 'warning.main', fontWeight: 600 } : {}) }}
     >
-      {ageWords(ageDays)}
+      {short ? ageWords(ageDays).replace(/ old$/, '') : ageWords(ageDays)}
       {tooOld && ', too old'}
     </Box>
   );

@@ -12,7 +12,7 @@ const COLUMNS: Column[] = [
   {
     field: 'part',
     headerName: 'Part',
-    width: 104,
+    width: 96,
     cellClassName: 'part-number',
     valueGetter: (_, { part }) => part.number,
   },
@@ -20,7 +20,7 @@ const COLUMNS: Column[] = [
     field: 'description',
     headerName: 'Description',
     flex: 1.2,
-    minWidth: 130,
+    minWidth: 140,
     sortable: false,
     valueGetter: (_, { part }) => part.description,
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -29,7 +29,7 @@ const COLUMNS: Column[] = [
     field: 'supplier',
     headerName: 'Supplier',
     flex: 1,
-    minWidth: 120,
+    minWidth: 136,
     valueGetter: (_, { supplier }) => supplier.name,
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
   },
@@ -37,8 +37,8 @@ const COLUMNS: Column[] = [
   {
     field: 'breaks',
     headerName: 'Price from a quantity',
-    flex: 1.8,
-    minWidth: 200,
+    flex: 1.6,
+    minWidth: 244,
     sortable: false,
     valueGetter: (_, offer) => breaksWords(offer),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -46,7 +46,7 @@ const COLUMNS: Column[] = [
   {
     field: 'leadTimeDays',
     headerName: 'Lead time',
-    width: 94,
+    width: 86,
     align: 'right',
     headerAlign: 'right',
     valueGetter: (_, { effectiveLeadTimeDays }) => leadTimeWords(effectiveLeadTimeDays),
@@ -54,21 +54,21 @@ const COLUMNS: Column[] = [
   {
     field: 'state',
     headerName: 'State',
-    width: 92,
+    width: 84,
     sortable: false,
     renderCell: ({ row }) => <OfferStateWord state={row.state} />,
   },
   {
     field: 'pricedOn',
-    headerName: 'Price',
-    width: 158,
-    renderCell: ({ row }) => <PriceAge offer={row} />,
+    headerName: 'Price age',
+    width: 142,
+    renderCell: ({ row }) => <PriceAge offer={row} short />,
     copied: ({ pricedOn }) => pricedOn,
   },
   {
     field: 'validUntil',
     headerName: 'Holds',
-    width: 138,
+    width: 152,
     valueGetter: (_, offer) => validityWords(offer),
     copied: ({ validUntil }) => validUntil,
   },
@@ -95,7 +95,7 @@ const STACKED = {
   whiteSpace: 'normal',
 } as const;
 
-const SMALL = { color: 'text.secondary', fontSize: '0.75rem' } as const;
+const SMALL = { color: 'text.secondary', fontSize: '0.75rem', fontWeight: 400 } as const;
 
 /** On a phone a row has two lines: the part over who offers it, the prices over whether they hold. */
 export function offerColumnsFor(room: OffersRoom, ofOneSupplier: boolean): Column[] {

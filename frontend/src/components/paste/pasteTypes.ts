@@ -21,7 +21,7 @@ export interface PasteRow {
 }
 
 export interface PastePreview {
-  /** Which column of the text was read as what; `from` is its head in the text, null when read by its place. */
+  /** Which column of the text was read as what; `from` is its head or place in the text, null when not known. */
   columns: readonly { name: string; from: string | null }[];
   rows: readonly PasteRow[];
   /** Says to the server which preview the person saw. */

@@ -14,6 +14,7 @@ import { FirstSteps } from './FirstSteps';
 import { LatestChanges } from './LatestChanges';
 import { LatestTrains } from './LatestTrains';
 import { MoreLink } from './MoreLink';
+import { PricesToRenew } from './PricesToRenew';
 import { TrainRows } from './TrainRows';
 import { WithdrawnParts } from './WithdrawnParts';
 
@@ -87,6 +88,7 @@ export default function HomePage() {
             )}
           </Sheet>
         )}
+        {(keeps || roles.includes('purchaser')) && <PricesToRenew />}
         {keeps && <WithdrawnParts />}
         {!designs && !keeps && <LatestTrains />}
         {can('people.manage') && <LatestChanges />}

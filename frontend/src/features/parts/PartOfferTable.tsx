@@ -37,7 +37,7 @@ export function PartOfferTable({ offers: { unit, offers } }: { offers: PartOffer
             <TableCell align="right" sx={WIDE_ONLY}>
               Here in
             </TableCell>
-            <TableCell>State</TableCell>
+            <TableCell sx={WIDE_ONLY}>State</TableCell>
           </TableRow>
         </TableHead>
         <TableBody>
@@ -72,6 +72,9 @@ function OfferRow({ offer }: { offer: Row }) {
           {offer.supplierPartNumber !== '' && `${offer.supplierPartNumber} · `}
           {breaksWords(offer)}
         </Box>
+        <Box sx={{ ...SMALL, display: { sm: 'none' } }}>
+          <OfferStateWord state={offer.state} />, {validityWords(offer)}, price <PriceAge offer={offer} />
+        </Box>
       </TableCell>
       <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
         {price === null ? NOTHING : formatPlain(price.orderQuantity, 3)}
@@ -90,7 +93,7 @@ function OfferRow({ offer }: { offer: Row }) {
       <TableCell align="right" sx={{ ...WIDE_ONLY, whiteSpace: 'nowrap' }}>
         {leadTimeWords(offer.arrivalDays)}
       </TableCell>
-      <TableCell>
+      <TableCell sx={WIDE_ONLY}>
         <OfferStateWord state={offer.state} />
         <Box sx={SMALL}>{validityWords(offer)}</Box>
         <Box sx={SMALL}>

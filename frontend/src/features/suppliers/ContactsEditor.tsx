@@ -32,18 +32,20 @@ export function ContactsEditor({ control }: { control: Control<SupplierForm> }) 
             required={!isBlankContact(typed[index] ?? BLANK_CONTACT)}
           />
           <TextInput control={control} name={`contacts.${index}.role`} label="Role there" most={120} />
-          <TextInput
-            control={control}
-            name={`contacts.${index}.email`}
-            label="E-mail"
-            type="email"
-            most={254}
-          />
+          <Box sx={{ gridColumn: { xs: '1 / -1', md: 'auto' } }}>
+            <TextInput
+              control={control}
+              name={`contacts.${index}.email`}
+              label="E-mail"
+              type="email"
+              most={254}
+            />
+          </Box>
           <TextInput control={control} name={`contacts.${index}.phone`} label="Telephone" most={60} />
           <IconButton
             aria-label={`Remove contact ${index + 1}`}
             onClick={() => remove(index)}
-            sx={{ alignSelf: 'start', mt: { xs: 0, sm: 2.75 }, justifySelf: 'end' }}
+            sx={{ alignSelf: 'start', mt: 2.75, justifySelf: 'end' }}
           >
             <Delete fontSize="small" />
           </IconButton>
@@ -67,6 +69,7 @@ const rowSx = {
   rowGap: 1,
   mb: 1.5,
   pb: { xs: 1.5, md: 0 },
-  borderBottom: { xs: '1px solid', md: 0 },
+  borderBottomStyle: 'solid',
+  borderBottomWidth: { xs: 1, md: 0 },
   borderColor: 'line.rule',
 } as const;

@@ -1,3 +1,4 @@
+import Box from '@mui/material/Box';
 import Link from '@mui/material/Link';
 import TableBody from '@mui/material/TableBody';
 import TableCell from '@mui/material/TableCell';
@@ -22,20 +23,28 @@ export function SupplierContacts({ contacts }: { contacts: Supplier['contacts'] 
             <TableHead>
               <TableRow>
                 <TableCell>Name</TableCell>
-                <TableCell>Role there</TableCell>
+                <TableCell sx={WIDE_ONLY}>Role there</TableCell>
                 <TableCell>E-mail</TableCell>
-                <TableCell>Telephone</TableCell>
+                <TableCell sx={WIDE_ONLY}>Telephone</TableCell>
               </TableRow>
             </TableHead>
             <TableBody>
               {contacts.map(({ name, role, email, phone }, index) => (
                 <TableRow key={index} sx={{ '&:last-of-type > *': { borderBottom: 0 } }}>
-                  <TableCell>{name}</TableCell>
-                  <TableCell>{role || NOTHING}</TableCell>
+                  <TableCell>
+                    {name}
+                    {role !== '' && <Box sx={NARROW_ONLY}>{role}</Box>}
+                  </TableCell>
+                  <TableCell sx={WIDE_ONLY}>{role || NOTHING}</TableCell>
                   <TableCell>
                     {email === '' ? NOTHING : <Link href={`mailto:${email}`}>{email}</Link>}
+                    {phone !== '' && (
+                      <Box sx={NARROW_ONLY}>
+                        <Link href={dialLink(phone)}>{phone}</Link>
+                      </Box>
+                    )}
                   </TableCell>
-                  <TableCell sx={{ whiteSpace: 'nowrap' }}>
+                  <TableCell sx={{ ...WIDE_ONLY, whiteSpace: 'nowrap' }}>
                     {phone === '' ? NOTHING : <Link href={dialLink(phone)}>{phone}</Link>}
                   </TableCell>
                 </TableRow>
@@ -47,6 +56,9 @@ export function SupplierContacts({ contacts }: { contacts: Supplier['contacts'] 
     </Sheet>
   );
 }
+
+const WIDE_ONLY = { display: { xs: 'none', sm: 'table-cell' } } as const;
+const NARROW_ONLY = { display: { sm: 'none' }, color: 'text.secondary', fontSize: '0.75rem' } as const;
 
 /** A telephone dials digits and a leading plus; what else people write to read it better is left out (RFC 3966). */
 const dialLink = (phone: string): string => `tel:${phone.replace(/\(0\)/g, '').replace(/[^\d+]/g, '')}`;

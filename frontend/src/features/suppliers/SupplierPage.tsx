@@ -83,14 +83,18 @@ export default function SupplierPage() {
       />
       <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2 }}>
         <Box sx={factsSx}>
-          <SupplierContacts contacts={supplier.contacts} />
+          <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2, minWidth: 0 }}>
+            <SupplierContacts contacts={supplier.contacts} />
+            {supplier.note !== '' && (
+              <Sheet title="Note">
+                <Typography sx={{ whiteSpace: 'pre-wrap', overflowWrap: 'anywhere' }}>
+                  {supplier.note}
+                </Typography>
+              </Sheet>
+            )}
+          </Box>
           <SupplierTerms supplier={supplier} />
         </Box>
-        {supplier.note !== '' && (
-          <Sheet title="Note">
-            <Typography sx={{ whiteSpace: 'pre-wrap', overflowWrap: 'anywhere' }}>{supplier.note}</Typography>
-          </Sheet>
-        )}
         <Box component="section" aria-labelledby="supplier-offers">
           <Typography variant="h2" id="supplier-offers" sx={{ mb: 0.75 }}>
             Offers

@@ -13,7 +13,7 @@ import { FilterText } from '../../components/FilterText';
 import { NoPermission } from '../../components/NoPermission';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState, writeSort, type ListState } from '../../components/useListState';
-import { LAPTOP_HIDDEN, NARROW_HIDDEN, SUPPLIER_COLUMNS } from './supplierColumns';
+import { LAPTOP_HIDDEN, NARROW_HIDDEN, SUPPLIER_COLUMNS, WIDE_HIDDEN } from './supplierColumns';
 
 const FILTERS = ['text', 'standing', 'currency'] as const;
 const SORTS = ['code', 'name', 'currency', 'leadTimeDays', 'offers', 'updatedAt'] as const;
@@ -39,6 +39,7 @@ export default function SuppliersPage() {
   const { page, problem, isLoading, mutate } = useSuppliers(queryOf(state), allowed);
   const narrow = useMediaQuery('(max-width: 600px)');
   const laptop = useMediaQuery('(max-width: 1399px)');
+  const full = useMediaQuery('(min-width: 1700px)');
   const add = can('prices.edit') ? (
     <Button variant="contained" component={Link} to="/add-supplier">
       Add supplier
@@ -83,7 +84,7 @@ export default function SuppliersPage() {
       <DataTable
         label="Suppliers"
         columns={SUPPLIER_COLUMNS}
-        hidden={narrow ? NARROW_HIDDEN : laptop ? LAPTOP_HIDDEN : undefined}
+        hidden={narrow ? NARROW_HIDDEN : laptop ? LAPTOP_HIDDEN : full ? undefined : WIDE_HIDDEN}
         rows={page?.items}
         total={page?.total}
         getRowId={(row) => row.code}

@@ -10,19 +10,26 @@ const right = { align: 'right', headerAlign: 'right' } as const;
 /** Columns of the list; `sortable` ones are those that the server sorts by. */
 export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   { field: 'code', headerName: 'Code', width: 84, cellClassName: 'part-number' },
-  { field: 'name', headerName: 'Name', flex: 1.4, minWidth: 160 },
+  {
+    field: 'name',
+    headerName: 'Name',
+    flex: 1,
+    minWidth: 180,
+    valueGetter: (_, { name, standing }) => (standing === 'closed' ? `${name} (closed)` : name),
+    renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
+  },
   { field: 'currency', headerName: 'Currency', width: 88 },
   {
     field: 'leadTimeDays',
     headerName: 'Usual lead time',
-    width: 126,
+    width: 124,
     ...right,
     valueFormatter: (days: number | null) => leadTimeWords(days),
   },
   {
     field: 'leastOrderValue',
     headerName: 'Least order',
-    width: 124,
+    width: 108,
     sortable: false,
     ...right,
     valueGetter: (_, { leastOrderValue, currency }) =>
@@ -31,8 +38,8 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   {
     field: 'freight',
     headerName: 'Freight',
-    flex: 1.4,
-    minWidth: 170,
+    flex: 1.3,
+    minWidth: 190,
     sortable: false,
     valueGetter: (_, { freight, currency }) => freightWords(freight, currency),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -40,7 +47,7 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   {
     field: 'offers',
     headerName: 'Offers',
-    width: 142,
+    width: 136,
     ...right,
     valueGetter: (_, { offers }) => offersWords(offers),
   },
@@ -53,7 +60,6 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
     valueGetter: (_, { offers: { oldestPricedOn } }) =>
       oldestPricedOn === null ? NOTHING : formatDay(oldestPricedOn),
   },
-  { field: 'standing', headerName: 'Standing', width: 88, sortable: false },
   {
     field: 'updatedAt',
     headerName: 'Changed',
@@ -66,6 +72,9 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
 /** Left out where the screen is a laptop's: everything else then stands whole. */
 export const LAPTOP_HIDDEN = { leastOrderValue: false, updatedAt: false };
 
+/** Left out below the widest screens. */
+export const WIDE_HIDDEN = { updatedAt: false };
+
 /** Left out where the screen is a phone's. */
 export const NARROW_HIDDEN = {
   ...LAPTOP_HIDDEN,
@@ -73,5 +82,4 @@ export const NARROW_HIDDEN = {
   leadTimeDays: false,
   freight: false,
   oldestPrice: false,
-  standing: false,
 };
