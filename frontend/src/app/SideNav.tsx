@@ -20,6 +20,7 @@ const PLACES: Place[] = [
   { to: '/parts', name: 'Parts', needs: 'parts.read', count: 'parts' },
   { to: '/suppliers', name: 'Suppliers', needs: 'prices.read', count: null },
   { to: '/offers', name: 'Offers', needs: 'prices.read', count: null },
+  { to: '/stock', name: 'Stock', needs: 'stock.read', count: null },
   { to: '/people', name: 'People', needs: 'people.manage', count: null },
 ];
 

@@ -42,6 +42,8 @@ export const router = createBrowserRouter([
           page('offers', () => import('../features/offers/OffersPage')),
           page('offers/:id', () => import('../features/offers/OfferPage')),
           page('add-offer', () => import('../features/offers/AddOfferPage')),
+          page('stock', () => import('../features/stock/StockPage')),
+          page('stock/count', () => import('../features/stock/CountPage')),
           page('people', () => import('../features/people/PeoplePage')),
           { path: '*', element: <NotFoundPage /> },
         ],

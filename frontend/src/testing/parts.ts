@@ -14,6 +14,9 @@ export function newPart(given: Partial<Part> = {}): Part {
     supply: 'bought',
     supplier: null,
     note: '',
+    shelf: null,
+    leastStock: null,
+    unit: 'pcs',
     attributes: {
       teeth: 28,
       module: 2,

@@ -13,6 +13,7 @@ import { DraftRows } from './DraftRows';
 import { FirstSteps } from './FirstSteps';
 import { LatestChanges } from './LatestChanges';
 import { LatestTrains } from './LatestTrains';
+import { LowStock } from './LowStock';
 import { MoreLink } from './MoreLink';
 import { PricesToRenew } from './PricesToRenew';
 import { TrainRows } from './TrainRows';
@@ -88,6 +89,7 @@ export default function HomePage() {
             )}
           </Sheet>
         )}
+        {(keeps || roles.includes('purchaser')) && <LowStock />}
         {(keeps || roles.includes('purchaser')) && <PricesToRenew />}
         {keeps && <WithdrawnParts />}
         {!designs && !keeps && <LatestTrains />}

@@ -15,6 +15,8 @@ import { PartFacts } from './PartFacts';
 import { formOfPart, patchOf, type PartForm } from './partForm';
 import { PartHeadFacts } from './PartHeadFacts';
 import { PartOffers } from './PartOffers';
+import { PartShelf } from './PartShelf';
+import { PartSubstitutes } from './PartSubstitutes';
 import { StandingActions } from './StandingActions';
 import { useRefreshParts } from './useRefreshParts';
 
@@ -98,6 +100,8 @@ export default function PartPage() {
         below={
           <Box sx={{ display: 'flex', flexDirection: 'column', gap: 2 }}>
             <PartOffers part={part} />
+            <PartShelf number={part.number} />
+            <PartSubstitutes part={part} />
             <PartChanges number={part.number} version={part.version} />
           </Box>
         }

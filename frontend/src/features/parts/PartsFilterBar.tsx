@@ -78,6 +78,15 @@ export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
           <TypedFilter figure label="most" width={72} {...bind('teethMax')} />
           <ChoiceFilter label="Material" width={128} choices={materials} {...bind('material')} />
           <ChoiceFilter label="Standing" width={108} choices={standings} {...bind('standing')} />
+          <ChoiceFilter
+            label="Shelf"
+            width={96}
+            choices={[
+              { value: 'there', name: 'there' },
+              { value: 'low', name: 'low' },
+            ]}
+            {...bind('shelf')}
+          />
         </>
       )}
       {shown && (

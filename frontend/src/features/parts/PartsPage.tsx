@@ -29,6 +29,8 @@ const COPY_HEAD = [
   'Bore mm',
   'Material',
   'Mass kg',
+  'Shelf',
+  'Unit',
   'Standing',
 ];
 
@@ -44,6 +46,8 @@ function copyRow(part: PartSummary): (string | number | null)[] {
     ...['faceWidth', 'bore'].map((name) => figureOf(part, name)),
     part.material,
     part.mass,
+    part.shelf,
+    part.unit,
     part.standing,
   ];
 }

@@ -89,6 +89,25 @@ export const PART_COLUMNS: Column[] = [
     valueFormatter: (value: number | null) => formatMass(value),
   },
   {
+    field: 'shelf',
+    headerName: 'Shelf',
+    width: 84,
+    sortable: false,
+    align: 'right',
+    headerAlign: 'right',
+    renderCell: ({ row: { shelf, leastStock, unit } }) => {
+      if (shelf === null && leastStock === null) return NOTHING;
+      const low = leastStock !== null && (shelf ?? 0) < leastStock;
+      return (
+        <span title={low ? `low: the least is ${formatPlain(leastStock, 3)} ${unit}` : undefined}>
+          {low && <b>low </b>}
+          {formatPlain(shelf ?? 0, 3)}
+          {unit === 'l' && ' l'}
+        </span>
+      );
+    },
+  },
+  {
     field: 'standing',
     headerName: 'Standing',
     width: 104,

@@ -17,6 +17,7 @@ export const PART_FILTERS = [
   'boreMax',
   'faceWidthMin',
   'faceWidthMax',
+  'shelf',
 ] as const;
 export type PartFilter = (typeof PART_FILTERS)[number];
 
@@ -53,11 +54,16 @@ const WORDS: ReadonlySet<PartFilter> = new Set(['text', 'kind', 'standing', 'mat
  * sent: an old or hand-made link should still show a list.
  */
 export function partQuery(state: ListState<PartFilter>): PartQuery {
-  const query: Record<string, string | number> = { page: state.page, size: state.size };
+  const query: Record<string, string | number | boolean> = { page: state.page, size: state.size };
   if (state.sort.length > 0) query.sort = writeSort(state.sort);
   for (const name of PART_FILTERS) {
     const value = state.filters[name];
     if (value === undefined) continue;
+    if (name === 'shelf') {
+      if (value === 'there') query.onShelf = true;
+      if (value === 'low') query.low = true;
+      continue;
+    }
     if (WORDS.has(name)) {
       query[name] = value;
       continue;

@@ -1,0 +1,59 @@
+import Box from '@mui/material/Box';
+import TableBody from '@mui/material/TableBody';
+import TableCell from '@mui/material/TableCell';
+import TableContainer from '@mui/material/TableContainer';
+import TableHead from '@mui/material/TableHead';
+import TableRow from '@mui/material/TableRow';
+import { useMemo } from 'react';
+import { useMovements } from '../../api/hooks/useMovements';
+import { CopyTable } from '../../components/CopyTable';
+import { ErrorState } from '../../components/ErrorState';
+import { formatPlain, formatWhen } from '../../components/figures';
+import { changeWords } from '../../components/stock/stockWords';
+
+/** Movements that a part's page shows; the whole ledger is one click away. */
+const SHOWN = 5;
+
+const WIDE = { display: { xs: 'none', sm: 'table-cell' } } as const;
+
+/** The latest movements of one part. */
+export function LastMovements({ number }: { number: string }) {
+  const query = useMemo(() => ({ part: number, size: SHOWN }), [number]);
+  const { page, problem, mutate } = useMovements(query);
+  if (page === undefined && problem !== null) {
+    return <ErrorState problem={problem} onRetry={() => void mutate()} what="the movements" />;
+  }
+  if (page === undefined || page.items.length === 0) return null;
+  return (
+    <Box sx={{ borderTop: 1, borderColor: 'line.rule', mt: 1 }}>
+      <TableContainer>
+        <CopyTable label="Last movements">
+          <TableHead>
+            <TableRow>
+              <TableCell>When</TableCell>
+              <TableCell>What</TableCell>
+              <TableCell align="right">Change</TableCell>
+              <TableCell align="right">Then there</TableCell>
+              <TableCell>Place</TableCell>
+              <TableCell sx={WIDE}>Why</TableCell>
+              <TableCell sx={WIDE}>By</TableCell>
+            </TableRow>
+          </TableHead>
+          <TableBody>
+            {page.items.map((movement) => (
+              <TableRow key={movement.id}>
+                <TableCell>{formatWhen(movement.at)}</TableCell>
+                <TableCell>{movement.kind}</TableCell>
+                <TableCell align="right">{changeWords(movement.change)}</TableCell>
+                <TableCell align="right">{formatPlain(movement.after, 3)}</TableCell>
+                <TableCell>{movement.place}</TableCell>
+                <TableCell sx={WIDE}>{movement.reason}</TableCell>
+                <TableCell sx={WIDE}>{movement.by}</TableCell>
+              </TableRow>
+            ))}
+          </TableBody>
+        </CopyTable>
+      </TableContainer>
+    </Box>
+  );
+}

@@ -1,0 +1,123 @@
+import { Link } from 'react-router-dom';
+import type { Movement } from '../../api/types';
+import { formatPlain, formatWhen } from '../../components/figures';
+import type { CopiedCell, DataColumn } from '../../components/gridText';
+import { changeWords } from '../../components/stock/stockWords';
+
+type Column = DataColumn<Movement>;
+
+const PartLink = ({ number }: { number: string }) => (
+  <Link
+    to={`/parts/${encodeURIComponent(number)}`}
+    className="part-number"
+    tabIndex={-1}
+    style={{ color: 'inherit', textDecoration: 'none' }}
+  >
+    {number}
+  </Link>
+);
+
+const titled = (text: string) => <span title={text}>{text}</span>;
+
+const COLUMNS: Column[] = [
+  { field: 'at', headerName: 'When', width: 138, valueFormatter: (at: string) => formatWhen(at) },
+  {
+    field: 'number',
+    headerName: 'Part',
+    width: 104,
+    sortable: false,
+    renderCell: ({ row }) => <PartLink number={row.number} />,
+  },
+  {
+    field: 'description',
+    headerName: 'Description',
+    flex: 1.2,
+    minWidth: 160,
+    sortable: false,
+    renderCell: ({ row }) => titled(row.description),
+  },
+  { field: 'kind', headerName: 'What', width: 92, sortable: false },
+  {
+    field: 'change',
+    headerName: 'Change',
+    width: 84,
+    sortable: false,
+    align: 'right',
+    headerAlign: 'right',
+    valueFormatter: (change: number) => changeWords(change),
+  },
+  {
+    field: 'after',
+    headerName: 'Then there',
+    width: 96,
+    sortable: false,
+    align: 'right',
+    headerAlign: 'right',
+    valueFormatter: (after: number) => formatPlain(after, 3),
+  },
+  { field: 'unit', headerName: 'Unit', width: 52, sortable: false },
+  { field: 'place', headerName: 'Place', width: 116, sortable: false },
+  {
+    field: 'reason',
+    headerName: 'Why',
+    flex: 1,
+    minWidth: 120,
+    sortable: false,
+    renderCell: ({ row }) => titled(row.reason),
+  },
+  { field: 'by', headerName: 'By', width: 112, sortable: false },
+];
+
+export const MIDDLE_HIDDEN = { unit: false };
+export const NARROW_HIDDEN = {
+  ...MIDDLE_HIDDEN,
+  number: false,
+  description: false,
+  kind: false,
+  after: false,
+  place: false,
+  reason: false,
+  by: false,
+};
+
+/** On a phone each row says in two lines what was done, and when. */
+export function movementColumns(narrow: boolean): Column[] {
+  if (!narrow) return COLUMNS;
+  return COLUMNS.map((column) => {
+    if (column.field !== 'at') return column;
+    return {
+      ...column,
+      headerName: 'Movement',
+      flex: 1,
+      minWidth: 200,
+      display: 'flex',
+      renderCell: ({ row }) => (
+        <span style={{ lineHeight: 1.35, whiteSpace: 'normal' }}>
+          <PartLink number={row.number} /> {row.kind}, {row.place}
+          <br />
+          {formatWhen(row.at)}, {row.by}
+        </span>
+      ),
+    };
+  });
+}
+
+export const COPY_HEAD = [
+  'When',
+  'Part',
+  'Description',
+  'What',
+  'Change',
+  'Counted',
+  'Then there',
+  'Unit',
+  'Place',
+  'Why',
+  'By',
+];
+
+/** A copied figure keeps a plain point and minus, so that a spreadsheet reads it as a number. */
+export function copyRow(movement: Movement): CopiedCell[] {
+  const { at, number, description, kind, change, counted, after, unit, place, reason, by } = movement;
+  return [at, number, description, kind, change, counted, after, unit, place, reason, by];
+}
