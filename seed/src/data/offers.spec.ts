@@ -83,13 +83,18 @@ describe('demo offers', () => {
     );
   });
 
-  it('show on the demo trains a price too old to order by, and none at all', () => {
+  it('show on the demo trains a price too old to order by, none at all, and other currencies', () => {
     const of = (description: string) => offers.filter(({ row }) => row.description === description);
     const [old, ...more] = of('Spur gear, steel, 66 teeth, module 1.5');
     expect(more).toEqual([]);
     expect(daysBetween(old?.offer.pricedOn ?? TODAY, TODAY)).toBeGreaterThan(180);
     expect(old && offerState(termsOf(old.offer), TODAY, 'open')).toBe('valid');
     expect(of('Spur gear, steel, 72 teeth, module 1.5')).toEqual([]);
+    const abroad = [
+      ...of('Rotary shaft seal 8 × 22 × 7 mm'),
+      ...of('Helical gear, hardened steel, 50 teeth, module 1.5, right hand 15°'),
+    ];
+    expect(abroad.map(({ offer }) => offer.currency)).toEqual(['GBP', 'JPY']);
     const usual = of('Spur gear, steel, 18 teeth, module 1.5').map(({ offer }) => termsOf(offer));
     expect(usual.some((terms) => offerState(terms, TODAY, 'open') === 'valid')).toBe(true);
     expect(usual.every((terms) => priceAt(24, terms).lineTotal.minor > 0)).toBe(true);

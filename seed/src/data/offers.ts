@@ -36,10 +36,14 @@ const SELLERS: Record<SupplierName, Seller> = {
   [SUPPLIER.lazuli]: seller('TND', 3150, 'CZ.', 4, ['Devis 0932', 'Devis 1017']),
 };
 
-/** Lines of the demo trains that show what a bill of materials says of prices too old and of none at all. */
-const ODD_ONES: Record<string, 'too old' | 'none'> = {
-  'Spur gear, steel, 66 teeth, module 1.5': 'too old',
-  'Spur gear, steel, 72 teeth, module 1.5': 'none',
+/** Lines of the demo trains that show what a bill of materials says of prices too old, and of none at all. */
+const TOO_OLD = 'Spur gear, steel, 66 teeth, module 1.5';
+const WITHOUT = 'Spur gear, steel, 72 teeth, module 1.5';
+
+/** Lines of the demo trains that only one firm sells, in another currency than the rest. */
+const ONE_SELLER: Record<string, SupplierName> = {
+  'Rotary shaft seal 8 × 22 × 7 mm': SUPPLIER.larkspit,
+  'Helical gear, hardened steel, 50 teeth, module 1.5, right hand 15°': SUPPLIER.asanagi,
 };
 
 /**
@@ -48,18 +52,27 @@ const ODD_ONES: Record<string, 'too old' | 'none'> = {
  * @param today ISO 8601 date; days of the offers are counted back from it
  */
 export function offersOf(row: LibraryRow, index: number, today: string): OfferRow[] {
-  const sellers = sellersOf(row);
-  const odd = ODD_ONES[row.description];
   const random = randomOf(`offers for ${row.description}`);
-  if (row.standing === 'withdrawn' || odd === 'none' || (odd === undefined && random.chance(0.025)))
-    return [];
-  const count = odd === 'too old' ? 1 : random.chance(0.55) ? 1 : random.chance(0.75) ? 2 : 3;
-  return sellers.slice(0, count).flatMap((name) => {
+  if (row.standing === 'withdrawn' || row.description === WITHOUT) return [];
+  const names = namesOf(row, random);
+  return names.flatMap((name) => {
     const one = randomOf(`${name} offers ${row.description}`);
     const now = offer(row, index, name, one);
-    if (odd === 'too old') return [{ ...now, ...daysOf(today, 262, null) }];
+    if (row.description === TOO_OLD) return [{ ...now, ...daysOf(today, 262, null) }];
+    if (row.description in ONE_SELLER) return [{ ...now, ...daysOf(today, 41, 300) }];
     return [{ ...now, ...usualDays(one, today) }, ...otherYears(row, index, name, one, today)];
   });
+}
+
+/** A few parts nobody offers, most one firm, some two or three. */
+function namesOf(row: LibraryRow, random: Random): SupplierName[] {
+  const only = ONE_SELLER[row.description];
+  if (only !== undefined) return [only];
+  const sellers = sellersOf(row);
+  if (row.description === TOO_OLD) return sellers.slice(0, 1);
+  if (random.chance(0.025)) return [];
+  const count = random.chance(0.55) ? 1 : random.chance(0.75) ? 2 : 3;
+  return sellers.slice(0, count);
 }
 
 function offer(row: LibraryRow, index: number, name: SupplierName, random: Random, dearer = 1): OfferRow {
