@@ -32,7 +32,7 @@ const SELLERS: Record<SupplierName, Seller> = {
     'Offer 1190',
     'Asked at the counter',
   ]),
-  [SUPPLIER.asanagi]: seller('JPY', 171, 'AG', 2, ['見積書 4471', '見積書 4620']),
+  [SUPPLIER.asanagi]: seller('JPY', 171, 'AG', 2, ['Mitsumori 4471', 'Mitsumori 4620']),
   [SUPPLIER.lazuli]: seller('TND', 3150, 'CZ.', 4, ['Devis 0932', 'Devis 1017']),
 };
 

@@ -43,6 +43,11 @@ const LOSSES = [
   'Wrong slip',
 ] as const;
 
+/** What one supplier brings on one day is on one note. */
+function deliveryNote(from: string, day: number): string {
+  return `Delivery from ${from}, note ${randomOf(`${from} on ${day}`).whole(3000, 9999)}`;
+}
+
 /** Plays a part's year through: opening count, builds, deliveries, a count in summer, now and then a correction. */
 export function yearOf(row: LibraryRow): PartYear {
   const usage = usageOf(row);
@@ -110,12 +115,9 @@ class ShelfYear {
     if (this.delivery === null || this.delivery.day > day) return;
     const { day: arrived, steps } = this.delivery;
     this.delivery = null;
-    const [from = 'own shop'] = sellersOf(this.row);
-    const note =
-      from === 'own shop'
-        ? 'Made in the own shop'
-        : `Delivery from ${from}, note ${this.random.whole(3000, 9999)}`;
-    this.book('received', steps, arrived, note);
+    const [from] = sellersOf(this.row);
+    const reason = from === undefined ? 'Made in the own shop' : deliveryNote(from, arrived);
+    this.book('received', steps, arrived, reason);
   }
 
   private recount(day: number): void {

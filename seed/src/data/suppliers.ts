@@ -65,7 +65,7 @@ export const DEMO_SUPPLIERS: readonly SupplierRow[] = [
     name: SUPPLIER.asanagi,
     currency: 'JPY',
     language: 'ja',
-    contacts: [{ name: '海外営業部', role: '見積り', email: 'export@asanagi.example', phone: '' }],
+    contacts: [{ name: 'Export desk', role: 'quotations', email: 'export@asanagi.example', phone: '' }],
     address: 'Asanagi Fine Gears\n2-8 Asanagi-dori',
     freight: { kind: 'free-from', charge: 3800, freeFrom: 120_000 },
     leastOrderValue: 20_000,
