@@ -6,9 +6,10 @@ interface Found {
   parts: { number: string; description: string }[];
   briefs: { id: string; code: string; title: string }[];
   trains: { code: string; title: string }[];
+  suppliers: { code: string; name: string }[];
 }
 interface Overview {
-  counts: { briefs: number; trains: number; parts: number };
+  counts: { briefs: number; trains: number; parts: number; suppliers: number };
   briefs: { code: string }[];
   trains: { code: string }[];
   draftParts: { number: string; standing: string }[];
@@ -51,8 +52,29 @@ describe('the search of the header', () => {
     expect(found.trains).toEqual([]);
   });
 
+  it('finds suppliers by name or code for people who read prices, active ones first, and for nobody else', async () => {
+    const purchaser = await server.as('purchaser');
+    const codes: string[] = [];
+    for (const name of ['Anchor Kelp Steel', 'Zinc Kelp Works']) {
+      codes.push(
+        (await purchaser.post<{ code: string }>('/api/suppliers', { name, currency: 'EUR' })).body.code,
+      );
+    }
+    await purchaser.patch(`/api/suppliers/${codes[0]}`, { version: 1, standing: 'closed' });
+    const { body } = await purchaser.get<Found>('/api/finder?text=kelp');
+    expect(body.suppliers).toEqual([
+      { code: codes[1], name: 'Zinc Kelp Works' },
+      { code: codes[0], name: 'Anchor Kelp Steel' },
+    ]);
+    const byCode = await purchaser.get<Found>(`/api/finder?text=${codes[0]?.toLowerCase()}`);
+    expect(byCode.body.suppliers.map(({ code }) => code)).toEqual([codes[0]]);
+    expect((await find('kelp')).suppliers).toEqual([]);
+    expect((await purchaser.get<Overview>('/api/overview')).body.counts.suppliers).toBe(1);
+    expect((await viewer.get<Overview>('/api/overview')).body.counts.suppliers).toBe(0);
+  });
+
   it('finds nothing for blanks, and takes any sign as it is', async () => {
-    const nothing = { parts: [], briefs: [], trains: [] };
+    const nothing = { parts: [], briefs: [], trains: [], suppliers: [] };
     for (const text of [
       '   ',
       '%',
@@ -83,7 +105,7 @@ describe('the overview', () => {
   it('shows a librarian the drafts to clear, the last changed first', async () => {
     await librarian.patch('/api/parts/KELP-03', { version: 1, note: 'Bore measured' });
     const { body } = await librarian.get<Overview>('/api/overview');
-    expect(body.counts).toEqual({ parts: 12, briefs: 1, trains: 0 });
+    expect(body.counts).toEqual({ parts: 12, briefs: 1, trains: 0, suppliers: 1 });
     expect(body.draftParts).toHaveLength(10);
     expect(body.draftParts[0]?.number).toBe('KELP-03');
     expect(new Set(body.draftParts.map(({ standing }) => standing))).toEqual(new Set(['draft']));
@@ -95,6 +117,11 @@ describe('the overview', () => {
     expect(mine.briefs).toHaveLength(1);
     expect(mine.draftParts).toEqual([]);
     const looking = (await viewer.get<Overview>('/api/overview')).body;
-    expect(looking).toEqual({ counts: mine.counts, briefs: [], trains: [], draftParts: [] });
+    expect(looking).toEqual({
+      counts: { ...mine.counts, suppliers: 0 },
+      briefs: [],
+      trains: [],
+      draftParts: [],
+    });
   });
 });

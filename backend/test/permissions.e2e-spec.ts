@@ -15,6 +15,11 @@ const HOLDERS: Record<string, Role[]> = {
   'briefs.edit': ['admin', 'designer'],
   'trains.edit': ['admin', 'designer'],
   'bom.export': ['admin', 'designer', 'librarian', 'purchaser'],
+  'prices.read': ['admin', 'designer', 'librarian', 'purchaser'],
+  'prices.edit': ['admin', 'librarian', 'purchaser'],
+  'offers.choose': ['admin', 'designer', 'purchaser'],
+  'stock.read': LOOKING,
+  'stock.book': ['admin', 'librarian', 'purchaser'],
   'people.manage': ['admin'],
 };
 

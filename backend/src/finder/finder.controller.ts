@@ -12,7 +12,7 @@ import { FinderService } from './finder.service.js';
 export class FinderController {
   constructor(private readonly finder: FinderService) {}
 
-  /** Parts, briefs and trains whose number, code, title or description holds the text. */
+  /** Parts, briefs, trains and suppliers whose number, code, title, name or description holds the text. */
   @Get()
   @SignedIn()
   @ApiOkResponse({ type: FinderResultDto })

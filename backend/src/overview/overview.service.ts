@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { type SignedInUser } from '../auth/signed-in-user.js';
 import { BriefReader } from '../briefs/brief-reader.js';
 import { PartsReader } from '../parts/parts-reader.service.js';
+import { SupplierReader } from '../suppliers/supplier-reader.js';
 import { TrainReader } from '../trains/train-reader.js';
 import { type OverviewDto } from './dto/overview.dto.js';
 
@@ -15,6 +16,7 @@ export class OverviewService {
     private readonly parts: PartsReader,
     private readonly briefs: BriefReader,
     private readonly trains: TrainReader,
+    private readonly suppliers: SupplierReader,
   ) {}
 
   async of({ id, permissions }: SignedInUser): Promise<OverviewDto> {
@@ -25,6 +27,7 @@ export class OverviewService {
         briefs: readBriefs ? await this.briefs.count() : 0,
         trains: readTrains ? await this.trains.count() : 0,
         parts: may('parts.read') ? await this.parts.count() : 0,
+        suppliers: may('prices.read') ? await this.suppliers.count() : 0,
       },
       briefs: readBriefs ? await this.briefs.latestOf(id, MOST_ROWS) : [],
       trains: readTrains ? await this.trains.latestOf(id, MOST_ROWS) : [],

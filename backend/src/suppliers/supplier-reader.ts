@@ -92,8 +92,9 @@ export class SupplierReader {
     return found.map(({ code, name }) => ({ code, name }));
   }
 
+  /** How many are asked and ordered from. */
   count(): Promise<number> {
-    return this.suppliers.count();
+    return this.suppliers.countBy({ standing: 'active' });
   }
 
   private async withOffers(manager: EntityManager, suppliers: Supplier[]): Promise<SupplierDto[]> {

@@ -3658,15 +3658,22 @@ export interface components {
       code: string;
       title: string;
     };
+    FoundSupplier: {
+      code: string;
+      name: string;
+    };
     FinderResult: {
       parts: components['schemas']['FoundPart'][];
       briefs: components['schemas']['FoundBrief'][];
       trains: components['schemas']['FoundTrain'][];
+      suppliers: components['schemas']['FoundSupplier'][];
     };
     OverviewCounts: {
       briefs: number;
       trains: number;
       parts: number;
+      /** @description Active ones */
+      suppliers: number;
     };
     Overview: {
       counts: components['schemas']['OverviewCounts'];

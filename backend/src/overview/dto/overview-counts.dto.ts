@@ -11,4 +11,7 @@ export class OverviewCountsDto {
 
   @ApiProperty({ type: 'integer' })
   parts!: number;
+
+  @ApiProperty({ type: 'integer', description: 'Active ones' })
+  suppliers!: number;
 }
