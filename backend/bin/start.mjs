@@ -1,4 +1,4 @@
-// npm start: from a clean clone to a served product. See README.md for the settings.
+// npm start: from a clean clone to a served product. See README.md for the settings; `-- --scale N` for a large library.
 import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { prepare } from './prepare.mjs';
@@ -11,8 +11,10 @@ process.env.STAGEYARD_DATA = dataFolder;
 await prepare();
 
 // The loader books everything or nothing, the database last; it does nothing where demo mode is off.
-if (!existsSync(path.join(dataFolder, 'stageyard.db')))
-  await step('Book the demo data into the empty data folder', () => runNode('seed/dist/load.js'));
+const options = process.argv.slice(2);
+// Options are for an empty folder: the loader says so where it is not.
+if (options.length > 0 || !existsSync(path.join(dataFolder, 'stageyard.db')))
+  await step('Book the demo data into the empty data folder', () => runNode('seed/dist/load.js', options));
 
 // In this same process: signals and the exit code are the server's own.
 await import('../dist/main.js');

@@ -1,11 +1,7 @@
 import 'reflect-metadata';
-import { existsSync, readdirSync, renameSync, rmSync } from 'node:fs';
-import path from 'node:path';
 import { NestFactory } from '@nestjs/core';
 import { Clock } from '@stageyard/backend/common/clock';
 import { AppModule } from '@stageyard/backend/app.module';
-import { DATABASE_FILE } from '@stageyard/backend/database/data-sources';
-import { LOCK_FILE, lockFolder } from '@stageyard/backend/database/folder-lock';
 import { type Settings } from '@stageyard/backend/settings/settings';
 import { UsersService } from '@stageyard/backend/users/users.service';
 import { demoActors } from './actors.js';
@@ -14,9 +10,7 @@ import { bookStock } from './book-stock.js';
 import { bookSupply } from './book-supply.js';
 import { bookWork } from './book-work.js';
 import { dayOf } from './demo-days.js';
-
-/** Hidden, so that a loading cut short by a power failure leaves a data folder that still counts as empty. */
-const WORKSHOP = '.demo-loading';
+import { fillEmptyFolder } from './empty-folder.js';
 
 export type DemoLoad = {
   parts: number;
@@ -28,33 +22,12 @@ export type DemoLoad = {
 } | null;
 
 /**
- * Fills a data folder that has no database with the demo workshop: all of it or nothing. The data is booked beside the
- * folder's final place and moved in when it is complete, the database file last.
+ * Fills a data folder that has no database with the demo workshop: all of it or nothing.
  * @returns what was booked; null where demo mode is off or the folder has a database already
  * @throws FolderInUseError while another program works on the folder
  */
-export async function loadDemo(settings: Settings): Promise<DemoLoad> {
-  if (!settings.demo || existsSync(path.join(settings.dataDir, DATABASE_FILE))) return null;
-  const release = lockFolder(settings.dataDir);
-  try {
-    return await bookBeside(settings);
-  } finally {
-    release();
-  }
-}
-
-async function bookBeside(settings: Settings): Promise<DemoLoad> {
-  // Another loading may have ended since the folder was looked at.
-  if (existsSync(path.join(settings.dataDir, DATABASE_FILE))) return null;
-  const workshop = path.join(settings.dataDir, WORKSHOP);
-  rmSync(workshop, { recursive: true, force: true });
-  try {
-    const booked = await book({ ...settings, dataDir: workshop });
-    moveIn(workshop, settings.dataDir);
-    return booked;
-  } finally {
-    rmSync(workshop, { recursive: true, force: true });
-  }
+export function loadDemo(settings: Settings): Promise<DemoLoad> {
+  return fillEmptyFolder(settings, book);
 }
 
 async function book(settings: Settings): Promise<NonNullable<DemoLoad>> {
@@ -75,9 +48,4 @@ async function book(settings: Settings): Promise<NonNullable<DemoLoad>> {
   } finally {
     await app.close();
   }
-}
-
-function moveIn(from: string, to: string): void {
-  const names = readdirSync(from).filter((name) => name !== DATABASE_FILE && name !== LOCK_FILE);
-  for (const name of [...names, DATABASE_FILE]) renameSync(path.join(from, name), path.join(to, name));
 }
