@@ -112,7 +112,7 @@ export class PastePlan {
     checkUnit(reader, part, now);
     const changes = (['partNumber', 'description', 'quantity', 'unit', 'note'] as const)
       .filter((field) => now[field] !== was[field])
-      .map((field) => `${WORDS[field]} ${was[field] ?? 'none'} → ${now[field] ?? 'none'}`);
+      .map((field) => `${WORDS[field]} ${was[field] || 'none'} → ${now[field] || 'none'}`);
     if (changes.length === 0) return same('The added line is like this already.');
     const summary = `Changes the added line ${line.findNumber}, ${line.description}.`;
     return { action: 'choose', summary, changes, do: () => void Object.assign(was, now) };
