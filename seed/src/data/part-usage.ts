@@ -63,12 +63,12 @@ export function usageOf(row: LibraryRow): PartUsage | null {
     opening: always ? 40 : Math.round(monthly * (1 + random.next() * 3)) + perDrive,
     reorderAt: Math.max(2, Math.round(monthly * 1.4)),
     pack: Math.max(1, Math.round(salesFormOf(row).pack * stepsPerUnit)),
-    watched: pace >= 0.2 || random.chance(0.09),
-    orderedLate: !always && random.chance(0.32),
+    watched: pace >= 0.2 || random.chance(0.07),
+    orderedLate: !always && random.chance(0.45),
   };
 }
 
 function paceOf(row: LibraryRow, drawn: number): number {
-  const usual = row.kind === 'gear' ? 0.03 : 0.12;
-  return drawn < 0.14 ? usual * 4 + 0.2 : drawn < 0.6 ? usual : usual / 2;
+  const usual = row.kind === 'gear' ? 0.03 : 0.09;
+  return drawn < 0.14 ? usual * 2 + 0.18 : drawn < 0.6 ? usual : usual / 2;
 }

@@ -79,7 +79,7 @@ class ShelfYear {
   play(builds: readonly Build[]): void {
     this.count(this.random.whole(...OPENING_DAYS), this.usage.opening, 'Yearly count');
     if (this.random.chance(0.04)) this.overflow();
-    const midyear = this.random.chance(0.3) ? this.random.whole(...MIDYEAR_DAYS) : null;
+    const midyear = this.random.chance(0.15) ? this.random.whole(...MIDYEAR_DAYS) : null;
     const mended = this.random.chance(0.05) ? this.random.whole(-24, -1) * LOOK_DAYS : null;
     const happenings = [
       ...builds.map((build) => ({ day: build.day, act: () => this.build(build) })),
