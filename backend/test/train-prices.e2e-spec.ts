@@ -1,12 +1,8 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { PartsLoader } from '../src/parts/parts-loader.service.js';
-import { type PartInputDto } from '../src/parts/dto/part-input.dto.js';
 import { StockService } from '../src/stock/stock.service.js';
-import { newRequirement } from '../src/testing/new-brief.js';
-import { addOffer, addSupplier } from '../src/testing/add-offer.js';
-import { LIBRARIAN, newPart } from '../src/testing/new-part.js';
-import { newTrain } from '../src/testing/new-train.js';
+import { LIBRARIAN } from '../src/testing/new-part.js';
 import { addSignedIn } from '../src/testing/people.js';
+import { newPricedTrain } from '../src/testing/priced-train.js';
 import { type TrainPricesDto } from '../src/train-prices/dto/train-prices.dto.js';
 import { type TrainDto } from '../src/trains/dto/train.dto.js';
 import { type Client, startServer, type TestServer } from './harness.js';
@@ -22,78 +18,17 @@ let server: TestServer;
 let purchaser: Client;
 let designer: Client;
 let train: TrainDto;
-/** Ids of the offers: two for the bearing, one each for key, seal and oil. */
+/** Ids of offers: two for the bearing, one for a key. */
 let tidewater: string;
 let quick: string;
 let keys: string;
 
-const cleared = (number: string, kind: PartInputDto['kind'], attributes: object): PartInputDto =>
-  newPart(kind, attributes, { number, standing: 'cleared' });
-
-/** A single stage of module 2 on two shafts of 12 mm: four bearings, two keys, two seals and a little oil. */
 beforeAll(async () => {
   server = await startServer();
   purchaser = await server.as('purchaser');
   designer = await server.as('designer');
   const { app } = server;
-  await app
-    .get(PartsLoader)
-    .createMany(LIBRARIAN, [
-      cleared('B-12', 'bearing', { bore: 12, outerDiameter: 28, width: 8, type: 'deep groove ball' }),
-      ...[16, 18, 20].map((length) => cleared(`K-${length}`, 'key', { width: 4, height: 4, length })),
-      cleared('W-12', 'seal', { shaftDiameter: 12, outerDiameter: 22, width: 6 }),
-      cleared('L-220', 'lubricant', { viscosityGrade: 'ISO VG 220', packVolume: 5 }),
-    ]);
-  const person = await addSignedIn(app, 'designer');
-  const requirement = newRequirement({
-    ratio: { target: '4', tolerancePercent: '1' },
-    stages: { min: 1, max: 1 },
-    modules: [2],
-    buildQuantity: 25,
-  });
-  train = await newTrain(app, person, { requirement });
-  const shafts = await designer.patch<TrainDto>(path(), { version: train.version, shaftDiameters: [12, 12] });
-  train = shafts.body;
-  const { code: first } = await addSupplier(app, { name: 'Tidewater Bearings', leadTimeDays: 21 });
-  const { code: second } = await addSupplier(app, { name: 'Quickhaven', leadTimeDays: null });
-  const { code: third } = await addSupplier(app, { name: 'Shionagi Seals', currency: 'JPY' });
-  const { code: fourth } = await addSupplier(app, {
-    name: 'Pearl Oils',
-    currency: 'KWD',
-    leadTimeDays: null,
-  });
-  // 4.20 EUR from 1, 3.10 from 50, 2.55 from 1,000; sold in tens.
-  const breaks = [
-    { quantity: 1, unitPrice: 420 },
-    { quantity: 50, unitPrice: 310 },
-    { quantity: 1000, unitPrice: 255 },
-  ];
-  tidewater = (
-    await addOffer(app, 'B-12', first, {
-      breaks,
-      pack: 10,
-      supplierPartNumber: 'TW 12/28',
-      pricedOn: '2020-02-03',
-    })
-  ).id;
-  quick = (
-    await addOffer(app, 'B-12', second, { breaks: [{ quantity: 1, unitPrice: 515 }], leadTimeDays: 2 })
-  ).id;
-  // 9.50 EUR for 100 keys, sold by the hundred. The rule for face widths of 20 mm gives one of the three lengths.
-  for (const number of ['K-16', 'K-18', 'K-20']) {
-    const breaks = [{ quantity: 100, unitPrice: 950 }];
-    keys = (await addOffer(app, number, first, { breaks, per: 100, pack: 100 })).id;
-  }
-  // 180 JPY from 1, 150 JPY from 40.
-  await addOffer(app, 'W-12', third, {
-    breaks: [
-      { quantity: 1, unitPrice: 180 },
-      { quantity: 40, unitPrice: 150 },
-    ],
-    leadTimeDays: 40,
-  });
-  // 12.345 KWD for ten litres, sold in cans of five.
-  await addOffer(app, 'L-220', fourth, { breaks: [{ quantity: 5, unitPrice: 12_345 }], per: 10, pack: 5 });
+  ({ train, tidewater, quick, keys } = await newPricedTrain(app, await addSignedIn(app, 'designer')));
   const stock = app.get(StockService);
   await stock.book(LIBRARIAN, { number: 'B-12', kind: 'received', quantity: 100, place: 'Rack A' });
   await stock.book(LIBRARIAN, { number: 'W-12', kind: 'received', quantity: 49, place: 'Rack A' });

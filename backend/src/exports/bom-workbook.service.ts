@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Clock } from '../common/clock.js';
+import { TrainPricesService } from '../train-prices/train-prices.service.js';
 import { BomService } from '../trains/bom.service.js';
 import { bomWorkbook, workbookName } from './bom-workbook.js';
 
@@ -8,12 +9,21 @@ import { bomWorkbook, workbookName } from './bom-workbook.js';
 export class BomWorkbookService {
   constructor(
     private readonly boms: BomService,
+    private readonly prices: TrainPricesService,
     private readonly clock: Clock,
   ) {}
 
   /** @throws ProblemError 404 */
   async ofTrain(code: string): Promise<{ name: string; bytes: Buffer }> {
     const record = await this.boms.record(code);
-    return { name: workbookName(record.train), bytes: await bomWorkbook(record, this.clock.now()) };
+    const { buildQuantity, offerChoices } = record.train;
+    const choices = Object.fromEntries(
+      offerChoices.map(({ partNumber, offerId }) => [partNumber, Number(offerId)]),
+    );
+    const prices = await this.prices.ofBom(record.bom, buildQuantity, choices);
+    return {
+      name: workbookName(record.train),
+      bytes: await bomWorkbook({ ...record, prices }, this.clock.now()),
+    };
   }
 }

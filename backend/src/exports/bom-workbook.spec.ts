@@ -6,11 +6,11 @@ import { PartsService } from '../parts/parts.service.js';
 import { newRequirement } from '../testing/new-brief.js';
 import { LIBRARIAN, newPart } from '../testing/new-part.js';
 import { newTrain } from '../testing/new-train.js';
-import { findOffice, recalculate } from '../testing/office.js';
 import { addSignedIn } from '../testing/people.js';
 import { openTempApp, type TempApp } from '../testing/temp-app.js';
-import { BomService, type TrainRecord } from '../trains/bom.service.js';
-import { bomWorkbook, workbookName } from './bom-workbook.js';
+import { TrainPricesService } from '../train-prices/train-prices.service.js';
+import { BomService } from '../trains/bom.service.js';
+import { bomWorkbook, type PricedRecord, workbookName } from './bom-workbook.js';
 import { CAUTIONS } from './cautions.js';
 import { HEAD_ROW } from './sheet-heading.js';
 
@@ -19,13 +19,19 @@ const HEADS = [
   'Find no.',
   'Part number',
   'Description',
-  'Quantity',
+  'Quantity of one',
   'Unit',
   'Material',
   'Made or bought',
   'Supplier',
+  "Supplier's number",
+  'Needed',
+  'Order quantity',
+  'Currency',
   'Unit price',
+  'Price per',
   'Line total',
+  'Price date',
   'Lead time, days',
   'Mass each, kg',
   'Source',
@@ -33,10 +39,10 @@ const HEADS = [
 ];
 
 let temp: TempApp;
-let record: TrainRecord;
+let record: PricedRecord;
 let bytes: Buffer;
 
-async function makeRecord(actor: SignedInUser): Promise<TrainRecord> {
+async function makeRecord(actor: SignedInUser): Promise<PricedRecord> {
   const wheels = { pinion: { min: 17, max: 24 }, wheel: { min: 20, max: 96 } };
   const requirement = newRequirement({
     teeth: wheels,
@@ -47,7 +53,8 @@ async function makeRecord(actor: SignedInUser): Promise<TrainRecord> {
     title: '=HYPERLINK("http://evil.example","winch")',
     requirement,
   });
-  return temp.app.get(BomService).record(train.code);
+  const prices = await temp.app.get(TrainPricesService).ofTrain(train.code);
+  return { ...(await temp.app.get(BomService).record(train.code)), prices };
 }
 
 beforeAll(async () => {
@@ -104,7 +111,7 @@ describe('the workbook, opened by another reader', () => {
     const [head] = (await readSheet(bytes, 'BOM')).slice(HEAD_ROW - 1);
     expect(head).toEqual(HEADS);
     const { lines } = await readBom(bytes);
-    expect(lines.map((row) => [row[0], row[2], row[3], row[4], row[6], row[11], row[12]])).toEqual(
+    expect(lines.map((row) => [row[0], row[2], row[3], row[4], row[6], row[17], row[18]])).toEqual(
       record.bom.lines.map((line) => [
         line.findNumber,
         line.description,
@@ -120,19 +127,17 @@ describe('the workbook, opened by another reader', () => {
     expect(made?.[1]).toBe('to be made');
   });
 
-  it('has empty prices, and line totals that show nothing', async () => {
-    const { lines, sums } = await readBom(bytes);
-    const shown = [...lines, sums]
-      .flatMap((row) => [row[8], row[9], row[10]])
-      .filter((value) => value !== '');
+  it('has no price and no total where nothing is offered', async () => {
+    const { lines } = await readBom(bytes);
+    const shown = lines.flatMap((row) => [...row.slice(11, 17)]).filter((value) => value !== '');
     expect(shown.every((value) => value === null)).toBe(true);
   });
 
   it('sums the masses: quantity × mass over the lines', async () => {
     const { lines, sums } = await readBom(bytes);
-    const total = lines.reduce((sum, row) => sum + Number(row[3]) * Number(row[11] ?? 0), 0);
+    const total = lines.reduce((sum, row) => sum + Number(row[3]) * Number(row[17] ?? 0), 0);
     expect(total).toBeGreaterThan(0);
-    expect(sums[11]).toBeCloseTo(total, 9);
+    expect(sums[17]).toBeCloseTo(total, 9);
     expect(record.bom.totals.massKg).toBeCloseTo(total, 9);
   });
 
@@ -145,9 +150,12 @@ describe('the workbook, opened by another reader', () => {
     book.eachSheet((sheet) =>
       sheet.eachRow((row) => row.eachCell((cell) => cell.formula && formulas.push(cell.formula))),
     );
-    // The only formulas are ours: a total a line, the sum of totals, how many they are, and the sum of masses.
-    expect(formulas).toHaveLength(record.bom.lines.length + 3);
-    expect(formulas.every((formula) => /^(IF|SUMPRODUCT)\(/.test(formula))).toBe(true);
+    // The only formulas are ours: need, order and total of a line (nothing is priced), how many totals there are, the
+    // sum of masses, the total in the house currency with its count, and what stands in no total.
+    expect(formulas).toHaveLength(3 * record.bom.lines.length + 5);
+    expect(formulas.every((formula) => /^(IF|ROUND|COUNT|COUNTIFS|SUMPRODUCT)\(|^J\d+$/.test(formula))).toBe(
+      true,
+    );
   });
 
   it('gives the data of every gear in the order of ISO 1340, tooth data after the body', async () => {
@@ -201,11 +209,11 @@ describe('the workbook as a document', () => {
     expect(sheet?.pageSetup.printTitlesRow).toBe(`${HEAD_ROW}:${HEAD_ROW}`);
     expect(sheet?.headerFooter.oddFooter).toContain('Page &P of &N');
     expect(sheet?.views[0]).toMatchObject({ state: 'frozen', ySplit: HEAD_ROW });
-    expect(sheet?.autoFilter).toBe(`A${HEAD_ROW}:N${HEAD_ROW + record.bom.lines.length}`);
+    expect(sheet?.autoFilter).toBe(`A${HEAD_ROW}:T${HEAD_ROW + record.bom.lines.length}`);
     expect(sheet?.getCell(`D${HEAD_ROW + 1}`).numFmt).toBe('0.###');
-    expect(sheet?.getCell(`I${HEAD_ROW + 1}`).numFmt).toBe('#,##0.00');
-    expect(sheet?.getColumn(3).width).toBe(36);
-    expect(sheet?.getCell(`L${HEAD_ROW + 1}`).numFmt).toBe('0.0000');
+    expect(sheet?.getCell(`M${HEAD_ROW + 1}`).numFmt).toBe('#,##0.00');
+    expect(sheet?.getColumn(3).width).toBe(30);
+    expect(sheet?.getCell(`R${HEAD_ROW + 1}`).numFmt).toBe('0.0000');
   });
 
   it('repeats the head of the one table of a sheet, and nothing where a sheet has three', async () => {
@@ -219,9 +227,9 @@ describe('the workbook as a document', () => {
     const sheet = book.getWorksheet('BOM');
     record.bom.lines.forEach((_, index) => {
       const row = sheet?.getRow(HEAD_ROW + 1 + index);
-      const note = row?.getCell(14).text ?? '';
+      const note = row?.getCell(20).text ?? '';
       // Even narrow letters do not get more than one and a half times its characters into a column.
-      const fewest = Math.max(1, Math.ceil(note.length / (1.5 * (sheet?.getColumn(14).width ?? 0))));
+      const fewest = Math.max(1, Math.ceil(note.length / (1.5 * (sheet?.getColumn(20).width ?? 0))));
       expect(row?.height).toBeGreaterThanOrEqual(fewest * 12);
     });
   });
@@ -256,77 +264,5 @@ describe('the workbook as a document', () => {
       modified: DATE,
     });
     expect(bytes.includes(temp.settings.dataDir)).toBe(false);
-  });
-});
-
-/** A workbook whose unit prices were filled in as a purchaser would, in currency units. */
-async function withPrices(priceOf: (index: number) => number | string | null): Promise<Buffer> {
-  const book = await new ExcelJS.Workbook().xlsx.load(bytes as unknown as ArrayBuffer);
-  record.bom.lines.forEach((_, index) => {
-    const cell = book.getWorksheet('BOM')?.getCell(`I${HEAD_ROW + 1 + index}`);
-    if (cell) cell.value = priceOf(index);
-  });
-  return Buffer.from(await book.xlsx.writeBuffer());
-}
-
-const every = (index: number) => 1.25 * (index + 1);
-/** The first line is priced and the second on request; the others are open. */
-const some = (index: number) => (index === 0 ? 2.5 : index === 1 ? 'on request' : null);
-
-const office = findOffice();
-/** The workbook as it is, priced in every line, and in one: all computed in one go. */
-let computed: Buffer[] = [];
-const officeChecks: [name: string, check: () => Promise<void>][] = [
-  [
-    'the sum of masses is the same, and prices that nobody filled in show nothing',
-    async () => {
-      const { lines, sums } = await readBom(computed[0] ?? bytes);
-      expect(sums[11]).toBeCloseTo(record.bom.totals.massKg, 6);
-      expect([...lines, sums].filter((row) => typeof row[9] === 'number')).toEqual([]);
-    },
-  ],
-  [
-    'line totals and their sum follow from prices that are filled in',
-    async () => {
-      const { lines, sums } = await readBom(computed[1] ?? bytes);
-      const wanted = record.bom.lines.map(({ quantity }, index) => quantity * every(index));
-      lines.forEach((row, index) => expect(row[9]).toBeCloseTo(wanted[index] ?? NaN, 6));
-      expect(sums[9]).toBeCloseTo(
-        wanted.reduce((sum, each) => sum + each, 0),
-        6,
-      );
-      expect(sums[7]).toBe(`${lines.length} of ${lines.length} priced`);
-    },
-  ],
-  [
-    'words in place of a price spoil no sum, and the sum says what it leaves out',
-    async () => {
-      const { lines, sums } = await readBom(computed[2] ?? bytes);
-      expect(sums[9]).toBeCloseTo((record.bom.lines[0]?.quantity ?? NaN) * 2.5, 6);
-      expect(sums[7]).toBe(`1 of ${lines.length} priced`);
-    },
-  ],
-];
-
-describe('the workbook in an office suite', () => {
-  if (office === null) {
-    process.stdout.write(`LibreOffice is not installed: ${officeChecks.length} checks not run\n`);
-  }
-  beforeAll(async () => {
-    if (office === null) return;
-    computed = recalculate(office, [bytes, await withPrices(every), await withPrices(some)]);
-  }, 90_000);
-  it.each(office === null ? [] : officeChecks)('%s', async (_, check) => check());
-  // Without an office suite the formulas are still held against what they must say.
-  it('names the cells it multiplies and sums', async () => {
-    const book = await new ExcelJS.Workbook().xlsx.load(bytes as unknown as ArrayBuffer);
-    const sheet = book.getWorksheet('BOM');
-    const first = HEAD_ROW + 1;
-    const last = HEAD_ROW + record.bom.lines.length;
-    expect(sheet?.getCell(`J${first}`).formula).toBe(`IF(ISNUMBER(I${first}),D${first}*I${first},"")`);
-    expect(sheet?.getCell(`J${last + 1}`).formula).toBe(
-      `IF(COUNT(J${first}:J${last})=0,"",SUM(J${first}:J${last}))`,
-    );
-    expect(sheet?.getCell(`L${last + 1}`).formula).toBe(`SUMPRODUCT(D${first}:D${last},L${first}:L${last})`);
   });
 });

@@ -84,7 +84,8 @@ export function ratioLine({ figures, spec }: Pick<TrainDto, 'figures' | 'spec'>)
   return `${exact}; ${formatErrorPercent(errorPercent)} from the ${target} : 1 ± ${tolerancePercent} % asked for`;
 }
 
-function longDate(date: Date): string {
+/** `9 March 2026` */
+export function longDate(date: Date): string {
   return date.toLocaleDateString('en-GB', {
     day: 'numeric',
     month: 'long',

@@ -4,6 +4,7 @@ import { Repository } from 'typeorm';
 import { Brief } from '../briefs/entities/brief.entity.js';
 import { DEFAULT_BUILD_QUANTITY } from '../briefs/requirement.js';
 import { Clock } from '../common/clock.js';
+import { politePause } from '../common/polite-pause.js';
 import { OffersFinder } from '../offers/offers-finder.service.js';
 import { OptionSearchesService } from '../option-searches/option-searches.service.js';
 import { specFromOption } from '../trains/adopt-option.js';
@@ -30,23 +31,27 @@ export class OptionSupplyService {
   async ofSearch(id: string, asked?: number): Promise<SearchSupplyDto> {
     const { briefId, request, outcome } = await this.searches.load(id);
     const quantity = asked ?? (await this.buildQuantityOf(briefId));
-    const options = (outcome?.options ?? []).map((option) => ({
-      key: option.key,
-      lines: gearLinesOf(specFromOption(option, request), quantity).map(({ need }) => need),
-    }));
-    const gears = await this.match(options.flatMap(({ lines }) => lines));
+    // A search may keep hundreds of options: others get their turn in between.
+    const pause = politePause();
+    const options: { key: string; needs: GearNeed[] }[] = [];
+    for (const option of outcome?.options ?? []) {
+      const lines = gearLinesOf(specFromOption(option, request), quantity);
+      options.push({ key: option.key, needs: lines.map(({ need }) => need) });
+      await pause();
+    }
+    const gears = await this.match(options.flatMap(({ needs }) => needs));
     const numbers = [...new Set([...gears.values()].flatMap((gear) => gear?.number ?? []))];
     const on = this.clock.iso().slice(0, 10);
     const pricer = new OptionPricer(await this.offers.forParts(numbers), on);
-    return {
-      quantity,
-      options: options.map(({ key, lines }) => {
-        const supplied = lines.map((need): SuppliedLine => {
-          return { wanted: need.wanted, gear: gears.get(identity(need)) ?? null };
-        });
-        return pricer.supplyOf(key, supplied);
-      }),
-    };
+    const answer: SearchSupplyDto = { quantity, options: [] };
+    for (const { key, needs } of options) {
+      const lines = needs.map((need): SuppliedLine => {
+        return { wanted: need.wanted, gear: gears.get(identity(need)) ?? null };
+      });
+      answer.options.push(pricer.supplyOf(key, lines));
+      await pause();
+    }
+    return answer;
   }
 
   /** Options share many gears: each is looked up once. */
