@@ -96,7 +96,7 @@ export function OptionTable(props: OptionTableProps) {
         overflowX: 'auto',
         minWidth: 0,
         // An upright A4 sheet then holds every column.
-        '@media print': { zoom: 0.84 },
+        '@media print': { zoom: supply ? 0.66 : 0.84 },
       }}
     >
       <Table

@@ -22,6 +22,11 @@ export function OfferLine({ offer, unit }: { offer: PricedOffer; unit: string })
       <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: 2 }}>
         <Box component="span" sx={{ fontWeight: 600 }}>
           {supplier.name}
+          {offer.chosen && (
+            <Box component="span" sx={{ fontWeight: 400, color: 'text.secondary' }}>
+              {' · the rule takes this one'}
+            </Box>
+          )}
         </Box>
         <Box component="span" sx={{ fontWeight: 600, whiteSpace: 'nowrap' }}>
           {price ? formatMoney(price.lineTotal) : 'no total'}

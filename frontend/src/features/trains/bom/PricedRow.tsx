@@ -7,10 +7,9 @@ import TableCell from '@mui/material/TableCell';
 import TableRow from '@mui/material/TableRow';
 import type { ComponentProps, ReactNode } from 'react';
 import type { TrainPriceLine } from '../../../api/types';
-import { formatPlain, NOTHING } from '../../../components/figures';
+import { formatDay, formatPlain, NOTHING } from '../../../components/figures';
 import { moneyWords } from '../../../components/moneyText';
-import { leadTimeWords } from '../../../components/offers/offerWords';
-import { PriceAge } from '../../../components/offers/PriceAge';
+import { ageWords, leadTimeWords } from '../../../components/offers/offerWords';
 import { PartLink } from '../PartLink';
 import { partNumberWords, quantityWords } from './bomCells';
 import { cellSx, NOT_ON_PHONE, PHONE_ONLY } from './pricedColumns';
@@ -38,6 +37,7 @@ const mark = { fontSize: 15, verticalAlign: '-0.18em', ml: 0.5 } as const;
 export function PricedRow({ line: { line, priced }, on, menu, rowProps }: PricedRowProps) {
   const price = priced?.price ?? null;
   const number = line.partNumber;
+  const needed = priced ? quantityWords({ quantity: priced.needed, unit: line.unit }) : quantityWords(line);
   return (
     <TableRow hover {...rowProps} sx={{ verticalAlign: { xs: 'top', md: 'middle' } }}>
       <TableCell align="right" sx={cellSx('Find')}>
@@ -50,6 +50,12 @@ export function PricedRow({ line: { line, priced }, on, menu, rowProps }: Priced
         <Box sx={PHONE_ONLY}>
           <PartNumber line={line} />
         </Box>
+        {line.flags.length > 0 && (
+          <WarningAmber
+            titleAccess={`Look at this before ordering: ${line.flags.join('; ')}`}
+            sx={{ ...mark, ml: 0, mr: 0.5, color: 'warning.main' }}
+          />
+        )}
         <Box component="span" sx={{ whiteSpace: { xs: 'normal', md: 'nowrap' } }}>
           {line.description}
         </Box>
@@ -62,12 +68,6 @@ export function PricedRow({ line: { line, priced }, on, menu, rowProps }: Priced
           <Box component="span" sx={{ ...quiet, ml: 0.75 }}>
             added
           </Box>
-        )}
-        {line.flags.length > 0 && (
-          <WarningAmber
-            titleAccess={`Look at this before ordering: ${line.flags.join('; ')}`}
-            sx={{ ...mark, color: 'warning.main' }}
-          />
         )}
         {priced && (
           <Box sx={{ ...PHONE_ONLY, ...quiet, whiteSpace: 'normal' }}>
@@ -83,7 +83,7 @@ export function PricedRow({ line: { line, priced }, on, menu, rowProps }: Priced
         )}
       </TableCell>
       <TableCell align="right" sx={cellSx('Needed')} title={`${quantityWords(line)} in each`}>
-        {priced ? quantityWords({ quantity: priced.needed, unit: line.unit }) : quantityWords(line)}
+        {needed}
       </TableCell>
       <ShelfCell priced={priced} />
       <SupplierCell priced={priced} />
@@ -101,11 +101,12 @@ export function PricedRow({ line: { line, priced }, on, menu, rowProps }: Priced
       </TableCell>
       <TableCell align="right" sx={{ ...cellSx('Line total'), fontWeight: 600 }}>
         {price ? moneyWords(price.lineTotal, price.currency) : <NoPrice priced={priced} onPhone />}
+        <Box sx={{ ...PHONE_ONLY, ...quiet, fontWeight: 400 }}>{needed}</Box>
       </TableCell>
-      <TableCell align="right" sx={cellSx('Lead, days')}>
-        {price && (price.leadTimeDays ?? NOTHING)}
+      <TableCell align="right" sx={cellSx('Lead')}>
+        {price && (price.leadTimeDays === null ? NOTHING : `${price.leadTimeDays} d`)}
       </TableCell>
-      <TableCell sx={cellSx('Price')}>{price && <AgeAndEnd price={price} on={on} />}</TableCell>
+      <TableCell sx={cellSx('Price age')}>{price && <AgeAndEnd price={price} on={on} />}</TableCell>
       <TableCell sx={{ ...cellSx('Actions'), '&&': { p: 0 } }}>{menu}</TableCell>
     </TableRow>
   );
@@ -153,7 +154,9 @@ function NoPrice({ priced, onPhone = false }: Pick<PricedLine, 'priced'> & { onP
       sx={{
         ...(made ? { color: 'text.secondary' } : { color: 'warning.main' }),
         fontWeight: made ? 400 : 600,
-        ...(onPhone ? { display: { xs: 'inline', md: 'none' }, displayPrint: 'none' } : NOT_ON_PHONE),
+        ...(onPhone
+          ? { display: { xs: 'inline', md: 'none' }, displayPrint: 'none', whiteSpace: 'normal' }
+          : NOT_ON_PHONE),
       }}
     >
       {words}
@@ -161,13 +164,18 @@ function NoPrice({ priced, onPhone = false }: Pick<PricedLine, 'priced'> & { onP
   );
 }
 
+/** How old the price is, and that its offer ends soon; the day itself on pointing at it. */
 function AgeAndEnd({ price, on }: { price: NonNullable<TrainPriceLine['price']>; on: string }) {
   const ends = endsSoonDays(price, on);
-  if (ends === null) return <PriceAge offer={price} />;
+  const marked = price.tooOld || ends !== null;
+  const age = price.tooOld ? `${price.ageDays} d, too old` : `${price.ageDays} d`;
   return (
-    <Box component="span" sx={{ color: 'warning.main', fontWeight: 600 }}>
-      {price.tooOld && 'too old, '}
-      {endsSoonWords(ends)}
+    <Box
+      component="span"
+      title={`Priced on ${formatDay(price.pricedOn)}, ${ageWords(price.ageDays)}`}
+      sx={marked ? { color: 'warning.main', fontWeight: 600 } : undefined}
+    >
+      {ends === null ? age : price.tooOld ? `too old, ${endsSoonWords(ends)}` : endsSoonWords(ends)}
     </Box>
   );
 }

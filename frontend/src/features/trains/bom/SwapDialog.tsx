@@ -39,7 +39,13 @@ export function SwapDialog({ train, line, needed, canSwap, onClose }: SwapDialog
   const own = line.replaces && (line.replaces.partNumber ?? line.replaces.description);
 
   return (
-    <Dialog open onClose={onClose} fullWidth maxWidth="md" aria-labelledby={id}>
+    <Dialog
+      open
+      onClose={onClose}
+      fullWidth
+      maxWidth={swap.choice === null ? 'md' : 'lg'}
+      aria-labelledby={id}
+    >
       <DialogTitle id={id}>{`Substitutes for ${now}`}</DialogTitle>
       <DialogContent>
         {swap.problem !== null && (
@@ -54,50 +60,54 @@ export function SwapDialog({ train, line, needed, canSwap, onClose }: SwapDialog
         {!data && error !== undefined && (
           <ErrorState problem={asProblem(error)} what="the substitutes" onRetry={() => void mutate()} />
         )}
-        {data && (
-          <RadioGroup
-            aria-label="Substitute"
-            value={swap.choice ?? ''}
-            onChange={(_, value) => swap.choose(value)}
-          >
-            {own && canSwap && (
-              <FormControlLabel
-                value={ORIGINAL}
-                control={<Radio />}
-                label={`Put the original part back: ${own}`}
-              />
+        <Box sx={swap.choice === null ? undefined : sideBySide}>
+          <Box sx={{ minWidth: 0 }}>
+            {data && (
+              <RadioGroup
+                aria-label="Substitute"
+                value={swap.choice ?? ''}
+                onChange={(_, value) => swap.choose(value)}
+              >
+                {own && canSwap && (
+                  <FormControlLabel
+                    value={ORIGINAL}
+                    control={<Radio />}
+                    label={`Put the original part back: ${own}`}
+                  />
+                )}
+                {items.map((substitute) => (
+                  <FormControlLabel
+                    key={substitute.part.number}
+                    value={substitute.part.number}
+                    disabled={!canSwap}
+                    control={<Radio />}
+                    label={<SubstituteLine substitute={substitute} />}
+                    sx={{
+                      alignItems: 'flex-start',
+                      mr: 0,
+                      '& .MuiFormControlLabel-label, & .MuiFormControlLabel-label.Mui-disabled': {
+                        flex: 1,
+                        color: 'text.primary',
+                      },
+                    }}
+                  />
+                ))}
+              </RadioGroup>
             )}
-            {items.map((substitute) => (
-              <FormControlLabel
-                key={substitute.part.number}
-                value={substitute.part.number}
-                disabled={!canSwap}
-                control={<Radio />}
-                label={<SubstituteLine substitute={substitute} />}
-                sx={{
-                  alignItems: 'flex-start',
-                  mr: 0,
-                  '& .MuiFormControlLabel-label, & .MuiFormControlLabel-label.Mui-disabled': {
-                    flex: 1,
-                    color: 'text.primary',
-                  },
-                }}
-              />
-            ))}
-          </RadioGroup>
-        )}
-        {data && items.length === 0 && (
-          <Typography color="textSecondary">
-            No cleared part in the library drops in here. A librarian can add one under Parts.
-          </Typography>
-        )}
-        {data && data.leftOut > 0 && (
-          <Typography variant="body2" color="textSecondary" sx={{ mt: 1 }}>
-            {`${data.leftOut} more drop in; they come later or cost more.`}
-          </Typography>
-        )}
-        <Box aria-live="polite">
-          {swap.choice !== null && <SwapPreview result={swap.preview} loading={swap.trying} />}
+            {data && items.length === 0 && (
+              <Typography color="textSecondary">
+                No cleared part in the library drops in here. A librarian can add one under Parts.
+              </Typography>
+            )}
+            {data && data.leftOut > 0 && (
+              <Typography variant="body2" color="textSecondary" sx={{ mt: 1 }}>
+                {`${data.leftOut} more drop in; they come later or cost more.`}
+              </Typography>
+            )}
+          </Box>
+          <Box aria-live="polite">
+            {swap.choice !== null && <SwapPreview result={swap.preview} loading={swap.trying} />}
+          </Box>
         </Box>
       </DialogContent>
       <DialogActions>
@@ -120,3 +130,11 @@ export function SwapDialog({ train, line, needed, canSwap, onClose }: SwapDialog
     </Dialog>
   );
 }
+
+/** The choices and what the chosen one changes, beside each other where there is room. */
+const sideBySide = {
+  display: 'grid',
+  gridTemplateColumns: { xs: 'minmax(0, 1fr)', md: 'minmax(0, 1fr) minmax(0, 1.1fr)' },
+  columnGap: 3,
+  alignItems: 'start',
+} as const;

@@ -17,8 +17,12 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
     return loading ? <LoadingRows rows={3} label="Working out what changes" /> : null;
   }
   const { changes, checks } = result;
+  // Figures first; sentences would push them out of sight.
+  const isRemark = ({ what }: Change) => /^(Finding|Flag)/.test(what);
+  const remarks = changes.filter(isRemark);
+  const figures = changes.filter((change) => !isRemark(change));
   return (
-    <Box sx={{ mt: 1.5, borderTop: '1px solid', borderColor: 'line.strong', pt: 1 }}>
+    <Box ref={intoView} sx={boxSx}>
       <Typography variant="h2" component="h3">
         What changes
       </Typography>
@@ -36,18 +40,7 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
               </TableRow>
             </TableHead>
             <TableBody>
-              {changes.map(({ what, before, after, verdict }, at) => (
-                <TableRow key={`${what} ${at}`}>
-                  <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
-                    {what}
-                  </TableCell>
-                  <TableCell>{before || NOTHING}</TableCell>
-                  <TableCell>{after || NOTHING}</TableCell>
-                  <TableCell>
-                    <Comparison verdict={verdict} />
-                  </TableCell>
-                </TableRow>
-              ))}
+              <ChangeRows changes={figures} />
               {checks.map(({ label, stage, unit, before, after }) => (
                 <TableRow key={`${label} ${stage}`}>
                   <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
@@ -65,6 +58,7 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
                   </TableCell>
                 </TableRow>
               ))}
+              <ChangeRows changes={remarks} />
             </TableBody>
           </CopyTable>
         </TableContainer>
@@ -73,7 +67,41 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
   );
 }
 
+/** Under a long list of choices on a small screen it would stand out of sight. */
+function intoView(element: HTMLElement | null): void {
+  if (globalThis.matchMedia('(max-width: 899px)').matches) element?.scrollIntoView({ block: 'nearest' });
+}
+
+const boxSx = {
+  mt: { xs: 1.5, md: 0 },
+  pt: { xs: 1, md: 0 },
+  borderTop: { xs: '1px solid', md: 0 },
+  pl: { md: 2 },
+  borderLeft: { md: '1px solid' },
+  borderColor: { xs: 'line.strong', md: 'line.rule' },
+} as const;
+
+type Change = SwapResult['changes'][number];
 type Check = SwapResult['checks'][number];
+
+function ChangeRows({ changes }: { changes: readonly Change[] }) {
+  return (
+    <>
+      {changes.map(({ what, before, after, verdict }, at) => (
+        <TableRow key={`${what} ${at}`}>
+          <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
+            {what}
+          </TableCell>
+          <TableCell>{before || NOTHING}</TableCell>
+          <TableCell>{after || NOTHING}</TableCell>
+          <TableCell>
+            <Comparison verdict={verdict} />
+          </TableCell>
+        </TableRow>
+      ))}
+    </>
+  );
+}
 
 function CheckState({ state, unit }: { state: Check['before']; unit: string }) {
   if (state === null) return <>{NOTHING}</>;

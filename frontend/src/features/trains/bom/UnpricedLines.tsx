@@ -36,6 +36,7 @@ export function UnpricedLines({ lines, mayAddOffers, mayEdit, onSubstitutes }: U
                 {`Find ${line.findNumber}: `}
                 {number === null ? line.description : <PartLink number={number} />}
                 {` ${WHY[reason]}.`}
+                {number === null && !mayEdit && ' A designer can choose it.'}
               </span>
               {number !== null && mayAddOffers && (
                 <Button
@@ -62,17 +63,17 @@ export function UnpricedLines({ lines, mayAddOffers, mayEdit, onSubstitutes }: U
 
 /** What stands on single lines and wants a look before anything is ordered. */
 export function LookAtList({ lines }: { lines: readonly PricedLine[] }) {
-  const remarks = lines.flatMap(({ line }) => line.flags.map((flag) => ({ line, flag })));
-  if (remarks.length === 0) return null;
+  const marked = lines.filter(({ line }) => line.flags.length > 0);
+  if (marked.length === 0) return null;
   return (
     <Sheet title="Look at before ordering" sx={{ mt: 2 }}>
       <Box component="ul" sx={listSx}>
-        {remarks.map(({ line, flag }) => (
-          <Box component="li" key={`${line.key} ${flag}`} sx={itemSx}>
+        {marked.map(({ line }) => (
+          <Box component="li" key={line.key} sx={itemSx}>
             <span>
               {`Find ${line.findNumber}: `}
               {line.partNumber === null ? line.description : <PartLink number={line.partNumber} />}
-              {` · ${flag}`}
+              {` · ${line.flags.join(' · ')}`}
             </span>
           </Box>
         ))}

@@ -16,18 +16,18 @@ export interface PricedColumn {
 }
 
 export const COLUMNS: PricedColumn[] = [
-  { name: 'Find', figure: true, room: 'always', width: 46, phoneWidth: 38, paper: 5 },
-  { name: 'Part', room: 'tablet', width: 98, paper: 11 },
+  { name: 'Find', figure: true, room: 'always', width: 42, phoneWidth: 38, paper: 5 },
+  { name: 'Part', room: 'tablet', width: 90, paper: 11 },
   { name: 'Description', room: 'always', paper: 27 },
-  { name: 'Needed', figure: true, room: 'always', width: 72, phoneWidth: 58, paper: 9 },
-  { name: 'Shelf', figure: true, room: 'tablet', width: 62, paper: 7 },
-  { name: 'Supplier', room: 'tablet', width: 152, paper: 15 },
-  { name: 'Order', figure: true, room: 'laptop', width: 72, paper: 8 },
-  { name: 'Unit price', figure: true, room: 'laptop', width: 112 },
-  { name: 'Line total', figure: true, room: 'always', width: 112, phoneWidth: 92, paper: 13 },
-  { name: 'Lead, days', figure: true, room: 'tablet', width: 72, paper: 5 },
-  { name: 'Price', room: 'laptop', width: 138 },
-  { name: '', said: 'Actions', room: 'always', width: 34, phoneWidth: 30 },
+  { name: 'Needed', figure: true, room: 'tablet', width: 66, paper: 9 },
+  { name: 'Shelf', figure: true, room: 'tablet', width: 56, paper: 7 },
+  { name: 'Supplier', room: 'tablet', width: 138, paper: 15 },
+  { name: 'Order', figure: true, room: 'laptop', width: 66, paper: 8 },
+  { name: 'Unit price', figure: true, room: 'laptop', width: 98 },
+  { name: 'Line total', figure: true, room: 'always', width: 94, phoneWidth: 96, paper: 13 },
+  { name: 'Lead', figure: true, room: 'tablet', width: 52, paper: 5 },
+  { name: 'Price age', room: 'laptop', width: 108 },
+  { name: '', said: 'Actions', room: 'always', width: 32, phoneWidth: 30 },
 ];
 
 const DISPLAY: Record<Room, object> = {

@@ -2,7 +2,6 @@ import { daysBetween } from '@stageyard/libs/bill-of-materials';
 import type { BomLine, LinePrice, TrainPriceLine, TrainPrices } from '../../../api/types';
 import { formatPlain } from '../../../components/figures';
 import { amountWords, moneyWords } from '../../../components/moneyText';
-import { priceUnitWords } from '../../../components/offers/offerWords';
 
 /** One line of the bill of materials with what is known of its price; null while that is on its way. */
 export interface PricedLine {
@@ -32,9 +31,9 @@ export function endsSoonWords(days: number): string {
   return days === 1 ? 'ends tomorrow' : `ends in ${days} days`;
 }
 
-/** `12.40 EUR`, `48.00 EUR per 100` */
+/** `12.40`, `48.00 per 100`; the currency stands with the line's total. */
 export function unitPriceWords({ unitPrice, currency, per }: LinePrice): string {
-  return `${amountWords(unitPrice, currency)} ${priceUnitWords({ currency, per })}`;
+  return `${amountWords(unitPrice, currency)}${per === 1 ? '' : ` per ${per}`}`;
 }
 
 /** Why a line has no price; null where it has one, or needs none. */
