@@ -6,6 +6,7 @@ import TextField from '@mui/material/TextField';
 import { useEffect, useRef, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { useFinder } from '../api/hooks/useFinder';
+import { useMe } from '../api/hooks/useMe';
 import type { FinderResult } from '../api/types';
 
 interface Hit {
@@ -40,6 +41,13 @@ function hitsOf(found: FinderResult | undefined): Hit[] {
       detail: t.title,
       to: `/trains/${encodeURIComponent(t.code)}`,
     })),
+    ...found.suppliers.map((s) => ({
+      group: 'Suppliers',
+      key: `s-${s.code}`,
+      label: s.code,
+      detail: s.name,
+      to: `/suppliers/${encodeURIComponent(s.code)}`,
+    })),
   ];
 }
 
@@ -47,12 +55,14 @@ const typing = (target: EventTarget | null): boolean =>
   target instanceof HTMLElement &&
   (target.isContentEditable || ['INPUT', 'TEXTAREA', 'SELECT'].includes(target.tagName));
 
-/** Search over parts, briefs and trains; `/` puts the cursor here from anywhere outside a field. */
+/** Search over parts, briefs, trains and (for those who see prices) suppliers; `/` puts the cursor here from anywhere outside a field. */
 export function HeaderSearch() {
   const navigate = useNavigate();
   const input = useRef<HTMLInputElement>(null);
   const [text, setText] = useState('');
   const { found, isLoading, problem } = useFinder(text);
+  const { can } = useMe();
+  const prices = can('prices.read');
 
   useEffect(() => {
     const toSearch = (event: KeyboardEvent) => {
@@ -89,7 +99,7 @@ export function HeaderSearch() {
       autoHighlight
       loading={isLoading}
       loadingText="Searching…"
-      noOptionsText={text.trim() === '' ? 'Part number, title, code or description' : nothing}
+      noOptionsText={text.trim() === '' ? 'Number, code, title, name or description' : nothing}
       forcePopupIcon={false}
       sx={{ flex: '0 1 420px', minWidth: 0 }}
       renderOption={({ key, ...props }, hit) => (
@@ -107,10 +117,15 @@ export function HeaderSearch() {
         <TextField
           {...params}
           inputRef={input}
-          placeholder="Search parts, briefs, trains"
+          placeholder={prices ? 'Search parts, briefs, trains, suppliers' : 'Search parts, briefs, trains'}
           slotProps={{
             ...params.slotProps,
-            htmlInput: { ...params.slotProps.htmlInput, 'aria-label': 'Search parts, briefs and trains' },
+            htmlInput: {
+              ...params.slotProps.htmlInput,
+              'aria-label': prices
+                ? 'Search parts, briefs, trains and suppliers'
+                : 'Search parts, briefs and trains',
+            },
             input: {
               ...params.slotProps.input,
               startAdornment: (
