@@ -55,7 +55,7 @@ export const BOM_COLUMNS: readonly Column<PricedLine>[] = [
     value: ({ line }) => line.quantity,
     numFmt: QUANTITY,
   },
-  { title: 'Unit', width: 5, kind: 'words', value: ({ line }) => line.unit },
+  { title: 'Unit', width: 6, kind: 'words', value: ({ line }) => line.unit },
   { title: 'Material', width: 12, kind: 'words', value: ({ line }) => line.material },
   { title: 'Made or bought', width: 8, kind: 'words', value: ({ line }) => line.supply },
   {
@@ -70,9 +70,9 @@ export const BOM_COLUMNS: readonly Column<PricedLine>[] = [
     kind: 'words',
     value: ({ price }) => price?.supplierPartNumber ?? null,
   },
-  { title: 'Needed', width: 9, kind: 'figure', value: needed, numFmt: QUANTITY },
+  { title: 'Needed', width: 8, kind: 'figure', value: needed, numFmt: QUANTITY },
   { title: 'Order quantity', width: 9, kind: 'figure', value: orderQuantity, numFmt: QUANTITY },
-  { title: 'Currency', width: 9, kind: 'words', value: ({ price }) => price?.currency ?? null },
+  { title: 'Currency', width: 10, kind: 'words', value: ({ price }) => price?.currency ?? null },
   {
     title: 'Unit price',
     width: 10,
@@ -101,7 +101,7 @@ export const BOM_COLUMNS: readonly Column<PricedLine>[] = [
   { title: 'Source', width: 14, kind: 'words', value: ({ line }) => line.source.join(', ') },
   {
     title: 'Note',
-    width: 36,
+    width: 35,
     kind: 'words',
     value: (line) => noteOf(line).text,
     look: (line) => (noteOf(line).warns ? inPlum : {}),

@@ -76,8 +76,8 @@ describe('prices in the workbook', () => {
   it('has a total for each currency and says how many lines stand in it', async () => {
     const { total, rows } = await read(bytes);
     expect(total('EUR')?.slice(14, 16)).toEqual([319.5, '2 lines']);
-    expect(total('JPY')?.slice(14, 16)).toEqual([7500, '1 lines']);
-    expect(total('KWD')?.slice(14, 16)).toEqual([6.173, '1 lines']);
+    expect(total('JPY')?.slice(14, 16)).toEqual([7500, '1 line']);
+    expect(total('KWD')?.slice(14, 16)).toEqual([6.173, '1 line']);
     const sums = rows[HEAD_ROW + record.bom.lines.length];
     expect(sums?.[12]).toBe(`4 of ${record.bom.lines.length} lines priced`);
   });
@@ -199,9 +199,9 @@ const officeChecks: [name: string, check: () => Promise<void>][] = [
     async () => {
       const { line, total, rows } = await read(computed[2] ?? bytes);
       expect(line('B-12')[14] ?? '').toBe('');
-      expect(total('EUR')?.slice(14, 16)).toEqual([9.5, '1 lines']);
+      expect(total('EUR')?.slice(14, 16)).toEqual([9.5, '1 line']);
       const told = rows.flat().filter((value) => String(value).includes('in no total'));
-      expect(told).toEqual(['1 priced lines are in no total: give each one of these currencies']);
+      expect(told).toEqual(['Priced lines in no total: 1. Give each one of these currencies.']);
     },
   ],
   [

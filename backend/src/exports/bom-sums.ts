@@ -37,7 +37,7 @@ export function writeBomSums(
   const counted = totals.map((_, index) => countOf(first + 1 + index, span)).join('+');
   const outside = `COUNT(${cells(COLUMN.lineTotal, span)})-(${counted})`;
   writeText(sheet, check, COLUMN.supplier, {
-    formula: `IF(${outside}=0,"",${outside}&" priced lines are in no total: give each one of these currencies")`,
+    formula: `IF(${outside}=0,"","Priced lines in no total: "&${outside}&". Give each one of these currencies.")`,
     result: '',
   });
   const lost = prices.lostChoices.filter(({ key }) => key === null);
@@ -111,7 +111,13 @@ function writeTotal(
       COLUMN.lineTotal,
       { formula: `ROUND(${sum},${decimalsOf(currency)})`, result: cellAmount(minor, currency) },
     ],
-    [COLUMN.priceDate, { formula: `${countOf(row, span)}&" lines"`, result: `${lines} lines` }],
+    [
+      COLUMN.priceDate,
+      {
+        formula: `${countOf(row, span)}&IF(${countOf(row, span)}=1," line"," lines")`,
+        result: `${lines} ${lines === 1 ? 'line' : 'lines'}`,
+      },
+    ],
   ];
   for (const [column, value] of values) {
     const cell = sheet.getCell(`${column}${row}`);
