@@ -11,8 +11,8 @@ import { Part } from '../parts/entities/part.entity.js';
 import { narrowToCandidates } from './candidate-conditions.js';
 import { toFitPart } from './fit-part.js';
 
-/** Most parts that are held against the rules of fit for one question. */
-const MOST_CANDIDATES = 1000;
+/** Most parts that are held against the rules of fit for one question, so that others need not wait long. */
+const MOST_CANDIDATES = 500;
 /** Longest chain of successors that is followed. */
 const LONGEST_CHAIN = 100;
 

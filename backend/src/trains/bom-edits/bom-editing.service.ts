@@ -5,7 +5,7 @@ import { Clock } from '../../common/clock.js';
 import { ChangedMeanwhileError } from '../../common/errors.js';
 import { updateVersioned } from '../../database/update-versioned.js';
 import { WriteQueue } from '../../database/write-queue.js';
-import { type BomEdits } from '../bom-edits.js';
+import { type BomEdits, NO_EDITS } from '../bom-edits.js';
 import { type TrainDto } from '../dto/train.dto.js';
 import { Train } from '../entities/train.entity.js';
 import { TrainReader } from '../train-reader.js';
@@ -36,12 +36,13 @@ export class BomEditing {
   /** @throws ProblemError 409 when the train changed since `train` was read */
   async book(
     train: Train,
-    change: BomChange,
+    asked: BomChange,
     actor: Pick<SignedInUser, 'id' | 'name'>,
     action: string,
     summary: string,
   ): Promise<TrainDto> {
     const { code } = train;
+    const change = onlyChanged(train, asked);
     await this.writes.run(async (manager) => {
       const present = async () => this.reader.describe(await this.reader.load(manager, code));
       const set = { ...change, updatedAt: this.clock.iso() };
@@ -58,6 +59,15 @@ export class BomEditing {
     });
     return this.reader.describe(await this.reader.row(code));
   }
+}
+
+/** An edit may hand over the whole draft; what is as before is neither written nor put on record. */
+function onlyChanged(train: Train, { spec, bomEdits }: BomChange): BomChange {
+  const differs = (a: unknown, b: unknown) => JSON.stringify(a) !== JSON.stringify(b);
+  return {
+    ...(spec && differs(spec, train.spec) ? { spec } : {}),
+    ...(bomEdits && differs(bomEdits, train.bomEdits ?? NO_EDITS) ? { bomEdits } : {}),
+  };
 }
 
 /** Only what the edit touches: a long list of added lines stands in the record when it changes. */

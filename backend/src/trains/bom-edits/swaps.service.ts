@@ -57,8 +57,7 @@ export class Swaps {
     const unchanged = JSON.stringify(draft) === JSON.stringify(draftOf(train));
     if (input.dryRun) return { train: null, changes, checks };
     if (unchanged) return { train: await this.reader.describe(train), changes, checks };
-    const change = line && isGearLine(line) ? { spec: draft.spec } : { bomEdits: draft.bomEdits };
-    const booked = await this.editing.book(train, change, user, 'swapped', summaryOf(code, line, after.line));
+    const booked = await this.editing.book(train, draft, user, 'swapped', summaryOf(code, line, after.line));
     return { train: booked, changes, checks };
   }
 
