@@ -73,7 +73,9 @@ export class OfferPaste {
   private async plan(manager: EntityManager, input: OfferPasteInputDto, pause: Pause): Promise<Planned> {
     const supplier = await this.suppliers.load(manager, input.supplierCode);
     if (supplier.standing === 'closed') throw closedSupplier(supplier.code, supplier.name);
-    const table = readOfferTable(input.text);
+    const cells = readTable(input.text);
+    await pause();
+    const table = offerTable(cells);
     await pause();
     const defaults = input.defaults ?? {};
     const rows: StatedRow[] = [];
@@ -81,21 +83,20 @@ export class OfferPaste {
       rows.push(readRow(row, { stated: defaults.currency, usual: supplier.currency }));
       await pause();
     }
-    const ground = await readGround(manager, supplier, rows, this.reader.today());
-    await pause();
+    const ground = await readGround(manager, supplier, rows, this.reader.today(), pause);
     const planner = new OfferPlan(ground, defaults);
     const plan: PlannedOffer[] = [];
     for (const stated of groupRows(rows)) {
       plan.push(planner.take(stated));
       await pause();
     }
-    return { plan, preview: previewOf(table, supplier.code, plan), supplier };
+    return { plan, preview: await previewOf(table, supplier.code, plan, pause), supplier };
   }
 }
 
-/** @throws InputError naming `text` when it is no table, or has no column of parts or of prices */
-function readOfferTable(text: string): MappedTable<OfferColumn> {
-  const table = mapColumns(readTable(text), OFFER_COLUMNS);
+/** @throws ProblemError or InputError naming `text` when it has no column of parts or of prices, or only a head */
+function offerTable(cells: string[][]): MappedTable<OfferColumn> {
+  const table = mapColumns(cells, OFFER_COLUMNS);
   if (!table.hasHead) return table;
   const has = (...keys: OfferColumn[]) => table.columns.some(({ key }) => keys.includes(key));
   const lacking = [

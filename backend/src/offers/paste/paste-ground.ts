@@ -21,24 +21,31 @@ export interface PasteGround {
   today: string;
 }
 
-/** Reads what the rows name: three queries, however many rows there are. */
+/**
+ * Reads what the rows name: three queries, however many rows there are.
+ * @param pause called after each, so that others get their turn
+ */
 export async function readGround(
   manager: EntityManager,
   supplier: Supplier,
   rows: readonly StatedRow[],
   today: string,
+  pause: () => Promise<void>,
 ): Promise<PasteGround> {
   const parts = await offerableParts(
     manager,
     rows.map(({ partNumber }) => partNumber),
   );
+  await pause();
   const bySupplierNumber = await partsOffered(
     manager,
     supplier,
     rows.filter(({ partNumber }) => partNumber === '').map((row) => row.supplierPartNumber),
   );
+  await pause();
   const named = [...parts.values(), ...[...bySupplierNumber.values()].flat()];
   const offers = await openOffers(manager, supplier, named, today);
+  await pause();
   return { supplier, parts, bySupplierNumber, offers, today };
 }
 

@@ -6,34 +6,34 @@ import { type OfferPasteRowDto } from './dto/offer-paste-row.dto.js';
 import { type PlannedOffer } from './offer-plan.js';
 import { type OfferColumn } from './paste-columns.js';
 
-/** What planned offers look like before they are booked, row by row. */
-export function previewOf(
+/**
+ * What planned offers look like before they are booked, row by row.
+ * @param pause called after each offer, so that others get their turn
+ */
+export async function previewOf(
   table: MappedTable<OfferColumn>,
   supplierCode: string,
   plan: readonly PlannedOffer[],
-): OfferPastePreviewDto {
-  const rows = plan.flatMap(rowsOf).sort((a, b) => a.row - b.row);
-  const count = (action: OfferPasteRowDto['action']) => rows.filter((row) => row.action === action).length;
-  return {
-    columns: columnsOf(table),
-    rows,
-    counts: { add: count('add'), change: count('change'), same: count('same'), wrong: count('wrong') },
-    token: tokenOf(supplierCode, plan),
-  };
+  pause: () => Promise<void>,
+): Promise<OfferPastePreviewDto> {
+  const rows: OfferPasteRowDto[] = [];
+  const counts = { add: 0, change: 0, same: 0, wrong: 0 };
+  const token = createHash('sha256').update(supplierCode);
+  for (const planned of plan) {
+    rows.push(...rowsOf(planned));
+    counts[planned.action] += planned.stated.rows.length;
+    token.update(actOf(planned));
+    await pause();
+  }
+  rows.sort((a, b) => a.row - b.row);
+  return { columns: columnsOf(table), rows, counts, token: token.digest('base64url') };
 }
 
-/** Names exactly what would be booked: the terms, and the versions of the offers that change. */
-function tokenOf(supplierCode: string, plan: readonly PlannedOffer[]): string {
-  const acts = plan.map(({ stated, action, part, before, content }) => [
-    stated.rows.map(({ reader }) => reader.row),
-    action,
-    part?.number,
-    before && [before.id, before.version],
-    action === 'same' ? null : content,
-  ]);
-  return createHash('sha256')
-    .update(JSON.stringify([supplierCode, acts]))
-    .digest('base64url');
+/** Names exactly what would be booked: the terms, and the version of the offer that changes. */
+function actOf({ stated, action, part, before, content }: PlannedOffer): string {
+  const rows = stated.rows.map(({ reader }) => reader.row);
+  const changed = before && [before.id, before.version];
+  return JSON.stringify([rows, action, part?.number, changed, action === 'same' ? null : content]);
 }
 
 function rowsOf(planned: PlannedOffer): OfferPasteRowDto[] {
