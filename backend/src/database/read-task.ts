@@ -20,3 +20,9 @@ export interface ReadThreadData {
 }
 
 export type Row = Record<string, unknown>;
+
+/** Rows as they travel between threads: their names once, which is far less to copy. */
+export interface Table {
+  columns: readonly string[];
+  rows: readonly (readonly unknown[])[];
+}

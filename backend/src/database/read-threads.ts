@@ -1,7 +1,7 @@
 import { availableParallelism } from 'node:os';
 import { type OnApplicationShutdown } from '@nestjs/common';
 import { Piscina } from 'piscina';
-import { type ReadStatement, type ReadTask, type ReadThreadData, type Row } from './read-task.js';
+import { type ReadStatement, type ReadTask, type ReadThreadData, type Row, type Table } from './read-task.js';
 
 /** A second one, so that a quick list need not wait behind a slow one. */
 const MOST_THREADS = 2;
@@ -11,7 +11,7 @@ const MOST_THREADS = 2;
  * held. Each thread has a read-only connection of its own; what is committed is seen at once.
  */
 export class ReadThreads implements OnApplicationShutdown {
-  private readonly pool: Piscina<ReadTask, Row[][]>;
+  private readonly pool: Piscina<ReadTask, Table[]>;
 
   /**
    * @param entry built thread entry point
@@ -34,11 +34,19 @@ export class ReadThreads implements OnApplicationShutdown {
    * @returns the rows of each, as the driver gives them
    * @throws Error of the database, for a statement that is wrong or would write
    */
-  read(...statements: ReadStatement[]): Promise<Row[][]> {
-    return this.pool.run({ statements });
+  async read(...statements: ReadStatement[]): Promise<Row[][]> {
+    return (await this.pool.run({ statements })).map(rowsOf);
   }
 
   async onApplicationShutdown(): Promise<void> {
     await this.pool.destroy();
   }
+}
+
+function rowsOf({ columns, rows }: Table): Row[] {
+  return rows.map((values) => {
+    const row: Row = {};
+    columns.forEach((column, index) => (row[column] = values[index]));
+    return row;
+  });
 }

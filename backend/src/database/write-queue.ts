@@ -8,6 +8,8 @@ interface RunningWrite {
 
 /** The driver is synchronous: a write that holds the queue this long is worth a line in the log. */
 const SLOW_MS = 250;
+/** A thread's turn keeps only other writes waiting. */
+const SLOW_TURN_MS = 2000;
 
 /**
  * The only way to change the database. Works are run one after the other, each in a transaction of its own:
@@ -35,7 +37,7 @@ export class WriteQueue implements OnApplicationShutdown {
    * @throws Error when called from inside another work: that would wait for itself for ever
    */
   async run<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
-    return this.#enqueue((write) => this.#running.run(write, () => this.#source.transaction(work)));
+    return this.#enqueue((write) => this.#running.run(write, () => this.#source.transaction(work)), SLOW_MS);
   }
 
   /**
@@ -44,15 +46,15 @@ export class WriteQueue implements OnApplicationShutdown {
    * @throws Error when called from inside another work: that would wait for itself for ever
    */
   async lease<T>(turn: () => Promise<T>): Promise<T> {
-    return this.#enqueue((write) => this.#running.run(write, turn));
+    return this.#enqueue((write) => this.#running.run(write, turn), SLOW_TURN_MS);
   }
 
-  async #enqueue<T>(work: (write: RunningWrite) => Promise<T>): Promise<T> {
+  async #enqueue<T>(work: (write: RunningWrite) => Promise<T>, slowMs: number): Promise<T> {
     if (this.#running.getStore()?.open) {
       throw new Error('WriteQueue.run was called inside a write. Pass the manager on instead.');
     }
     if (this.#closed) throw new Error('The database is closed.');
-    const result = this.#tail.then(() => this.#timed(work));
+    const result = this.#tail.then(() => this.#timed(work, slowMs));
     this.#tail = result.catch(() => undefined);
     return result;
   }
@@ -64,7 +66,7 @@ export class WriteQueue implements OnApplicationShutdown {
     this.#afterClose();
   }
 
-  async #timed<T>(work: (write: RunningWrite) => Promise<T>): Promise<T> {
+  async #timed<T>(work: (write: RunningWrite) => Promise<T>, slowMs: number): Promise<T> {
     const write: RunningWrite = { open: true };
     const start = performance.now();
     try {
@@ -72,7 +74,7 @@ export class WriteQueue implements OnApplicationShutdown {
     } finally {
       write.open = false;
       const elapsed = performance.now() - start;
-      if (elapsed > SLOW_MS) this.#logger.warn(`A write held the queue for ${elapsed.toFixed(0)} ms`);
+      if (elapsed > slowMs) this.#logger.warn(`A write held the queue for ${elapsed.toFixed(0)} ms`);
     }
   }
 }

@@ -8,11 +8,17 @@ import { type ListQueryDto, type Page, pageOf, parseListQuery, type SortKey } fr
 import { type ReadStatement, type Row } from '../database/read-task.js';
 import { ReadThreads } from '../database/read-threads.js';
 import { hasStock, isLow } from '../stock/shelf-conditions.js';
+import { fromThousandths } from '../stock/thousandths.js';
 import { StockLevels } from '../stock/stock-levels.service.js';
 import { type FigureCountDto, type PartFacetsDto, type TextCountDto } from './dto/part-facets.dto.js';
 import { type PartAttributes } from './dto/attributes/part-attributes.js';
 import { PART_SORTS, type PartListQueryDto, type PartSort } from './dto/part-list-query.dto.js';
-import { type PartSummaryDto, toPartSummaryDto } from './dto/part-summary.dto.js';
+import {
+  type PartSummaryDto,
+  SUMMARY_COLUMNS,
+  type SummarizedPart,
+  toPartSummaryDto,
+} from './dto/part-summary.dto.js';
 import { type PartDto, toPartDto } from './dto/part.dto.js';
 import { Part } from './entities/part.entity.js';
 import { type PartStanding } from './part-kinds.js';
@@ -50,7 +56,7 @@ export class PartsReader {
     // Sorting ids alone keeps the sort small: whole rows are read for this page only.
     const page = rows.select('part.id', 'id').offset(list.skip).limit(list.size);
     const [counted, found] = await this.threads.read(count, statementOf(page, { whole: WHOLE_PART }));
-    return pageOf(await this.withShelf((found ?? []).map(partOf)), countIn(counted), list);
+    return pageOf((found ?? []).map(summaryOf), countIn(counted), list);
   }
 
   /** What the library holds, counted for the choices of the filter bar. */
@@ -151,8 +157,9 @@ export class PartsReader {
   }
 }
 
-/** A part as a reading thread finds it by its id. */
-const WHOLE_PART = 'SELECT * FROM "part" WHERE "id" = ?';
+/** A part as a reading thread finds it by its id, with what lies on the shelf over all places. */
+const WHOLE_PART = `SELECT ${SUMMARY_COLUMNS.map((column) => `"${column}"`).join(', ')},
+  (SELECT SUM("quantity") FROM "stock_level" WHERE "partId" = "part"."id") AS "shelf" FROM "part" WHERE "id" = ?`;
 
 function statementOf(
   rows: SelectQueryBuilder<Part>,
@@ -167,8 +174,13 @@ function countIn(rows: Row[] | undefined): number {
 }
 
 /** The columns of the table are the entity's fields; only the attributes are text there. */
-function partOf(row: Row): Part {
-  return { ...(row as unknown as Part), attributes: JSON.parse(String(row.attributes)) as PartAttributes };
+function summaryOf(row: Row): PartSummaryDto {
+  const { shelf, attributes, ...columns } = row as unknown as Omit<SummarizedPart, 'attributes'> & {
+    attributes: string;
+    shelf: number | null;
+  };
+  const part = { ...columns, attributes: JSON.parse(attributes) as PartAttributes };
+  return toPartSummaryDto(part, shelf === null ? null : fromThousandths(shelf));
 }
 
 /** Each filter with the column and comparison it stands for. */

@@ -1,36 +1,46 @@
 import { workerData } from 'node:worker_threads';
 import type BetterSqlite3 from 'better-sqlite3';
 import { openReading } from '../database/connection.js';
-import { KeptRows } from '../database/kept-rows.js';
-import { type ReadStatement, type ReadTask, type ReadThreadData, type Row } from '../database/read-task.js';
+import { KeptTables } from '../database/kept-tables.js';
+import { type ReadStatement, type ReadTask, type ReadThreadData, type Table } from '../database/read-task.js';
 
 const database = openReading((workerData as ReadThreadData).file);
-const kept = new KeptRows();
-const prepared = new Map<string, BetterSqlite3.Statement<unknown[], Row>>();
-/** Texts vary with the filters used; beyond this many the oldest is prepared anew. */
-const MOST_PREPARED = 100;
+const kept = new KeptTables();
 
-function statement(sql: string): BetterSqlite3.Statement<unknown[], Row> {
-  const known = prepared.get(sql);
-  if (known) return known;
-  const fresh = database.prepare<unknown[], Row>(sql);
-  const [oldest] = prepared.keys();
-  if (prepared.size >= MOST_PREPARED && oldest !== undefined) prepared.delete(oldest);
-  prepared.set(sql, fresh);
+/** A statement whose rows come as arrays, with the names of its columns. */
+interface Prepared {
+  columns: string[];
+  statement: BetterSqlite3.Statement<unknown[], unknown[]>;
+}
+
+const known = new Map<string, Prepared>();
+/** Texts vary with the filters used; beyond this many the oldest is prepared anew. */
+const MOST_KNOWN = 100;
+
+function prepared(sql: string): Prepared {
+  const before = known.get(sql);
+  if (before) return before;
+  const statement = database.prepare<unknown[], unknown[]>(sql).raw(true);
+  const fresh = { statement, columns: statement.columns().map(({ name }) => name) };
+  const [oldest] = known.keys();
+  if (known.size >= MOST_KNOWN && oldest !== undefined) known.delete(oldest);
+  known.set(sql, fresh);
   return fresh;
 }
 
-function rowsOf({ sql, params, whole }: ReadStatement): Row[] {
-  const found = statement(sql).all(...params);
-  if (whole === undefined) return found;
-  const one = statement(whole);
-  return found.map((row) => one.get(Object.values(row)[0])).filter((row) => row !== undefined);
+function tableOf({ sql, params, whole }: ReadStatement): Table {
+  const { columns, statement } = prepared(sql);
+  const rows = statement.all(...params);
+  if (whole === undefined) return { columns, rows };
+  const one = prepared(whole);
+  const found = rows.map(([key]) => one.statement.get(key)).filter((row) => row !== undefined);
+  return { columns: one.columns, rows: found };
 }
 
 /** Thread entry point: reads lists on a connection of its own. */
-export default function read({ statements }: ReadTask): Row[][] {
+export default function read({ statements }: ReadTask): Table[] {
   return database.transaction(() => {
     kept.of(Number(database.pragma('data_version', { simple: true })));
-    return statements.map((one) => (one.keep ? kept.get(one, rowsOf) : rowsOf(one)));
+    return statements.map((one) => (one.keep ? kept.get(one, tableOf) : tableOf(one)));
   })();
 }

@@ -82,11 +82,35 @@ export class PartSummaryDto {
   updatedBy!: string;
 }
 
+/** The columns of a part that people see in a row of the library. */
+export const SUMMARY_COLUMNS = [
+  'id',
+  'number',
+  'kind',
+  'description',
+  'standing',
+  'successorNumber',
+  'material',
+  'mass',
+  'supply',
+  'supplier',
+  'note',
+  'attributes',
+  'leastStock',
+  'version',
+  'createdAt',
+  'updatedAt',
+  'updatedBy',
+] as const satisfies readonly (keyof Part)[];
+
+/** What is known of a part where a row of the library is shown. */
+export type SummarizedPart = Pick<Part, (typeof SUMMARY_COLUMNS)[number]>;
+
 /**
  * What people see of a stored part; the index columns stay inside.
  * @param shelf what lies on the shelf, in the part's unit; null when it never lay there (see `StockLevels`)
  */
-export function toPartSummaryDto(part: Part, shelf: number | null): PartSummaryDto {
+export function toPartSummaryDto(part: SummarizedPart, shelf: number | null): PartSummaryDto {
   return {
     id: String(part.id),
     number: part.number,
