@@ -7,7 +7,7 @@ import DialogContent from '@mui/material/DialogContent';
 import DialogTitle from '@mui/material/DialogTitle';
 import Typography from '@mui/material/Typography';
 import useMediaQuery from '@mui/material/useMediaQuery';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
 import { useStockItem } from '../../api/hooks/useStockItem';
 import type { MovementKind } from '../../api/types';
@@ -44,6 +44,13 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
   const book = useBooking();
   const act = typed.kind ?? kind;
   const limits = quantityLimits(act, item?.unit);
+
+  // A part that lies at one place only most likely goes there, or comes from there.
+  const [only] = item?.places.length === 1 ? item.places : [];
+  const home = only?.place ?? '';
+  useEffect(() => {
+    if (home !== '' && form.getValues('place') === '') form.setValue('place', home);
+  }, [form, home]);
 
   const save = handleSubmit(async (values) => {
     setRefusal(null);

@@ -35,11 +35,12 @@ export function shortWords({ low, leastStock, quantity }: StockItem): string {
   return formatPlain(leastStock - quantity, 3);
 }
 
-/** `Rack A: 12, Rack B: 3`; places with none left are left out. */
+/** `Rack A: 12, Rack B: 3`; places with none left only where there is no other: that is where it belongs. */
 export function placesWords({ places }: StockItem): string {
-  const words = places
-    .filter(({ quantity }) => quantity > 0)
-    .map(({ place, quantity }) => `${place}: ${formatPlain(quantity, 3)}`);
+  const filled = places.filter(({ quantity }) => quantity > 0);
+  const words = (filled.length > 0 ? filled : places).map(
+    ({ place, quantity }) => `${place}: ${formatPlain(quantity, 3)}`,
+  );
   return words.length > 0 ? words.join(', ') : NOTHING;
 }
 

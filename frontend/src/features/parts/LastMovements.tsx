@@ -4,6 +4,7 @@ import TableCell from '@mui/material/TableCell';
 import TableContainer from '@mui/material/TableContainer';
 import TableHead from '@mui/material/TableHead';
 import TableRow from '@mui/material/TableRow';
+import Typography from '@mui/material/Typography';
 import { useMemo } from 'react';
 import { useMovements } from '../../api/hooks/useMovements';
 import { CopyTable } from '../../components/CopyTable';
@@ -25,7 +26,10 @@ export function LastMovements({ number }: { number: string }) {
   }
   if (page === undefined || page.items.length === 0) return null;
   return (
-    <Box sx={{ borderTop: 1, borderColor: 'line.rule', mt: 1 }}>
+    <Box sx={{ mt: 1.5 }}>
+      <Typography variant="h3" sx={{ px: 1.25, mb: 0.5 }}>
+        Last movements
+      </Typography>
       <TableContainer>
         <CopyTable label="Last movements">
           <TableHead>

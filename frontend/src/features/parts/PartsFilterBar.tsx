@@ -33,9 +33,12 @@ const MORE: readonly PartFilter[] = [
 export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
   const { facets } = usePartFacets();
   const narrow = useMediaQuery(useTheme().breakpoints.down('sm'));
+  // On a laptop one filter more would take the table a row.
+  const roomy = useMediaQuery('(min-width: 1400px)');
   // A second sort key shows itself, too: an order that nobody can see looks like none.
   const rareSet =
     state.sort.length > 1 ||
+    (!roomy && state.filters.shelf !== undefined) ||
     (narrow ? PART_FILTERS.filter((name) => name !== 'text') : MORE).some(
       (name) => state.filters[name] !== undefined,
     );
@@ -66,6 +69,17 @@ export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
     name: value,
     count: many,
   }));
+  const shelf = (
+    <ChoiceFilter
+      label="Shelf"
+      width={96}
+      choices={[
+        { value: 'there', name: 'there' },
+        { value: 'low', name: 'low' },
+      ]}
+      {...bind('shelf')}
+    />
+  );
   const shown = open || rareSet;
   return (
     <FilterBar filterCount={state.filterCount} onClear={state.clearFilters} result={result}>
@@ -78,15 +92,7 @@ export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
           <TypedFilter figure label="most" width={72} {...bind('teethMax')} />
           <ChoiceFilter label="Material" width={128} choices={materials} {...bind('material')} />
           <ChoiceFilter label="Standing" width={108} choices={standings} {...bind('standing')} />
-          <ChoiceFilter
-            label="Shelf"
-            width={96}
-            choices={[
-              { value: 'there', name: 'there' },
-              { value: 'low', name: 'low' },
-            ]}
-            {...bind('shelf')}
-          />
+          {roomy && shelf}
         </>
       )}
       {shown && (
@@ -116,6 +122,7 @@ export function PartsFilterBar({ state, result }: PartsFilterBarProps) {
           <TypedFilter figure label="most" width={72} {...bind('boreMax')} />
           <TypedFilter figure label="Face mm, least" width={104} {...bind('faceWidthMin')} />
           <TypedFilter figure label="most" width={72} {...bind('faceWidthMax')} />
+          {!roomy && shelf}
           <SecondSort state={state} />
         </>
       )}

@@ -71,8 +71,8 @@ export const PART_COLUMNS: Column[] = [
     valueGetter: (_, part) => (figureOf(part, 'teeth') === null ? null : figureOf(part, 'profileShift')),
     valueFormatter: (value: number | null) => (value === null ? NOTHING : formatFixed(value, 3)),
   },
-  attributeColumn('faceWidth', 'Face mm', 92),
-  attributeColumn('bore', 'Bore mm', 92),
+  attributeColumn('faceWidth', 'Face mm', 88),
+  attributeColumn('bore', 'Bore mm', 88),
   {
     field: 'material',
     headerName: 'Material',
@@ -91,7 +91,7 @@ export const PART_COLUMNS: Column[] = [
   {
     field: 'shelf',
     headerName: 'Shelf',
-    width: 84,
+    width: 68,
     sortable: false,
     align: 'right',
     headerAlign: 'right',

@@ -55,7 +55,7 @@ export function MovementsTab() {
       label={label}
       value={state.filters[name] ?? ''}
       onChange={(event) => state.setFilters({ [name]: event.target.value })}
-      sx={{ width: 138 }}
+      sx={{ width: 136 }}
     />
   );
   return (
@@ -84,9 +84,9 @@ export function MovementsTab() {
       </FilterBar>
       <DataTable<Movement>
         label="Movements"
-        height="calc(100dvh - 252px)"
+        height="calc(100dvh - 242px)"
         columns={movementColumns(narrow)}
-        rowHeight={narrow ? 56 : 32}
+        rowHeight={narrow ? 52 : 32}
         hidden={narrow ? NARROW_HIDDEN : middle ? MIDDLE_HIDDEN : undefined}
         rows={page?.items}
         total={page?.total}

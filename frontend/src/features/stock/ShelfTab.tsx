@@ -41,7 +41,7 @@ export function ShelfTab({ onBook }: { onBook: () => void }) {
   const { page, problem, isLoading, mutate } = useStock(queryOf(state));
   const places = usePlaces();
   const narrow = useMediaQuery('(max-width: 600px)');
-  const middle = useMediaQuery('(max-width: 1100px)');
+  const middle = useMediaQuery('(max-width: 1399px)');
   const onlyLow = state.filters.low === 'true';
   const count = page && `${formatCount(page.total)} ${page.total === 1 ? 'part' : 'parts'}`;
   return (
@@ -54,21 +54,21 @@ export function ShelfTab({ onBook }: { onBook: () => void }) {
         />
         <ChoiceFilter
           label="Shelf"
-          width={108}
+          width={100}
           value={state.filters.low ?? ''}
           onSet={(low) => state.setFilters({ low })}
           choices={[{ value: 'true', name: 'low' }]}
         />
         <ChoiceFilter
           label="Place"
-          width={132}
+          width={124}
           value={state.filters.place ?? ''}
           onSet={(place) => state.setFilters({ place })}
           choices={places.map(({ place, parts }) => ({ value: place, name: place, count: parts }))}
         />
         <ChoiceFilter
           label="Kind"
-          width={128}
+          width={116}
           value={state.filters.kind ?? ''}
           onSet={(kind) => state.setFilters({ kind })}
           choices={STOCK_KINDS.map((kind) => ({ value: kind, name: kind.replaceAll('-', ' ') }))}
@@ -76,7 +76,7 @@ export function ShelfTab({ onBook }: { onBook: () => void }) {
       </FilterBar>
       <DataTable<StockItem>
         label="Parts on the shelf"
-        height="calc(100dvh - 252px)"
+        height="calc(100dvh - 242px)"
         columns={shelfColumns(narrow)}
         rowHeight={narrow ? 48 : 32}
         hidden={narrow ? NARROW_HIDDEN : middle ? MIDDLE_HIDDEN : undefined}

@@ -1,6 +1,6 @@
 import { Link } from 'react-router-dom';
 import type { Movement } from '../../api/types';
-import { formatPlain, formatWhen } from '../../components/figures';
+import { formatDay, formatPlain, formatWhen } from '../../components/figures';
 import type { CopiedCell, DataColumn } from '../../components/gridText';
 import { changeWords } from '../../components/stock/stockWords';
 
@@ -17,10 +17,12 @@ const PartLink = ({ number }: { number: string }) => (
   </Link>
 );
 
+const ONE_LINE = { display: 'block', overflow: 'hidden', textOverflow: 'ellipsis' } as const;
+
 const titled = (text: string) => <span title={text}>{text}</span>;
 
 const COLUMNS: Column[] = [
-  { field: 'at', headerName: 'When', width: 138, valueFormatter: (at: string) => formatWhen(at) },
+  { field: 'at', headerName: 'When', width: 156, valueFormatter: (at: string) => formatWhen(at) },
   {
     field: 'number',
     headerName: 'Part',
@@ -56,7 +58,14 @@ const COLUMNS: Column[] = [
     valueFormatter: (after: number) => formatPlain(after, 3),
   },
   { field: 'unit', headerName: 'Unit', width: 52, sortable: false },
-  { field: 'place', headerName: 'Place', width: 116, sortable: false },
+  {
+    field: 'place',
+    headerName: 'Place',
+    flex: 0.8,
+    minWidth: 130,
+    sortable: false,
+    renderCell: ({ row }) => titled(row.place),
+  },
   {
     field: 'reason',
     headerName: 'Why',
@@ -68,13 +77,12 @@ const COLUMNS: Column[] = [
   { field: 'by', headerName: 'By', width: 112, sortable: false },
 ];
 
-export const MIDDLE_HIDDEN = { unit: false };
+export const MIDDLE_HIDDEN = { unit: false, after: false };
 export const NARROW_HIDDEN = {
   ...MIDDLE_HIDDEN,
   number: false,
   description: false,
   kind: false,
-  after: false,
   place: false,
   reason: false,
   by: false,
@@ -92,10 +100,13 @@ export function movementColumns(narrow: boolean): Column[] {
       minWidth: 200,
       display: 'flex',
       renderCell: ({ row }) => (
-        <span style={{ lineHeight: 1.35, whiteSpace: 'normal' }}>
-          <PartLink number={row.number} /> {row.kind}, {row.place}
-          <br />
-          {formatWhen(row.at)}, {row.by}
+        <span style={{ lineHeight: 1.4, minWidth: 0 }}>
+          <span style={ONE_LINE}>
+            <PartLink number={row.number} /> {row.kind} {formatDay(row.at)}
+          </span>
+          <span style={ONE_LINE}>
+            {row.place} · {row.by}
+          </span>
         </span>
       ),
     };

@@ -1,4 +1,5 @@
 import Box from '@mui/material/Box';
+import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import type { StockItem } from '../../api/types';
 import { formatDay, formatPlain, NOTHING } from '../../components/figures';
@@ -7,11 +8,11 @@ import { placesWords, shortWords } from '../../components/stock/stockWords';
 
 type Column = DataColumn<StockItem>;
 
-/** The word, not the colour alone, says that a shelf is low. */
-function LowWord() {
+/** Bold and in words, too: the colour alone tells nothing. */
+function Low({ children }: { children: ReactNode }) {
   return (
-    <Box component="span" sx={{ color: 'error.main', fontWeight: 600 }}>
-      low
+    <Box component="b" sx={{ color: 'error.main', fontWeight: 600 }}>
+      {children}
     </Box>
   );
 }
@@ -56,20 +57,19 @@ const COLUMNS: Column[] = [
     minWidth: 200,
     renderCell: ({ row }) => <span title={row.description}>{row.description}</span>,
   },
-  { ...figure('quantity', 'On shelf', 92), valueFormatter: (value: number) => formatPlain(value, 3) },
-  { field: 'unit', headerName: 'Unit', width: 56, sortable: false },
+  {
+    ...figure('quantity', 'On shelf', 96),
+    copied: ({ quantity }) => quantity,
+    valueGetter: (_, { quantity, unit }) => `${formatPlain(quantity, 3)} ${unit}`,
+  },
   {
     ...figure('leastStock', 'Least', 76),
     valueFormatter: (value: number | null) => formatPlain(value, 3),
   },
-  { ...figure('shortBy', 'Short by', 84), valueGetter: (_, item) => shortWords(item) },
   {
-    field: 'low',
-    headerName: 'Shelf',
-    width: 68,
-    sortable: false,
-    copied: ({ low }) => (low ? 'low' : ''),
-    renderCell: ({ row }) => (row.low ? <LowWord /> : NOTHING),
+    ...figure('shortBy', 'Short by', 88),
+    valueGetter: (_, item) => shortWords(item),
+    renderCell: ({ row }) => (row.low ? <Low>{shortWords(row)}</Low> : NOTHING),
   },
   {
     field: 'places',
@@ -91,13 +91,12 @@ const COLUMNS: Column[] = [
   },
 ];
 
-export const MIDDLE_HIDDEN = { countedAt: false, unit: false };
+export const MIDDLE_HIDDEN = { countedAt: false };
 export const NARROW_HIDDEN = {
   ...MIDDLE_HIDDEN,
   leastStock: false,
   shortBy: false,
   places: false,
-  low: false,
 };
 
 /** On a phone the description takes two lines, and the figure carries the unit and the word that it is low. */
@@ -112,7 +111,7 @@ export function shelfColumns(narrow: boolean): Column[] {
     if (column.field === 'quantity') {
       const renderCell: Column['renderCell'] = ({ row }) => (
         <span>
-          {formatPlain(row.quantity, 3)} {row.unit} {row.low && <LowWord />}
+          {formatPlain(row.quantity, 3)} {row.unit} {row.low && <Low>low</Low>}
         </span>
       );
       return { ...column, width: 104, renderCell };

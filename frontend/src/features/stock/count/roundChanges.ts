@@ -75,8 +75,6 @@ function isSameShelf(
 function shelfNow(current: unknown, place: string): Count['now'] {
   const places = (current as Partial<StockItem> | undefined)?.places;
   if (!Array.isArray(places)) return null;
-  const level = (places).find(
-    (each) => each.place.toLowerCase() === place.toLowerCase(),
-  );
+  const level = places.find((each) => each.place.toLowerCase() === place.toLowerCase());
   return { quantity: level?.quantity ?? 0, movementId: level?.lastMovementId ?? 0 };
 }
