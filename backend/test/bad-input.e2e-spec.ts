@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { newBrief, newRequirement } from '../src/testing/new-brief.js';
+import { newOffer, newSupplier } from '../src/testing/new-offer.js';
 import { newGear } from '../src/testing/new-part.js';
 import { newPerson } from '../src/testing/people.js';
 import { type Answer, type Client, startServer, type TestServer } from './harness.js';
@@ -16,6 +17,8 @@ let admin: Client;
 beforeAll(async () => {
   server = await startServer();
   admin = await server.as('admin');
+  await admin.post('/api/parts', newGear({ number: partNumber, standing: 'cleared' }));
+  ({ code: supplierCode } = (await admin.post<{ code: string }>('/api/suppliers', newSupplier())).body);
 });
 afterAll(() => server.close());
 
@@ -47,11 +50,43 @@ function send(method: string, path: string, body: unknown): Promise<Answer<Refus
 const spur = { teeth: 24, module: 2, faceWidth: 20 };
 const wheel = { ...spur, teeth: 48, thicknessAllowance: { upper: -0.05, lower: -0.1 } };
 
+/** Every offer is for this part, by this supplier. */
+const partNumber = 'OFFERED';
+let supplierCode: string;
+let count = 0;
+const PASTED = {
+  pricedOn: '2026-01-15',
+  validFrom: '2026-01-15',
+  validUntil: '2199-12-31',
+  source: 'List 9',
+  currency: 'EUR',
+};
+
+const wholeSupplier = () =>
+  newSupplier({
+    language: 'de',
+    contacts: [{ name: 'Desk', role: 'Sales', email: 'desk@northwharf.example', phone: '1' }],
+    address: 'Quay 4',
+    freight: { kind: 'free-from', charge: 900, freeFrom: 50_000 },
+    leastOrderValue: 2500,
+    note: 'Seen.',
+  });
+
+/** Each call gives another source, since the very same offer is refused. */
+const wholeOffer = () => ({
+  ...newOffer({ partNumber, supplierCode }),
+  ...{ supplierPartNumber: 'A1', per: 10, pack: 5, leastQuantity: 5, leadTimeDays: 3, note: 'Seen.' },
+  ...{ ...PASTED, source: `List ${(count += 1)}` },
+});
+
 /** A body that is taken as it stands, for every route that takes one. */
 const ROUTES: [method: string, path: string, body: () => object][] = [
   ['POST', '/api/users', () => newPerson()],
   ['POST', '/api/parts', () => newGear()],
   ['POST', '/api/briefs', () => newBrief()],
+  ['POST', '/api/suppliers', () => wholeSupplier()],
+  ['POST', '/api/offers', () => wholeOffer()],
+  ['POST', '/api/offers/paste', () => ({ text: 'OFFERED\t\t1\t2.50', supplierCode, defaults: PASTED })],
   ['POST', '/api/calc/gear', () => ({ ...spur, pressureAngleDeg: 20, helixAngleDeg: 0, profileShift: 0.1 })],
   ['POST', '/api/calc/mesh', () => ({ pinion: { ...spur, profileShift: 0.1 }, wheel, allowance: 0.01 })],
   ['POST', '/api/calc/shift', () => ({ pinion: spur, wheel, policy: 'none', keepReferenceDistance: true })],
@@ -81,7 +116,9 @@ describe.each(ROUTES)('%s %s', (method, path, body) => {
   });
 
   it('names the field when a text is far too long, in a short answer', async () => {
-    for (const place of placesIn(body())) {
+    // A pasted table may be that long: each of its rows is looked at by itself.
+    const isTable = ([field]: Path) => path.endsWith('/paste') && field === 'text';
+    for (const place of placesIn(body()).filter((here) => !isTable(here))) {
       const { status, body: answer, bytes } = await send(method, path, withValue(body(), place, LONG));
       const what = place.join('.');
       expect([what, status]).toEqual([what, 400]);
@@ -109,6 +146,24 @@ const EDITS: [kind: string, make: () => object, place: (made: Made) => string, c
     { description: 'Other', material: 'C60', mass: 0.3, note: 'Seen.', attributes: newGear().attributes },
   ],
   [
+    'suppliers',
+    wholeSupplier,
+    ({ code }) => `/api/suppliers/${code}`,
+    {
+      name: 'Other Works',
+      standing: 'closed',
+      currency: 'GBP',
+      leastOrderValue: 3,
+      freight: { kind: 'included' },
+    },
+  ],
+  [
+    'offers',
+    wholeOffer,
+    ({ id }) => `/api/offers/${id}`,
+    { breaks: [{ quantity: 5, unitPrice: 9 }], pack: 10, leastQuantity: 10, validUntil: null, note: 'Other' },
+  ],
+  [
     'briefs',
     () => newBrief(),
     ({ id }) => `/api/briefs/${id}`,
@@ -118,6 +173,7 @@ const EDITS: [kind: string, make: () => object, place: (made: Made) => string, c
 
 interface Made {
   id: string;
+  code: string;
   number: string;
   version: number;
 }
