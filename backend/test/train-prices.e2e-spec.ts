@@ -178,6 +178,13 @@ describe('how a train is bought', () => {
       code: 'changed-meanwhile',
       current: { code: train.code, version: train.version, buildQuantity: 25 },
     });
+    const choices = [{ partNumber: 'K-1', offerId: '1' }];
+    expect((await choose({ version: train.version - 1, choices })).status).toBe(409);
+  });
+
+  it('changes no version where everything stands that way already', async () => {
+    const same = await choose({ buildQuantity: 25, choices: [{ partNumber: 'B-12', offerId: null }] });
+    expect([same.status, same.body]).toEqual([200, train]);
   });
 
   it.each<[string, object, string]>([

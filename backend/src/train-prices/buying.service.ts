@@ -5,7 +5,7 @@ import { AuditService } from '../audit/audit.service.js';
 import { type SignedInUser } from '../auth/signed-in-user.js';
 import { DEFAULT_BUILD_QUANTITY } from '../briefs/requirement.js';
 import { Clock } from '../common/clock.js';
-import { badInput } from '../common/errors.js';
+import { badInput, ChangedMeanwhileError } from '../common/errors.js';
 import { updateVersioned } from '../database/update-versioned.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { OffersFinder, type PartOffer } from '../offers/offers-finder.service.js';
@@ -36,31 +36,37 @@ export class BuyingService {
   ) {}
 
   /**
-   * Sets what the input names.
+   * Sets what the input names; what stands that way already is left alone and changes no version.
    * @throws ProblemError 400 naming every choice that cannot be, 404, or 409 when the train changed since
    */
   async choose(code: string, input: BuyingInputDto, actor: Person): Promise<TrainDto> {
     await this.writes.run(async (manager) => {
       const before = await this.reader.load(manager, code);
-      const checked = await this.check(before, input.choices ?? []);
-      const buildQuantity = input.buildQuantity ?? before.buildQuantity;
+      // Before the choices: what fits the train as it was seen may not fit it any more.
+      if (before.version !== input.version)
+        throw new ChangedMeanwhileError(await this.reader.describe(before));
+      const checked = (await this.check(before, input.choices ?? [])).filter(
+        ({ partNumber, offer }) => (offer?.id ?? null) !== chosenId(before, partNumber),
+      );
+      const wasBuilt = before.buildQuantity ?? DEFAULT_BUILD_QUANTITY;
+      const buildQuantity = input.buildQuantity ?? wasBuilt;
+      if (buildQuantity === wasBuilt && checked.length === 0) return;
       const offerChoices = merged(before.offerChoices ?? {}, checked);
       const change = { buildQuantity, offerChoices, updatedAt: this.clock.iso() };
       const current = () => this.reader.describe(before);
       const after = await updateVersioned<Train>(manager, Train, { code }, input.version, change, current);
       const common = { actor, entityId: code };
-      if (buildQuantity !== before.buildQuantity) {
+      if (buildQuantity !== wasBuilt) {
         await this.audit.record(manager, {
           ...common,
           action: 'changed',
           entity: 'train',
-          summary: `Build quantity of ${code} is ${buildQuantity ?? DEFAULT_BUILD_QUANTITY}`,
+          summary: `Build quantity of ${code} is ${buildQuantity}`,
           before: audited(before),
           after: audited(after),
         });
       }
       for (const { partNumber, offer } of checked) {
-        const was = before.offerChoices?.[partNumber] ?? null;
         await this.audit.record(manager, {
           ...common,
           action: offer ? 'offer chosen' : 'offer left to the rule',
@@ -68,7 +74,7 @@ export class BuyingService {
           summary: offer
             ? `Chose the offer of ${offer.supplierName} for ${partNumber} of ${code}`
             : `Left the offer for ${partNumber} of ${code} to the rule`,
-          before: { offerId: was === null ? null : String(was) },
+          before: { offerId: chosenId(before, partNumber) },
           after: { offerId: offer?.id ?? null },
         });
       }
@@ -148,6 +154,11 @@ function merged(
     else choices.delete(partNumber);
   }
   return choices.size > 0 ? Object.fromEntries(choices) : null;
+}
+
+function chosenId({ offerChoices }: Train, partNumber: string): string | null {
+  const id = offerChoices?.[partNumber];
+  return id === undefined ? null : String(id);
 }
 
 function lower(partNumber: string): string {
