@@ -33,7 +33,8 @@ export function OffersTable({ supplier, height, more }: OffersTableProps) {
   const { page, problem, isLoading, mutate } = useOffers(query);
   const narrow = useMediaQuery('(max-width: 600px)');
   const laptop = useMediaQuery('(max-width: 1399px)');
-  const room: OffersRoom = narrow ? 'narrow' : laptop ? 'laptop' : 'wide';
+  const full = useMediaQuery('(min-width: 1700px)');
+  const room: OffersRoom = narrow ? 'narrow' : laptop ? 'laptop' : full ? 'full' : 'wide';
   const ofOne = supplier !== undefined;
   const { filters, setFilters } = state;
   return (

@@ -28,8 +28,8 @@ const COLUMNS: Column[] = [
   {
     field: 'supplier',
     headerName: 'Supplier',
-    flex: 1,
-    minWidth: 136,
+    flex: 0.8,
+    minWidth: 130,
     valueGetter: (_, { supplier }) => supplier.name,
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
   },
@@ -37,8 +37,8 @@ const COLUMNS: Column[] = [
   {
     field: 'breaks',
     headerName: 'Price from a quantity',
-    flex: 1.6,
-    minWidth: 244,
+    flex: 1,
+    minWidth: 300,
     sortable: false,
     valueGetter: (_, offer) => breaksWords(offer),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -75,14 +75,14 @@ const COLUMNS: Column[] = [
 ];
 
 /** How much of a table a screen has room for. */
-export type OffersRoom = 'narrow' | 'laptop' | 'wide';
+export type OffersRoom = 'narrow' | 'laptop' | 'wide' | 'full';
 
 /** Columns to leave out: what does not fit, and the supplier where all rows are one supplier's. */
 export function hiddenOfferColumns(room: OffersRoom, ofOneSupplier: boolean): Record<string, boolean> {
   return {
     supplier: !ofOneSupplier && room !== 'narrow',
-    supplierPartNumber: room === 'wide' || (ofOneSupplier && room === 'laptop'),
-    ...(room === 'wide' ? {} : { validUntil: false }),
+    supplierPartNumber: room === 'full' || (ofOneSupplier && room !== 'narrow'),
+    ...(room === 'wide' || room === 'full' ? {} : { validUntil: false }),
     ...(room === 'narrow' ? { description: false, leadTimeDays: false, state: false, pricedOn: false } : {}),
   };
 }

@@ -2,7 +2,8 @@ import { addDays } from '@stageyard/libs/bill-of-materials';
 import { useOffers } from '../../api/hooks/useOffers';
 import type { Offer } from '../../api/types';
 import { EmptyState } from '../../components/EmptyState';
-import { breaksWords, validityWords } from '../../components/offers/offerWords';
+import { formatCount } from '../../components/figures';
+import { validityWords } from '../../components/offers/offerWords';
 import { PriceAge } from '../../components/offers/PriceAge';
 import { Sheet } from '../../components/Sheet';
 import { todayIso } from '../../components/today';
@@ -21,7 +22,6 @@ const COLUMNS: RowColumn<Offer>[] = [
   { name: 'Part', cell: (offer) => <CodeLink to={pathOf(offer)} code={offer.part.number} /> },
   { name: 'Description', wideOnly: true, cell: ({ part }) => part.description },
   { name: 'Supplier', cell: ({ supplier }) => supplier.name },
-  { name: 'Price from a quantity', wideOnly: true, cell: breaksWords },
   { name: 'Holds', cell: validityWords },
   { name: 'Price age', figure: true, cell: (offer) => <PriceAge offer={offer} short /> },
 ];
@@ -39,8 +39,14 @@ export function PricesToRenew() {
       title="Prices too old or ending soon"
       aside={
         <>
-          <MoreLink to={`/offers?ends=${SOON}&sort=validUntil`} text={`${ending.page.total} ending`} />
-          <MoreLink to="/offers?tooOld=true&state=valid&sort=pricedOn" text={`${old.page.total} too old`} />
+          <MoreLink
+            to={`/offers?ends=${SOON}&sort=validUntil`}
+            text={`${formatCount(ending.page.total)} ending`}
+          />
+          <MoreLink
+            to="/offers?tooOld=true&state=valid&sort=pricedOn"
+            text={`${formatCount(old.page.total)} too old`}
+          />
         </>
       }
       flush

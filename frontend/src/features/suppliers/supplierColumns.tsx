@@ -47,7 +47,7 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   {
     field: 'offers',
     headerName: 'Offers',
-    width: 136,
+    width: 172,
     ...right,
     valueGetter: (_, { offers }) => offersWords(offers),
   },

@@ -1,4 +1,5 @@
 import type { Supplier } from '../../api/types';
+import { formatCount } from '../../components/figures';
 import { moneyWords } from '../../components/moneyText';
 
 type FreightKind = Supplier['freight']['kind'];
@@ -59,5 +60,6 @@ export const LANGUAGE_CHOICES = Object.entries(LANGUAGE_NAMES).map(([value, name
 /** `42 open, 3 ended` */
 export function offersWords({ open, expired }: Supplier['offers']): string {
   if (open === 0 && expired === 0) return 'none';
-  return expired === 0 ? `${open} open` : `${open} open, ${expired} ended`;
+  const words = `${formatCount(open)} open`;
+  return expired === 0 ? words : `${words}, ${formatCount(expired)} ended`;
 }
