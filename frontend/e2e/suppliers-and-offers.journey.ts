@@ -44,7 +44,7 @@ for (const role of ['purchaser', 'librarian'] as const) {
       await expect(page.getByRole('row', { name: /Least order value/ })).toContainText('50.00 EUR');
 
       await page.getByRole('link', { name: 'Add offer' }).click();
-      await page.getByLabel('Part', { exact: true }).fill(part);
+      await page.getByRole('combobox', { name: 'Part', exact: true }).fill(part);
       await page.getByRole('option', { name: new RegExp(part) }).click();
       // The breaks by the keyboard alone.
       await page.getByLabel('Price, row 1').fill('12.40');
