@@ -344,7 +344,11 @@ describe('added lines', () => {
     const screws = (await bom()).lines.find(({ partNumber }) => partNumber === 'F-6');
     await booked({ key: screws?.key, partNumber: 'B-12' });
     expect((await bom()).extraLines[0]?.partNumber).toBe('B-12');
-    await booked({ key: screws?.key, partNumber: 'F-6' });
+    // A gear on an added line stands in no place of the train.
+    const { changes } = await booked({ key: screws?.key, partNumber: 'G-10' });
+    expect(changes[0]).toMatchObject({ what: 'Part', after: 'G-10, Spur gear m 2, 24 teeth' });
+    const back = await booked({ key: screws?.key, partNumber: 'F-6' });
+    expect(back.changes[0]?.before).toBe('G-10, Spur gear m 2, 24 teeth');
     expect((await swap({ key: screws?.key, partNumber: null })).status).toBe(400);
   });
 

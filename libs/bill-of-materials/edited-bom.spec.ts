@@ -159,6 +159,23 @@ describe('added lines', () => {
     expect(line?.note).toBe('Name plate');
   });
 
+  it('never share a find number, however many there are', () => {
+    const screw = newPartRef({ number: 'KW-00301', kind: 'fastener' });
+    const ids = Array.from({ length: 250 }, (_, index) => `s${index}`);
+    const screws = ids.map((id) => added({ id, partNumber: 'KW-00301', part: screw }));
+    const { lines } = build({ added: [...screws, added({ id: 'plate' })] });
+    const numbers = lines.map(({ findNumber }) => findNumber);
+    expect(new Set(numbers).size).toBe(lines.length);
+    // Block 10 holds 1001 to 1099; the hundredth screw begins above all blocks.
+    expect(
+      lines
+        .filter(({ kind }) => kind === 'fastener')
+        .map(({ findNumber }) => findNumber)
+        .slice(97, 101),
+    ).toEqual([1098, 1099, 100_100, 100_101]);
+    expect(lines.at(-1)?.findNumber).toBe(1101);
+  });
+
   it('weigh a lubricant by the litre: a pack of 5 l at 4.5 kg is 0.9 kg a litre', () => {
     const oil = newPartRef({ number: 'KW-00401', kind: 'lubricant', mass: 4.5, packVolume: 5 });
     const { lines } = build({

@@ -3,6 +3,9 @@ import { type GearDataRow } from './gear-data.js';
 import { type PartNeed } from './part-finder.js';
 import { BOM_KINDS } from './part-kinds.js';
 
+/** Find numbers of one kind. */
+const BLOCK = 100;
+
 /**
  * Merges equal parts and numbers the lines. Equal means the same number, make, material, supply, mass and gear data
  * (the mate aside), and no key of their own or the same; quantities add up, sources, notes and flags are kept. Lines stand by kind in the declared order
@@ -19,8 +22,13 @@ export function rollUp(items: readonly KitItem[]): BomLine[] {
   return BOM_KINDS.flatMap((kind, block) =>
     lines
       .filter((line) => line.kind === kind)
-      .map((line, index) => ({ findNumber: (block + 1) * 100 + index + 1, ...line })),
+      .map((line, index) => ({ findNumber: findNumber(block, index), ...line })),
   );
+}
+
+/** People may add more lines than a block of a hundred holds: the rest is numbered far above all blocks. */
+function findNumber(block: number, index: number): number {
+  return (block + 1) * (index < BLOCK - 1 ? BLOCK : BLOCK * BLOCK) + index + 1;
 }
 
 /** Where lines share a part number or a description, all but the first are told apart by a count. */

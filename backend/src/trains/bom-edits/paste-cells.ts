@@ -4,7 +4,7 @@ import { type BomPasteRowDto } from './dto/bom-paste.dto.js';
 import { DESCRIPTION_LENGTH, LINE_NOTE_LENGTH, MOST_QUANTITY } from './dto/extra-lines.dto.js';
 import { PASTE_COLUMNS, type PasteColumn, unitOfWords } from './paste-columns.js';
 
-const MOST_FIND_NUMBER = 99_999;
+const MOST_FIND_NUMBER = 999_999;
 /** Longest text of a cell that is shown again. */
 export const LONGEST_SHOWN = 80;
 

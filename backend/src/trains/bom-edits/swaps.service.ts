@@ -112,7 +112,7 @@ export class Swaps {
 
 /** The same line after the swap: a gear's by its places, since its key is the part's number. */
 function lineAfter(lines: readonly BomLine[], was: BomLine, { spec }: Train): BomLine | undefined {
-  if (!isGearLine(was)) return lines.find(({ key }) => key === was.key);
+  if (!isGearLine(was) || was.extraLineId !== undefined) return lines.find(({ key }) => key === was.key);
   const [place] = gearPlaces(was, spec);
   return lines.find(
     (line) =>
