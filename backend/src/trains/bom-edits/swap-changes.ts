@@ -12,6 +12,7 @@ export interface TrainState {
 }
 
 type Verdict = SwapChangeDto['verdict'];
+type TrainFinding = TrainFigures['findings'][number];
 
 /** What differs between two states, other than checks and prices. */
 export function swapChanges(before: TrainState, after: TrainState): SwapChangeDto[] {
@@ -24,7 +25,7 @@ export function swapChanges(before: TrainState, after: TrainState): SwapChangeDt
     ...changed('Mass of all lines', formatMass(massBefore), formatMass(massAfter)),
     ...lostAndGained('Line', otherLines(before), otherLines(after), null, null),
     ...lostAndGained('Flag', flagsOf(before), flagsOf(after), 'better', 'worse'),
-    ...lostAndGained('Finding', findingsOf(before), findingsOf(after), 'better', 'worse'),
+    ...findingChanges(before, after),
   ];
 }
 
@@ -81,6 +82,48 @@ function flagsOf({ lines }: TrainState): Set<string> {
   return new Set(lines.flatMap(({ source, flags }) => flags.map((flag) => `${source.join(', ')}: ${flag}`)));
 }
 
-function findingsOf({ figures }: TrainState): Set<string> {
-  return new Set(figures.findings.map(({ message }) => message));
+/**
+ * Findings lost, gained, and those that say something else of the same place. One that only names the other part is
+ * the same finding.
+ */
+function findingChanges(before: TrainState, after: TrainState): SwapChangeDto[] {
+  const [old, now] = [before, after].map(
+    ({ figures, line }) => new Map(figures.findings.map((finding) => [withoutPart(finding, line), finding])),
+  ) as [Map<string, TrainFinding>, Map<string, TrainFinding>];
+  const lost = [...old].filter(([text]) => !now.has(text)).map(([, finding]) => finding);
+  const gained = [...now].filter(([text]) => !old.has(text)).map(([, finding]) => finding);
+  const changes = lost.map((finding): SwapChangeDto => {
+    const index = gained.findIndex((other) => placeOf(other) === placeOf(finding));
+    const [same] = index < 0 ? [] : gained.splice(index, 1);
+    const messages = { before: finding.message, after: same?.message ?? '' };
+    return { what: 'Finding', ...messages, verdict: same ? bySeverity(finding, same) : 'better' };
+  });
+  return [
+    ...changes,
+    ...gained.map(({ message }) => ({
+      what: 'Finding',
+      before: '',
+      after: message,
+      verdict: 'worse' as const,
+    })),
+  ];
+}
+
+function withoutPart({ code, message }: TrainFinding, line: BomLine | undefined): string {
+  const number = line?.partNumber ?? null;
+  return `${code} ${number === null ? message : message.replaceAll(number, '…')}`;
+}
+
+/** What a finding is about: its rule, stage and gear. */
+function placeOf({ code, stage, message }: TrainFinding): string {
+  const [role] = /pinion|wheel/.exec(message) ?? [];
+  return JSON.stringify([code, stage, role]);
+}
+
+const SEVERITIES = ['note', 'marginal', 'fail'] as const;
+
+function bySeverity(before: TrainFinding, after: TrainFinding): Verdict {
+  const [old, now] = [SEVERITIES.indexOf(before.severity), SEVERITIES.indexOf(after.severity)];
+  if (old === now) return 'same';
+  return now < old ? 'better' : 'worse';
 }
