@@ -7,6 +7,8 @@ import { Clock } from '../common/clock.js';
 import { notFound } from '../common/errors.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery } from '../common/list-query.js';
 import { rowId } from '../common/row-id.js';
+import { statementOf } from '../database/list-statement.js';
+import { ReadThreads } from '../database/read-threads.js';
 import { OFFER_SORTS, type OfferQueryDto } from './dto/offer-query.dto.js';
 import { type OfferDto, type OfferRow, toOfferDto } from './dto/offer.dto.js';
 import { Offer } from './entities/offer.entity.js';
@@ -19,6 +21,7 @@ export class OfferReader {
     @InjectRepository(Offer) private readonly offers: Repository<Offer>,
     private readonly audit: AuditService,
     private readonly clock: Clock,
+    private readonly threads: ReadThreads,
   ) {}
 
   /** One page of the offers, the last changed first when nothing else is asked for. */
@@ -26,22 +29,13 @@ export class OfferReader {
     const list = parseListQuery(query, OFFER_SORTS);
     const rows = this.offers.createQueryBuilder('offer');
     narrowOffers(rows, query, list.text, this.today());
-    const total = await rows.getCount();
+    const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     orderOffers(rows, list.sorts);
     // Sorting ids alone keeps the sort small: whole rows are read for this page only.
-    const ids = await rows
-      .select('offer.id', 'id')
-      .offset(list.skip)
-      .limit(list.size)
-      .getRawMany<{ id: number }>();
-    return pageOf(
-      await this.byIds(
-        this.offers.manager,
-        ids.map(({ id }) => id),
-      ),
-      total,
-      list,
-    );
+    const page = statementOf(rows.select('offer.id', 'id').offset(list.skip).limit(list.size));
+    const [counted, found] = await this.threads.read(count, page);
+    const ids = (found ?? []).map(({ id }) => Number(id));
+    return pageOf(await this.byIds(this.offers.manager, ids), Number(counted?.[0]?.count ?? 0), list);
   }
 
   /** @throws ProblemError 404 */

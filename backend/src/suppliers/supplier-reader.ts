@@ -1,12 +1,14 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, Repository } from 'typeorm';
+import { type EntityManager, In, Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import { type Change } from '../audit/dto/change.js';
 import { Clock } from '../common/clock.js';
 import { notFound } from '../common/errors.js';
 import { containing } from '../common/like-text.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery } from '../common/list-query.js';
+import { statementOf } from '../database/list-statement.js';
+import { ReadThreads } from '../database/read-threads.js';
 import { type SupplierOffersDto } from './dto/supplier-offers.dto.js';
 import { SUPPLIER_SORTS, type SupplierQueryDto } from './dto/supplier-query.dto.js';
 import { NO_OFFERS, type SupplierDto, toSupplierDto } from './dto/supplier.dto.js';
@@ -19,6 +21,8 @@ const SEARCHED = ['code', 'name', 'address', 'note', 'contacts'];
 const OPEN_OFFERS = `(SELECT COUNT(*) FROM "offer" "o" WHERE "o"."supplierId" = supplier.id
   AND "o"."standing" = 'open' AND ("o"."validUntil" IS NULL OR "o"."validUntil" >= :today))`;
 
+type OfferCount = { supplierId: number } & SupplierOffersDto;
+
 /** Reads suppliers; their offers are counted by one query a page. */
 @Injectable()
 export class SupplierReader {
@@ -26,6 +30,7 @@ export class SupplierReader {
     @InjectRepository(Supplier) private readonly suppliers: Repository<Supplier>,
     private readonly audit: AuditService,
     private readonly clock: Clock,
+    private readonly threads: ReadThreads,
   ) {}
 
   /** One page; sorted by name when nothing else is asked for. */
@@ -39,18 +44,22 @@ export class SupplierReader {
       const fields = SEARCHED.map((field) => `supplier.${field} LIKE :text ESCAPE '\\'`);
       rows.andWhere(`(${fields.join(' OR ')})`, { text: containing(list.text) });
     }
+    const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     for (const { field, direction } of list.sorts) {
       if (field === 'offers') {
-        rows.addSelect(OPEN_OFFERS, 'open_offers').setParameter('today', this.today());
-        rows.addOrderBy('open_offers', direction);
+        rows.addOrderBy(OPEN_OFFERS, direction).setParameter('today', this.today());
       } else {
         rows.addOrderBy(`supplier.${field}`, direction, field === 'leadTimeDays' ? 'NULLS LAST' : undefined);
       }
     }
     if (list.sorts.length === 0) rows.addOrderBy('supplier.name', 'ASC');
-    rows.addOrderBy('supplier.id', 'ASC').offset(list.skip).limit(list.size);
-    const [found, total] = await rows.getManyAndCount();
-    return pageOf(await this.withOffers(this.suppliers.manager, found), total, list);
+    const page = rows.select('supplier.id', 'id').addOrderBy('supplier.id', 'ASC');
+    const [counted, found] = await this.threads.read(
+      count,
+      statementOf(page.offset(list.skip).limit(list.size)),
+    );
+    const ids = (found ?? []).map(({ id }) => Number(id));
+    return pageOf(await this.byIds(ids), Number(counted?.[0]?.count ?? 0), list);
   }
 
   /** @throws ProblemError 404 */
@@ -73,7 +82,8 @@ export class SupplierReader {
 
   /** A supplier with its offers counted, as a manager sees it. */
   async describe(manager: EntityManager, supplier: Supplier): Promise<SupplierDto> {
-    const offers = await this.countOffers(manager, [supplier.id]);
+    const { sql, params } = this.offersCounted([supplier.id]);
+    const offers = offersById(await manager.query<OfferCount[]>(sql, params));
     return toSupplierDto(supplier, offers.get(supplier.id) ?? NO_OFFERS);
   }
 
@@ -97,29 +107,34 @@ export class SupplierReader {
     return this.suppliers.countBy({ standing: 'active' });
   }
 
-  private async withOffers(manager: EntityManager, suppliers: Supplier[]): Promise<SupplierDto[]> {
-    const offers = await this.countOffers(
-      manager,
-      suppliers.map(({ id }) => id),
-    );
-    return suppliers.map((supplier) => toSupplierDto(supplier, offers.get(supplier.id) ?? NO_OFFERS));
+  /** Suppliers in the order of the ids, with their offers counted. */
+  private async byIds(ids: number[]): Promise<SupplierDto[]> {
+    const { sql, params } = this.offersCounted(ids);
+    const [counts] = await this.threads.read({ sql, params, keep: true });
+    const offers = offersById((counts ?? []) as unknown as OfferCount[]);
+    const suppliers = new Map((await this.suppliers.findBy({ id: In(ids) })).map((row) => [row.id, row]));
+    return ids.flatMap((id) => {
+      const supplier = suppliers.get(id);
+      return supplier ? [toSupplierDto(supplier, offers.get(id) ?? NO_OFFERS)] : [];
+    });
   }
 
-  private async countOffers(manager: EntityManager, ids: number[]): Promise<Map<number, SupplierOffersDto>> {
-    if (ids.length === 0) return new Map();
-    const marks = ids.map(() => '?').join(', ');
-    const counts = await manager.query<({ supplierId: number } & SupplierOffersDto)[]>(
-      `SELECT "supplierId", SUM("lasts") AS "open", SUM(NOT "lasts") AS "expired",
+  private offersCounted(ids: number[]): { sql: string; params: unknown[] } {
+    return {
+      sql: `SELECT "supplierId", SUM("lasts") AS "open", SUM(NOT "lasts") AS "expired",
               MIN(CASE WHEN "lasts" THEN "pricedOn" END) AS "oldestPricedOn"
        FROM (SELECT "supplierId", "pricedOn", ("validUntil" IS NULL OR "validUntil" >= ?) AS "lasts"
-             FROM "offer" WHERE "supplierId" IN (${marks}) AND "standing" = 'open')
+             FROM "offer" WHERE "supplierId" IN (SELECT "value" FROM json_each(?)) AND "standing" = 'open')
        GROUP BY "supplierId"`,
-      [this.today(), ...ids],
-    );
-    return new Map(counts.map(({ supplierId, ...offers }) => [supplierId, offers]));
+      params: [this.today(), JSON.stringify(ids)],
+    };
   }
 
   private today(): string {
     return this.clock.iso().slice(0, 10);
   }
+}
+
+function offersById(counts: OfferCount[]): Map<number, SupplierOffersDto> {
+  return new Map(counts.map(({ supplierId, ...offers }) => [supplierId, offers]));
 }

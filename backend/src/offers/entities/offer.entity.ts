@@ -8,6 +8,7 @@ import type { OfferStanding, PricePer } from '../offer-terms.js';
 @Entity('offer')
 @Index('offer_part', ['partId', 'standing'])
 @Index('offer_supplier_part', ['supplierId', 'partId'])
+@Index('offer_supplier_state', ['supplierId', 'standing', 'validUntil', 'pricedOn'])
 @Index('offer_supplier_number', ['supplierId', 'supplierPartNumber'])
 export class Offer {
   @PrimaryGeneratedColumn({ type: 'integer' })

@@ -47,6 +47,7 @@ export const SUPPLIERS = [
   )`,
   `CREATE INDEX "offer_part" ON "offer" ("partId", "standing")`,
   `CREATE INDEX "offer_supplier_part" ON "offer" ("supplierId", "partId")`,
+  `CREATE INDEX "offer_supplier_state" ON "offer" ("supplierId", "standing", "validUntil", "pricedOn")`,
   `CREATE INDEX "offer_supplier_number" ON "offer" ("supplierId", "supplierPartNumber")`,
   `CREATE INDEX "offer_valid_until" ON "offer" ("validUntil")`,
   `CREATE INDEX "offer_priced_on" ON "offer" ("pricedOn")`,
