@@ -26,7 +26,7 @@ const away = (): never => {
 };
 
 async function openAt(place: string) {
-  const user = userEvent.setup();
+  const user = userEvent.setup({ delay: null });
   renderAt('/stock/count', '/stock/count', <CountRoundView userId={`person-${person}`} />);
   await user.type(await screen.findByLabelText('Place'), `${place}{Enter}`);
   return user;
@@ -119,6 +119,24 @@ describe('counting', () => {
     expect(requests[0]?.requestKey).toBe(tried[0]);
     // The second has seen the first, which the server numbered 8.
     expect(requests.map(({ seenMovementId }) => seenMovementId)).toEqual([7, 8]);
+  });
+
+  it('has seen its own last count where the network went away right after it', async () => {
+    let isAway = false;
+    const { sent } = pretendServer({
+      ...BASE,
+      [ITEM]: () => (isAway ? away() : { body: newStockItem() }),
+      [BOOK]: { status: 201, body: newMovement({ id: 8, after: 39 }) },
+    });
+    const user = await openAt('Rack A');
+    await waitFor(() => expect(localStorage.getItem('stageyard.shelf')).toContain('KW-00017'));
+    await count(user, 'KW-00017', '39');
+    await waitFor(() => expect(counted(sent)).toHaveLength(1));
+    await screen.findByText(/· booked/);
+    isAway = true;
+    await count(user, 'KW-00017', '38');
+    await waitFor(() => expect(counted(sent)).toHaveLength(2));
+    expect(counted(sent).map(({ seenMovementId }) => seenMovementId)).toEqual([7, 8]);
   });
 
   it('finds its counts again after the page was closed', async () => {

@@ -1,7 +1,7 @@
 import { readStockItem } from '../../../api/hooks/useStockItem';
 import { asProblem, type Problem } from '../../../api/problem';
 import type { StockItem } from '../../../api/types';
-import { keptItem } from './shelfCache';
+import { type KeptItem, keptItem } from './shelfCache';
 
 /** A part that was scanned or typed. */
 export interface FoundPart {
@@ -37,7 +37,7 @@ export async function lookUp(place: string, number: string): Promise<FoundPart |
   }
 }
 
-function found({ number, description, unit, places }: StockItem, place: string): FoundPart {
+function found({ number, description, unit, places }: KeptItem, place: string): FoundPart {
   const level = places.find((each) => each.place.toLowerCase() === place.toLowerCase());
   return {
     number,

@@ -3,6 +3,7 @@ import { asProblem } from '../../../api/problem';
 import { waiting } from './countTypes';
 import { refused, taken } from './roundChanges';
 import type { RoundStore } from './roundStore';
+import { keepMovement } from './shelfCache';
 import { sendCount } from './sendCount';
 
 /** While the network is away it is tried again this often, ms. */
@@ -28,6 +29,7 @@ export function useSending(store: RoundStore, count: number): { away: boolean; t
         try {
           const movement = await sendCount(next);
           store.change((round) => taken(round, next.key, movement));
+          keepMovement(movement);
         } catch (error) {
           const problem = asProblem(error);
           // What the server could not do just now it may do later; only what it will never take is refused.
