@@ -1,3 +1,4 @@
+import { readSheet } from 'read-excel-file/node';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { type Change } from '../src/audit/dto/change.js';
 import { type Page } from '../src/common/list-query.js';
@@ -338,6 +339,15 @@ describe('added lines', () => {
     const [screws, plate] = (await bom()).extraLines;
     train = (await put({ lines: [{ ...screws, quantity: 12 }, plate] })).body;
     expect((await bom()).extraLines).toEqual([{ ...screws, quantity: 12 }, plate]);
+  });
+
+  it('and chosen parts stand in the workbook', async () => {
+    await booked({ key: 'B-12', partNumber: 'B-12X' });
+    const { bytes } = await designer.get(`${path()}/bom.xlsx`);
+    const cells = (await readSheet(bytes, 'BOM')).flat();
+    expect(cells).toEqual(expect.arrayContaining(['B-12X', 'F-6', 'Name plate']));
+    expect(cells).not.toContain('B-12');
+    await booked({ key: 'B-12', partNumber: null });
   });
 
   it('can be swapped for another part, but have none of the kit’s own', async () => {

@@ -118,7 +118,7 @@ describe('a smaller bore', () => {
       'hardened: ask whether the bore can still be machined',
     ]);
     expect(fitFor({ hubLength: 30 }, {}).toCheck).toEqual([
-      'bore 20 mm long, 10 mm shorter: see that the key fits',
+      'the bore is 20 mm long, 10 mm shorter: see that the key fits',
     ]);
   });
 });
@@ -131,7 +131,7 @@ describe('its material', () => {
     );
     expect(fits).toBe(true);
     expect(differences).toEqual([
-      'stronger material, 16MnCr5, case-hardened: σ_Hlim 1500 for 360, σ_Flim 425 for 146 N/mm²',
+      'stronger material, 16MnCr5, case-hardened: σ_Hlim 1500 for 360, σ_Flim 425 for 146 N/mm² (typical, confirm with the supplier)',
     ]);
   });
 
@@ -154,6 +154,8 @@ describe('its material', () => {
     expect(check('POM', null).toCheck).toHaveLength(1);
     expect(check(null, 'POM').toCheck).toEqual(['material POM: the original’s is not known']);
     expect(check(null, null).toCheck).toHaveLength(1);
+    // C45 so soft that the table does not rate it, in place of rated C45.
+    expect(fit({ strength: null }).toCheck).toEqual(['material C45 in place of C45: strength is not rated']);
     expect(fit({ strength: null }, { material: 'POM' })).toMatchObject({
       fits: true,
       toCheck: ['material POM in place of C45: strength is not rated'],

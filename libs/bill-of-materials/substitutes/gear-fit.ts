@@ -24,7 +24,7 @@ export function fitGear(
   const [wanted, has] = [length(original.sizes), length(candidate.sizes)];
   if (has < wanted - SAME) {
     notes.check(
-      `bore ${figure(has, 'mm')} long, ${figure(wanted - has, 'mm')} shorter: see that the key fits`,
+      `the bore is ${figure(has, 'mm')} long, ${figure(wanted - has, 'mm')} shorter: see that the key fits`,
     );
   }
 }

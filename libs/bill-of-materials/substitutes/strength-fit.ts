@@ -10,7 +10,8 @@ type Toothed = SubstitutePart & { sizes: SubstituteTeeth };
 export function compareStrength(original: Toothed, candidate: Toothed, notes: FitNotes): void {
   const [wanted, has] = [original.sizes.strength, candidate.sizes.strength];
   if (wanted && has) return compareRated(wanted, has, candidate, notes);
-  if (sameMaterial(original, candidate)) return;
+  // One rated and the other not, though of one name: its hardness is outside what the table covers.
+  if (!wanted && !has && sameMaterial(original, candidate)) return;
   const [held, needed] = [made(candidate), made(original)];
   notes.check(
     original.material === null
@@ -33,7 +34,9 @@ function compareRated(wanted: RatedStrength, has: RatedStrength, candidate: Toot
     const gains = pairs.map(
       ([name, needs, holds]) => `${name} ${figure(holds, '')} for ${figure(needs, '')}`,
     );
-    notes.differs(`stronger material, ${made(candidate)}: ${gains.join(', ')} N/mm²`);
+    notes.differs(
+      `stronger material, ${made(candidate)}: ${gains.join(', ')} N/mm² (typical, confirm with the supplier)`,
+    );
   }
 }
 
