@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { type BriefDto } from '../src/briefs/dto/brief.dto.js';
 import { type SearchSupplyDto } from '../src/option-supply/dto/search-supply.dto.js';
 import { type SearchDto } from '../src/option-searches/dto/search.dto.js';
 import { PartsLoader } from '../src/parts/parts-loader.service.js';
@@ -71,6 +72,20 @@ describe('cost and stock of the options of a search', () => {
       unpriced: 0,
       longestLeadTimeDays: 30,
     });
+  });
+
+  it('follow another build quantity of the brief, which does not make it open again', async () => {
+    const path = `/api/briefs/${search.briefId}`;
+    const { body: brief } = await designer.get<BriefDto>(path);
+    const change = (version: number, changes: object) =>
+      designer.patch<BriefDto>(path, { version, requirement: { ...brief.requirement, ...changes } });
+    const more = await change(brief.version, { buildQuantity: 7 });
+    expect(more.body).toMatchObject({ standing: 'searched', requirement: { buildQuantity: 7 } });
+    expect((await supply()).quantity).toBe(7);
+    const back = await change(brief.version + 1, {});
+    expect(back.body).toMatchObject({ standing: 'searched', requirement: { buildQuantity: 6 } });
+    const other = await change(brief.version + 2, { modules: [2.5] });
+    expect(other.body.standing).toBe('open');
   });
 
   it('take the narrower pinion once the shelf no longer covers the need', async () => {
