@@ -125,7 +125,12 @@ const surfaces: Look = {
   MuiAutocomplete: {
     styleOverrides: {
       // As high as the other fields.
-      inputRoot: { '&&.MuiInputBase-sizeSmall': { paddingBlock: 4 } },
+      root: {
+        '& .MuiOutlinedInput-root.MuiInputBase-sizeSmall': {
+          paddingBlock: 4,
+          '&:not(.MuiInputBase-adornedStart)': { paddingLeft: 2 },
+        },
+      },
       paper: ({ theme }) => ({
         marginTop: 2,
         border: `1px solid ${theme.vars.palette.line.rule}`,

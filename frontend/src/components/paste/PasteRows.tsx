@@ -58,8 +58,8 @@ export function PasteRows({ preview }: { preview: PastePreview }) {
               <TableCell align="right" sx={{ width: 52 }}>
                 Row
               </TableCell>
-              <TableCell sx={{ width: 120 }}>What happens</TableCell>
-              <TableCell sx={{ width: 220 }}>Part</TableCell>
+              <TableCell sx={{ width: { sm: 120 } }}>What happens</TableCell>
+              <TableCell sx={{ ...WIDE_ONLY, width: 230 }}>Part</TableCell>
               <TableCell>Details</TableCell>
             </TableRow>
           </TableHead>
@@ -82,19 +82,23 @@ export function PasteRows({ preview }: { preview: PastePreview }) {
 function Row({ row }: { row: PasteRow }) {
   const wrong = row.action === 'wrong';
   return (
-    <TableRow sx={{ '& > *': { verticalAlign: 'top' } }}>
+    <TableRow sx={{ '& > td': { verticalAlign: 'top' } }}>
       <TableCell align="right">{row.row}</TableCell>
       <TableCell sx={wrong ? { color: 'error.main', fontWeight: 600 } : undefined}>
         {wrong && <span aria-hidden="true">✕ </span>}
         {actionWords(row.action)}
       </TableCell>
-      <TableCell>
+      <TableCell sx={WIDE_ONLY}>
         <span className="part-number">{row.partNumber ?? NOTHING}</span>
         {row.partDescription && (
           <Box sx={{ color: 'text.secondary', fontSize: '0.75rem' }}>{row.partDescription}</Box>
         )}
       </TableCell>
       <TableCell sx={{ overflowWrap: 'anywhere' }}>
+        {/* A phone has no room for the part's own column. */}
+        <Box className="part-number" sx={{ display: { sm: 'none' } }}>
+          {row.partNumber ?? NOTHING}
+        </Box>
         {row.problems.map((problem, index) => (
           <div key={index}>{problemWords(problem)}</div>
         ))}
@@ -107,5 +111,11 @@ function Row({ row }: { row: PasteRow }) {
   );
 }
 
+const WIDE_ONLY = { display: { xs: 'none', sm: 'table-cell' } } as const;
+
 const columnWords = ({ name, from }: PastePreview['columns'][number]): string =>
-  from === null || from.toLowerCase() === name.toLowerCase() ? name : `${name} (from “${from}”)`;
+  from === null
+    ? name
+    : from.toLowerCase().startsWith(name.toLowerCase())
+      ? from
+      : `${name} (from “${from}”)`;

@@ -3,7 +3,8 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import IconButton from '@mui/material/IconButton';
 import Typography from '@mui/material/Typography';
-import type { KeyboardEvent } from 'react';
+import { useRef, type KeyboardEvent } from 'react';
+import { flushSync } from 'react-dom';
 import { useFieldArray, useWatch, type UseFormReturn } from 'react-hook-form';
 import { priceUnitWords } from '../../components/offers/offerWords';
 import { BreakCell } from './BreakCell';
@@ -22,25 +23,31 @@ interface BreakEditorProps {
  * a row that is blank takes it away.
  */
 export function BreakEditor({ form, unit }: BreakEditorProps) {
-  const { control, getValues, setFocus } = form;
+  const { control, getValues } = form;
+  const rows = useRef<HTMLDivElement>(null);
   const { fields, append, remove } = useFieldArray({ control, name: 'breaks' });
   const currency = useWatch({ control, name: 'currency' });
   const per = useWatch({ control, name: 'per' });
   const full = fields.length >= MOST_BREAKS;
 
-  const add = () => append(BLANK_BREAK, { focusName: `breaks.${fields.length}.quantity` });
+  const focus = (index: number, cell: 'quantity' | 'price') =>
+    rows.current?.querySelector<HTMLInputElement>(`[name="breaks.${index}.${cell}"]`)?.focus();
+  // The row is there before the next key is pressed, however fast somebody types.
+  const add = () => {
+    flushSync(() => append(BLANK_BREAK, { shouldFocus: false }));
+    focus(fields.length, 'quantity');
+  };
   const drop = (index: number) => {
-    remove(index);
-    const before = Math.max(0, index - 1);
-    if (fields.length > 1) setTimeout(() => setFocus(`breaks.${before}.price`));
+    flushSync(() => remove(index));
+    focus(Math.max(0, index - 1), 'price');
   };
   const onKey = (event: KeyboardEvent, index: number, cell: 'quantity' | 'price') => {
     const row = getValues(`breaks.${index}`);
     if (event.key === 'Enter' && !event.ctrlKey && !event.metaKey) {
       // Enter alone would send the form.
       event.preventDefault();
-      if (cell === 'quantity') setFocus(`breaks.${index}.price`);
-      else if (index + 1 < fields.length) setFocus(`breaks.${index + 1}.quantity`);
+      if (cell === 'quantity') focus(index, 'price');
+      else if (index + 1 < fields.length) focus(index + 1, 'quantity');
       else if (!full && row.quantity.trim() !== '') add();
     } else if (event.key === 'Backspace' && row.quantity === '' && row.price === '' && fields.length > 1) {
       event.preventDefault();
@@ -49,7 +56,7 @@ export function BreakEditor({ form, unit }: BreakEditorProps) {
   };
 
   return (
-    <Box role="group" aria-label="Price breaks">
+    <Box ref={rows} role="group" aria-label="Price breaks">
       <Box sx={{ ...gridSx, mb: 0.5 }} aria-hidden="true">
         <Typography variant="body2" color="textSecondary">
           From quantity, {unit}

@@ -7,7 +7,7 @@ export const OFFER_COLUMNS_HELP: PasteColumnsHelp = {
     { name: 'Supplier part number', hint: 'Theirs' },
     { name: 'From quantity', hint: 'Rows of one part with rising quantities become its price breaks' },
     { name: 'Price', hint: 'Or columns “Price from 1”, “Price from 10” in one row', required: true },
-    { name: 'Currency', hint: 'Such as EUR; the one chosen above where blank' },
+    { name: 'Currency', hint: 'Such as EUR; the supplier’s where blank' },
     { name: 'Per', hint: 'The price is for 1, 10, 100 or 1000' },
     { name: 'Pack', hint: 'Sold in multiples of this' },
     { name: 'Least quantity', hint: 'Of one order' },

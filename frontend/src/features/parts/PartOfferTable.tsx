@@ -56,7 +56,7 @@ function OfferRow({ offer }: { offer: Row }) {
     <TableRow
       sx={{
         '&:last-of-type > *': { borderBottom: 0 },
-        '& > *': { verticalAlign: 'top' },
+        '& > td': { verticalAlign: 'top' },
         ...(offer.chosen
           ? { boxShadow: (theme) => `inset 3px 0 0 ${theme.vars.palette.secondary.main}` }
           : {}),
