@@ -22,12 +22,15 @@ export interface PasteGround {
 export class PastePlan {
   private readonly byFind: ReadonlyMap<number, BomLine>;
   private readonly used = new Map<number, number>();
+  /** Added lines as they are told apart: two alike are one. */
+  private readonly added: Set<string>;
 
   constructor(
     readonly draft: BomDraft,
     private readonly ground: PasteGround,
   ) {
     this.byFind = new Map(ground.lines.map((line) => [line.findNumber, line]));
+    this.added = new Set(draft.bomEdits.extraLines.map(identity));
   }
 
   take(row: MappedRow<PasteColumn>): BomPasteRowDto {
@@ -115,7 +118,13 @@ export class PastePlan {
       .map((field) => `${WORDS[field]} ${was[field] || 'none'} → ${now[field] || 'none'}`);
     if (changes.length === 0) return same('The added line is like this already.');
     const summary = `Changes the added line ${line.findNumber}, ${line.description}.`;
-    return { action: 'choose', summary, changes, do: () => void Object.assign(was, now) };
+    return {
+      ...{ action: 'choose', summary, changes },
+      do: () => {
+        this.added.delete(identity(was));
+        this.added.add(identity(Object.assign(was, now)));
+      },
+    };
   }
 
   private add(reader: RowReader, read: ReadCells, part: Part | null): Outcome | null {
@@ -135,9 +144,7 @@ export class PastePlan {
       note: read.note,
     };
     checkUnit(reader, part, line);
-    if (extraLines.some((other) => JSON.stringify({ ...other, id: '' }) === JSON.stringify(line))) {
-      return same('The same line was added before.');
-    }
+    if (this.added.has(identity(line))) return same('The same line was added before.');
     if (extraLines.length >= MOST_EXTRA_LINES) {
       const most = MOST_EXTRA_LINES.toLocaleString('en-GB');
       return reader.wrong('partNumber', `A bill of materials takes at most ${most} added lines.`);
@@ -148,7 +155,10 @@ export class PastePlan {
       action: 'add',
       summary: `Adds ${line.quantity} ${line.unit} of ${name}.`,
       changes: also.map(({ findNumber, quantity, unit }) => `also on ${findNumber}: ${quantity} ${unit}`),
-      do: () => void extraLines.push({ ...line, id: this.ground.newId() }),
+      do: () => {
+        this.added.add(identity(line));
+        extraLines.push({ ...line, id: this.ground.newId() });
+      },
     };
   }
 }
@@ -167,6 +177,11 @@ const WORDS = {
   unit: 'unit',
   note: 'note',
 } as const;
+
+/** An added line but for its id. */
+function identity({ partNumber, description, quantity, unit, note }: ExtraLine): string {
+  return JSON.stringify([partNumber, description, quantity, unit, note]);
+}
 
 const same = (summary: string): Outcome => ({ action: 'same', summary, changes: [] });
 
