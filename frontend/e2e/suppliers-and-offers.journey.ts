@@ -66,7 +66,7 @@ for (const role of ['purchaser', 'librarian'] as const) {
       await expect(page).toHaveURL(/\/offers\/\d+$/);
 
       await page.goto(`/parts/${part}`);
-      const quantity = page.getByLabel('At quantity, pcs');
+      const quantity = page.getByRole('region', { name: 'Offers' }).getByLabel('At quantity, pcs');
       // 12.40; 30 × 11.10; 250 × 9.85.
       for (const [needed, total] of [
         ['1', '12.40'],
