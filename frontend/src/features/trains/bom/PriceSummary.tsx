@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { Fragment } from 'react';
 import type { TrainPrices } from '../../../api/types';
 import { formatCount, formatDay } from '../../../components/figures';
 import { moneyWords } from '../../../components/moneyText';
@@ -18,25 +19,28 @@ export function PriceSummary({ prices, short = false }: PriceSummaryProps) {
   const { totals, unpriced, buildQuantity } = prices;
   return (
     <Typography component="div" sx={{ minWidth: 0 }}>
-      <Box component="span" sx={{ color: 'text.secondary', mr: 1 }}>
-        {`For ${formatCount(buildQuantity)}:`}
+      <Box component="span" sx={{ color: 'text.secondary' }}>
+        {`For ${formatCount(buildQuantity)}: `}
       </Box>
       {totals.length === 0 && 'nothing is priced'}
       {totals.map(({ currency, minor, lines: count }, at) => (
-        <Box component="span" key={currency} sx={{ mr: 1, whiteSpace: 'nowrap' }}>
-          {at > 0 && '+ '}
-          <Box component="strong" sx={{ fontWeight: 600, fontSize: '1rem' }}>
+        <Fragment key={currency}>
+          {at > 0 && ' + '}
+          <Box component="strong" sx={{ fontWeight: 600, fontSize: '1rem', whiteSpace: 'nowrap' }}>
             {moneyWords(minor, currency)}
           </Box>
           {totals.length > 1 && (
             <Box component="span" sx={{ color: 'text.secondary' }}>{` in ${lines(count)}`}</Box>
           )}
-        </Box>
+        </Fragment>
       ))}
       {unpriced.length > 0 && (
-        <Box component="span" sx={{ color: 'warning.main', fontWeight: 600, mr: 1 }}>
-          {`without ${lines(unpriced.length)} of unknown price`}
-        </Box>
+        <>
+          {' '}
+          <Box component="span" sx={{ color: 'warning.main', fontWeight: 600 }}>
+            {`without ${lines(unpriced.length)} of unknown price`}
+          </Box>
+        </>
       )}
       {!short && <MoreFacts prices={prices} />}
     </Typography>
@@ -49,6 +53,7 @@ function MoreFacts({ prices }: Pick<PriceSummaryProps, 'prices'>) {
   return (
     <>
       <Box component="span" sx={{ color: 'text.secondary' }}>
+        {' · '}
         {[
           `${shelf.covered} of ${lines(shelf.lines)} on the shelf`,
           longestLeadTimeDays !== null && `longest lead time ${leadTimeWords(longestLeadTimeDays)}`,

@@ -36,7 +36,6 @@ const mark = { fontSize: 15, verticalAlign: '-0.18em', ml: 0.5 } as const;
 /** One line: on a laptop a single line of text, on a phone its part, words and price under each other. */
 export function PricedRow({ line: { line, priced }, on, menu, rowProps }: PricedRowProps) {
   const price = priced?.price ?? null;
-  const number = line.partNumber;
   const needed = priced ? quantityWords({ quantity: priced.needed, unit: line.unit }) : quantityWords(line);
   return (
     <TableRow hover {...rowProps} sx={{ verticalAlign: { xs: 'top', md: 'middle' } }}>
@@ -75,7 +74,7 @@ export function PricedRow({ line: { line, priced }, on, menu, rowProps }: Priced
               price?.supplier.name,
               price?.leadTimeDays != null && leadTimeWords(price.leadTimeDays),
               priced.onShelf !== null && `${formatPlain(priced.onShelf, 3)} on the shelf`,
-              ...(number === null && price === null ? [] : marksOf(priced, on)),
+              ...(price === null ? [] : marksOf(priced, on)),
             ]
               .filter(Boolean)
               .join(' · ')}
