@@ -53,6 +53,8 @@ export interface MappedTable<K extends string = string> {
 
 /** One match may be chance in a data row; two, or nothing else, is a head. */
 const HEAD_MATCHES = 2;
+/** A longer cell names no column; matching one of a million characters could keep a server busy for minutes. */
+const LONGEST_HEAD = 80;
 
 /**
  * Says what each column of a pasted table is. A first row that names two columns or more (or nothing but columns) is
@@ -96,6 +98,7 @@ function namedColumn<K extends string>(
   index: number,
   specs: readonly ColumnSpec<K>[],
 ): MappedColumn<K> | null {
+  if (cell.length > LONGEST_HEAD) return null;
   for (const { key, label, synonyms = [], series = false } of specs) {
     const name = series ? (/^(.*?\D)(\d[\d.,]*)$/s.exec(cell)?.[1] ?? '') : cell;
     if (![label, ...synonyms].some((known) => plainHead(known) === plainHead(name))) continue;
