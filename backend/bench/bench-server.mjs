@@ -5,6 +5,9 @@ import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { DEMO_PASSWORD } from '../dist/auth/demo-people.js';
 
+/** A server that does not end by itself is ended by force after this. */
+const PATIENCE_MS = 10_000;
+
 /** A server of its own process on an empty folder and a free port; `close` ends it and removes the folder. */
 export async function openBenchServer() {
   const dataDir = mkdtempSync(path.join(tmpdir(), 'stageyard-bench-'));
@@ -20,7 +23,9 @@ export async function openBenchServer() {
   const ended = new Promise((resolve) => child.once('exit', resolve));
   const close = async () => {
     if (child.connected) child.disconnect();
+    const impatience = setTimeout(() => child.kill('SIGKILL'), PATIENCE_MS);
     await ended;
+    clearTimeout(impatience);
     rmSync(dataDir, { recursive: true, force: true });
   };
   const answer = (kind) =>

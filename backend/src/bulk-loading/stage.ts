@@ -29,7 +29,7 @@ export class Stage {
     // A connection that must find its database would not make another file either; an empty one is an empty database.
     writeFileSync(file, '', { mode: 0o600 });
     database.prepare(`ATTACH ? AS "stage"`).run(file);
-    database.pragma('stage.journal_mode = OFF');
+    database.pragma('stage.journal_mode = MEMORY');
     database.pragma('stage.synchronous = OFF');
     database.exec(`
       CREATE TABLE "stage"."part" ("row" integer PRIMARY KEY, "number" text COLLATE NOCASE, "blanks" integer, ${list(PART_COLUMNS)});
@@ -54,13 +54,14 @@ export class Stage {
     if (this.parts % ROWS_AT_ONCE === 0) this.next();
     this.parts += 1;
     if (number === null) this.blanks += 1;
-    const { attributes, ...columns } = part;
-    const values = { ...columns, attributes: JSON.stringify(attributes) };
-    this.insertPart.run(row, number, this.blanks, ...PART_COLUMNS.map((column) => values[column]));
-    offers.forEach(({ supplierId, content: { breaks, ...terms } }, nth) => {
-      const offer = { ...terms, breaks: JSON.stringify(breaks) };
-      this.insertOffer.run(row, nth, supplierId, ...OFFER_COLUMNS.map((column) => offer[column]));
-    });
+    const attributes = JSON.stringify(part.attributes);
+    const columns = PART_COLUMNS.map((column) => (column === 'attributes' ? attributes : part[column]));
+    this.insertPart.run(row, number, this.blanks, columns);
+    for (const [nth, { supplierId, content }] of offers.entries()) {
+      const breaks = JSON.stringify(content.breaks);
+      const terms = OFFER_COLUMNS.map((column) => (column === 'breaks' ? breaks : content[column]));
+      this.insertOffer.run(row, nth, supplierId, terms);
+    }
     this.offers += offers.length;
     if (opening === null) return;
     this.insertOpening.run(row, opening.place, opening.thousandths);

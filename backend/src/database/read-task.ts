@@ -26,3 +26,6 @@ export interface Table {
   columns: readonly string[];
   rows: readonly (readonly unknown[])[];
 }
+
+/** What a thread answers. A failure is data, since an error of the driver loses its words between threads. */
+export type ReadReply = { tables: Table[] } | { failed: { message: string; code: string } };

@@ -1,7 +1,14 @@
 import { availableParallelism } from 'node:os';
 import { type OnApplicationShutdown } from '@nestjs/common';
 import { Piscina } from 'piscina';
-import { type ReadStatement, type ReadTask, type ReadThreadData, type Row, type Table } from './read-task.js';
+import {
+  type ReadReply,
+  type ReadStatement,
+  type ReadTask,
+  type ReadThreadData,
+  type Row,
+  type Table,
+} from './read-task.js';
 
 /** A second one, so that a quick list need not wait behind a slow one. */
 const MOST_THREADS = 2;
@@ -11,7 +18,7 @@ const MOST_THREADS = 2;
  * held. Each thread has a read-only connection of its own; what is committed is seen at once.
  */
 export class ReadThreads implements OnApplicationShutdown {
-  private readonly pool: Piscina<ReadTask, Table[]>;
+  private readonly pool: Piscina<ReadTask, ReadReply>;
 
   /**
    * @param entry built thread entry point
@@ -35,7 +42,10 @@ export class ReadThreads implements OnApplicationShutdown {
    * @throws Error of the database, for a statement that is wrong or would write
    */
   async read(...statements: ReadStatement[]): Promise<Row[][]> {
-    return (await this.pool.run({ statements })).map(rowsOf);
+    const reply = await this.pool.run({ statements });
+    if ('tables' in reply) return reply.tables.map(rowsOf);
+    const { message, code } = reply.failed;
+    throw Object.assign(new Error(message), { code });
   }
 
   async onApplicationShutdown(): Promise<void> {

@@ -1,5 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { type EntityManager } from 'typeorm';
+import { openWritingSource } from './data-sources.js';
 import { openTempDatabase, type TempDatabase } from '../testing/temp-database.js';
 import { UserEntity } from '../users/entities/user.entity.js';
 
@@ -82,6 +83,31 @@ describe('WriteQueue', () => {
     });
     await later;
     expect(await ids()).toEqual(['first', 'later']);
+  });
+
+  it('gives a turn to a thread that writes, in the order of the calls, and takes it back when it fails', async () => {
+    const events: string[] = [];
+    const turn = async () => {
+      events.push('turn begins');
+      // Another connection can write: the queue itself holds no transaction meanwhile.
+      const other = await openWritingSource(database.dataDir);
+      await other.manager.insert(UserEntity, user('of the thread'));
+      await other.destroy();
+      events.push('turn ends');
+    };
+    const leased = database.queue.lease(turn);
+    const after = database.queue.run(async (manager) => {
+      events.push('write');
+      await insert('after')(manager);
+    });
+    await Promise.all([leased, after]);
+    expect(events).toEqual(['turn begins', 'turn ends', 'write']);
+    expect(await ids()).toEqual(['after', 'of the thread']);
+    await expect(database.queue.lease(() => Promise.reject(new Error('the reason')))).rejects.toThrow(
+      'the reason',
+    );
+    await database.queue.run(insert('next'));
+    expect(await ids()).toContain('next');
   });
 
   it('makes a stray save on the default source fail, with nothing written', async () => {

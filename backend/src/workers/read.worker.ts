@@ -1,8 +1,14 @@
 import { workerData } from 'node:worker_threads';
-import type BetterSqlite3 from 'better-sqlite3';
+import Database from 'better-sqlite3';
 import { openReading } from '../database/connection.js';
 import { KeptTables } from '../database/kept-tables.js';
-import { type ReadStatement, type ReadTask, type ReadThreadData, type Table } from '../database/read-task.js';
+import {
+  type ReadReply,
+  type ReadStatement,
+  type ReadTask,
+  type ReadThreadData,
+  type Table,
+} from '../database/read-task.js';
 
 const database = openReading((workerData as ReadThreadData).file);
 const kept = new KeptTables();
@@ -10,7 +16,7 @@ const kept = new KeptTables();
 /** A statement whose rows come as arrays, with the names of its columns. */
 interface Prepared {
   columns: string[];
-  statement: BetterSqlite3.Statement<unknown[], unknown[]>;
+  statement: Database.Statement<unknown[], unknown[]>;
 }
 
 const known = new Map<string, Prepared>();
@@ -38,9 +44,17 @@ function tableOf({ sql, params, whole }: ReadStatement): Table {
 }
 
 /** Thread entry point: reads lists on a connection of its own. */
-export default function read({ statements }: ReadTask): Table[] {
-  return database.transaction(() => {
-    kept.of(Number(database.pragma('data_version', { simple: true })));
-    return statements.map((one) => (one.keep ? kept.get(one, tableOf) : tableOf(one)));
-  })();
+export default function read({ statements }: ReadTask): ReadReply {
+  try {
+    return { tables: readTables(statements) };
+  } catch (error) {
+    if (!(error instanceof Database.SqliteError)) throw error;
+    return { failed: { message: error.message, code: error.code } };
+  }
 }
+
+/** All statements on the same state of the database. */
+const readTables = database.transaction((statements: readonly ReadStatement[]): Table[] => {
+  kept.of(Number(database.pragma('data_version', { simple: true })));
+  return statements.map((one) => (one.keep ? kept.get(one, tableOf) : tableOf(one)));
+});

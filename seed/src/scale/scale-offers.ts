@@ -6,15 +6,17 @@ import { type ScaleSupplier } from './scale-suppliers.js';
 type Offers = NonNullable<BulkRow['offers']>;
 
 const DAY_MS = 86_400_000;
-/** Days that were written before: a large set names the same few hundred again and again. */
-const written = new Map<string, string>();
+/** Days counted from one day, each written once: a large set names the same few hundred again and again. */
+let written = new Map<number, string>();
+let writtenFrom = '';
 
 function dayFrom(today: string, days: number): string {
-  const key = `${today} ${days}`;
-  const known = written.get(key);
+  if (today !== writtenFrom) written = new Map();
+  writtenFrom = today;
+  const known = written.get(days);
   if (known !== undefined) return known;
   const day = new Date(Date.parse(today) + days * DAY_MS).toISOString().slice(0, 10);
-  written.set(key, day);
+  written.set(days, day);
   return day;
 }
 
