@@ -1,5 +1,5 @@
 import type { Movement, MovementKind, StockItem } from '../../api/types';
-import { formatPlain, formatSigned, NOTHING } from '../figures';
+import { formatSigned, NOTHING } from '../figures';
 
 export const MOVEMENT_KINDS: readonly MovementKind[] = ['received', 'issued', 'counted', 'corrected'];
 
@@ -11,9 +11,15 @@ export const ACT_NAMES: Record<MovementKind, string> = {
   corrected: 'Correct',
 };
 
+/** A quantity without its unit: `1,250`, `0.5`; `–` for null. */
+export function figureWords(quantity: number | null): string {
+  if (quantity === null) return NOTHING;
+  return quantity.toLocaleString('en-GB', { maximumFractionDigits: 3 }).replace('-', '−');
+}
+
 /** `12 pcs`, `1.25 l`; thousands parted. */
 export function quantityWords(quantity: number, unit: string): string {
-  return `${quantity.toLocaleString('en-GB', { maximumFractionDigits: 3 })} ${unit}`;
+  return `${figureWords(quantity)} ${unit}`;
 }
 
 /** `+3`, `−2`, `±0` for a count that found what was expected. */
@@ -32,14 +38,14 @@ export function bookedWords({ number, kind, change, counted, after, unit, place 
 /** How much is missing to the least stock; `–` when the part is not watched or has enough. */
 export function shortWords({ low, leastStock, quantity }: StockItem): string {
   if (!low || leastStock === null) return NOTHING;
-  return formatPlain(leastStock - quantity, 3);
+  return figureWords(leastStock - quantity);
 }
 
 /** `Rack A: 12, Rack B: 3`; places with none left only where there is no other: that is where it belongs. */
 export function placesWords({ places }: StockItem): string {
   const filled = places.filter(({ quantity }) => quantity > 0);
   const words = (filled.length > 0 ? filled : places).map(
-    ({ place, quantity }) => `${place}: ${formatPlain(quantity, 3)}`,
+    ({ place, quantity }) => `${place}: ${figureWords(quantity)}`,
   );
   return words.length > 0 ? words.join(', ') : NOTHING;
 }

@@ -2,9 +2,8 @@ import { useMe } from '../../api/hooks/useMe';
 import { useStock } from '../../api/hooks/useStock';
 import type { StockItem } from '../../api/types';
 import { EmptyState } from '../../components/EmptyState';
-import { formatPlain } from '../../components/figures';
 import { Sheet } from '../../components/Sheet';
-import { shortWords } from '../../components/stock/stockWords';
+import { figureWords, quantityWords, shortWords } from '../../components/stock/stockWords';
 import { CodeLink } from './CodeLink';
 import { MoreLink } from './MoreLink';
 import { RowTable, type RowColumn } from './RowTable';
@@ -16,8 +15,8 @@ const pathOf = (item: StockItem) => `/parts/${encodeURIComponent(item.number)}`;
 const COLUMNS: RowColumn<StockItem>[] = [
   { name: 'Number', cell: (item) => <CodeLink to={pathOf(item)} code={item.number} /> },
   { name: 'Description', cell: (item) => item.description },
-  { name: 'On shelf', figure: true, cell: (item) => `${formatPlain(item.quantity, 3)} ${item.unit}` },
-  { name: 'Least', figure: true, wideOnly: true, cell: (item) => formatPlain(item.leastStock, 3) },
+  { name: 'On shelf', figure: true, cell: (item) => quantityWords(item.quantity, item.unit) },
+  { name: 'Least', figure: true, wideOnly: true, cell: (item) => figureWords(item.leastStock) },
   { name: 'Short by', figure: true, cell: shortWords },
 ];
 

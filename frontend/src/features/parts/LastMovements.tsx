@@ -9,8 +9,8 @@ import { useMemo } from 'react';
 import { useMovements } from '../../api/hooks/useMovements';
 import { CopyTable } from '../../components/CopyTable';
 import { ErrorState } from '../../components/ErrorState';
-import { formatPlain, formatWhen } from '../../components/figures';
-import { changeWords } from '../../components/stock/stockWords';
+import { formatWhen } from '../../components/figures';
+import { changeWords, figureWords } from '../../components/stock/stockWords';
 
 /** Movements that a part's page shows; the whole ledger is one click away. */
 const SHOWN = 5;
@@ -37,7 +37,9 @@ export function LastMovements({ number }: { number: string }) {
               <TableCell>When</TableCell>
               <TableCell>What</TableCell>
               <TableCell align="right">Change</TableCell>
-              <TableCell align="right">Then there</TableCell>
+              <TableCell align="right" sx={WIDE}>
+                Then there
+              </TableCell>
               <TableCell>Place</TableCell>
               <TableCell sx={WIDE}>Why</TableCell>
               <TableCell sx={WIDE}>By</TableCell>
@@ -49,7 +51,9 @@ export function LastMovements({ number }: { number: string }) {
                 <TableCell>{formatWhen(movement.at)}</TableCell>
                 <TableCell>{movement.kind}</TableCell>
                 <TableCell align="right">{changeWords(movement.change)}</TableCell>
-                <TableCell align="right">{formatPlain(movement.after, 3)}</TableCell>
+                <TableCell align="right" sx={WIDE}>
+                  {figureWords(movement.after)}
+                </TableCell>
                 <TableCell>{movement.place}</TableCell>
                 <TableCell sx={WIDE}>{movement.reason}</TableCell>
                 <TableCell sx={WIDE}>{movement.by}</TableCell>

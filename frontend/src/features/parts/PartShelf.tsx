@@ -15,12 +15,12 @@ import type { MovementKind, StockItem } from '../../api/types';
 import { CopyTable } from '../../components/CopyTable';
 import { EmptyState } from '../../components/EmptyState';
 import { ErrorState } from '../../components/ErrorState';
-import { formatDay, formatPlain } from '../../components/figures';
+import { formatDay } from '../../components/figures';
 import { LoadingRows } from '../../components/LoadingRows';
 import { Sheet } from '../../components/Sheet';
 import { LeastStockDialog } from '../../components/stock/LeastStockDialog';
 import { MovementDialog } from '../../components/stock/MovementDialog';
-import { ACT_NAMES, MOVEMENT_KINDS, quantityWords } from '../../components/stock/stockWords';
+import { ACT_NAMES, figureWords, MOVEMENT_KINDS, quantityWords } from '../../components/stock/stockWords';
 import { LastMovements } from './LastMovements';
 
 /** Where the part lies and how much of it; booking and the least stock for those who may. */
@@ -116,7 +116,7 @@ function Places({ item }: { item: StockItem }) {
           {item.places.map(({ place, quantity, countedAt }) => (
             <TableRow key={place}>
               <TableCell>{place}</TableCell>
-              <TableCell align="right">{formatPlain(quantity, 3)}</TableCell>
+              <TableCell align="right">{figureWords(quantity)}</TableCell>
               <TableCell align="right">{countedAt === null ? 'never' : formatDay(countedAt)}</TableCell>
             </TableRow>
           ))}

@@ -1,8 +1,8 @@
 import { Link } from 'react-router-dom';
 import type { Movement } from '../../api/types';
-import { formatDay, formatPlain, formatWhen } from '../../components/figures';
+import { formatDay, formatWhen } from '../../components/figures';
 import type { CopiedCell, DataColumn } from '../../components/gridText';
-import { changeWords } from '../../components/stock/stockWords';
+import { changeWords, figureWords } from '../../components/stock/stockWords';
 
 type Column = DataColumn<Movement>;
 
@@ -55,7 +55,7 @@ const COLUMNS: Column[] = [
     sortable: false,
     align: 'right',
     headerAlign: 'right',
-    valueFormatter: (after: number) => formatPlain(after, 3),
+    valueFormatter: (after: number) => figureWords(after),
   },
   { field: 'unit', headerName: 'Unit', width: 52, sortable: false },
   {

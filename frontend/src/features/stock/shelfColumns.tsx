@@ -2,9 +2,9 @@ import Box from '@mui/material/Box';
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import type { StockItem } from '../../api/types';
-import { formatDay, formatPlain, NOTHING } from '../../components/figures';
+import { formatDay, NOTHING } from '../../components/figures';
 import type { CopiedCell, DataColumn } from '../../components/gridText';
-import { placesWords, shortWords } from '../../components/stock/stockWords';
+import { figureWords, placesWords, quantityWords, shortWords } from '../../components/stock/stockWords';
 
 type Column = DataColumn<StockItem>;
 
@@ -60,11 +60,11 @@ const COLUMNS: Column[] = [
   {
     ...figure('quantity', 'On shelf', 96),
     copied: ({ quantity }) => quantity,
-    valueGetter: (_, { quantity, unit }) => `${formatPlain(quantity, 3)} ${unit}`,
+    valueGetter: (_, { quantity, unit }) => quantityWords(quantity, unit),
   },
   {
     ...figure('leastStock', 'Least', 76),
-    valueFormatter: (value: number | null) => formatPlain(value, 3),
+    valueFormatter: (value: number | null) => figureWords(value),
   },
   {
     ...figure('shortBy', 'Short by', 88),
@@ -111,7 +111,7 @@ export function shelfColumns(narrow: boolean): Column[] {
     if (column.field === 'quantity') {
       const renderCell: Column['renderCell'] = ({ row }) => (
         <span>
-          {formatPlain(row.quantity, 3)} {row.unit} {row.low && <Low>low</Low>}
+          {quantityWords(row.quantity, row.unit)} {row.low && <Low>low</Low>}
         </span>
       );
       return { ...column, width: 104, renderCell };

@@ -139,7 +139,7 @@ describe('counting', () => {
     expect(counted(sent).map(({ seenMovementId }) => seenMovementId)).toEqual([7, 8]);
   });
 
-  it('finds its counts again after the page was closed', async () => {
+  it('writes each count to the device at once, so that a closed page loses none', async () => {
     pretendServer({ ...BASE, [BOOK]: away });
     const user = await openAt('Rack A');
     await count(user, 'KW-00017', '39');
