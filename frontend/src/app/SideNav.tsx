@@ -10,7 +10,7 @@ interface Place {
   to: string;
   name: string;
   needs: Permission | null;
-  count: 'briefs' | 'trains' | 'parts' | null;
+  count: 'briefs' | 'trains' | 'parts' | 'suppliers' | null;
 }
 
 const PLACES: Place[] = [
@@ -18,7 +18,7 @@ const PLACES: Place[] = [
   { to: '/briefs', name: 'Briefs', needs: 'briefs.read', count: 'briefs' },
   { to: '/trains', name: 'Trains', needs: 'trains.read', count: 'trains' },
   { to: '/parts', name: 'Parts', needs: 'parts.read', count: 'parts' },
-  { to: '/suppliers', name: 'Suppliers', needs: 'prices.read', count: null },
+  { to: '/suppliers', name: 'Suppliers', needs: 'prices.read', count: 'suppliers' },
   { to: '/offers', name: 'Offers', needs: 'prices.read', count: null },
   { to: '/stock', name: 'Stock', needs: 'stock.read', count: null },
   { to: '/people', name: 'People', needs: 'people.manage', count: null },
