@@ -38,16 +38,18 @@ export function PricesToRenew() {
     <Sheet
       title="Prices too old or ending soon"
       aside={
-        <>
-          <MoreLink
-            to={`/offers?ends=${SOON}&sort=validUntil`}
-            text={`${formatCount(ending.page.total)} ending`}
-          />
-          <MoreLink
-            to="/offers?tooOld=true&state=valid&sort=pricedOn"
-            text={`${formatCount(old.page.total)} too old`}
-          />
-        </>
+        rows.length > 0 && (
+          <>
+            <MoreLink
+              to={`/offers?ends=${SOON}&sort=validUntil`}
+              text={`${formatCount(ending.page.total)} ending`}
+            />
+            <MoreLink
+              to="/offers?tooOld=true&state=valid&sort=pricedOn"
+              text={`${formatCount(old.page.total)} too old`}
+            />
+          </>
+        )
       }
       flush
     >
