@@ -1,4 +1,4 @@
-import useSWR from 'swr';
+import useSWR, { type SWRResponse } from 'swr';
 import { answer, api } from '../client';
 import type {
   BomPasteBooked,
@@ -12,7 +12,11 @@ import type {
 import { keepTrain } from './useTrain';
 
 /** Parts that could take the place of a line's, the soonest there first. */
-export function useLineSubstitutes(code: string, key: string, quantity: number) {
+export function useLineSubstitutes(
+  code: string,
+  key: string,
+  quantity: number,
+): SWRResponse<Substitutes, unknown> {
   return useSWR<Substitutes, unknown>(['/api/trains/{code}/substitutes', code, key, quantity], () =>
     answer(
       api.GET('/api/trains/{code}/substitutes', { params: { path: { code }, query: { key, quantity } } }),

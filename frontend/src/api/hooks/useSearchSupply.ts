@@ -1,4 +1,4 @@
-import useSWR from 'swr';
+import useSWR, { type SWRResponse } from 'swr';
 import { answer, api } from '../client';
 import type { OptionSupply, SearchSupply } from '../types';
 
@@ -9,7 +9,10 @@ export type SupplyByOption = ReadonlyMap<string, OptionSupply>;
  * Cost and stock of every option of a finished search at a build quantity.
  * @param quantity null: nothing is asked (no build quantity named, or prices are not for this person)
  */
-export function useSearchSupply(searchId: string | null, quantity: number | null) {
+export function useSearchSupply(
+  searchId: string | null,
+  quantity: number | null,
+): SWRResponse<SearchSupply, unknown> {
   const asked = searchId === null || quantity === null ? null : { searchId, quantity };
   return useSWR<SearchSupply, unknown>(
     asked && ['/api/searches/{id}/supply', asked.searchId, asked.quantity],

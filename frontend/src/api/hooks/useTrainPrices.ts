@@ -1,4 +1,4 @@
-import useSWR from 'swr';
+import useSWR, { type SWRResponse } from 'swr';
 import { answer, api } from '../client';
 import type { BuyingInput, Train, TrainPrices } from '../types';
 import { keepTrain } from './useTrain';
@@ -15,7 +15,7 @@ export function useTrainPrices(
   { code, version }: Pick<Train, 'code' | 'version'>,
   prefer: Prefer,
   allowed: boolean,
-) {
+): SWRResponse<TrainPrices, unknown> {
   return useSWR<TrainPrices, unknown>(
     allowed ? ['/api/trains/{code}/prices', code, version, prefer] : null,
     () => answer(api.GET('/api/trains/{code}/prices', { params: { path: { code }, query: { prefer } } })),
