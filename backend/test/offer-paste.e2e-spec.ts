@@ -1,3 +1,4 @@
+import { addDays, calendarDay } from '@stageyard/libs/bill-of-materials';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { PartsLoader } from '../src/parts/parts-loader.service.js';
 import { newOffer, newSupplier } from '../src/testing/new-offer.js';
@@ -40,8 +41,7 @@ interface Refusal {
   current?: Preview;
 }
 
-const DAY_MS = 86_400_000;
-const day = (offset: number) => new Date(Date.now() + offset * DAY_MS).toISOString().slice(0, 10);
+const day = (offset: number) => addDays(calendarDay(new Date()), offset);
 
 let server: TestServer;
 let purchaser: Client;

@@ -1,3 +1,4 @@
+import { calendarDay } from '@stageyard/libs/bill-of-materials';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { newGear } from '../src/testing/new-part.js';
 import { type Answer, type Client, startServer, type TestServer } from './harness.js';
@@ -201,7 +202,7 @@ describe('the ledger over HTTP', () => {
       const path = `/api/stock/movements?part=${number.toLowerCase()}&${query}`;
       return (await purchaser.get<{ items: Movement[] }>(path)).body.items.map(({ change }) => change);
     };
-    const today = new Date().toISOString().slice(0, 10);
+    const today = calendarDay(new Date());
     expect(await found('')).toEqual([-2, 6]);
     expect(await found('sort=at')).toEqual([6, -2]);
     expect(await found('kind=issued')).toEqual([-2]);

@@ -1,3 +1,4 @@
+import { calendarDay } from '@stageyard/libs/bill-of-materials';
 import { openWriting } from '../database/connection.js';
 import { badInput, type FieldIssue } from '../common/errors.js';
 import { type Supplier } from '../suppliers/entities/supplier.entity.js';
@@ -53,7 +54,7 @@ async function fill(
 ): Promise<void> {
   const { default: rows } = (await import(source.module)) as { default: BulkRows };
   const findings: FieldIssue[] = [];
-  const today = at.slice(0, 10);
+  const today = calendarDay(new Date(at));
   let index = 0;
   for await (const row of rows(source.options)) {
     try {

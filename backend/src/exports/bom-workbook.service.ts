@@ -23,7 +23,8 @@ export class BomWorkbookService {
     const prices = await this.prices.ofBom(record.bom, buildQuantity, choices);
     return {
       name: workbookName(record.train),
-      bytes: await bomWorkbook({ ...record, prices }, this.clock.now()),
+      // The same day as the offers are of; the sheets write dates in UTC.
+      bytes: await bomWorkbook({ ...record, prices }, new Date(`${this.clock.today()}T00:00:00Z`)),
     };
   }
 }

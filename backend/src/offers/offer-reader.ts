@@ -72,7 +72,7 @@ export class OfferReader {
 
   /** The day that states and ages are counted from, ISO 8601. */
   today(): string {
-    return this.clock.iso().slice(0, 10);
+    return this.clock.today();
   }
 }
 

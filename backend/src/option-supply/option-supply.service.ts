@@ -41,7 +41,7 @@ export class OptionSupplyService {
     }
     const gears = await this.match(options.flatMap(({ needs }) => needs));
     const numbers = [...new Set([...gears.values()].flatMap((gear) => gear?.number ?? []))];
-    const on = this.clock.iso().slice(0, 10);
+    const on = this.clock.today();
     const pricer = new OptionPricer(await this.offers.forParts(numbers), on);
     const answer: SearchSupplyDto = { quantity, options: [] };
     for (const { key, needs } of options) {

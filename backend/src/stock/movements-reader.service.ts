@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import { addDays } from '@stageyard/libs/bill-of-materials';
 import { InjectRepository } from '@nestjs/typeorm';
 import { Repository } from 'typeorm';
 import { containing } from '../common/like-text.js';
@@ -29,8 +30,8 @@ export class MovementsReader {
     if (query.part) rows.andWhere('part.number = :part', { part: query.part.trim() });
     if (query.place) rows.andWhere('movement.place = :place', { place: query.place.trim() });
     if (query.kind) rows.andWhere('movement.kind = :kind', { kind: query.kind });
-    if (query.from) rows.andWhere('movement.at >= :from', { from: query.from });
-    if (query.until) rows.andWhere('movement.at <= :until', { until: `${query.until}T23:59:59.999Z` });
+    if (query.from) rows.andWhere('movement.at >= :from', { from: startOf(query.from) });
+    if (query.until) rows.andWhere('movement.at < :end', { end: startOf(addDays(query.until, 1)) });
     if (list.text) rows.andWhere(TEXT, { text: containing(list.text) });
     const [movements, total] = await rows.getManyAndCount();
     return pageOf(
@@ -39,4 +40,9 @@ export class MovementsReader {
       list,
     );
   }
+}
+
+/** When a day began where the server stands, as moments are stored: ISO 8601, UTC. Without a zone it is local time. */
+function startOf(day: string): string {
+  return new Date(`${day}T00:00:00`).toISOString();
 }

@@ -39,7 +39,7 @@ export class SupplyOfParts {
     const mayPrice = user.permissions.includes('prices.read');
     const offers = mayPrice ? await this.offers.forParts(numbers) : new Map<string, PartOffer[]>();
     const rules = {
-      on: this.clock.iso().slice(0, 10),
+      on: this.clock.today(),
       prefer: 'arrival',
       currency: HOUSE_RULES.currency,
     } as const;

@@ -47,7 +47,7 @@ export class SupplierReader {
     const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     for (const { field, direction } of list.sorts) {
       if (field === 'offers') {
-        rows.addOrderBy(OPEN_OFFERS, direction).setParameter('today', this.today());
+        rows.addOrderBy(OPEN_OFFERS, direction).setParameter('today', this.clock.today());
       } else {
         rows.addOrderBy(`supplier.${field}`, direction, field === 'leadTimeDays' ? 'NULLS LAST' : undefined);
       }
@@ -126,12 +126,8 @@ export class SupplierReader {
        FROM (SELECT "supplierId", "pricedOn", ("validUntil" IS NULL OR "validUntil" >= ?) AS "lasts"
              FROM "offer" WHERE "supplierId" IN (SELECT "value" FROM json_each(?)) AND "standing" = 'open')
        GROUP BY "supplierId"`,
-      params: [this.today(), JSON.stringify(ids)],
+      params: [this.clock.today(), JSON.stringify(ids)],
     };
-  }
-
-  private today(): string {
-    return this.clock.iso().slice(0, 10);
   }
 }
 

@@ -91,7 +91,7 @@ export class BuyingService {
     // A choice for a part that has left the train can still be taken back.
     const chosen = new Map(Object.keys(train.offerChoices ?? {}).map((number) => [lower(number), number]));
     const offers = await this.offers.forParts([...onTrain.values()]);
-    const on = this.clock.iso().slice(0, 10);
+    const on = this.clock.today();
     const issues: FieldIssue[] = [];
     const checked = choices.map(({ partNumber: asked, offerId = null }, index): CheckedChoice => {
       const known = onTrain.get(lower(asked));

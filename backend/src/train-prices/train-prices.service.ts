@@ -41,7 +41,7 @@ export class TrainPricesService {
   ): Promise<TrainPricesDto> {
     const numbers = [...new Set(bom.lines.flatMap(({ partNumber }) => partNumber ?? []))];
     const [offers, levels] = await Promise.all([this.offers.forParts(numbers), this.levels.ofParts(numbers)]);
-    const on = this.clock.iso().slice(0, 10);
+    const on = this.clock.today();
     return priceTrain(bom.lines, { buildQuantity, on, prefer, offers, levels, choices });
   }
 }

@@ -86,7 +86,7 @@ export class StockGears {
 
   private async ask(sql: string, asked: readonly Question[]): Promise<MatchRow[]> {
     if (asked.length === 0) return [];
-    const on = this.clock.iso().slice(0, 10);
+    const on = this.clock.today();
     const [rows = []] = await this.threads.read({ sql, params: [JSON.stringify(asked), on, on] });
     return rows as unknown as MatchRow[];
   }

@@ -4682,9 +4682,9 @@ export interface operations {
         /** @description Place, whole, whatever its case */
         place?: string;
         kind?: components['schemas']['MovementKind'];
-        /** @description First day (UTC) */
+        /** @description First day, where the server stands */
         from?: string;
-        /** @description Last day (UTC) */
+        /** @description Last day, where the server stands */
         until?: string;
       };
       header?: never;

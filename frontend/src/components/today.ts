@@ -1,5 +1,6 @@
+import { calendarDay } from '@stageyard/libs/bill-of-materials';
+
 /** Today in the reader's own time zone, `YYYY-MM-DD`. */
 export function todayIso(now = new Date()): string {
-  const two = (figure: number) => String(figure).padStart(2, '0');
-  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
+  return calendarDay(now);
 }

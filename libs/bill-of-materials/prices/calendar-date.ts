@@ -13,6 +13,13 @@ export function isCalendarDate(text: string): boolean {
   return date.getUTCMonth() === month - 1 && date.getUTCDate() === day;
 }
 
+/** The day of a moment on the calendar of this machine's time zone, as ISO 8601 writes it. */
+export function calendarDay(moment: Date): string {
+  const two = (figure: number) => String(figure).padStart(2, '0');
+  const year = String(moment.getFullYear()).padStart(4, '0');
+  return `${year}-${two(moment.getMonth() + 1)}-${two(moment.getDate())}`;
+}
+
 /** Calendar days from one ISO 8601 date to another, below 0 when `to` is earlier. Both must be calendar dates. */
 export function daysBetween(from: string, to: string): number {
   return Math.round((Date.parse(`${to}T00:00:00Z`) - Date.parse(`${from}T00:00:00Z`)) / DAY_MS);

@@ -1,7 +1,7 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { InputError } from '../../units/index.js';
 import { newCandidate } from '../testing/offer-builder.js';
-import { addDays, chooseOffer, daysBetween, offerState, priceAge } from './index.js';
+import { addDays, calendarDay, chooseOffer, daysBetween, offerState, priceAge } from './index.js';
 
 const RULES = { on: '2026-06-15', prefer: 'price', currency: 'EUR' } as const;
 const price = (unitPrice: number) => ({ breaks: [{ quantity: 1, unitPrice }] });
@@ -31,6 +31,17 @@ describe('state and age of an offer', () => {
     expect(priceAge('2026-07-01', '2026-06-15')).toBe(0);
     expect(daysBetween('2026-03-28', '2026-03-30')).toBe(2);
     expect(addDays('2026-01-01', -1)).toBe('2025-12-31');
+  });
+
+  it.each([
+    // 30 November, 20:30 in Greenwich: the next morning 13 hours to the east, the same day 10 hours to the west.
+    ['Pacific/Auckland', '2026-12-01'],
+    ['UTC', '2026-11-30'],
+    ['Pacific/Honolulu', '2026-11-30'],
+  ])('says what day it is in %s', (zone, day) => {
+    vi.stubEnv('TZ', zone);
+    expect(calendarDay(new Date('2026-11-30T20:30:00Z'))).toBe(day);
+    vi.unstubAllEnvs();
   });
 });
 

@@ -1,4 +1,4 @@
-export { addDays, daysBetween, isCalendarDate } from './calendar-date.js';
+export { addDays, calendarDay, daysBetween, isCalendarDate } from './calendar-date.js';
 export { checkOfferTerms, OFFER_LIMITS } from './check-offer.js';
 export {
   chooseOffer,

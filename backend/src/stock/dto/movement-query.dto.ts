@@ -36,9 +36,9 @@ export class MovementQueryDto extends ListQueryDto {
   @IsIn(MOVEMENT_KINDS)
   kind?: MovementKind;
 
-  @FilterDay('First day (UTC)')
+  @FilterDay('First day, where the server stands')
   from?: string;
 
-  @FilterDay('Last day (UTC)')
+  @FilterDay('Last day, where the server stands')
   until?: string;
 }
