@@ -244,8 +244,14 @@ describe('pasted rows', () => {
     ['a quantity of 1e12', () => [['', 'F-001', '1000000000000']], 'Quantity', 'too large'],
     ['a quantity that can be read two ways', () => [['', 'F-001', '1,500']], 'Quantity', 'two ways'],
     ['four decimals of a litre', () => [['', 'L-68', '0.0001']], 'Quantity', 'decimals'],
-    ['a cell too many', () => [['', 'F-001', 1, 'pcs', '', '', 'what?']], '', 'beyond the 6 columns'],
-    ['a long description', () => [['', '', 1, '', 'x'.repeat(201)]], 'Description', 'At most 200'],
+    [
+      'a cell too many',
+      () => [['', 'F-001', 1, 'pcs', '', '', 'what?']],
+      '',
+      'more cells than there are columns',
+    ],
+    ['a long description', () => [['', '', 1, '', 'x'.repeat(201)]], 'Description', 'at most 200'],
+    ['a control character', () => [['', '', 1, '', 'a bell \u0007']], 'Description', 'cannot be shown'],
   ])('are wrong with %s', async (_, rowsFor, column, words) => {
     const { body } = await preview(table(...rowsFor(await bearings())));
     expect(body.rows[0]).toMatchObject({ action: 'wrong' });

@@ -2,7 +2,8 @@ import { Injectable } from '@nestjs/common';
 import { mapColumns, type MappedTable, readTable } from '@stageyard/libs/bill-of-materials';
 import { DataSource, type EntityManager } from 'typeorm';
 import { type AuditRecord } from '../../audit/audit.service.js';
-import { badInput, conflict, type ProblemError } from '../../common/errors.js';
+import { badInput, type ProblemError } from '../../common/errors.js';
+import { previewOutdated, wrongRows } from '../../common/paste/answers.js';
 import { politePause } from '../../common/polite-pause.js';
 import { WriteQueue } from '../../database/write-queue.js';
 import { SupplierReader } from '../../suppliers/supplier-reader.js';
@@ -18,9 +19,6 @@ import { previewOf } from './paste-preview.js';
 import { readRow, type StatedRow } from './read-row.js';
 
 type Pause = () => Promise<void>;
-
-/** Wrong rows named by one refusal. */
-const MOST_NAMED = 20;
 
 interface Planned {
   plan: PlannedOffer[];
@@ -53,8 +51,8 @@ export class OfferPaste {
     const pause = politePause();
     return this.queue.run(async (manager) => {
       const { plan, preview, supplier } = await this.plan(manager, input, pause);
-      if (preview.token !== input.token) throw outdated(preview);
-      if (preview.counts.wrong > 0 && !input.leaveOutWrong) throw wrongRows(preview);
+      if (preview.token !== input.token) throw previewOutdated(preview);
+      if (preview.counts.wrong > 0 && !input.leaveOutWrong) throw wrongRows(preview.rows);
       const added: NewOffer[] = [];
       const changed: ChangedOffer[] = [];
       let same = 0;
@@ -111,21 +109,4 @@ function offerTable(cells: string[][]): MappedTable<OfferColumn> {
 function closedSupplier(code: string, name: string): ProblemError {
   const message = `${code} “${name}” is closed, so nothing is taken from it. Open the supplier again first.`;
   return badInput([{ field: 'supplierCode', value: code, message }]);
-}
-
-function outdated(preview: OfferPastePreviewDto): ProblemError {
-  const message =
-    'What the rows would do has changed since the preview, so nothing was booked. Look at the new preview, then book again.';
-  return conflict('preview-outdated', message, { current: preview });
-}
-
-function wrongRows({ rows }: OfferPastePreviewDto): ProblemError {
-  const wrong = rows.filter(({ action }) => action === 'wrong');
-  const message = `${wrong.length} ${wrong.length === 1 ? 'row is' : 'rows are'} wrong, so nothing was booked. Correct them, or leave them out.`;
-  const named = wrong.slice(0, MOST_NAMED).map(({ row, summary }) => ({
-    field: 'text',
-    value: `row ${row}`,
-    message: `Row ${row}: ${summary}`,
-  }));
-  return badInput(named, message);
 }

@@ -1,5 +1,6 @@
 import { DomainError, type FieldIssue } from '@stageyard/libs/units';
 import { ProblemError } from '../../common/errors.js';
+import { type RowReader, shownCell } from '../../common/paste/row-reader.js';
 import { type Offer } from '../entities/offer.entity.js';
 import { type OfferContent, storedContent } from '../offer-changes.js';
 import { checkContent, closedReasons, contentOf } from '../offer-content.js';
@@ -10,7 +11,6 @@ import { type StatedOffer } from './group-rows.js';
 import { matchOffer } from './match-offer.js';
 import { type OfferColumn } from './paste-columns.js';
 import { type PastedPart, type PasteGround } from './paste-ground.js';
-import { type RowReader } from './row-reader.js';
 import { type StatedTerms } from './read-row.js';
 
 /** What the rows of one offer would do. */
@@ -64,7 +64,7 @@ export class OfferPlan {
     return { ...wrong, action: changes.length > 0 ? 'change' : 'same', before, content, changes };
   }
 
-  private partOf(stated: StatedOffer, first: RowReader): PastedPart | null {
+  private partOf(stated: StatedOffer, first: RowReader<OfferColumn>): PastedPart | null {
     const [{ partNumber, supplierPartNumber } = { partNumber: '', supplierPartNumber: '' }] = stated.rows;
     if (partNumber !== '') {
       const part = this.ground.parts.get(partNumber.toLowerCase());
@@ -72,7 +72,7 @@ export class OfferPlan {
         part ??
         first.wrong(
           'partNumber',
-          `There is no part “${cut(partNumber)}”. Check the number, or add the part first.`,
+          `There is no part “${shownCell(partNumber)}”. Check the number, or add the part first.`,
         )
       );
     }
@@ -89,11 +89,11 @@ export class OfferPlan {
     const numbers = [part, ...others].map(({ number }) => number).join(', ');
     return first.wrong(
       'supplierPartNumber',
-      `${code} has offered ${cut(numbers)} under this number. Give the part number too.`,
+      `${code} has offered ${shownCell(numbers)} under this number. Give the part number too.`,
     );
   }
 
-  private refuseTaken(before: Offer, first: RowReader): void {
+  private refuseTaken(before: Offer, first: RowReader<OfferColumn>): void {
     const row = this.taken.get(before.id);
     if (row === undefined) this.taken.set(before.id, first.row);
     else
@@ -168,7 +168,7 @@ export function isWrong({ rows }: StatedOffer): boolean {
   return rows.some(({ reader }) => reader.problems.length > 0);
 }
 
-function firstReader({ rows: [first] }: StatedOffer): RowReader {
+function firstReader({ rows: [first] }: StatedOffer): RowReader<OfferColumn> {
   if (!first) throw new Error('An offer was stated without a row.');
   return first.reader;
 }
@@ -204,8 +204,4 @@ function note({ field, value, message }: FieldIssue, stated: StatedOffer): void 
   const price = name === 'breaks' ? stated.breaks[Number(index)] : undefined;
   if (price) price.row.reader.wrong(part === 'quantity' ? 'from' : 'price', message, shown);
   else firstReader(stated).wrong(name === 'breaks' ? 'price' : (name as OfferColumn), message, shown);
-}
-
-function cut(text: string): string {
-  return text.length > 60 ? `${text.slice(0, 60)}…` : text;
 }

@@ -47,10 +47,3 @@ export const OFFER_COLUMNS: readonly ColumnSpec<OfferColumn>[] = [
   { key: 'source', label: 'Source', synonyms: ['quotation', 'quote', 'price list'] },
   { key: 'note', label: 'Note', synonyms: ['remark', 'remarks', 'comment'] },
 ];
-
-const LABELS = new Map(OFFER_COLUMNS.map(({ key, label }) => [key, label]));
-
-/** The name of a column on the screen. */
-export function columnLabel(key: OfferColumn): string {
-  return LABELS.get(key) ?? key;
-}

@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
 import { type MappedTable } from '@stageyard/libs/bill-of-materials';
+import { columnsOf } from '../../common/paste/answers.js';
 import { pricesText } from '../offer-changes.js';
 import { type OfferPastePreviewDto } from './dto/offer-paste-preview.dto.js';
 import { type OfferPasteRowDto } from './dto/offer-paste-row.dto.js';
@@ -73,11 +74,4 @@ function summaryOf({ action, content, before, beside }: PlannedOffer): string {
   if (action === 'same') return `Offer ${before?.id ?? ''} says this already.`;
   if (!beside) return `New offer: ${prices}.`;
   return `New offer from ${content?.validFrom ?? ''}: ${prices}. Offer ${beside.id} goes on beside it until it ends or is closed.`;
-}
-
-function columnsOf({ columns, ignored }: MappedTable<OfferColumn>): OfferPastePreviewDto['columns'] {
-  return [
-    ...columns.map(({ label, from, index }) => ({ name: label, from: from ?? `column ${index + 1}` })),
-    ...ignored.map((from) => ({ name: 'left out', from })),
-  ];
 }

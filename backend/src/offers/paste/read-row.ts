@@ -8,9 +8,9 @@ import {
   type PriceBreak,
 } from '@stageyard/libs/bill-of-materials';
 import { currencyDecimals } from '@stageyard/libs/units';
+import { RowReader } from '../../common/paste/row-reader.js';
 import { PRICE_PER, type PricePer, SOURCE_LENGTH, SUPPLIER_NUMBER_LENGTH } from '../offer-terms.js';
-import { type OfferColumn } from './paste-columns.js';
-import { RowReader } from './row-reader.js';
+import { OFFER_COLUMNS, type OfferColumn } from './paste-columns.js';
 
 /** What a row may state beside its price; null where its cell is blank. */
 export interface StatedTerms {
@@ -27,7 +27,7 @@ export interface StatedTerms {
 
 /** One pasted row, read cell by cell. */
 export interface StatedRow {
-  reader: RowReader;
+  reader: RowReader<OfferColumn>;
   /** As written; blank where the row names the part by the supplier's number only. */
   partNumber: string;
   supplierPartNumber: string;
@@ -51,7 +51,7 @@ export function readRow(
   source: MappedRow<OfferColumn>,
   currencies: { stated: string | undefined; usual: string },
 ): StatedRow {
-  const reader = new RowReader(source);
+  const reader = new RowReader(source, OFFER_COLUMNS);
   const partNumber = reader.bounded('partNumber', 200) ?? '';
   const supplierPartNumber = reader.bounded('supplierPartNumber', SUPPLIER_NUMBER_LENGTH) ?? '';
   if (reader.text('partNumber') === '' && reader.text('supplierPartNumber') === '') {
@@ -77,13 +77,13 @@ export function readRow(
       validUntil: reader.value('validUntil', cellDate),
       pricedOn: reader.value('pricedOn', cellDate),
       source: reader.bounded('source', SOURCE_LENGTH),
-      note: reader.bounded('note', NOTE_LENGTH, { lines: true }),
+      note: reader.bounded('note', NOTE_LENGTH, 'kept'),
     },
   };
 }
 
 /** The currency that the row itself says, in its column or with its first price; null where it says none. */
-function currencyOf(reader: RowReader): string | null {
+function currencyOf(reader: RowReader<OfferColumn>): string | null {
   const stated = reader.text('currency').toUpperCase();
   if (stated !== '') {
     if (currencyDecimals(stated) !== undefined) return stated;
@@ -94,7 +94,7 @@ function currencyOf(reader: RowReader): string | null {
   return codes.find((code) => currencyDecimals(code) !== undefined) ?? null;
 }
 
-function breaksOf(reader: RowReader, currency: string): PriceBreak[] {
+function breaksOf(reader: RowReader<OfferColumn>, currency: string): PriceBreak[] {
   const price = reader.text('price');
   const breaks: PriceBreak[] = [];
   if (price !== '') {
@@ -116,7 +116,7 @@ function breaksOf(reader: RowReader, currency: string): PriceBreak[] {
 }
 
 function push(
-  reader: RowReader,
+  reader: RowReader<OfferColumn>,
   breaks: PriceBreak[],
   key: OfferColumn,
   quantity: number | null,
@@ -130,7 +130,7 @@ function push(
   else if (cell.value !== null && quantity !== null) breaks.push({ quantity, unitPrice: cell.value.minor });
 }
 
-function perOf(reader: RowReader): PricePer | null {
+function perOf(reader: RowReader<OfferColumn>): PricePer | null {
   const figure = reader.value('per', (text) => cellWhole(text, { min: 1, max: 1000 }));
   if (figure === null) return null;
   const per = PRICE_PER.find((known) => known === figure);

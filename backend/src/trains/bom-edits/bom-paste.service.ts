@@ -1,8 +1,9 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
-import { mapColumns, type MappedTable, readTable } from '@stageyard/libs/bill-of-materials';
+import { mapColumns, readTable } from '@stageyard/libs/bill-of-materials';
 import { type SignedInUser } from '../../auth/signed-in-user.js';
-import { badInput, ChangedMeanwhileError, conflict } from '../../common/errors.js';
+import { ChangedMeanwhileError } from '../../common/errors.js';
+import { columnsOf, previewOutdated, wrongRows } from '../../common/paste/answers.js';
 import { BomService } from '../bom.service.js';
 import { type Train } from '../entities/train.entity.js';
 import { StockGears } from '../stock-gears.service.js';
@@ -12,11 +13,8 @@ import { type BomPasteBookedDto, type BomPastePreviewDto, type BomPasteRowDto } 
 import { type BomPasteBookInputDto } from './dto/bom-paste-input.dto.js';
 import { type BomDraft, draftOf } from './line-choice.js';
 import { partNumberOf } from './paste-cells.js';
-import { PASTE_COLUMNS, type PasteColumn } from './paste-columns.js';
+import { PASTE_COLUMNS } from './paste-columns.js';
 import { PastePlan } from './paste-plan.js';
-
-/** Wrong rows named by one refusal. */
-const MOST_NAMED = 20;
 
 /** Rows of a spreadsheet that choose parts for lines by find number, or add lines. */
 @Injectable()
@@ -41,11 +39,7 @@ export class BomPaste {
   async book(code: string, input: BomPasteBookInputDto, actor: SignedInUser): Promise<BomPasteBookedDto> {
     const train = await this.reader.row(code);
     const { preview, draft } = await this.plan(train, input.text);
-    if (preview.token !== input.token) {
-      const message =
-        'What the rows would do has changed since the preview, so nothing was booked. Look at the new preview, then book again.';
-      throw conflict('preview-outdated', message, { current: preview });
-    }
+    if (preview.token !== input.token) throw previewOutdated(preview);
     if (train.version !== input.version) throw new ChangedMeanwhileError(await this.reader.describe(train));
     const { choose, add, same, wrong } = preview.counts;
     if (wrong > 0 && !input.leaveOutWrong) throw wrongRows(preview.rows);
@@ -74,22 +68,4 @@ export class BomPaste {
     const preview = { columns: columnsOf(table), rows, counts, version: train.version, token };
     return { preview, draft: plan.draft };
   }
-}
-
-function columnsOf({ columns, ignored }: MappedTable<PasteColumn>): BomPastePreviewDto['columns'] {
-  return [
-    ...columns.map(({ label, from, index }) => ({ name: label, from: from ?? `column ${index + 1}` })),
-    ...ignored.map((from) => ({ name: 'left out', from })),
-  ];
-}
-
-function wrongRows(rows: readonly BomPasteRowDto[]) {
-  const wrong = rows.filter(({ action }) => action === 'wrong');
-  const message = `${wrong.length} ${wrong.length === 1 ? 'row is' : 'rows are'} wrong, so nothing was booked. Correct them, or leave them out.`;
-  const named = wrong.slice(0, MOST_NAMED).map(({ row, summary }) => ({
-    field: 'text',
-    value: `row ${row}`,
-    message: `Row ${row}: ${summary}`,
-  }));
-  return badInput(named, message);
 }

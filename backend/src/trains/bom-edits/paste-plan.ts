@@ -1,4 +1,5 @@
 import { type BomLine, type MappedRow } from '@stageyard/libs/bill-of-materials';
+import { RowReader, shownCell } from '../../common/paste/row-reader.js';
 import { type Part } from '../../parts/entities/part.entity.js';
 import { unitOf } from '../../parts/part-unit.js';
 import { type ExtraLine } from '../bom-edits.js';
@@ -6,8 +7,8 @@ import { type BomPasteRowDto } from './dto/bom-paste.dto.js';
 import { MOST_EXTRA_LINES } from './dto/extra-lines.dto.js';
 import { quantityProblem } from './extra-line-rules.js';
 import { type BomDraft, chooseForLine, refuseChoice } from './line-choice.js';
-import { LONGEST_SHOWN, type ReadCells, readCells, RowReader } from './paste-cells.js';
-import { type PasteColumn } from './paste-columns.js';
+import { type ReadCells, readCells } from './paste-cells.js';
+import { PASTE_COLUMNS, type PasteColumn } from './paste-columns.js';
 
 /** What the rows are held against. */
 export interface PasteGround {
@@ -34,7 +35,7 @@ export class PastePlan {
   }
 
   take(row: MappedRow<PasteColumn>): BomPasteRowDto {
-    const reader = new RowReader(row);
+    const reader = new RowReader(row, PASTE_COLUMNS);
     const read = readCells(reader);
     const line = read.findNumber === null ? undefined : this.byFind.get(read.findNumber);
     const part = this.partNamed(reader, read.partNumber);
@@ -62,15 +63,19 @@ export class PastePlan {
     return { ...answer, action, summary, changes, problems: [] };
   }
 
-  private partNamed(reader: RowReader, number: string): Part | null {
+  private partNamed(reader: RowReader<PasteColumn>, number: string): Part | null {
     if (number === '') return null;
     const part = this.ground.parts.get(number);
-    if (!part)
-      reader.wrong('partNumber', `There is no part “${number.slice(0, LONGEST_SHOWN)}”. Check the number.`);
+    if (!part) reader.wrong('partNumber', `There is no part “${shownCell(number)}”. Check the number.`);
     return part ?? null;
   }
 
-  private change(reader: RowReader, read: ReadCells, line: BomLine, part: Part | null): Outcome | null {
+  private change(
+    reader: RowReader<PasteColumn>,
+    read: ReadCells,
+    line: BomLine,
+    part: Part | null,
+  ): Outcome | null {
     if (line.extraLineId !== undefined) return this.changeAdded(reader, read, line, part);
     const { quantity, unit } = read;
     if (quantity !== null && Math.abs(quantity - line.quantity) > 1e-9) {
@@ -97,7 +102,12 @@ export class PastePlan {
     };
   }
 
-  private changeAdded(reader: RowReader, read: ReadCells, line: BomLine, part: Part | null): Outcome | null {
+  private changeAdded(
+    reader: RowReader<PasteColumn>,
+    read: ReadCells,
+    line: BomLine,
+    part: Part | null,
+  ): Outcome | null {
     const was = this.draft.bomEdits.extraLines.find(({ id }) => id === line.extraLineId);
     if (!was) return null;
     const swapped = part !== null && part.number !== was.partNumber;
@@ -127,7 +137,7 @@ export class PastePlan {
     };
   }
 
-  private add(reader: RowReader, read: ReadCells, part: Part | null): Outcome | null {
+  private add(reader: RowReader<PasteColumn>, read: ReadCells, part: Part | null): Outcome | null {
     const { extraLines } = this.draft.bomEdits;
     if (read.quantity === null)
       reader.wrong('quantity', 'Say how many: the quantity of a new line is needed.');
@@ -185,11 +195,11 @@ function identity({ partNumber, description, quantity, unit, note }: ExtraLine):
 
 const same = (summary: string): Outcome => ({ action: 'same', summary, changes: [] });
 
-function checkNewPart(reader: RowReader, { number, standing }: Part): void {
+function checkNewPart(reader: RowReader<PasteColumn>, { number, standing }: Part): void {
   if (standing !== 'cleared') reader.wrong('partNumber', `${number} is ${standing}. Choose a cleared part.`);
 }
 
-function checkUnit(reader: RowReader, part: Part | null, { quantity, unit }: ExtraLine): void {
+function checkUnit(reader: RowReader<PasteColumn>, part: Part | null, { quantity, unit }: ExtraLine): void {
   const own = part ? unitOf(part.kind) : unit;
   if (own !== unit) reader.wrong('unit', `${part?.number ?? ''} is counted in ${own}. Leave the unit blank.`);
   const problem = quantityProblem(quantity, own);
