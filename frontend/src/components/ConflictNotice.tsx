@@ -2,6 +2,7 @@ import Alert from '@mui/material/Alert';
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
+import { useEffect, useRef } from 'react';
 import { DifferenceList, type Difference } from './DifferenceList';
 import { formatWhen } from './figures';
 
@@ -19,8 +20,11 @@ interface ConflictNoticeProps {
 /** Says what changed meanwhile and lets the person decide; what they typed stays in the form until then. */
 export function ConflictNotice(props: ConflictNoticeProps) {
   const { what, theirs, differences, onKeepMine, onTakeTheirs } = props;
+  const notice = useRef<HTMLDivElement>(null);
+  // It stands at the head of a form whose button may be far below.
+  useEffect(() => notice.current?.focus(), []);
   return (
-    <Alert severity="warning" sx={{ mb: 1.5 }}>
+    <Alert ref={notice} tabIndex={-1} severity="warning" sx={{ mb: 1.5, scrollMarginTop: 64 }}>
       <Typography sx={{ fontWeight: 600 }}>
         {theirs.updatedBy} changed {what} on {formatWhen(theirs.updatedAt)}, while you were editing.
       </Typography>
