@@ -34,8 +34,8 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
             <TableHead>
               <TableRow>
                 <TableCell>What</TableCell>
-                <TableCell>Before</TableCell>
-                <TableCell>After</TableCell>
+                <TableCell sx={WIDE}>Before</TableCell>
+                <TableCell sx={WIDE}>After</TableCell>
                 <TableCell sx={{ width: 76 }}>Verdict</TableCell>
               </TableRow>
             </TableHead>
@@ -46,11 +46,14 @@ export function SwapPreview({ result, loading }: { result: SwapResult | null; lo
                   <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
                     {label}
                     {stage !== null && `, stage ${stage + 1}`}
+                    <Box sx={PHONE}>
+                      <CheckState state={before} unit={unit} /> → <CheckState state={after} unit={unit} />
+                    </Box>
                   </TableCell>
-                  <TableCell>
+                  <TableCell sx={WIDE}>
                     <CheckState state={before} unit={unit} />
                   </TableCell>
-                  <TableCell>
+                  <TableCell sx={WIDE}>
                     <CheckState state={after} unit={unit} />
                   </TableCell>
                   <TableCell>
@@ -72,6 +75,10 @@ function intoView(element: HTMLElement | null): void {
   if (globalThis.matchMedia('(max-width: 899px)').matches) element?.scrollIntoView({ block: 'nearest' });
 }
 
+/** On a phone before and after stand under what they are of. */
+const WIDE = { display: { xs: 'none', sm: 'table-cell' } } as const;
+const PHONE = { display: { sm: 'none' }, color: 'text.secondary', fontSize: '0.8125rem' } as const;
+
 const boxSx = {
   mt: { xs: 1.5, md: 0 },
   pt: { xs: 1, md: 0 },
@@ -91,9 +98,10 @@ function ChangeRows({ changes }: { changes: readonly Change[] }) {
         <TableRow key={`${what} ${at}`}>
           <TableCell component="th" scope="row" sx={{ fontWeight: 400 }}>
             {what}
+            <Box sx={PHONE}>{`${before || NOTHING} → ${after || NOTHING}`}</Box>
           </TableCell>
-          <TableCell>{before || NOTHING}</TableCell>
-          <TableCell>{after || NOTHING}</TableCell>
+          <TableCell sx={WIDE}>{before || NOTHING}</TableCell>
+          <TableCell sx={WIDE}>{after || NOTHING}</TableCell>
           <TableCell>
             <Comparison verdict={verdict} />
           </TableCell>
