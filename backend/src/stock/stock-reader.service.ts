@@ -3,6 +3,8 @@ import { InjectRepository } from '@nestjs/typeorm';
 import { In, Repository, type SelectQueryBuilder } from 'typeorm';
 import { notFound } from '../common/errors.js';
 import { type Page, pageOf, parseListQuery, type SortKey } from '../common/list-query.js';
+import { statementOf } from '../database/list-statement.js';
+import { ReadThreads } from '../database/read-threads.js';
 import { Part } from '../parts/entities/part.entity.js';
 import { narrowToText } from '../parts/part-text-search.js';
 import type { PlaceCountDto } from './dto/place-count.dto.js';
@@ -29,6 +31,7 @@ export class StockReader {
   constructor(
     @InjectRepository(Part) private readonly parts: Repository<Part>,
     private readonly levels: StockLevels,
+    private readonly threads: ReadThreads,
   ) {}
 
   /** Parts that lay on a shelf or are watched; sorted by number when nothing else is asked for. */
@@ -40,14 +43,13 @@ export class StockReader {
     if (query.low && query.place) isOnShelf(rows, query.place);
     if (query.kind) rows.andWhere('part.kind = :kind', { kind: query.kind });
     if (list.text) await narrowToText(rows, list.text);
-    const total = await rows.getCount();
+    const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     order(rows, list.sorts.length > 0 ? list.sorts : [{ field: 'number', direction: 'ASC' }]);
-    const ids = await rows
-      .select('part.id', 'id')
-      .offset(list.skip)
-      .limit(list.size)
-      .getRawMany<{ id: number }>();
-    return pageOf(await this.byIds(ids.map(({ id }) => id)), total, list);
+    // Counting and sorting hundreds of thousands of shelves takes longer than the server's loop may be held.
+    const page = rows.select('part.id', 'id').offset(list.skip).limit(list.size);
+    const [counted, found] = await this.threads.read(count, statementOf(page));
+    const ids = (found ?? []).map(({ id }) => Number(id));
+    return pageOf(await this.byIds(ids), Number(counted?.[0]?.count ?? 0), list);
   }
 
   /** @throws ProblemError 404 */
@@ -58,12 +60,11 @@ export class StockReader {
   }
 
   /** Every place the ledger knows, in alphabetical order; at most 2,000. */
-  places(): Promise<PlaceCountDto[]> {
-    return this.parts.manager.query<PlaceCountDto[]>(
-      `SELECT MIN("place") AS "place", SUM("quantity" > 0) AS "parts" FROM "stock_level"
-        GROUP BY "place" ORDER BY "place" LIMIT ?`,
-      [MOST_PLACES],
-    );
+  async places(): Promise<PlaceCountDto[]> {
+    const sql = `SELECT MIN("place") AS "place", SUM("quantity" > 0) AS "parts" FROM "stock_level"
+      GROUP BY "place" ORDER BY "place" LIMIT ?`;
+    const [found] = await this.threads.read({ sql, params: [MOST_PLACES], keep: true });
+    return (found ?? []).map(({ place, parts }) => ({ place: String(place), parts: Number(parts) }));
   }
 
   /** Items in the order of the ids. */
