@@ -1,6 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import { notFound } from '../common/errors.js';
 import { Part } from '../parts/entities/part.entity.js';
+import { isAscii, placeKey, plainPlace } from './place-name.js';
 import { StockMovement } from './entities/stock-movement.entity.js';
 
 /** What the ledger needs to know of a part. */
@@ -42,19 +43,21 @@ export class LedgerPage {
 
   /** The place as it was written first: “rack b 3” is Rack B 3 wherever parts lie there already. */
   async placeName(written: string): Promise<string> {
-    const place = written.trim().replace(/\s+/g, ' ');
-    const key = place.toLowerCase();
-    const known =
-      this.#places.get(key) ??
-      (
-        await this.manager.query<{ place: string }[]>(
-          'SELECT "place" FROM "stock_level" WHERE "place" = ? LIMIT 1',
-          [place],
-        )
-      )[0]?.place ??
-      place;
+    const place = plainPlace(written);
+    const key = placeKey(place);
+    const known = this.#places.get(key) ?? (await this.placeOf(place)) ?? place;
     this.#places.set(key, known);
     return known;
+  }
+
+  private async placeOf(place: string): Promise<string | undefined> {
+    const found = await this.manager.query<{ place: string }[]>(
+      'SELECT "place" FROM "stock_level" WHERE "place" = ? LIMIT 1',
+      [place],
+    );
+    if (found[0] || isAscii(place)) return found[0]?.place;
+    const all = await this.manager.query<{ place: string }[]>(EVERY_PLACE);
+    return all.find((other) => placeKey(other.place) === placeKey(place))?.place;
   }
 
   async standing(part: LedgerPart, place: string): Promise<PlaceStanding> {
@@ -93,10 +96,20 @@ export class LedgerPage {
   }
 }
 
+/** Every place: one look into the index for each, however much lies there. */
+const EVERY_PLACE = `
+  WITH RECURSIVE "known"("place") AS (
+    SELECT MIN("place") FROM "stock_level"
+    UNION ALL
+    SELECT (SELECT MIN("place") FROM "stock_level" WHERE "place" > "known"."place")
+    FROM "known" WHERE "known"."place" IS NOT NULL
+  )
+  SELECT "place" FROM "known" WHERE "place" IS NOT NULL`;
+
 const INSERT = `INSERT INTO "stock_movement"
   ("partId", "kind", "change", "counted", "after", "place", "reason", "at", "actorId", "actorName", "requestKey")
   VALUES (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?) RETURNING "id"`;
 
 function standingKey({ id }: LedgerPart, place: string): string {
-  return `${id} ${place.toLowerCase()}`;
+  return `${id} ${placeKey(place)}`;
 }

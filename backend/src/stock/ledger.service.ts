@@ -9,6 +9,7 @@ import { StockMovement } from './entities/stock-movement.entity.js';
 import type { LedgerPage, LedgerPart } from './ledger-page.js';
 import { type AskedMovement, askedMovement, canStand, changeOf, impossible } from './movement-change.js';
 import { movementText } from './movement-text.js';
+import { placeKey } from './place-name.js';
 import { StockLevels } from './stock-levels.service.js';
 
 /** A movement in the ledger. */
@@ -85,7 +86,7 @@ function sameAgain(first: StockMovement, part: LedgerPart, place: string, asked:
   const amount = counted ?? (kind === 'issued' ? -change : change);
   const isSame =
     first.partId === part.id &&
-    first.place.toLowerCase() === place.toLowerCase() &&
+    placeKey(first.place) === placeKey(place) &&
     kind === asked.kind &&
     amount === asked.amount;
   if (isSame) return toMovementDto(first, part);

@@ -6,6 +6,7 @@ import { containing } from '../common/like-text.js';
 import { type Page, pageOf, parseListQuery } from '../common/list-query.js';
 import type { MovementQueryDto } from './dto/movement-query.dto.js';
 import { type MovementDto, toMovementDto } from './dto/movement.dto.js';
+import { plainPlace } from './place-name.js';
 import { StockMovement } from './entities/stock-movement.entity.js';
 
 const TEXT = `(part.number LIKE :text ESCAPE '\\' OR part.description LIKE :text ESCAPE '\\'
@@ -28,7 +29,7 @@ export class MovementsReader {
       .offset(list.skip)
       .limit(list.size);
     if (query.part) rows.andWhere('part.number = :part', { part: query.part.trim() });
-    if (query.place) rows.andWhere('movement.place = :place', { place: query.place.trim() });
+    if (query.place) rows.andWhere('movement.place = :place', { place: plainPlace(query.place) });
     if (query.kind) rows.andWhere('movement.kind = :kind', { kind: query.kind });
     if (query.from) rows.andWhere('movement.at >= :from', { from: startOf(query.from) });
     if (query.until) rows.andWhere('movement.at < :end', { end: startOf(addDays(query.until, 1)) });

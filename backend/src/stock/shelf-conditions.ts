@@ -1,4 +1,5 @@
 import type { SelectQueryBuilder } from 'typeorm';
+import { plainPlace } from './place-name.js';
 import type { Part } from '../parts/entities/part.entity.js';
 
 /** What lies of a part over all places, thousandths of its unit; over the alias `part`. */
@@ -10,7 +11,7 @@ const ANYWHERE = 'EXISTS (SELECT 1 FROM "stock_level" "level" WHERE "level"."par
 
 /** Narrows a query over parts to those that lay at a place, or anywhere, or are watched. */
 export function isOnShelf(rows: SelectQueryBuilder<Part>, place?: string): void {
-  if (place) rows.andWhere(AT_PLACE, { place: place.trim() });
+  if (place) rows.andWhere(AT_PLACE, { place: plainPlace(place) });
   else rows.andWhere(`(part.leastStock IS NOT NULL OR ${ANYWHERE})`);
 }
 

@@ -66,6 +66,13 @@ describe('booking a movement', () => {
     expect(movement).toMatchObject({ place: 'Shelf C 1', after: 10 });
   });
 
+  it('does so beyond the letters A to Z, and however an accent was typed', async () => {
+    await book({ place: 'Übergabe é' });
+    // A small ü, and é as e with an accent of its own (U+0301).
+    const { movement } = await book({ place: 'übergabe e\u0301' });
+    expect(movement).toMatchObject({ place: 'Übergabe é', after: 10 });
+  });
+
   it('keeps litres to the millilitre, exactly', async () => {
     const oil = await library.module
       .get(PartsService)
