@@ -396,6 +396,15 @@ describe('a pasted row is wrong', () => {
     expect(rows.map(({ action }) => action)).toEqual(['change', 'wrong']);
     expect(rows[1]?.summary).toContain('Row 1');
   });
+
+  it('when two of them would add the same offer, one by the part number and one by the supplier number', async () => {
+    const supplierCode = await addSupplier();
+    const ended = { validFrom: day(-300), validUntil: day(-1), supplierPartNumber: 'ENDED' };
+    await purchaser.post('/api/offers', newOffer({ ...ended, partNumber: part(2), supplierCode }));
+    const { rows } = await preview(supplierCode, `${part(2)}\tENDED\t1\t5.00\n\tended\t1\t6.00`);
+    expect(rows.map(({ action }) => action)).toEqual(['add', 'wrong']);
+    expect(rows[1]?.summary).toContain('Row 1');
+  });
 });
 
 describe('pasting', () => {

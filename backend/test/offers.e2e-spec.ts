@@ -146,6 +146,7 @@ describe('an offer', () => {
     ['a lead time of -1 days', { leadTimeDays: -1 }, ['leadTimeDays']],
     ['an end before its start', { validFrom: '2026-05-02', validUntil: '2026-05-01' }, ['validUntil']],
     ['the 30th of February', { pricedOn: '2026-02-30' }, ['pricedOn']],
+    ['a price that was stated in two days', { pricedOn: day(2) }, ['pricedOn']],
     ['an unknown part', { partNumber: 'KW-99999' }, ['partNumber']],
     [
       'an unknown supplier and part',

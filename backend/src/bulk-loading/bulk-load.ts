@@ -7,7 +7,7 @@ import { type BulkLoadTask, type BulkProgress, type BulkResult } from './bulk-me
 import { type BulkRows } from './bulk-row.js';
 import { checkRow, type KnownSuppliers } from './check-row.js';
 import { MOST_FINDINGS, Stage } from './stage.js';
-import { issuesOf } from './under-path.js';
+import { issuesOf } from '../common/under-path.js';
 
 type Database = ReturnType<typeof openWriting>;
 

@@ -1,9 +1,8 @@
 import { checkedInput, quickCheck } from '../common/quick-check.js';
-import { badInput } from '../common/errors.js';
 import { type OfferContent } from '../offers/offer-changes.js';
-import { checkContent, closedReasons, contentOf } from '../offers/offer-content.js';
 import { OfferInputDto } from '../offers/dto/offer-input.dto.js';
 import { PriceBreakDto } from '../offers/dto/price-break.dto.js';
+import { resolvedOffer } from '../offers/resolved-offer.js';
 import { checkAttributes } from '../parts/check-attributes.js';
 import { PartInputDto } from '../parts/dto/part-input.dto.js';
 import { type NewPart, newPart } from '../parts/new-part.js';
@@ -11,9 +10,10 @@ import { unitOf } from '../parts/part-unit.js';
 import { LeastStockInputDto } from '../stock/dto/least-stock-input.dto.js';
 import { MovementInputDto } from '../stock/dto/movement-input.dto.js';
 import { askedMovement } from '../stock/movement-change.js';
+import { plainPlace } from '../stock/place-name.js';
 import { toThousandths } from '../stock/thousandths.js';
 import { type Supplier } from '../suppliers/entities/supplier.entity.js';
-import { under } from './under-path.js';
+import { underPath } from '../common/under-path.js';
 import { type BulkRow, type OpeningCount } from './bulk-row.js';
 
 /** A row that may be booked as it stands. */
@@ -44,28 +44,24 @@ const LATER = 'later';
  * @throws ProblemError or InputError listing the fields at fault: `part.…`, `offers.<index>.…`, `opening.…`
  */
 export function checkRow(row: BulkRow, suppliers: KnownSuppliers, today: string): CheckedRow {
-  const { input, part } = under('part', () => checkPart(row.part));
+  const { input, part } = underPath('part', () => checkPart(row.part));
   const number = input.number?.trim() || null;
   const owner = { id: 0, number: number ?? LATER, ...part };
   const offers = (row.offers ?? []).map((raw, index) =>
-    under(`offers.${index}`, () => {
+    underPath(`offers.${index}`, () => {
       const offer = checkedInput(OfferInputDto, QUICK.offer, { ...raw, partNumber: owner.number });
-      const supplier = suppliers.get(offer.supplierCode.toUpperCase());
-      if (!supplier) throw unknownSupplier(offer.supplierCode);
-      const closed = closedReasons(owner, supplier);
-      if (closed.length > 0) throw badInput(closed);
-      const content = contentOf(offer, supplier, today);
-      checkContent(content, owner);
+      const known = suppliers.get(offer.supplierCode.toUpperCase());
+      const { supplier, content } = resolvedOffer(offer, owner, known, today);
       return { supplierId: supplier.id, content };
     }),
   );
-  part.leastStock = under('', () => checkLeastStock(row.leastStock ?? null, part));
+  part.leastStock = underPath('', () => checkLeastStock(row.leastStock ?? null, part));
   const { opening } = row;
   return {
     number,
     part,
     offers,
-    opening: opening ? under('opening', () => checkOpening(opening, owner)) : null,
+    opening: opening ? underPath('opening', () => checkOpening(opening, owner)) : null,
   };
 }
 
@@ -85,10 +81,5 @@ function checkOpening(
 ): NonNullable<CheckedRow['opening']> {
   const raw = { number: part.number, kind: 'counted', place, quantity };
   const input = checkedInput(MovementInputDto, QUICK.movement, raw);
-  return { place: input.place, thousandths: askedMovement(part, input).amount };
-}
-
-function unknownSupplier(code: string) {
-  const message = `There is no supplier “${code}”. Check the code, or add the supplier first.`;
-  return badInput([{ field: 'supplierCode', value: code, message }]);
+  return { place: plainPlace(input.place), thousandths: askedMovement(part, input).amount };
 }

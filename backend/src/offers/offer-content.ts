@@ -1,4 +1,4 @@
-import { checkOfferTerms } from '@stageyard/libs/bill-of-materials';
+import { addDays, checkOfferTerms } from '@stageyard/libs/bill-of-materials';
 import { badInput, type FieldIssue } from '../common/errors.js';
 import { type Part } from '../parts/entities/part.entity.js';
 import { unitOf } from '../parts/part-unit.js';
@@ -33,12 +33,29 @@ export function contentOf(
 }
 
 /**
- * Checks the terms of an offer against what they are and what the part is counted in.
+ * Checks the terms of an offer against what they are, what the part is counted in, and the calendar.
+ * @param today ISO 8601 date
  * @throws InputError or ProblemError 400 listing every field at fault
  */
-export function checkContent(content: OfferContent, part: Pick<Part, 'kind' | 'number'>): void {
+export function checkContent(
+  content: OfferContent,
+  part: Pick<Part, 'kind' | 'number'>,
+  today: string,
+): void {
   checkOfferTerms(content);
-  if (unitOf(part.kind) !== 'pcs') return;
+  const issues = [...brokenPieces(content, part), ...statedLater(content, today)];
+  if (issues.length > 0) throw badInput(issues);
+}
+
+/** A slip such as 2062 would keep a price from ever growing too old. A day is granted to people ahead of the server. */
+function statedLater({ pricedOn }: OfferContent, today: string): FieldIssue[] {
+  if (pricedOn <= addDays(today, 1)) return [];
+  const message = `The price cannot have been stated on ${pricedOn}: today is ${today}. Give the day of the quotation; a price that starts later has a first day of its own.`;
+  return [{ field: 'pricedOn', value: pricedOn, limit: today, message }];
+}
+
+function brokenPieces(content: OfferContent, part: Pick<Part, 'kind' | 'number'>): FieldIssue[] {
+  if (unitOf(part.kind) !== 'pcs') return [];
   const quantities: [field: string, quantity: number][] = [
     ...content.breaks.map(({ quantity }, index): [string, number] => [`breaks.${index}.quantity`, quantity]),
     ['pack', content.pack],
@@ -47,14 +64,12 @@ export function checkContent(content: OfferContent, part: Pick<Part, 'kind' | 'n
       ? []
       : [['leastQuantity', content.leastQuantity] as [string, number]]),
   ];
-  const broken = quantities.filter(([, quantity]) => !Number.isInteger(quantity));
-  if (broken.length === 0) return;
-  throw badInput(
-    broken.map(([field, value]) => {
+  return quantities
+    .filter(([, quantity]) => !Number.isInteger(quantity))
+    .map(([field, value]) => {
       const message = `${part.number} is counted in pieces; ${value} is not a whole number of them.`;
       return { field, value, message };
-    }),
-  );
+    });
 }
 
 /** Why this supplier cannot offer this part any more; empty when it can. */

@@ -1,11 +1,10 @@
 import { Injectable } from '@nestjs/common';
-import { DomainError } from '@stageyard/libs/units';
 import { plainToInstance } from 'class-transformer';
 import { validateSync } from 'class-validator';
 import { DataSource } from 'typeorm';
 import { type AuditRecord } from '../audit/audit.service.js';
-import { badInput, ProblemError } from '../common/errors.js';
 import { politePause } from '../common/polite-pause.js';
+import { underPath } from '../common/under-path.js';
 import { validationProblem } from '../common/validation.js';
 import { WriteQueue } from '../database/write-queue.js';
 import { under } from '../parts/under.js';
@@ -62,7 +61,7 @@ export class OffersLoader {
     for (const [index, input] of stated.entries()) {
       const part = parts.get(input.partNumber.toLowerCase());
       const supplier = suppliers.get(input.supplierCode.toUpperCase());
-      offers.push(named(index, () => resolvedOffer(input, part, supplier, today)));
+      offers.push(underPath(`offers.${index}`, () => resolvedOffer(input, part, supplier, today)));
       await pause();
     }
     return offers;
@@ -74,16 +73,4 @@ function checkInput(raw: OfferInputDto, index: number): OfferInputDto {
   const faults = validateSync(input, { whitelist: true, forbidNonWhitelisted: true });
   if (faults.length > 0) throw validationProblem([under(`offers.${index}`, faults)]);
   return input;
-}
-
-/** Says in a refusal which of the inputs it is about. */
-function named<T>(index: number, act: () => T): T {
-  try {
-    return act();
-  } catch (error) {
-    if (!(error instanceof DomainError || error instanceof ProblemError)) throw error;
-    throw badInput(
-      (error.errors ?? []).map((issue) => ({ ...issue, field: `offers.${index}.${issue.field}` })),
-    );
-  }
 }

@@ -56,7 +56,7 @@ export class OffersService {
         const reasons = closedReasons(part, supplier);
         if (reasons.length > 0) throw badInput(reasons.map((issue) => ({ ...issue, field: 'standing' })));
       }
-      checkContent(content, part);
+      checkContent(content, part, this.reader.today());
       // Nothing changed: nothing to count up or to put on record.
       if (offerChange(before, content).fields.length > 0) {
         await this.writer.change(manager, actor, [{ before, content, part, supplier }]);

@@ -27,6 +27,6 @@ export function resolvedOffer(
   const closed = closedReasons(part, supplier);
   if (closed.length > 0) throw badInput(closed);
   const content = contentOf(input, supplier, today);
-  checkContent(content, part);
+  checkContent(content, part, today);
   return { part, supplier, content };
 }

@@ -29,8 +29,8 @@ export interface PlannedOffer {
 
 /** Goes through pasted offers and says what each does; what is wrong is noted at its row. */
 export class OfferPlan {
-  /** Rows that change an offer already, by its id. */
-  private readonly taken = new Map<number, number>();
+  /** The first rows of offers that are changed or added already, by what tells them apart. */
+  private readonly taken = new Map<string, number>();
 
   constructor(
     private readonly ground: PasteGround,
@@ -54,10 +54,10 @@ export class OfferPlan {
     const match = matchOffer(stated, part, this.ground, this.defaults.validFrom);
     if (match.problem !== null) first.wrong(null, match.problem);
     const { before, beside } = match;
-    if (before) this.refuseTaken(before, first);
+    this.refuseTaken(before ? `${before.id}` : `${part.id} ${ownNumber(stated)}`, first);
     if (isWrong(stated)) return wrong;
     const content = before ? this.changed(stated, before) : this.added(stated);
-    check(content, part, stated);
+    check(content, part, stated, this.ground.today);
     if (isWrong(stated)) return wrong;
     if (!before) return { ...wrong, action: 'add', content, beside };
     const changes = changeLines(storedContent(before), content);
@@ -93,14 +93,15 @@ export class OfferPlan {
     );
   }
 
-  private refuseTaken(before: Offer, first: RowReader<OfferColumn>): void {
-    const row = this.taken.get(before.id);
-    if (row === undefined) this.taken.set(before.id, first.row);
-    else
+  private refuseTaken(offer: string, first: RowReader<OfferColumn>): void {
+    const row = this.taken.get(offer);
+    if (row === undefined) this.taken.set(offer, first.row);
+    else {
       first.wrong(
         null,
-        `Row ${row} changes the same offer. Keep one of them, or give the supplier part number in both.`,
+        `Row ${row} is about the same offer. Keep one of them, or give the part number and the supplier part number in both.`,
       );
+    }
   }
 
   private changed(stated: StatedOffer, before: Offer): OfferContent {
@@ -173,6 +174,11 @@ function firstReader({ rows: [first] }: StatedOffer): RowReader<OfferColumn> {
   return first.reader;
 }
 
+/** The supplier's number that the rows give, in small letters. */
+function ownNumber({ rows: [first] }: StatedOffer): string {
+  return first?.supplierPartNumber.toLowerCase() ?? '';
+}
+
 function breaksOf({ breaks }: StatedOffer): OfferContent['breaks'] {
   return breaks.map(({ quantity, unitPrice }) => ({ quantity, unitPrice }));
 }
@@ -189,9 +195,9 @@ function stating({ per, pack, leastQuantity, leadTimeDays, note }: StatedTerms) 
 }
 
 /** Holds the terms against the rules; a fault is noted at the row and the column it comes from. */
-function check(content: OfferContent, part: PastedPart, stated: StatedOffer): void {
+function check(content: OfferContent, part: PastedPart, stated: StatedOffer, today: string): void {
   try {
-    checkContent(content, part);
+    checkContent(content, part, today);
   } catch (error) {
     if (!(error instanceof DomainError || error instanceof ProblemError)) throw error;
     for (const issue of error.errors ?? []) note(issue, stated);

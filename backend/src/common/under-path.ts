@@ -1,5 +1,5 @@
 import { DomainError } from '@stageyard/libs/units';
-import { badInput, type FieldIssue, ProblemError } from '../common/errors.js';
+import { badInput, type FieldIssue, ProblemError } from './errors.js';
 
 /** The fields at fault that an error lists; null for an error that is no refusal. */
 export function issuesOf(error: unknown): FieldIssue[] | null {
@@ -11,7 +11,7 @@ export function issuesOf(error: unknown): FieldIssue[] | null {
  * Runs a check of a part of a larger input.
  * @throws ProblemError whose fields are named from the larger input: `<path>.<field>`
  */
-export function under<T>(path: string, check: () => T): T {
+export function underPath<T>(path: string, check: () => T): T {
   try {
     return check();
   } catch (error) {
