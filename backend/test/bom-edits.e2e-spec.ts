@@ -80,6 +80,8 @@ beforeAll(async () => {
   const { code } = await addSupplier(app, { name: 'Corrie Bearings' });
   // 16 bearings: 16 × 4.00 = 64.00 EUR in 21 days, 16 × 3.00 = 48.00 EUR in 30 days.
   await addOffer(app, 'B-12', code, { breaks: [{ quantity: 1, unitPrice: 400 }], leadTimeDays: 21 });
+  // Sooner and dearer: the prices of a train are by price, and so are those that a swap names.
+  await addOffer(app, 'B-12', code, { breaks: [{ quantity: 1, unitPrice: 900 }], leadTimeDays: 2 });
   await addOffer(app, 'B-12X', code, { breaks: [{ quantity: 1, unitPrice: 300 }], leadTimeDays: 30 });
   await app
     .get(StockService)

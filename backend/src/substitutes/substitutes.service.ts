@@ -55,6 +55,7 @@ export class Substitutes {
       found.map(({ part }) => part.number),
       quantity,
       user,
+      { prefer: 'arrival' },
     );
     const items = found.map((fitting) => toSubstitute(fitting, supply.get(fitting.part.number)));
     items.sort(bySuitability(HOUSE_RULES.currency));

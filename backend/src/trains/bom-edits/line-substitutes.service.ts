@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import {
   type BomLine,
   type FitPlace,
+  neededQuantity,
   placeOf,
   placePart,
   type SubstitutePart,
@@ -17,7 +18,6 @@ import { Substitutes } from '../../substitutes/substitutes.service.js';
 import { BomService } from '../bom.service.js';
 import { StockGears } from '../stock-gears.service.js';
 import { TrainReader } from '../train-reader.js';
-import { lineQuantity } from './line-quantity.js';
 
 /** Parts that drop in on a line of a train. */
 @Injectable()
@@ -47,7 +47,8 @@ export class LineSubstitutes {
       const message = `The bill of materials of ${code} has no line “${key.slice(0, 60)}”. It may have changed: open it again.`;
       throw badInput([{ field: 'key', value: key, message }]);
     }
-    const wanted = quantity ?? lineQuantity(line, train.buildQuantity ?? DEFAULT_BUILD_QUANTITY);
+    const builds = train.buildQuantity ?? DEFAULT_BUILD_QUANTITY;
+    const wanted = quantity ?? neededQuantity(line.quantity, builds) ?? line.quantity;
     const own = await this.ownPart(line);
     const room = train.spec.gap ?? HOUSE_RULES.planeGap;
     const { original, place } = asked(line, own, room);

@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { type BomLine, type EditedBom } from '@stageyard/libs/bill-of-materials';
+import { type BomLine, type EditedBom, neededQuantity } from '@stageyard/libs/bill-of-materials';
 import { formatTrimmed } from '@stageyard/libs/units';
 import { type SignedInUser } from '../../auth/signed-in-user.js';
 import { DEFAULT_BUILD_QUANTITY } from '../../briefs/requirement.js';
@@ -21,7 +21,6 @@ import {
   isGearLine,
   refuseChoice,
 } from './line-choice.js';
-import { lineQuantity } from './line-quantity.js';
 import { supplyChanges } from './swap-supply.js';
 import { changedChecks, swapChanges, type TrainState } from './swap-changes.js';
 
@@ -96,15 +95,18 @@ export class Swaps {
   }
 
   private async supplyChanges(
-    { buildQuantity }: Train,
+    { buildQuantity, offerChoices }: Train,
     before: BomLine | undefined,
     after: BomLine | undefined,
     user: SignedInUser,
   ): Promise<SwapChangeDto[]> {
     if (!before || !after || !user.permissions.includes('prices.read')) return [];
-    const quantity = lineQuantity(after, buildQuantity ?? DEFAULT_BUILD_QUANTITY);
+    const quantity = neededQuantity(after.quantity, buildQuantity ?? DEFAULT_BUILD_QUANTITY);
+    if (quantity === null) return [];
     const numbers = [before, after].flatMap(({ partNumber }) => partNumber ?? []);
-    const supply = await this.supply.of(numbers, quantity, user);
+    // The same offers as the prices of the train name, so that both say the same of the line.
+    const rule = { prefer: 'price', choices: offerChoices ?? {} } as const;
+    const supply = await this.supply.of(numbers, quantity, user, rule);
     const of = ({ partNumber }: BomLine) => (partNumber === null ? null : (supply.get(partNumber) ?? null));
     return supplyChanges(`${formatTrimmed(quantity, 3)} ${after.unit}`, of(before), of(after));
   }
