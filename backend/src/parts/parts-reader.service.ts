@@ -5,6 +5,7 @@ import { AuditService } from '../audit/audit.service.js';
 import { type Change } from '../audit/dto/change.js';
 import { notFound } from '../common/errors.js';
 import { type ListQueryDto, type Page, pageOf, parseListQuery, type SortKey } from '../common/list-query.js';
+import { statementOf } from '../database/list-statement.js';
 import { type ReadStatement, type Row } from '../database/read-task.js';
 import { ReadThreads } from '../database/read-threads.js';
 import { hasStock, isLow } from '../stock/shelf-conditions.js';
@@ -160,14 +161,6 @@ export class PartsReader {
 /** A part as a reading thread finds it by its id, with what lies on the shelf over all places. */
 const WHOLE_PART = `SELECT ${SUMMARY_COLUMNS.map((column) => `"${column}"`).join(', ')},
   (SELECT SUM("quantity") FROM "stock_level" WHERE "partId" = "part"."id") AS "shelf" FROM "part" WHERE "id" = ?`;
-
-function statementOf(
-  rows: SelectQueryBuilder<Part>,
-  options: Pick<ReadStatement, 'keep' | 'whole'> = {},
-): ReadStatement {
-  const [sql, params] = rows.getQueryAndParameters();
-  return { sql, params: params as unknown[], ...options };
-}
 
 function countIn(rows: Row[] | undefined): number {
   return Number(rows?.[0]?.count ?? 0);

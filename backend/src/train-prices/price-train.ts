@@ -7,10 +7,10 @@ import {
   totalsByCurrency,
 } from '@stageyard/libs/bill-of-materials';
 import { HOUSE_RULES } from '../house-rules/house-rules.js';
+import { type Preference } from '../offers/offer-terms.js';
 import { type PartOffer } from '../offers/offers-finder.service.js';
 import { type BomLineDto } from '../trains/dto/bom.dto.js';
 import { type LinePriceDto } from './dto/line-price.dto.js';
-import { type Preference } from './dto/price-query.dto.js';
 import {
   type LostChoiceDto,
   type NoPriceReason,

@@ -3,10 +3,7 @@ import { Transform } from 'class-transformer';
 import { IsIn, IsInt, IsOptional, Max, Min } from 'class-validator';
 import { numberFromQuery } from '../../common/list-query.js';
 import { BUILD_QUANTITY } from '../../briefs/requirement.js';
-
-/** What the rule ranks offers by. */
-export const PREFERENCES = ['price', 'arrival'] as const;
-export type Preference = (typeof PREFERENCES)[number];
+import { PREFERENCES, type Preference } from '../../offers/offer-terms.js';
 
 const WHOLE = `quantity must be a whole number from ${BUILD_QUANTITY.min} to ${BUILD_QUANTITY.max.toLocaleString('en-GB')}.`;
 
