@@ -1,7 +1,10 @@
+import { statSync } from 'node:fs';
+import path from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { type EntityManager } from 'typeorm';
 import { openWritingSource } from './data-sources.js';
 import { openTempDatabase, type TempDatabase } from '../testing/temp-database.js';
+import { DATABASE_FILE } from './data-sources.js';
 import { UserEntity } from '../users/entities/user.entity.js';
 
 let database: TempDatabase;
@@ -124,5 +127,7 @@ describe('WriteQueue', () => {
     await expect(queued).resolves.toBeDefined();
     await expect(database.queue.run(insert('late'))).rejects.toThrow('closed');
     expect(await ids()).toEqual(['queued']);
+    // Nothing is left beside the database file, though a reading connection is still open.
+    expect(statSync(path.join(database.dataDir, `${DATABASE_FILE}-wal`)).size).toBe(0);
   });
 });
