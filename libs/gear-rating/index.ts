@@ -7,4 +7,10 @@ export {
   type Treatment,
 } from './materials.js';
 export { statedHardness } from './hardness.js';
-export { isSurfaceHardened, strengthOf, type MaterialStrength, type StatedMaterial } from './strength.js';
+export {
+  isSofterThanSteel,
+  isSurfaceHardened,
+  strengthOf,
+  type MaterialStrength,
+  type StatedMaterial,
+} from './strength.js';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { MATERIAL_FIELDS } from './materials.js';
-import { isSurfaceHardened, strengthOf } from './strength.js';
+import { isSofterThanSteel, isSurfaceHardened, strengthOf } from './strength.js';
 
 const rated = (
   material: string | null,
@@ -70,4 +70,19 @@ describe('isSurfaceHardened', () => {
   ])('%s: %s', (text, hardened) => {
     expect(isSurfaceHardened(text)).toBe(hardened);
   });
+});
+
+describe('isSofterThanSteel', () => {
+  it.each(['POM', 'acetal', 'PA 6 G', 'PA66', 'PEEK', 'CuZn39Pb3', 'brass', 'EN AW-6082', 'EN AC-AlSi10Mg'])(
+    '%s is',
+    (material) => {
+      expect(isSofterThanSteel(material)).toBe(true);
+    },
+  );
+  it.each(['C45', '16MnCr5', 'X17CrNi16-2', '1.4301', 'EN-GJL-250', 'steel', 'secret stuff', null])(
+    '%s is not, as far as is known',
+    (material) => {
+      expect(isSofterThanSteel(material)).toBe(false);
+    },
+  );
 });

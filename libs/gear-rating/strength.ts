@@ -32,6 +32,10 @@ const GROUP_NAMES: readonly (readonly [MaterialGroup, RegExp])[] = [
   ['nodular iron', /^(EN-?GJS-?\d{3}(-\d+)?|GGG-?\d{2})$/i],
 ]; // prettier-ignore
 
+/** Plastics, brass and aluminium by name: as gears they bear less than any steel or iron of the table (common practice). */
+const SOFT_NAMES =
+  /^(POM|PA ?\d|PA-|PE(EK|T|-|\d|$)|PC\b|PBT|PTFE|acetal|nylon|CuZn|brass|EN AW|EN AC|Al[A-Z]|alumini)/i;
+
 /** In the order they are tried: “nitrocarburised” holds “carburised”, a tempered steel is hardened too. */
 const TREATMENT_NAMES: readonly (readonly [Treatment, RegExp])[] = [
   ['nitrocarburised', /nitro-?carburi[sz]/i],
@@ -67,6 +71,11 @@ export function strengthOf(stated: StatedMaterial): { strength: MaterialStrength
     return unrated(`${stated.material} is rated from ${Math.round(field.leastHv)} HV, ${treatment}`);
   }
   return { strength: strengthAt(field, Math.min(hardness, field.greatestHv)), reason: '' };
+}
+
+/** Whether gears of the material bear less than any steel or iron that `strengthOf` rates; false where it is not known. */
+export function isSofterThanSteel(material: string | null): boolean {
+  return material !== null && SOFT_NAMES.test(material.trim());
 }
 
 /** Whether the teeth were hardened so that a bore can no longer be turned without more ado. */

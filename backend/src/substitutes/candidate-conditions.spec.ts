@@ -23,7 +23,7 @@ const teeth: SubstituteTeeth = {
     profileShift: 0,
     faceWidth: 20,
   },
-  ...{ heatTreatment: null, hardened: false, strength: null },
+  ...{ heatTreatment: null, hardened: false, strength: null, softerThanSteel: false },
 };
 
 describe('narrowing to candidates', () => {

@@ -5,7 +5,7 @@ import {
   type SubstituteTeeth,
 } from '@stageyard/libs/bill-of-materials';
 import { gearRadii } from '@stageyard/libs/gear-geometry';
-import { isSurfaceHardened, strengthOf } from '@stageyard/libs/gear-rating';
+import { isSofterThanSteel, isSurfaceHardened, strengthOf } from '@stageyard/libs/gear-rating';
 import { type AttributesOf } from '../parts/dto/attributes/part-attributes.js';
 import { type ToothedAttributes } from '../parts/dto/attributes/toothed-attributes.js';
 import { type Part } from '../parts/entities/part.entity.js';
@@ -98,6 +98,7 @@ function teethOf(a: ToothedAttributes, material: string | null): SubstituteTeeth
     heatTreatment: a.heatTreatment,
     hardened: isSurfaceHardened(a.heatTreatment),
     strength: ratedStrength(a, material),
+    softerThanSteel: isSofterThanSteel(material),
   };
 }
 

@@ -13,7 +13,7 @@ function gear(
 ): SubstitutePart {
   const teeth = { teeth: 40, module: 2, pressureAngleDeg: 20, helixAngleDeg: 0, hand: null, profileShift: 0 };
   const body = { faceWidth: 20, bore: 20, hubDiameter: null, hubLength: null };
-  const made = { heatTreatment: null, hardened: false, strength: C45 };
+  const made = { heatTreatment: null, hardened: false, strength: C45, softerThanSteel: false };
   return {
     number,
     standing: 'cleared',
@@ -156,9 +156,15 @@ describe('its material', () => {
     expect(check(null, null).toCheck).toHaveLength(1);
     // C45 so soft that the table does not rate it, in place of rated C45.
     expect(fit({ strength: null }).toCheck).toEqual(['material C45 in place of C45: strength is not rated']);
-    expect(fit({ strength: null }, { material: 'POM' })).toMatchObject({
+    // Stainless steel: not rated, and not known to be weaker either.
+    expect(fit({ strength: null }, { material: '1.4301' })).toMatchObject({
       fits: true,
-      toCheck: ['material POM in place of C45: strength is not rated'],
+      toCheck: ['material 1.4301 in place of C45: strength is not rated'],
+    });
+    // Acetal in place of steel is no matter of checking.
+    expect(fit({ strength: null, softerThanSteel: true }, { material: 'POM' })).toMatchObject({
+      fits: false,
+      misfits: ['material POM is weaker than C45'],
     });
   });
 });

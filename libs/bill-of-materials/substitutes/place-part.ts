@@ -56,6 +56,6 @@ function sizesOf(need: PartNeed): SubstituteSizes {
 
 function teethOf(need: GearNeed | PinionShaftNeed): SubstituteTeeth {
   const { teeth, module, pressureAngleDeg, helixAngleDeg, hand, profileShift, faceWidth } = need;
-  const unknown = { heatTreatment: null, hardened: false, strength: null };
+  const unknown = { heatTreatment: null, hardened: false, strength: null, softerThanSteel: false };
   return { teeth, module, pressureAngleDeg, helixAngleDeg, hand, profileShift, faceWidth, ...unknown };
 }

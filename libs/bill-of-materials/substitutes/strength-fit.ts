@@ -5,7 +5,8 @@ type Toothed = SubstitutePart & { sizes: SubstituteTeeth };
 
 /**
  * The material must be at least as strong: both allowable stress numbers, σ_Hlim and σ_Flim, at least the original's.
- * What the table does not rate drops in only as the very same material; any other is to be checked.
+ * What the table does not rate drops in only as the very same material; any other is to be checked, but plastic or brass
+ * never takes the place of rated steel or iron.
  */
 export function compareStrength(original: Toothed, candidate: Toothed, notes: FitNotes): void {
   const [wanted, has] = [original.sizes.strength, candidate.sizes.strength];
@@ -13,6 +14,9 @@ export function compareStrength(original: Toothed, candidate: Toothed, notes: Fi
   // One rated and the other not, though of one name: its hardness is outside what the table covers.
   if (!wanted && !has && sameMaterial(original, candidate)) return;
   const [held, needed] = [made(candidate), made(original)];
+  if (wanted && candidate.sizes.softerThanSteel) {
+    return notes.misfit(`material ${held} is weaker than ${needed}`);
+  }
   notes.check(
     original.material === null
       ? `material ${held}: the original’s is not known`

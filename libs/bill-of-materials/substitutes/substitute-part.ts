@@ -23,6 +23,8 @@ export interface SubstituteTeeth {
   hardened: boolean;
   /** null: the material is not rated. */
   strength: RatedStrength | null;
+  /** A plastic, brass or the like: weaker than any rated material. */
+  softerThanSteel: boolean;
   /** Root diameter; worked out from the standard rack when left out. */
   rootDiameter?: number;
 }
