@@ -50,7 +50,11 @@ function TrainInTabs({ train }: { train: Train }) {
             {train.brief && (
               <>
                 {' · from '}
-                <MuiLink component={Link} to={`/briefs/${encodeURIComponent(train.brief.id)}`}>
+                <MuiLink
+                  component={Link}
+                  to={`/briefs/${encodeURIComponent(train.brief.id)}`}
+                  sx={{ whiteSpace: 'nowrap' }}
+                >
                   {train.brief.code}
                 </MuiLink>
               </>
