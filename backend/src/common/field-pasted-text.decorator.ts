@@ -1,9 +1,9 @@
 import { applyDecorators } from '@nestjs/common';
 import { ApiProperty } from '@nestjs/swagger';
+import { PASTE_LIMITS } from '@stageyard/libs/bill-of-materials';
 import { ValidateBy } from 'class-validator';
 
-/** Most characters that can be pasted at once. */
-export const MOST_PASTED = 2_000_000;
+const MOST_PASTED = PASTE_LIMITS.characters;
 
 const BOUNDS = `must be text of 1 to ${MOST_PASTED.toLocaleString('en-GB')} characters. Paste fewer rows at a time.`;
 

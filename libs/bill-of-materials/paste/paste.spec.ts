@@ -50,7 +50,7 @@ describe('reading a pasted table', () => {
     ['blanks', ' \t \r\n\t', /Nothing was pasted/],
     ['2,001 rows', 'a\n'.repeat(2001), /2,001 rows; at most 2,000/],
     ['41 columns', Array.from({ length: 41 }, () => 'a').join('\t'), /41 columns; at most 40/],
-    ['more than 2 MB', 'a'.repeat(2_000_001), /characters/],
+    ['more than a million characters', 'a'.repeat(1_000_001), /characters/],
   ])('refuses %s', (_name, text, message) => {
     expect(() => readTable(text)).toThrow(InputError);
     expect(() => readTable(text)).toThrow(message);
@@ -64,8 +64,8 @@ describe('reading a pasted table', () => {
   it('stays quick with quotes that are never closed', () => {
     const began = performance.now();
     expect(readTable('"""a\t""b\n'.repeat(1999))).toHaveLength(1999);
-    expect(readTable('"a"b'.repeat(500_000).slice(0, 2_000_000))).toHaveLength(1);
-    expect(readTable(`"${'""'.repeat(999_000)}`)).toHaveLength(1);
+    expect(readTable('"a"b'.repeat(250_000))).toHaveLength(1);
+    expect(readTable(`"${'""'.repeat(499_000)}`)).toHaveLength(1);
     expect(performance.now() - began).toBeLessThan(2000);
   });
 });

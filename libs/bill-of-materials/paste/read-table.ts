@@ -1,7 +1,7 @@
 import { fieldError } from '../../units/index.js';
 
 /** Bounds of what may be pasted in one go. */
-export const PASTE_LIMITS = { characters: 2_000_000, rows: 2_000, columns: 40 } as const;
+export const PASTE_LIMITS = { characters: 1_000_000, rows: 2_000, columns: 40 } as const;
 
 /** One cell and where the next one starts. */
 interface ReadCell {
@@ -15,7 +15,7 @@ interface ReadCell {
  * followed by more text, is part of the cell, as in `"wide" version`. Cells are trimmed; blank rows at the end are
  * dropped, others kept, so that the n-th row of the answer is the n-th row of the sheet.
  * @param field path named in the refusal
- * @throws InputError for a text without any filled cell, beyond 2,000,000 characters, 2,000 rows or 40 columns
+ * @throws InputError for a text without any filled cell, beyond 1,000,000 characters, 2,000 rows or 40 columns
  */
 export function readTable(text: string, field = 'text'): string[][] {
   const most = PASTE_LIMITS;
