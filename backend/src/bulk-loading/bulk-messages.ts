@@ -42,6 +42,3 @@ export type ThreadMessage =
   | { kind: 'over' }
   | { kind: 'done'; result: BulkResult }
   | { kind: 'refused'; message: string; errors: FieldIssue[] };
-
-/** What the server says to the thread. */
-export type ServerMessage = { kind: 'go' };

@@ -5,7 +5,6 @@ import { SUPPLIER_STANDINGS, type SupplierStanding } from '../supplier-terms.js'
 
 /** Fields that the list of suppliers can be sorted by. */
 export const SUPPLIER_SORTS = ['code', 'name', 'currency', 'leadTimeDays', 'updatedAt', 'offers'] as const;
-export type SupplierSort = (typeof SUPPLIER_SORTS)[number];
 
 /** Filters of the suppliers; the text is looked for in code, name, address, note and contacts. */
 @ApiSchema({ name: 'SupplierQuery' })

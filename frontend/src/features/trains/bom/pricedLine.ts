@@ -54,11 +54,6 @@ export function orderWords({ needed, unit, price }: TrainPriceLine): string {
     : `${formatPlain(price.orderQuantity, 3)} ${unit}`;
 }
 
-/** `1,234.50 EUR + 80.00 USD`; never added, there are no exchange rates here. */
-export function totalsWords(totals: TrainPrices['totals']): string {
-  return totals.map(({ minor, currency }) => moneyWords(minor, currency)).join(' + ');
-}
-
 /** Heads of the copied table. */
 export const PRICED_HEADS = [
   'Find',
