@@ -45,15 +45,16 @@ const PER_DRIVE: Record<LibraryRow['kind'], [least: number, most: number]> = {
   other: [1, 6],
 };
 
-/** Null for parts that never lay on a shelf. */
+/** Null for parts that never lay on a shelf: drafts, and what was withdrawn. */
 export function usageOf(row: LibraryRow): PartUsage | null {
   if (row.standing !== 'cleared') return null;
   const random = randomOf(`usage of ${row.description}`);
   const always = ALWAYS_KEPT.has(row.description);
-  if (!random.chance(row.kind === 'gear' ? 0.62 : 0.93) && !always) return null;
+  const used = random.chance(row.kind === 'gear' ? 0.62 : 0.93) || always;
   const stepsPerUnit = row.kind === 'lubricant' ? 10 : 1;
   const perDrive = random.whole(...PER_DRIVE[row.kind]);
-  const pace = always ? 0.7 : paceOf(row, random.next());
+  // What no build took this year lies there all the same.
+  const pace = always ? 0.7 : used ? paceOf(row, random.next()) : 0;
   // A third of the 78 builds of a year are of one line; about three drives each.
   const monthly = Math.max(1, Math.round((26 / 12) * pace * perDrive * 3));
   return {
@@ -61,9 +62,9 @@ export function usageOf(row: LibraryRow): PartUsage | null {
     pace,
     perDrive,
     opening: always ? 40 : Math.round(monthly * (1 + random.next() * 3)) + perDrive,
-    reorderAt: Math.max(2, Math.round(monthly * 1.4)),
+    reorderAt: pace === 0 ? 0 : Math.max(2, Math.round(monthly * 1.4)),
     pack: Math.max(1, Math.round(salesFormOf(row).pack * stepsPerUnit)),
-    watched: pace >= 0.2 || random.chance(0.07),
+    watched: pace >= 0.2 || (pace > 0 && random.chance(0.07)),
     orderedLate: !always && random.chance(0.45),
   };
 }
