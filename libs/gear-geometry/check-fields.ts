@@ -20,13 +20,14 @@ export class FieldChecks {
 
   /** True when the value is a finite number within the bounds; otherwise adds the refusal. */
   number(field: string, value: unknown, label: string, bounds: Bounds, unit = ''): value is number {
-    const range = describeBounds(bounds, unit);
+    // Described only for a refusal: a library of parts is checked number by number.
+    const range = () => describeBounds(bounds, unit);
     if (value === undefined || value === null || value === '') {
-      this.refuse(field, value, label, `is missing. Enter a number ${range}.`, range);
+      this.refuse(field, value, label, `is missing. Enter a number ${range()}.`, range());
       return false;
     }
     if (typeof value !== 'number' || !Number.isFinite(value)) {
-      this.refuse(field, value, label, `is not a number. Enter a number ${range}.`, range);
+      this.refuse(field, value, label, `is not a number. Enter a number ${range()}.`, range());
       return false;
     }
     const tooSmall =
@@ -39,7 +40,7 @@ export class FieldChecks {
         field,
         value,
         label,
-        `is too ${tooSmall ? 'small' : 'large'}. Enter a number ${range}.`,
+        `is too ${tooSmall ? 'small' : 'large'}. Enter a number ${range()}.`,
         limit,
       );
       return false;

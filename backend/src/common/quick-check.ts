@@ -6,6 +6,7 @@ type Values = Record<string, unknown>;
 type Rule = (value: unknown, holder: object) => boolean;
 
 interface FieldRules {
+  field: string;
   /** The field is checked only where all of these hold. */
   conditions: Rule[];
   rules: Rule[];
@@ -26,19 +27,24 @@ export function quickCheck<T extends object>(
 ): QuickCheck<T> {
   const fields = rulesOf(type, nested);
   if (fields === null) return () => null;
+  const known = new Set(fields.map(({ field }) => field));
   return (raw) => {
-    for (const [field, value] of Object.entries(raw)) {
-      if (value === undefined || !fields.has(field)) return null;
+    for (const field of Object.keys(raw)) {
+      if (!known.has(field) || (raw as Values)[field] === undefined) return null;
     }
     const instance = Object.assign(new type(), raw);
-    for (const [field, { conditions, rules }] of fields) {
+    for (const { field, conditions, rules } of fields) {
       const value = (instance as Values)[field];
       if (typeof value === 'string' && value !== value.trim()) return null;
-      if (!conditions.every((holds) => holds(value, instance))) continue;
-      if (!rules.every((passes) => passes(value, instance))) return null;
+      if (allHold(conditions, value, instance) && !allHold(rules, value, instance)) return null;
     }
     return instance;
   };
+}
+
+function allHold(rules: readonly Rule[], value: unknown, holder: object): boolean {
+  for (const holds of rules) if (!holds(value, holder)) return false;
+  return true;
 }
 
 /**
@@ -62,11 +68,16 @@ export function checkedInput<T extends object>(type: new () => T, quick: QuickCh
 function rulesOf(
   type: new () => object,
   nested: Readonly<Record<string, QuickCheck<object>>>,
-): Map<string, FieldRules> | null {
+): FieldRules[] | null {
   const storage = getMetadataStorage();
+  const { name: targetName } = type;
   const fields = new Map<string, FieldRules>();
   for (const metadata of storage.getTargetValidationMetadatas(type, '', false, false)) {
-    const field = fields.get(metadata.propertyName) ?? { conditions: [], rules: [] };
+    const field = fields.get(metadata.propertyName) ?? {
+      field: metadata.propertyName,
+      conditions: [],
+      rules: [],
+    };
     fields.set(metadata.propertyName, field);
     const constraints = metadata.constraints as unknown[];
     if (metadata.type === 'conditionalValidation') {
@@ -81,7 +92,7 @@ function rulesOf(
         if (async || metadata.validateIf) return null;
         const { propertyName: property } = metadata;
         const passes: Rule = (value, object) =>
-          instance.validate(value, { value, object, constraints, property, targetName: type.name }) === true;
+          instance.validate(value, { value, object, constraints, property, targetName }) === true;
         field.rules.push(
           metadata.each
             ? (value, holder) => Array.isArray(value) && value.every((one) => passes(one, holder))
@@ -90,5 +101,5 @@ function rulesOf(
       }
     } else if (metadata.type !== 'whitelistValidation') return null;
   }
-  return fields;
+  return [...fields.values()];
 }

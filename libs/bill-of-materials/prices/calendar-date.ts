@@ -1,17 +1,19 @@
-const ISO_DATE = /^(\d{4})-(\d{2})-(\d{2})$/;
+const ISO_DATE = /^\d{4}-\d{2}-\d{2}$/;
 const DAY_MS = 86_400_000;
 const FIRST_YEAR = 1900;
 const LAST_YEAR = 2999;
+const DAYS_OF_MONTHS = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
 
 /** Whether the text is a day of the calendar, 1900 to 2999, as ISO 8601 writes it: `2026-02-28`, not `2026-02-30`. */
 export function isCalendarDate(text: string): boolean {
-  const match = typeof text === 'string' ? ISO_DATE.exec(text) : null;
-  if (!match) return false;
-  const [year, month, day] = match.slice(1).map(Number) as [number, number, number];
-  if (year < FIRST_YEAR || year > LAST_YEAR) return false;
-  const date = new Date(Date.UTC(year, month - 1, day));
-  return date.getUTCMonth() === month - 1 && date.getUTCDate() === day;
+  if (typeof text !== 'string' || !ISO_DATE.test(text)) return false;
+  const [year, month, day] = [Number(text.slice(0, 4)), Number(text.slice(5, 7)), Number(text.slice(8))];
+  if (year < FIRST_YEAR || year > LAST_YEAR || day < 1) return false;
+  if (month === 2 && day === 29) return isLeapYear(year);
+  return day <= (DAYS_OF_MONTHS[month - 1] ?? 0);
 }
+
+const isLeapYear = (year: number) => year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0);
 
 /** The day of a moment on the calendar of this machine's time zone, as ISO 8601 writes it. */
 export function calendarDay(moment: Date): string {
