@@ -132,6 +132,8 @@ describe('how a train is bought', () => {
     expect([chosen.status, chosen.body.message]).toEqual([200, undefined]);
     train = chosen.body;
     expect(train).toMatchObject({ buildQuantity: 2, offerChoices: [{ partNumber: 'B-12', offerId: quick }] });
+    const viewer = await server.as('viewer');
+    expect((await viewer.get<TrainDto>(path())).body).toMatchObject({ buildQuantity: 2, offerChoices: [] });
     // Two builds need 8: 8 × 5.15 = 41.20 EUR, and 42.00 EUR for ten at the other.
     const answer = await prices();
     expect(lineOf(answer, 'B-12')?.price).toMatchObject({ chosenBy: 'person', lineTotal: 4120 });

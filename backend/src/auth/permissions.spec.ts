@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { passwordMatches, hashPassword } from './passwords.js';
-import { permissionsOf, PERMISSIONS } from './permissions.js';
+import { permissionsOf, PERMISSIONS, ROLE_PERMISSIONS } from './permissions.js';
 
 describe('permissions', () => {
   it('add up over the roles of a person', () => {
@@ -9,6 +9,19 @@ describe('permissions', () => {
     expect(both).not.toContain('people.manage');
     expect(permissionsOf([])).toEqual([]);
     expect(permissionsOf(['admin', 'viewer'])).toEqual(PERMISSIONS);
+  });
+});
+
+describe('people who see prices', () => {
+  it('are all those who write them, choose among them or take them out in a workbook', () => {
+    const holders = Object.entries(ROLE_PERMISSIONS).filter(([, held]) =>
+      (['prices.edit', 'offers.choose', 'bom.export', 'trains.edit'] as const).some((one) =>
+        held.includes(one),
+      ),
+    );
+    expect(holders.length).toBeGreaterThan(0);
+    for (const [role, held] of holders) expect(held, role).toContain('prices.read');
+    expect(permissionsOf(['viewer'])).not.toContain('prices.read');
   });
 });
 

@@ -1,4 +1,5 @@
 import { beforeEach, describe, expect, it } from 'vitest';
+import { Clock } from '../common/clock.js';
 import { type ProblemError } from '../common/errors.js';
 import { MOST_WRONG, PAUSE_MS, SignInThrottle, WINDOW_MS } from './sign-in-throttle.js';
 
@@ -6,7 +7,9 @@ let now = 0;
 let throttle: SignInThrottle;
 beforeEach(() => {
   now = Date.parse('2026-03-02T08:00:00Z');
-  throttle = new SignInThrottle({ now: () => new Date(now), iso: () => new Date(now).toISOString() });
+  const clock = new Clock();
+  clock.now = () => new Date(now);
+  throttle = new SignInThrottle(clock);
 });
 
 const wrong = () => Promise.resolve(null);

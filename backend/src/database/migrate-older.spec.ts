@@ -7,6 +7,7 @@ import { PartsReader } from '../parts/parts-reader.service.js';
 import { StockReader } from '../stock/stock-reader.service.js';
 import { tempSettings } from '../testing/temp-settings.js';
 import { DATABASE_FILE, makeDataFolder } from './data-sources.js';
+import { MIGRATIONS } from './migrations.js';
 import { Initial1764600000000 } from './migrations/1764600000000-initial.js';
 
 type Row = Record<string, unknown>;
@@ -97,6 +98,17 @@ const file = path.join(settings.dataDir, DATABASE_FILE);
 const open = (options: { migrations?: (new () => Initial1764600000000)[] } = {}) =>
   new DataSource({ type: 'better-sqlite3', database: file, synchronize: false, ...options }).initialize();
 
+async function fill(source: DataSource): Promise<void> {
+  for (const [table, row] of OLDER) {
+    const names = Object.keys(row).map((name) => `"${name}"`);
+    const places = names.map(() => '?');
+    await source.query(
+      `INSERT INTO "${table}" (${names.join(', ')}) VALUES (${places.join(', ')})`,
+      Object.values(row),
+    );
+  }
+}
+
 /** What the tables of the first release hold. */
 async function contents(source: DataSource): Promise<[string, Row[]][]> {
   const tables = [...new Set(OLDER.map(([table]) => table))];
@@ -111,14 +123,7 @@ beforeAll(async () => {
   makeDataFolder(settings.dataDir);
   const older = await open({ migrations: [Initial1764600000000] });
   await older.runMigrations();
-  for (const [table, row] of OLDER) {
-    const names = Object.keys(row).map((name) => `"${name}"`);
-    const places = names.map(() => '?');
-    await older.query(
-      `INSERT INTO "${table}" (${names.join(', ')}) VALUES (${places.join(', ')})`,
-      Object.values(row),
-    );
-  }
+  await fill(older);
   before = await contents(older);
   await older.destroy();
   app = await createApp(settings);
@@ -126,6 +131,30 @@ beforeAll(async () => {
 afterAll(async () => {
   await app.close();
   remove();
+});
+
+describe('the tables for suppliers and stock', () => {
+  it('can be taken away again, and the first release finds what it wrote', async () => {
+    const own = tempSettings({ demo: false });
+    makeDataFolder(own.settings.dataDir);
+    const source = await new DataSource({
+      type: 'better-sqlite3',
+      database: path.join(own.settings.dataDir, DATABASE_FILE),
+      migrations: MIGRATIONS,
+    }).initialize();
+    const schema = () => source.query<Row[]>(`SELECT "name", "sql" FROM "sqlite_master" ORDER BY "name"`);
+    await source.runMigrations();
+    await fill(source);
+    await source.undoLastMigration();
+    expect(await contents(source)).toEqual(before);
+    expect(await source.query('PRAGMA foreign_key_check')).toEqual([]);
+    const names = (await schema()).map(({ name }) => name);
+    expect(names.filter((name) => /supplier|offer|stock|least|kind_length/.test(String(name)))).toEqual([]);
+    await source.runMigrations();
+    expect(await contents(source)).toMatchObject(before);
+    await source.destroy();
+    own.remove();
+  });
 });
 
 describe('a database of the first release, opened by this one', () => {

@@ -44,8 +44,10 @@ export class TrainsController {
   @Get(':code')
   @Allow('trains.read')
   @ApiOkResponse({ type: TrainDto })
-  get(@Param('code') code: string): Promise<TrainDto> {
-    return this.reader.get(code);
+  async get(@Param('code') code: string, @CurrentUser() user: SignedInUser): Promise<TrainDto> {
+    const train = await this.reader.get(code);
+    // Which offers people chose is for those who may see offers.
+    return user.permissions.includes('prices.read') ? train : { ...train, offerChoices: [] };
   }
 
   @Patch(':code')

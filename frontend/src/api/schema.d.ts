@@ -3225,7 +3225,7 @@ export interface components {
       optionKey: string;
       /** @description Trains built at once */
       buildQuantity: number;
-      /** @description Parts whose offer a person chose */
+      /** @description Parts whose offer a person chose; empty for people who may not see prices */
       offerChoices: components['schemas']['OfferChoice'][];
       figures: components['schemas']['TrainFigures'];
     };

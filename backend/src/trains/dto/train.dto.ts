@@ -27,7 +27,10 @@ export class TrainDto extends TrainSummaryDto {
   @ApiProperty({ type: 'integer', description: 'Trains built at once' })
   buildQuantity!: number;
 
-  @ApiProperty({ type: [OfferChoiceDto], description: 'Parts whose offer a person chose' })
+  @ApiProperty({
+    type: [OfferChoiceDto],
+    description: 'Parts whose offer a person chose; empty for people who may not see prices',
+  })
   offerChoices!: OfferChoiceDto[];
 
   @ApiProperty({ type: TrainFiguresDto })
