@@ -187,13 +187,15 @@ describe('booking many movements', () => {
   it('takes ten thousand of a past year within seconds, and lets others read in between', async () => {
     const inputs = Array.from({ length: 50 }, () => newGear());
     const numbers = await library.module.get(PartsLoader).createMany(LIBRARIAN, inputs);
+    // Midnight where the tests run, as the filter takes days.
+    const newYear = new Date(2025, 0, 1);
     // Every part is received and issued in turn, so that all shelves are empty again at the end.
     const year = Array.from({ length: 10_000 }, (_, index) => ({
       number: numbers[index % 50] ?? '',
       kind: index % 100 < 50 ? ('received' as const) : ('issued' as const),
       quantity: 2,
       place: `Rack ${(index % 50) % 3}`,
-      at: new Date(Date.UTC(2025, 0, 1) + index * 1_800_000).toISOString(),
+      at: new Date(newYear.getTime() + index * 1_800_000).toISOString(),
     }));
     let turns = 0;
     const ticking = setInterval(() => (turns += 1), 1);
@@ -205,7 +207,7 @@ describe('booking many movements', () => {
     const first = numbers[0] ?? '';
     const ledger = await movements.list({ part: first, from: '2025-01-01', until: '2025-01-01' });
     // A movement of this part every 50 half hours: the second falls on 2 January.
-    expect(ledger).toMatchObject({ total: 1, items: [{ at: '2025-01-01T00:00:00.000Z', kind: 'received' }] });
+    expect(ledger).toMatchObject({ total: 1, items: [{ at: newYear.toISOString(), kind: 'received' }] });
   });
 
   it('books nothing when one makes no sense or lies in the future, and names it', async () => {
