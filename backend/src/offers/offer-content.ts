@@ -1,7 +1,7 @@
 import { addDays, checkOfferTerms } from '@stageyard/libs/bill-of-materials';
 import { badInput, type FieldIssue } from '../common/errors.js';
 import { type Part } from '../parts/entities/part.entity.js';
-import { unitOf } from '../parts/part-unit.js';
+import { isCountable, unitOf } from '../parts/part-unit.js';
 import { type Supplier } from '../suppliers/entities/supplier.entity.js';
 import { type OfferInputDto } from './dto/offer-input.dto.js';
 import { type OfferContent } from './offer-changes.js';
@@ -55,7 +55,9 @@ function statedLater({ pricedOn }: OfferContent, today: string): FieldIssue[] {
 }
 
 function brokenPieces(content: OfferContent, part: Pick<Part, 'kind' | 'number'>): FieldIssue[] {
-  if (unitOf(part.kind) !== 'pcs') return [];
+  const unit = unitOf(part.kind);
+  // The terms hold thousandths of a litre to their rule already.
+  if (unit !== 'pcs') return [];
   const quantities: [field: string, quantity: number][] = [
     ...content.breaks.map(({ quantity }, index): [string, number] => [`breaks.${index}.quantity`, quantity]),
     ['pack', content.pack],
@@ -65,7 +67,7 @@ function brokenPieces(content: OfferContent, part: Pick<Part, 'kind' | 'number'>
       : [['leastQuantity', content.leastQuantity] as [string, number]]),
   ];
   return quantities
-    .filter(([, quantity]) => !Number.isInteger(quantity))
+    .filter(([, quantity]) => !isCountable(quantity, unit))
     .map(([field, value]) => {
       const message = `${part.number} is counted in pieces; ${value} is not a whole number of them.`;
       return { field, value, message };

@@ -4,7 +4,7 @@ import { DataSource } from 'typeorm';
 import { badInput, notFound } from '../common/errors.js';
 import { HOUSE_RULES } from '../house-rules/house-rules.js';
 import { Part } from '../parts/entities/part.entity.js';
-import { unitOf } from '../parts/part-unit.js';
+import { isCountable, unitOf } from '../parts/part-unit.js';
 import { StockLevels } from '../stock/stock-levels.service.js';
 import { type PartOffersQueryDto } from './dto/part-offers-query.dto.js';
 import { type PartOffersDto } from './dto/part-offers.dto.js';
@@ -30,7 +30,7 @@ export class PartOffers {
     if (!part) throw notFound('part', number);
     const { quantity = 1, prefer = 'price' } = query;
     const unit = unitOf(part.kind);
-    if (unit === 'pcs' && !Number.isInteger(quantity)) {
+    if (unit === 'pcs' && !isCountable(quantity, unit)) {
       const message = `${part.number} is counted in pieces; ${quantity} is not a whole number of them.`;
       throw badInput([{ field: 'quantity', value: quantity, message }]);
     }

@@ -1,5 +1,8 @@
+import { fromThousandths } from '@stageyard/libs/bill-of-materials';
 import { badInput } from '../common/errors.js';
-import type { PartUnit } from '../parts/part-unit.js';
+import { isCountable, type PartUnit } from '../parts/part-unit.js';
+
+export { fromThousandths };
 
 /** Most of a part that can lie at one place, in its unit. */
 export const MOST_STOCK = 1_000_000;
@@ -13,22 +16,13 @@ const THOUSAND = 1000;
  * @throws ProblemError 400 for parts of a piece, or more than three decimals
  */
 export function toThousandths(quantity: number, unit: PartUnit, field = 'quantity'): number {
-  if (unit === 'pcs' && !Number.isInteger(quantity)) {
+  if (isCountable(quantity, unit)) return Math.round(quantity * THOUSAND);
+  if (unit === 'pcs') {
     const message = `${field} must be a whole number: this part is counted in pieces.`;
     throw badInput([{ field, value: quantity, message }]);
   }
-  const thousandths = Math.round(quantity * THOUSAND);
-  // The nearest figure with three decimals is the same double exactly when no more were typed.
-  if (thousandths / THOUSAND !== quantity) {
-    const message = `${field} may have at most three decimals: litres are kept to the millilitre.`;
-    throw badInput([{ field, value: quantity, limit: 3, message }]);
-  }
-  return thousandths;
-}
-
-/** A kept quantity in the part's unit; at most three decimals. */
-export function fromThousandths(thousandths: number): number {
-  return thousandths / THOUSAND;
+  const message = `${field} may have at most three decimals: litres are kept to the millilitre.`;
+  throw badInput([{ field, value: quantity, limit: 3, message }]);
 }
 
 /** As people read it: `3 pcs`, `1.25 l`. */

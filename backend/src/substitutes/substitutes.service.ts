@@ -7,7 +7,7 @@ import { badInput, notFound } from '../common/errors.js';
 import { HOUSE_RULES } from '../house-rules/house-rules.js';
 import { toPartSummaryDto } from '../parts/dto/part-summary.dto.js';
 import { Part } from '../parts/entities/part.entity.js';
-import { unitOf } from '../parts/part-unit.js';
+import { isCountable, unitOf } from '../parts/part-unit.js';
 import { type SubstituteDto, type SubstituteOfferDto, type SubstitutesDto } from './dto/substitutes.dto.js';
 import { toFitPart } from './fit-part.js';
 import { FittingParts, type FittingPart } from './fitting-parts.service.js';
@@ -32,7 +32,7 @@ export class Substitutes {
   async ofPart(number: string, quantity: number, user: Viewer): Promise<SubstitutesDto> {
     const part = await this.parts.findOneBy({ number: number.trim() });
     if (!part) throw notFound('part', number);
-    if (unitOf(part.kind) === 'pcs' && !Number.isInteger(quantity)) {
+    if (!isCountable(quantity, unitOf(part.kind))) {
       const message = `quantity must be a whole number: ${part.number} is counted in pieces.`;
       throw badInput([{ field: 'quantity', value: quantity, message }]);
     }

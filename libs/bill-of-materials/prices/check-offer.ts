@@ -1,6 +1,7 @@
 import { currencyDecimals, type FieldIssue, InputError } from '../../units/index.js';
 import { isCalendarDate } from './calendar-date.js';
 import { type OfferTerms, type PriceBreak } from './offer-terms.js';
+import { isInThousandths } from './thousandths.js';
 
 /** Bounds of an offer; quantities in the part's unit, prices in minor units, lead time in calendar days. */
 export const OFFER_LIMITS = {
@@ -90,7 +91,7 @@ function quantityIssues(field: string, quantity: unknown, label: string): FieldI
     const message = `${label} must be above 0 and at most ${most.toLocaleString('en-GB')}; ${shown(quantity)} is not.`;
     return [{ field, value: given(quantity), limit: most, message }];
   }
-  if (Number(quantity.toFixed(3)) === quantity) return [];
+  if (isInThousandths(quantity)) return [];
   const message = `${label} has at most three decimals; ${quantity} has more.`;
   return [{ field, value: quantity, limit: 0.001, message }];
 }

@@ -10,7 +10,7 @@ export {
 export { offerState, priceAge, type OfferState } from './offer-state.js';
 export type { OfferTerms, PriceBreak } from './offer-terms.js';
 export { orderQuantity, priceAt, type PricedQuantity, type PriceTerms, type QuantityTerms } from './price.js';
-export { fromThousandths, MOST_QUANTITY, toThousandths } from './thousandths.js';
+export { fromThousandths, isInThousandths, MOST_QUANTITY, toThousandths } from './thousandths.js';
 export {
   neededQuantity,
   priceNeed,

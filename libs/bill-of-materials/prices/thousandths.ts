@@ -6,6 +6,11 @@ export const MOST_QUANTITY = 1_000_000_000;
 /** What binary fractions may add to a product such as 3 × 0.1, in thousandths. */
 const NOISE = 1e-4;
 
+/** Whether a figure as it was typed, up to 1,000,000,000, has at most three decimals: those are the nearest doubles. */
+export function isInThousandths(quantity: number): boolean {
+  return Math.round(quantity * 1000) / 1000 === quantity;
+}
+
 /**
  * A quantity as a whole number of thousandths, so that sums and multiples are exact.
  * @param quantity in the part's unit, from 0 to 1,000,000,000, at most three decimals

@@ -1,4 +1,5 @@
 import { ApiPropertyOptional, ApiSchema } from '@nestjs/swagger';
+import { isInThousandths } from '@stageyard/libs/bill-of-materials';
 import { Transform } from 'class-transformer';
 import { IsOptional, ValidateBy } from 'class-validator';
 
@@ -24,10 +25,7 @@ export class SubstitutesQueryDto {
     constraints: [MOST_ASKED],
     validator: {
       validate: (value) =>
-        typeof value === 'number' &&
-        value > 0 &&
-        value <= MOST_ASKED &&
-        Math.abs(value * 1000 - Math.round(value * 1000)) < 1e-6,
+        typeof value === 'number' && value > 0 && value <= MOST_ASKED && isInThousandths(value),
       defaultMessage: () =>
         'quantity must be a number above 0 and at most 1,000,000 with at most three decimals.',
     },
