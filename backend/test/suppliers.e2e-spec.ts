@@ -190,6 +190,19 @@ describe('the list of suppliers', () => {
     expect(await names('standing=closed')).toEqual([]);
     expect((await purchaser.get('/api/suppliers?sort=address')).status).toBe(400);
   });
+
+  it('is searched in what people typed of contacts, not in how they are kept', async () => {
+    const contact = { name: 'Ines Falk', role: 'Quotations', email: 'ines@cairn.example', phone: '0555 123' };
+    await add({ name: 'Cairn Castings', contacts: [contact] });
+    const found = async (text: string) =>
+      (await purchaser.get<Page>(`/api/suppliers?text=${text}`)).body.items.map(({ name }) => name);
+    for (const text of ['ines%20falk', 'quotations', 'ines@cairn', '0555']) {
+      expect(await found(text), text).toEqual(['Cairn Castings']);
+    }
+    // The contacts are kept with these words in them.
+    expect(await found('phone')).toEqual([]);
+    expect(await found('role')).toEqual([]);
+  });
 });
 
 describe('people without prices', () => {

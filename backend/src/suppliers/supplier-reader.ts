@@ -14,8 +14,11 @@ import { SUPPLIER_SORTS, type SupplierQueryDto } from './dto/supplier-query.dto.
 import { NO_OFFERS, type SupplierDto, toSupplierDto } from './dto/supplier.dto.js';
 import { Supplier } from './entities/supplier.entity.js';
 
-/** Where the text of a list is looked for. */
-const SEARCHED = ['code', 'name', 'address', 'note', 'contacts'];
+/** Where the text of a list is looked for. Of contacts only what people typed: the names of their fields are no text. */
+const HOLDS_TEXT = [
+  ...['code', 'name', 'address', 'note'].map((field) => `supplier.${field} LIKE :text ESCAPE '\\'`),
+  `EXISTS (SELECT 1 FROM json_tree(supplier.contacts) "typed" WHERE "typed"."atom" LIKE :text ESCAPE '\\')`,
+].join(' OR ');
 
 /** Open offers that have not ended, of the supplier of the row. */
 const OPEN_OFFERS = `(SELECT COUNT(*) FROM "offer" "o" WHERE "o"."supplierId" = supplier.id
@@ -40,10 +43,7 @@ export class SupplierReader {
     if (query.standing) rows.andWhere('supplier.standing = :standing', { standing: query.standing });
     if (query.currency)
       rows.andWhere('supplier.currency = :currency', { currency: query.currency.toUpperCase() });
-    if (list.text) {
-      const fields = SEARCHED.map((field) => `supplier.${field} LIKE :text ESCAPE '\\'`);
-      rows.andWhere(`(${fields.join(' OR ')})`, { text: containing(list.text) });
-    }
+    if (list.text) rows.andWhere(`(${HOLDS_TEXT})`, { text: containing(list.text) });
     const count = statementOf(rows.clone().select('COUNT(*)', 'count'), { keep: true });
     for (const { field, direction } of list.sorts) {
       if (field === 'offers') {
