@@ -339,6 +339,16 @@ describe('what a pasted row changes', () => {
     });
   });
 
+  it('lets a least quantity that came from the first price follow it, and keeps one that was stated', async () => {
+    const supplierCode = await addSupplier();
+    const fromTen = { supplierCode, breaks: [{ quantity: 10, unitPrice: 500 }] };
+    await purchaser.post('/api/offers', newOffer({ ...fromTen, partNumber: part(0) }));
+    await purchaser.post('/api/offers', newOffer({ ...fromTen, partNumber: part(1), leastQuantity: 20 }));
+    const { rows } = await preview(supplierCode, `${part(0)}\t\t1\t6.00\n${part(1)}\t\t1\t6.00`);
+    expect(rows[0]?.changes).toContain('Least quantity: 10 → 1');
+    expect(rows[1]?.changes.join()).not.toContain('Least quantity');
+  });
+
   it('never changes a price a hundredfold because a column is missing', async () => {
     const supplierCode = await addSupplier();
     await purchaser.post('/api/offers', newOffer({ partNumber: part(0), supplierCode, per: 100 }));

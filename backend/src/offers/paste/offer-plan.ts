@@ -127,14 +127,15 @@ export class OfferPlan {
         `The present offer is in ${before.currency}, and the row does not say its currency. Say it.`,
       );
     }
+    const breaks = breaksOf(stated);
     return {
       ...storedContent(before),
       supplierPartNumber: supplierPartNumber || before.supplierPartNumber,
       currency,
       per: terms.per ?? before.per,
-      breaks: breaksOf(stated),
+      breaks,
       pack: terms.pack ?? before.pack,
-      leastQuantity: terms.leastQuantity ?? before.leastQuantity,
+      leastQuantity: terms.leastQuantity ?? leastQuantityOf(before, breaks),
       leadTimeDays: terms.leadTimeDays ?? before.leadTimeDays,
       validFrom: terms.validFrom ?? this.defaults.validFrom ?? before.validFrom,
       validUntil: terms.validUntil ?? this.defaults.validUntil ?? before.validUntil,
@@ -181,6 +182,12 @@ function ownNumber({ rows: [first] }: StatedOffer): string {
 
 function breaksOf({ breaks }: StatedOffer): OfferContent['breaks'] {
   return breaks.map(({ quantity, unitPrice }) => ({ quantity, unitPrice }));
+}
+
+/** A least quantity that was no more than the first price break goes on with it. */
+function leastQuantityOf(before: Offer, [first]: OfferContent['breaks']): number {
+  const wasTheFirst = before.leastQuantity === before.breaks[0]?.quantity;
+  return wasTheFirst && first ? first.quantity : before.leastQuantity;
 }
 
 /** The terms that the rows state. */
