@@ -24,6 +24,8 @@ interface NumberFieldProps<Form extends FieldValues> extends NumberLimits {
   autoFocus?: boolean;
 }
 
+const limitWords = (limit: number): string => limit.toLocaleString('en-GB', { maximumFractionDigits: 10 });
+
 /** What is wrong with typed text as a figure within limits; `null` when nothing is. */
 export function numberProblem(typed: string, limits: NumberLimits, unit = ''): string | null {
   const reading = readDecimal(typed);
@@ -33,9 +35,10 @@ export function numberProblem(typed: string, limits: NumberLimits, unit = ''): s
   const u = unit === '' ? '' : ` ${unit}`;
   if (limits.whole && !Number.isInteger(value)) return `Give a whole number; ${reading.text} is not one.`;
   if (limits.min !== undefined && limits.above && value <= limits.min)
-    return `Must be above ${limits.min}${u}.`;
-  if (limits.min !== undefined && value < limits.min) return `Must be at least ${limits.min}${u}.`;
-  if (limits.max !== undefined && value > limits.max) return `Must be at most ${limits.max}${u}.`;
+    return `Must be above ${limitWords(limits.min)}${u}.`;
+  if (limits.min !== undefined && value < limits.min)
+    return `Must be at least ${limitWords(limits.min)}${u}.`;
+  if (limits.max !== undefined && value > limits.max) return `Must be at most ${limitWords(limits.max)}${u}.`;
   return null;
 }
 

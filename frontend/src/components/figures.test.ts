@@ -1,5 +1,5 @@
-import { describe, expect, it } from 'vitest';
-import { formatCount, formatFixed, formatMass, formatPlain, formatSigned } from './figures';
+import { describe, expect, it, vi } from 'vitest';
+import { formatCount, formatFixed, formatMass, formatPlain, formatQuantity, formatSigned } from './figures';
 import { toTsv } from './copyTsv';
 
 describe('figures', () => {
@@ -29,6 +29,26 @@ describe('figures', () => {
     expect(formatPlain(1.25)).toBe('1.25');
     expect(formatPlain(20)).toBe('20');
     expect(formatCount(41208113)).toBe('41,208,113');
+  });
+
+  it('parts the thousands of quantities and keeps their thousandths', () => {
+    expect([1250, 0.5, 1000.125, -2, null].map(formatQuantity)).toEqual([
+      '1,250',
+      '0.5',
+      '1,000.125',
+      '\u22122',
+      '–',
+    ]);
+  });
+
+  it('writes a day of the calendar as it is, wherever the reader sits', async () => {
+    // Ten hours behind Greenwich, where the first minute of 1 December is still November.
+    vi.stubEnv('TZ', 'Pacific/Honolulu');
+    vi.resetModules();
+    const there = await import('./figures');
+    expect(there.formatDay('2026-12-01T00:00:00Z')).toBe('30 Nov 2026');
+    expect(there.formatDay('2026-12-01')).toBe('1 Dec 2026');
+    vi.unstubAllEnvs();
   });
 });
 

@@ -29,6 +29,12 @@ export function formatPlain(value: number | null | undefined, decimals = 4): str
   return String(Number(value.toFixed(decimals))).replace('-', MINUS);
 }
 
+/** A quantity to the thousandth, thousands parted: `1,250`, `0.5`; `–` where nothing is known. */
+export function formatQuantity(value: number | null | undefined): string {
+  if (value === null || value === undefined || !Number.isFinite(value)) return NOTHING;
+  return value.toLocaleString('en-GB', { maximumFractionDigits: 3 }).replace('-', MINUS);
+}
+
 /** Whole numbers with thousands separators: 1,842. */
 export function formatCount(value: number): string {
   return value.toLocaleString('en-GB');
@@ -42,7 +48,9 @@ export function formatWhen(iso: string): string {
   return WHEN.format(new Date(iso));
 }
 
-/** "1 Dec 2026". */
+const CALENDAR_DAY = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeZone: 'UTC' });
+
+/** "1 Dec 2026": the reader's day of a moment, or a day of the calendar (`YYYY-MM-DD`), which is the same everywhere. */
 export function formatDay(iso: string): string {
-  return DAY.format(new Date(iso));
+  return (iso.length === 10 ? CALENDAR_DAY : DAY).format(new Date(iso));
 }

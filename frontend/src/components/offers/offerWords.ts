@@ -1,25 +1,25 @@
 import type { Offer } from '../../api/types';
-import { formatDay, formatPlain } from '../figures';
+import { formatDay, formatQuantity } from '../figures';
 import { amountWords } from '../moneyText';
 
 /** How an offer is written wherever it stands: in lists, on a part's page, at a supplier. */
 
 /** `EUR`, or `EUR per 100` where the prices are for more than one. */
 export function priceUnitWords({ currency, per }: Pick<Offer, 'currency' | 'per'>): string {
-  return per === 1 ? currency : `${currency} per ${per}`;
+  return per === 1 ? currency : `${currency} per ${formatQuantity(per)}`;
 }
 
 /** `1: 12.40 · 10: 11.10 · 100: 9.85 EUR`: from which quantity which price holds. */
 export function breaksWords(offer: Pick<Offer, 'breaks' | 'currency' | 'per'>): string {
   const steps = offer.breaks.map(
-    ({ quantity, unitPrice }) => `${formatPlain(quantity, 3)}: ${amountWords(unitPrice, offer.currency)}`,
+    ({ quantity, unitPrice }) => `${formatQuantity(quantity)}: ${amountWords(unitPrice, offer.currency)}`,
   );
   return `${steps.join(' · ')} ${priceUnitWords(offer)}`;
 }
 
 /** `250 pcs`, `2.5 l` */
 export const quantityWords = (quantity: number, unit: string): string =>
-  `${formatPlain(quantity, 3)} ${unit}`;
+  `${formatQuantity(quantity)} ${unit}`;
 
 /** `today`, `1 day old`, `264 days old` */
 export function ageWords(days: number): string {

@@ -1,5 +1,5 @@
 import type { Movement, MovementKind, StockItem } from '../../api/types';
-import { formatSigned, NOTHING } from '../figures';
+import { formatQuantity, formatSigned, NOTHING } from '../figures';
 
 export const MOVEMENT_KINDS: readonly MovementKind[] = ['received', 'issued', 'counted', 'corrected'];
 
@@ -12,10 +12,7 @@ export const ACT_NAMES: Record<MovementKind, string> = {
 };
 
 /** A quantity without its unit: `1,250`, `0.5`; `–` for null. */
-export function figureWords(quantity: number | null): string {
-  if (quantity === null) return NOTHING;
-  return quantity.toLocaleString('en-GB', { maximumFractionDigits: 3 }).replace('-', '−');
-}
+export const figureWords = (quantity: number | null): string => formatQuantity(quantity);
 
 /** `12 pcs`, `1.25 l`; thousands parted. */
 export function quantityWords(quantity: number, unit: string): string {

@@ -74,7 +74,7 @@ describe('what is wrong with a quantity', () => {
   it('must be above nothing, within bounds, and a number', () => {
     expect(breakQuantityProblem(rows('0'), 0)).toMatch(/above 0/);
     expect(breakQuantityProblem(rows('-1'), 0)).toMatch(/above 0/);
-    expect(breakQuantityProblem(rows('1000001'), 0)).toMatch(/at most 1000000/);
+    expect(breakQuantityProblem(rows('1000001'), 0)).toMatch(/at most 1,000,000/);
     expect(breakQuantityProblem(rows('ten'), 0)).toMatch(/not a number/);
   });
 

@@ -10,12 +10,16 @@ import { formatMoney } from '@stageyard/libs/units';
 import { useState } from 'react';
 import type { Offer } from '../../api/types';
 import { CopyTable } from '../../components/CopyTable';
-import { formatPlain } from '../../components/figures';
+import { formatQuantity } from '../../components/figures';
 import { amountWords } from '../../components/moneyText';
 import { numberOrNull, numberProblem } from '../../components/NumberField';
 import { priceUnitWords } from '../../components/offers/offerWords';
 import { PricedWords } from '../../components/offers/PricedWords';
 import { Sheet } from '../../components/Sheet';
+
+const Nowrap = ({ children }: { children: string }) => (
+  <span style={{ whiteSpace: 'nowrap' }}>{children}</span>
+);
 
 /** The breaks of one offer, what an order at each comes to, and any other quantity on trial. */
 export function OfferPrices({ offer }: { offer: Offer }) {
@@ -39,10 +43,11 @@ export function OfferPrices({ offer }: { offer: Offer }) {
               const { lineTotal, orderQuantity } = priceAt(each.quantity, offer);
               return (
                 <TableRow key={each.quantity}>
-                  <TableCell align="right">{formatPlain(each.quantity, 3)}</TableCell>
+                  <TableCell align="right">{formatQuantity(each.quantity)}</TableCell>
                   <TableCell align="right">{amountWords(each.unitPrice, offer.currency)}</TableCell>
                   <TableCell align="right">
-                    {formatPlain(orderQuantity, 3)} {unit}, {formatMoney(lineTotal)}
+                    <Nowrap>{`${formatQuantity(orderQuantity)} ${unit},`}</Nowrap>{' '}
+                    <Nowrap>{formatMoney(lineTotal)}</Nowrap>
                   </TableCell>
                 </TableRow>
               );

@@ -8,7 +8,7 @@ import TableRow from '@mui/material/TableRow';
 import { Link as RouterLink } from 'react-router-dom';
 import type { PartOffers } from '../../api/types';
 import { CopyTable } from '../../components/CopyTable';
-import { formatPlain, NOTHING } from '../../components/figures';
+import { formatQuantity, NOTHING } from '../../components/figures';
 import { amountWords } from '../../components/moneyText';
 import {
   breaksWords,
@@ -77,9 +77,9 @@ function OfferRow({ offer }: { offer: Row }) {
         </Box>
       </TableCell>
       <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
-        {price === null ? NOTHING : formatPlain(price.orderQuantity, 3)}
+        {price === null ? NOTHING : formatQuantity(price.orderQuantity)}
         {price !== null && price.surplus > 0 && (
-          <Box sx={SMALL}>{formatPlain(price.surplus, 3)} left over</Box>
+          <Box sx={SMALL}>{formatQuantity(price.surplus)} left over</Box>
         )}
       </TableCell>
       <TableCell align="right" sx={{ ...WIDE_ONLY, whiteSpace: 'nowrap' }}>

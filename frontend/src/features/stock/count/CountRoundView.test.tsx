@@ -80,7 +80,7 @@ describe('counting', () => {
     await user.clear(screen.getByLabelText('Part number'));
     for (const [figure, words] of [
       ['-1', /at least 0/],
-      ['1000000000000', /at most 1000000/],
+      ['1000000000000', /at most 1,000,000/],
       ['1.5', /whole number/],
       ['KW-00017', /not a number/],
     ] as const) {
