@@ -18,8 +18,14 @@ const LOOK: Record<Offer['state'], { word: string; mark: string; filled: boolean
   closed: { word: 'closed', mark: 'M2 6h8', filled: false, colour: 'text.secondary' },
 };
 
+interface OfferStateWordProps {
+  state: Offer['state'];
+  /** In place of the state's own word, where they say as much: "until 5 Jun 2027". */
+  words?: string;
+}
+
 /** Whether an offer can be ordered from: a mark and a word, never colour alone. */
-export function OfferStateWord({ state }: { state: Offer['state'] }) {
+export function OfferStateWord({ state, words }: OfferStateWordProps) {
   const { word, mark, filled, colour } = LOOK[state];
   return (
     <Box component="span" sx={{ color: colour, whiteSpace: 'nowrap' }}>
@@ -37,7 +43,7 @@ export function OfferStateWord({ state }: { state: Offer['state'] }) {
           strokeWidth={filled ? 0 : 1.5}
         />
       </svg>
-      {word}
+      {words ?? word}
     </Box>
   );
 }

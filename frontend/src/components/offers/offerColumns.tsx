@@ -12,15 +12,15 @@ const COLUMNS: Column[] = [
   {
     field: 'part',
     headerName: 'Part',
-    width: 96,
+    width: 92,
     cellClassName: 'part-number',
     valueGetter: (_, { part }) => part.number,
   },
   {
     field: 'description',
     headerName: 'Description',
-    flex: 1.2,
-    minWidth: 140,
+    flex: 1,
+    minWidth: 150,
     sortable: false,
     valueGetter: (_, { part }) => part.description,
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -28,8 +28,9 @@ const COLUMNS: Column[] = [
   {
     field: 'supplier',
     headerName: 'Supplier',
-    flex: 0.8,
-    minWidth: 130,
+    flex: 1,
+    minWidth: 150,
+    maxWidth: 220,
     valueGetter: (_, { supplier }) => supplier.name,
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
   },
@@ -37,8 +38,8 @@ const COLUMNS: Column[] = [
   {
     field: 'breaks',
     headerName: 'Price from a quantity',
-    flex: 1,
-    minWidth: 300,
+    flex: 0.3,
+    minWidth: 290,
     sortable: false,
     valueGetter: (_, offer) => breaksWords(offer),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -54,23 +55,23 @@ const COLUMNS: Column[] = [
   {
     field: 'state',
     headerName: 'State',
-    width: 84,
+    width: 80,
     sortable: false,
     renderCell: ({ row }) => <OfferStateWord state={row.state} />,
   },
   {
     field: 'pricedOn',
     headerName: 'Price age',
-    width: 142,
+    width: 130,
     renderCell: ({ row }) => <PriceAge offer={row} short />,
     copied: ({ pricedOn }) => pricedOn,
   },
   {
     field: 'validUntil',
     headerName: 'Holds',
-    width: 152,
+    width: 158,
     valueGetter: (_, offer) => validityWords(offer),
-    copied: ({ validUntil }) => validUntil,
+    renderCell: ({ row, value }) => <OfferStateWord state={row.state} words={String(value)} />,
   },
 ];
 
@@ -82,7 +83,8 @@ export function hiddenOfferColumns(room: OffersRoom, ofOneSupplier: boolean): Re
   return {
     supplier: !ofOneSupplier && room !== 'narrow',
     supplierPartNumber: room === 'full' || (ofOneSupplier && room !== 'narrow'),
-    ...(room === 'wide' || room === 'full' ? {} : { validUntil: false }),
+    // How long it holds says its state too; where there is no room for that, the state alone.
+    ...(room === 'wide' || room === 'full' ? { state: false } : { validUntil: false }),
     ...(room === 'narrow' ? { description: false, leadTimeDays: false, state: false, pricedOn: false } : {}),
   };
 }

@@ -16,6 +16,8 @@ import { changeWords, figureWords } from '../../components/stock/stockWords';
 const SHOWN = 5;
 
 const WIDE = { display: { xs: 'none', sm: 'table-cell' } } as const;
+/** On a phone they take two lines. */
+const ONE_LINE = { whiteSpace: { sm: 'nowrap' } } as const;
 
 /** The latest movements of one part. */
 export function LastMovements({ number }: { number: string }) {
@@ -48,15 +50,15 @@ export function LastMovements({ number }: { number: string }) {
           <TableBody>
             {page.items.map((movement) => (
               <TableRow key={movement.id}>
-                <TableCell>{formatWhen(movement.at)}</TableCell>
+                <TableCell sx={ONE_LINE}>{formatWhen(movement.at)}</TableCell>
                 <TableCell>{movement.kind}</TableCell>
                 <TableCell align="right">{changeWords(movement.change)}</TableCell>
                 <TableCell align="right" sx={WIDE}>
                   {figureWords(movement.after)}
                 </TableCell>
-                <TableCell>{movement.place}</TableCell>
+                <TableCell sx={ONE_LINE}>{movement.place}</TableCell>
                 <TableCell sx={WIDE}>{movement.reason}</TableCell>
-                <TableCell sx={WIDE}>{movement.by}</TableCell>
+                <TableCell sx={{ ...WIDE, ...ONE_LINE }}>{movement.by}</TableCell>
               </TableRow>
             ))}
           </TableBody>

@@ -134,7 +134,7 @@ const ROOM: Partial<Record<string, readonly TableWidth[]>> = {
   kind: ['full'],
   teeth: ['narrow', 'middle', 'wide', 'full'],
   material: ['wide', 'full'],
-  mass: ['wide', 'full'],
+  mass: ['full'],
   profileShift: ['full'],
   updatedAt: ['full'],
 };

@@ -22,31 +22,31 @@ const ONE_LINE = { display: 'block', overflow: 'hidden', textOverflow: 'ellipsis
 const titled = (text: string) => <span title={text}>{text}</span>;
 
 const COLUMNS: Column[] = [
-  { field: 'at', headerName: 'When', width: 156, valueFormatter: (at: string) => formatWhen(at) },
+  { field: 'at', headerName: 'When', width: 150, valueFormatter: (at: string) => formatWhen(at) },
   {
     field: 'number',
     headerName: 'Part',
-    width: 104,
+    width: 94,
     sortable: false,
     renderCell: ({ row }) => <PartLink number={row.number} />,
   },
   {
     field: 'description',
     headerName: 'Description',
-    flex: 1.2,
-    minWidth: 160,
+    flex: 1,
+    minWidth: 150,
     sortable: false,
     renderCell: ({ row }) => titled(row.description),
   },
-  { field: 'kind', headerName: 'What', width: 92, sortable: false },
+  { field: 'kind', headerName: 'What', width: 88, sortable: false },
   {
     field: 'change',
     headerName: 'Change',
-    width: 84,
+    width: 92,
     sortable: false,
     align: 'right',
     headerAlign: 'right',
-    valueFormatter: (change: number) => changeWords(change),
+    valueGetter: (_, { change, unit }) => `${changeWords(change)} ${unit}`,
   },
   {
     field: 'after',
@@ -57,27 +57,25 @@ const COLUMNS: Column[] = [
     headerAlign: 'right',
     valueFormatter: (after: number) => figureWords(after),
   },
-  { field: 'unit', headerName: 'Unit', width: 52, sortable: false },
   {
     field: 'place',
     headerName: 'Place',
-    flex: 0.8,
-    minWidth: 130,
+    width: 158,
     sortable: false,
     renderCell: ({ row }) => titled(row.place),
   },
   {
     field: 'reason',
     headerName: 'Why',
-    flex: 1,
-    minWidth: 120,
+    flex: 1.2,
+    minWidth: 150,
     sortable: false,
     renderCell: ({ row }) => titled(row.reason),
   },
-  { field: 'by', headerName: 'By', width: 112, sortable: false },
+  { field: 'by', headerName: 'By', width: 104, sortable: false },
 ];
 
-export const MIDDLE_HIDDEN = { unit: false, after: false };
+export const MIDDLE_HIDDEN = { after: false };
 export const NARROW_HIDDEN = {
   ...MIDDLE_HIDDEN,
   number: false,

@@ -13,7 +13,7 @@ import { FilterText } from '../../components/FilterText';
 import { NoPermission } from '../../components/NoPermission';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState, writeSort, type ListState } from '../../components/useListState';
-import { LAPTOP_HIDDEN, NARROW_HIDDEN, SUPPLIER_COLUMNS, WIDE_HIDDEN } from './supplierColumns';
+import { LAPTOP_HIDDEN, NARROW_HIDDEN, supplierColumns, WIDE_HIDDEN } from './supplierColumns';
 
 const FILTERS = ['text', 'standing', 'currency'] as const;
 const SORTS = ['code', 'name', 'currency', 'leadTimeDays', 'offers', 'updatedAt'] as const;
@@ -83,7 +83,8 @@ export default function SuppliersPage() {
       </FilterBar>
       <DataTable
         label="Suppliers"
-        columns={SUPPLIER_COLUMNS}
+        columns={supplierColumns(narrow)}
+        rowHeight={narrow ? 46 : 32}
         hidden={narrow ? NARROW_HIDDEN : laptop ? LAPTOP_HIDDEN : full ? undefined : WIDE_HIDDEN}
         rows={page?.items}
         total={page?.total}

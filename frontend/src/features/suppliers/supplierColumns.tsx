@@ -1,3 +1,4 @@
+import Box from '@mui/material/Box';
 import type { Supplier } from '../../api/types';
 import { formatDay, NOTHING } from '../../components/figures';
 import type { DataColumn } from '../../components/gridText';
@@ -5,24 +6,27 @@ import { moneyWords } from '../../components/moneyText';
 import { leadTimeWords } from '../../components/offers/offerWords';
 import { freightWords, offersWords } from './supplierWords';
 
+const ONE_LINE = { overflow: 'hidden', textOverflow: 'ellipsis' } as const;
+
 const right = { align: 'right', headerAlign: 'right' } as const;
 
 /** Columns of the list; `sortable` ones are those that the server sorts by. */
-export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
-  { field: 'code', headerName: 'Code', width: 84, cellClassName: 'part-number' },
+const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
+  { field: 'code', headerName: 'Code', width: 80, cellClassName: 'part-number' },
   {
     field: 'name',
     headerName: 'Name',
     flex: 1,
-    minWidth: 180,
+    minWidth: 222,
     valueGetter: (_, { name, standing }) => (standing === 'closed' ? `${name} (closed)` : name),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
   },
-  { field: 'currency', headerName: 'Currency', width: 88 },
+  { field: 'currency', headerName: 'Currency', width: 86 },
   {
     field: 'leadTimeDays',
-    headerName: 'Usual lead time',
-    width: 124,
+    headerName: 'Lead time',
+    description: 'Their usual lead time',
+    width: 96,
     ...right,
     valueFormatter: (days: number | null) => leadTimeWords(days),
   },
@@ -38,8 +42,8 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   {
     field: 'freight',
     headerName: 'Freight',
-    flex: 1.3,
-    minWidth: 190,
+    flex: 1,
+    minWidth: 236,
     sortable: false,
     valueGetter: (_, { freight, currency }) => freightWords(freight, currency),
     renderCell: ({ value }) => <span title={String(value)}>{String(value)}</span>,
@@ -47,14 +51,14 @@ export const SUPPLIER_COLUMNS: DataColumn<Supplier>[] = [
   {
     field: 'offers',
     headerName: 'Offers',
-    width: 172,
+    width: 168,
     ...right,
     valueGetter: (_, { offers }) => offersWords(offers),
   },
   {
     field: 'oldestPrice',
     headerName: 'Oldest price',
-    width: 110,
+    width: 104,
     sortable: false,
     ...right,
     valueGetter: (_, { offers: { oldestPricedOn } }) =>
@@ -81,5 +85,23 @@ export const NARROW_HIDDEN = {
   currency: false,
   leadTimeDays: false,
   freight: false,
+  offers: false,
   oldestPrice: false,
 };
+
+/** On a phone the offers stand under the name. */
+export function supplierColumns(narrow: boolean): DataColumn<Supplier>[] {
+  if (!narrow) return SUPPLIER_COLUMNS;
+  return SUPPLIER_COLUMNS.map((column) => {
+    if (column.field !== 'name') return column;
+    const renderCell: DataColumn<Supplier>['renderCell'] = ({ row, value }) => (
+      <Box sx={{ lineHeight: 1.35, minWidth: 0 }}>
+        <Box sx={ONE_LINE}>{String(value)}</Box>
+        <Box sx={{ ...ONE_LINE, color: 'text.secondary', fontSize: '0.75rem' }}>
+          {`${row.currency} · ${row.offers.open + row.offers.expired === 0 ? 'no offers' : offersWords(row.offers)}`}
+        </Box>
+      </Box>
+    );
+    return { ...column, display: 'flex', renderCell };
+  });
+}

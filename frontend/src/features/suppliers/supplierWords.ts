@@ -26,7 +26,7 @@ export function freightWords(freight: Supplier['freight'], currency: string): st
     case 'free-from':
       return freeFrom === null
         ? `${charged} an order`
-        : `${charged} an order, free from ${moneyWords(freeFrom, currency)}`;
+        : `${charged}, free from ${moneyWords(freeFrom, currency)}`;
     case 'as-charged':
       return 'as the carrier charges';
   }
