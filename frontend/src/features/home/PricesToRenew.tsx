@@ -22,8 +22,13 @@ const COLUMNS: RowColumn<Offer>[] = [
   { name: 'Part', cell: (offer) => <CodeLink to={pathOf(offer)} code={offer.part.number} /> },
   { name: 'Description', wideOnly: true, cell: ({ part }) => part.description },
   { name: 'Supplier', cell: ({ supplier }) => supplier.name },
-  { name: 'Holds', cell: validityWords },
-  { name: 'Price age', figure: true, cell: (offer) => <PriceAge offer={offer} short /> },
+  { name: 'Holds', wideOnly: true, cell: validityWords },
+  { name: 'Price age', figure: true, wideOnly: true, cell: (offer) => <PriceAge offer={offer} short /> },
+  {
+    name: 'Why',
+    phoneOnly: true,
+    cell: (offer) => (offer.tooOld ? <PriceAge offer={offer} /> : validityWords(offer)),
+  },
 ];
 
 /** Offers to ask for again: those that end soon, then the oldest prices beyond the house rule. */

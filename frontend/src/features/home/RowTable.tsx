@@ -12,6 +12,8 @@ export interface RowColumn<Row> {
   figure?: boolean;
   /** Left out on a narrow screen. */
   wideOnly?: boolean;
+  /** Stands on a narrow screen in place of what is left out there. */
+  phoneOnly?: boolean;
   cell: (row: Row) => ReactNode;
 }
 
@@ -30,6 +32,7 @@ export function RowTable<Row>({ label, columns, rows, keyOf, pathOf }: RowTableP
   const wide = (column: RowColumn<Row>) => ({
     ...(column.figure ? { whiteSpace: 'nowrap' } : {}),
     ...(column.wideOnly ? { display: { xs: 'none', sm: 'table-cell' } } : {}),
+    ...(column.phoneOnly ? { display: { sm: 'none' } } : {}),
   });
   return (
     <TableContainer>

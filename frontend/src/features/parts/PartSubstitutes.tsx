@@ -15,7 +15,7 @@ import type { Part, Substitute } from '../../api/types';
 import { CopyTable } from '../../components/CopyTable';
 import { EmptyState } from '../../components/EmptyState';
 import { ErrorState } from '../../components/ErrorState';
-import { formatPlain, NOTHING } from '../../components/figures';
+import { formatQuantity, NOTHING } from '../../components/figures';
 import { LoadingRows } from '../../components/LoadingRows';
 import { moneyWords } from '../../components/moneyText';
 import { numberOrNull, numberProblem } from '../../components/NumberField';
@@ -127,23 +127,23 @@ function SubstituteRow({ item, unit, priced }: SubstituteRowProps) {
       </TableCell>
       <TableCell sx={{ whiteSpace: 'nowrap' }}>{arrivalWords(item)}</TableCell>
       <TableCell align="right" sx={WIDE}>
-        {formatPlain(onShelf, 3)}
+        {formatQuantity(onShelf)}
       </TableCell>
       {priced && (
-        <TableCell align="right" sx={{ whiteSpace: 'nowrap' }}>
+        <TableCell align="right">
           {offer === null ? (
             NOTHING
           ) : (
             <>
-              {moneyWords(offer.lineTotal, offer.currency)}
-              <Box sx={quietSx}>{`${formatPlain(offer.orderQuantity, 3)} ${unit}, ${offer.supplier}`}</Box>
+              <Box sx={{ whiteSpace: 'nowrap' }}>{moneyWords(offer.lineTotal, offer.currency)}</Box>
+              <Box sx={quietSx}>{`${formatQuantity(offer.orderQuantity)} ${unit}, ${offer.supplier}`}</Box>
             </>
           )}
         </TableCell>
       )}
       <TableCell sx={WIDE}>
         <Box sx={quietSx}>
-          {differences.length === 0 ? 'the same in every figure' : differences.join(' · ')}
+          {differences.length + toCheck.length === 0 ? 'nothing' : differences.join(' · ')}
         </Box>
         <ToCheck toCheck={toCheck} />
       </TableCell>
