@@ -52,11 +52,11 @@ export function CloseOrOpen<Thing extends { version: number }>(props: CloseOrOpe
     <>
       {closed ? (
         <Button variant="outlined" disabled={busy} onClick={() => void set(thing.version, false)}>
-          Open again
+          Open {name} again
         </Button>
       ) : (
         <Button variant="outlined" color="error" disabled={busy} onClick={() => setAsking(true)}>
-          Close
+          Close {name}
         </Button>
       )}
       <ConfirmDialog

@@ -1,20 +1,26 @@
 import TextField from '@mui/material/TextField';
-import type { ReactNode } from 'react';
+import { isCalendarDate } from '@stageyard/libs/bill-of-materials';
 import { useController, type Control, type FieldPath, type FieldValues } from 'react-hook-form';
+import { formatDay } from './figures';
 
 interface DateFieldProps<Form extends FieldValues> {
   control: Control<Form>;
   name: FieldPath<Form>;
   label: string;
-  hint?: ReactNode;
+  hint?: string;
+  /** Stands in place of the hint while no day is given. */
+  blank?: string;
   required?: boolean;
   /** Says what is wrong with a day that is given; null when nothing is. */
   check?: (day: string) => string | null;
 }
 
-/** A day of the calendar in the browser's own field; the form holds `YYYY-MM-DD`, or blank. */
+/**
+ * A day of the calendar in the browser's own field, which may write 12/01 for the first of December: the day in words
+ * stands below. The form holds `YYYY-MM-DD`, or blank.
+ */
 export function DateField<Form extends FieldValues>(props: DateFieldProps<Form>) {
-  const { control, name, label, hint, required, check } = props;
+  const { control, name, label, hint, blank, required, check } = props;
   const { field, fieldState } = useController({
     control,
     name,
@@ -27,6 +33,7 @@ export function DateField<Form extends FieldValues>(props: DateFieldProps<Form>)
     },
   });
   const { ref, ...input } = field;
+  const day = String(field.value ?? '');
   const error = fieldState.error?.message;
   return (
     <TextField
@@ -37,7 +44,9 @@ export function DateField<Form extends FieldValues>(props: DateFieldProps<Form>)
       fullWidth
       required={required}
       error={error !== undefined}
-      helperText={error ?? hint}
+      helperText={
+        error ?? (isCalendarDate(day) ? [formatDay(day), hint].filter(Boolean).join(' · ') : (blank ?? hint))
+      }
       slotProps={{ htmlInput: { min: '1990-01-01', max: '2100-12-31' } }}
     />
   );

@@ -96,7 +96,8 @@ export function OfferFormFields({ form, isNew, unit }: OfferFormFieldsProps) {
             control={control}
             name="pricedOn"
             label="Priced on"
-            hint="The price’s age counts from here"
+            hint="its age counts from here"
+            blank="The price’s age counts from here"
             required
           />
           <DateField control={control} name="validFrom" label="Valid from" required />
@@ -104,7 +105,7 @@ export function OfferFormFields({ form, isNew, unit }: OfferFormFieldsProps) {
             control={control}
             name="validUntil"
             label="Valid until"
-            hint="Blank: until further notice"
+            blank="Blank: until further notice"
             check={(day) =>
               day < getValues('validFrom') ? 'It ends before it starts. Mend one of the days.' : null
             }
@@ -120,7 +121,7 @@ export function OfferFormFields({ form, isNew, unit }: OfferFormFieldsProps) {
 
 const gridSx = {
   display: 'grid',
-  gridTemplateColumns: { xs: '1fr', sm: 'repeat(auto-fill, minmax(200px, 1fr))' },
+  gridTemplateColumns: { xs: '1fr', sm: 'repeat(auto-fill, minmax(225px, 1fr))' },
   columnGap: 1.5,
   rowGap: 1.5,
   alignItems: 'start',

@@ -3,6 +3,7 @@ import TextField from '@mui/material/TextField';
 import { useState } from 'react';
 import { bookOffers, previewOffers } from '../../api/hooks/useOfferPaste';
 import { readOffersAgain } from '../../api/hooks/useOffer';
+import { formatDay } from '../../components/figures';
 import { PasteDialog } from '../../components/paste/PasteDialog';
 import { SupplierPicker } from '../../components/SupplierPicker';
 import { todayIso } from '../../components/today';
@@ -73,7 +74,11 @@ export function PasteOffers({ supplier, onClose }: PasteOffersProps) {
             required
             value={pricedOn}
             onChange={(event) => setPricedOn(event.target.value)}
-            helperText="For rows that name no day"
+            helperText={
+              pricedOn === ''
+                ? 'For rows that name no day'
+                : `${formatDay(pricedOn)}, for rows that name no day`
+            }
           />
           <TextField
             type="date"
@@ -81,7 +86,13 @@ export function PasteOffers({ supplier, onClose }: PasteOffersProps) {
             value={validUntil}
             onChange={(event) => setValidUntil(event.target.value)}
             error={ends}
-            helperText={ends ? 'This day is past already.' : 'Blank: until further notice'}
+            helperText={
+              ends
+                ? 'This day is past already.'
+                : validUntil === ''
+                  ? 'Blank: until further notice'
+                  : formatDay(validUntil)
+            }
           />
           <TextField
             label="Source"
