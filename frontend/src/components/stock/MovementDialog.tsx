@@ -64,7 +64,10 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
   return (
     <Dialog
       open
-      onClose={onClose}
+      onClose={(_, reason) => {
+        // A click beside the dialog must not throw away what was typed.
+        if (reason !== 'backdropClick' || !formState.isDirty) onClose();
+      }}
       fullWidth
       maxWidth="xs"
       fullScreen={narrow}
@@ -101,6 +104,7 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
               }
               {...limits}
               required
+              autoFocus={number !== null && act === kind}
               unit={item?.unit ?? 'pcs'}
               {...(act === 'corrected' ? { hint: 'Below zero takes off, such as −2' } : {})}
             />

@@ -44,7 +44,7 @@ export default function AddOfferPage() {
       supplierCode: form.supplierCode,
     });
     tell(`Offer of ${offer.supplier.name} for ${offer.part.number} added.`);
-    return () => void navigate(`/offers/${encodeURIComponent(offer.id)}`);
+    return () => void navigate(`/offers/${encodeURIComponent(offer.id)}`, { replace: true });
   };
   const back =
     part === ''

@@ -23,7 +23,7 @@ export default function AddPartPage() {
     const part = await answer(api.POST('/api/parts', { body: inputOf(form) }));
     refresh();
     tell(`${part.number} added.`);
-    return () => void navigate(`/parts/${encodeURIComponent(part.number)}`);
+    return () => void navigate(`/parts/${encodeURIComponent(part.number)}`, { replace: true });
   };
 
   if (!can('parts.edit')) {

@@ -15,7 +15,7 @@ export default function AddSupplierPage() {
   const save = async (form: SupplierForm) => {
     const supplier = await addSupplier(inputOfSupplier(form));
     tell(`${supplier.code} ${supplier.name} added.`);
-    return () => void navigate(`/suppliers/${encodeURIComponent(supplier.code)}`);
+    return () => void navigate(`/suppliers/${encodeURIComponent(supplier.code)}`, { replace: true });
   };
 
   return (

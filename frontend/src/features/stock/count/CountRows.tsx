@@ -30,7 +30,7 @@ function Row({ count, onRemove, onAgain, onSendAgain }: { count: Count } & Omit<
         <Typography component="span" className="part-number" sx={{ fontWeight: 600 }}>
           {number}
         </Typography>
-        <Typography component="span" color="textSecondary" noWrap sx={{ flex: 1, minWidth: 0 }}>
+        <Typography component="span" color="textSecondary" sx={{ flex: 1, minWidth: 0 }}>
           {description}
         </Typography>
         <Typography component="span" className="number" sx={{ whiteSpace: 'nowrap', fontWeight: 600 }}>

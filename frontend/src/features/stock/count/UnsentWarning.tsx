@@ -24,8 +24,8 @@ export function UnsentWarning({ count }: { count: number }) {
       onCancel={() => blocker.reset?.()}
     >
       <Typography>
-        They stay on this device. They are sent when you open this page again with a network; until then the
-        books do not know them.
+        {count === 1 ? 'It stays on this device. It is' : 'They stay on this device. They are'} sent when you
+        open this page again with a network; until then the books do not know {count === 1 ? 'it' : 'them'}.
       </Typography>
     </ConfirmDialog>
   );
