@@ -10,11 +10,10 @@ export function setUpReading(database: Database.Database): void {
   database.pragma('query_only = ON');
 }
 
-/** Settings of every connection that writes. */
+/** Settings of the connection inside the write queue, which waits for the disk itself: see `WriteLog`. */
 export function setUpWriting(database: Database.Database): void {
   setUpShared(database);
-  // In WAL mode the weaker setting may lose the last commits when the power fails.
-  database.pragma('synchronous = FULL');
+  database.pragma('synchronous = NORMAL');
 }
 
 /** A connection for a thread that only reads. @throws Error when there is no such file */
@@ -27,7 +26,9 @@ export function openReading(file: string): Database.Database {
 /** A connection for a thread that writes in turns of the write queue. @throws Error when there is no such file */
 export function openWriting(file: string): Database.Database {
   const database = new Database(file, { fileMustExist: true });
-  setUpWriting(database);
+  setUpShared(database);
+  // Every commit waits for the disk: with the weaker setting a power failure may lose the last ones.
+  database.pragma('synchronous = FULL');
   database.pragma('foreign_keys = ON');
   return database;
 }

@@ -1,10 +1,11 @@
 import { statSync } from 'node:fs';
 import path from 'node:path';
-import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { type EntityManager } from 'typeorm';
 import { openWritingSource } from './data-sources.js';
 import { openTempDatabase, type TempDatabase } from '../testing/temp-database.js';
 import { DATABASE_FILE } from './data-sources.js';
+import { WriteLog } from './write-log.js';
 import { UserEntity } from '../users/entities/user.entity.js';
 
 let database: TempDatabase;
@@ -44,6 +45,25 @@ describe('WriteQueue', () => {
     await expect(failing).rejects.toThrow('the reason');
     await Promise.all([before, after]);
     expect(await ids()).toEqual(['a', 'c']);
+  });
+
+  it('says that a write is done only once it is on the disk, and tells when it could not get there', async () => {
+    const events: string[] = [];
+    const log = new WriteLog(path.join(database.dataDir, DATABASE_FILE));
+    const toDisk = log.toDisk.bind(log);
+    const spy = vi.spyOn(WriteLog.prototype, 'toDisk').mockImplementationOnce(async () => {
+      events.push(`on its way: ${(await ids()).join()}`);
+      await toDisk();
+      events.push('on the disk');
+    });
+    await database.queue.run(insert('a')).then(() => events.push('done'));
+    expect(events).toEqual(['on its way: a', 'on the disk', 'done']);
+    spy.mockRejectedValueOnce(new Error('EIO'));
+    await expect(database.queue.run(insert('b'))).rejects.toThrow('EIO');
+    await database.queue.run(insert('c'));
+    expect(spy).toHaveBeenCalledTimes(3);
+    spy.mockRestore();
+    await log.close();
   });
 
   it('runs one work at a time, in the order of the calls', async () => {

@@ -1,6 +1,7 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
 import { Injectable, Logger, type OnApplicationShutdown } from '@nestjs/common';
 import { type DataSource, type EntityManager } from 'typeorm';
+import { WriteLog } from './write-log.js';
 
 interface RunningWrite {
   open: boolean;
@@ -18,6 +19,7 @@ const SLOW_TURN_MS = 2000;
 @Injectable()
 export class WriteQueue implements OnApplicationShutdown {
   readonly #source: DataSource;
+  readonly #log: WriteLog;
   readonly #running = new AsyncLocalStorage<RunningWrite>();
   readonly #logger = new Logger(WriteQueue.name);
   #tail: Promise<unknown> = Promise.resolve();
@@ -28,16 +30,22 @@ export class WriteQueue implements OnApplicationShutdown {
   /** @param afterClose called once the last write is done and the database is closed */
   constructor(source: DataSource, afterClose: () => void = () => undefined) {
     this.#source = source;
+    this.#log = new WriteLog(String(source.options.database));
     this.#afterClose = afterClose;
   }
 
   /**
-   * Runs the work in a transaction once everything queued before it is settled. Resolves after the commit.
+   * Runs the work in a transaction once everything queued before it is settled. Resolves once the commit is on the disk.
    * @param work changes the database only through the manager it is given
    * @throws Error when called from inside another work: that would wait for itself for ever
    */
   async run<T>(work: (manager: EntityManager) => Promise<T>): Promise<T> {
-    return this.#enqueue((write) => this.#running.run(write, () => this.#source.transaction(work)), SLOW_MS);
+    return this.#enqueue(async (write) => {
+      const result = await this.#running.run(write, () => this.#source.transaction(work));
+      write.open = false;
+      await this.#log.toDisk();
+      return result;
+    }, SLOW_MS);
   }
 
   /**
@@ -62,6 +70,7 @@ export class WriteQueue implements OnApplicationShutdown {
   async onApplicationShutdown(): Promise<void> {
     this.#closed = true;
     await this.#tail;
+    await this.#log.close();
     if (this.#source.isInitialized) {
       // A reading connection that closes last cannot empty the log: done here, a copied folder is whole without it.
       await this.#source.query('PRAGMA wal_checkpoint(TRUNCATE)');
