@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import { Module } from '@nestjs/common';
 import { JwtModule } from '@nestjs/jwt';
 import { TypeOrmModule } from '@nestjs/typeorm';
@@ -12,7 +13,8 @@ import { SessionsService } from './sessions.service.js';
     JwtModule.registerAsync({
       inject: [SETTINGS],
       useFactory: (settings: Settings) => ({
-        secret: sessionSecret(settings.dataDir),
+        // As a key object: a text would be tried as a public key first, with every request.
+        secret: createSecretKey(sessionSecret(settings.dataDir), 'utf8'),
         signOptions: { algorithm: 'HS256' as const },
         verifyOptions: { algorithms: ['HS256' as const] },
       }),
