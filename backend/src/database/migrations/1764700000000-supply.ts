@@ -10,10 +10,14 @@ const COLUMNS: [table: string, column: string, type: string][] = [
   ['train', 'offerChoices', 'text'],
 ];
 
-/** Parts whose shelf is watched are few among many; substitutes of keys, screws and housings are found by length. */
+/**
+ * Parts whose shelf is watched are few among many; substitutes of keys, screws and housings are found by length; gears
+ * by mass are a usual list.
+ */
 const INDEXES: [name: string, on: string][] = [
   ['part_least_stock', '"part" ("leastStock") WHERE "leastStock" IS NOT NULL'],
   ['part_kind_length', '"part" ("kind", "length")'],
+  ['part_kind_mass', '"part" ("kind", "mass")'],
 ];
 
 /** Suppliers, offers and stock; trains remember how many are built and what a person chose for their lines. */

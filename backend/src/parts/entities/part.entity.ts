@@ -12,6 +12,7 @@ import type { Hand, PartKind, PartStanding, PartSupply } from '../part-kinds.js'
 @Index('part_kind_bore', ['kind', 'bore'])
 @Index('part_kind_shaft', ['kind', 'shaftDiameter'])
 @Index('part_kind_length', ['kind', 'length'])
+@Index('part_kind_mass', ['kind', 'mass'])
 @Index('part_standing_number', ['standing', 'number'])
 @Index('part_standing_updated', ['standing', 'updatedAt'])
 export class Part {
