@@ -12,7 +12,8 @@ export async function benchLoading(server, count) {
   });
   console.log(
     `Loading ${loaded.parts.toLocaleString('en-GB')} parts, ${loaded.offers.toLocaleString('en-GB')} offers and ` +
-      `${loaded.counts.toLocaleString('en-GB')} opening counts into a serving server`,
+      `${loaded.counts.toLocaleString('en-GB')} opening counts into a serving server.\n` +
+      `Meanwhile two people ask for pages, each a tenth of a second after the last, and one changes a part four times a second`,
   );
   printTable([['', 'requests', 'refused', 'half within', '99 % within', 'longest'], ...rows]);
   const { body } = await server.request('GET', '/api/parts?text=pattern&size=1');

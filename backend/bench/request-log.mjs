@@ -9,11 +9,12 @@ const READS = [
   '/api/parts/facets',
   '/api/parts/BENCH-1',
 ];
-const READ_EVERY_MS = 5;
+const READ_EVERY_MS = 100;
 const WRITE_EVERY_MS = 250;
 
 /**
- * Two people who ask for pages every few milliseconds, and one who changes a part four times a second.
+ * Two people who each ask for another page a tenth of a second after the last, and one who changes a part four times a
+ * second.
  * @returns ends it and gives the log: `{ kind, status, ms }` of every request
  */
 export async function keepAsking(server) {
