@@ -69,7 +69,7 @@ const COLUMNS: Column[] = [
   {
     field: 'validUntil',
     headerName: 'Holds',
-    width: 158,
+    width: 166,
     valueGetter: (_, offer) => validityWords(offer),
     renderCell: ({ row, value }) => <OfferStateWord state={row.state} words={String(value)} />,
   },

@@ -49,7 +49,7 @@ export function PasteRows({ preview }: { preview: PastePreview }) {
         </ToggleButtonGroup>
       </Box>
       <Typography variant="body2" color="textSecondary" sx={{ mb: 0.75 }}>
-        Read as: {columns.map(columnWords).join(', ')}.
+        {columnsWords(columns)}
       </Typography>
       <TableContainer sx={{ maxHeight: 420, border: '1px solid', borderColor: 'line.rule' }}>
         <CopyTable label="What booking would do" stickyHeader>
@@ -112,6 +112,16 @@ function Row({ row }: { row: PasteRow }) {
 }
 
 const WIDE_ONLY = { display: { xs: 'none', sm: 'table-cell' } } as const;
+
+/** Columns of the text that no name fits come from the server under this name. */
+const LEFT_OUT = 'left out';
+
+/** "Read as: Part number, Price (from “Netto”). Left out: “Weight”." */
+function columnsWords(columns: PastePreview['columns']): string {
+  const read = columns.filter(({ name }) => name !== LEFT_OUT).map(columnWords);
+  const left = columns.filter(({ name }) => name === LEFT_OUT).map(({ from }) => `“${from ?? ''}”`);
+  return `Read as: ${read.join(', ')}.${left.length > 0 ? ` Left out: ${left.join(', ')}.` : ''}`;
+}
 
 const columnWords = ({ name, from }: PastePreview['columns'][number]): string =>
   from === null

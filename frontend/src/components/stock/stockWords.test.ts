@@ -27,7 +27,7 @@ describe('words about stock', () => {
   });
 
   it('says what is missing only where something is', () => {
-    expect(shortWords(newStockItem({ quantity: 3, leastStock: 5, low: true }))).toBe('2');
+    expect(shortWords(newStockItem({ quantity: 3, leastStock: 5, low: true }))).toBe('2 pcs');
     expect(shortWords(newStockItem({ quantity: 5, leastStock: 5, low: false }))).toBe('–');
   });
 

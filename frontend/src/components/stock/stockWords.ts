@@ -32,10 +32,10 @@ export function bookedWords({ number, kind, change, counted, after, unit, place 
   return `${number}: ${amount} ${act} at ${place}${now}.`;
 }
 
-/** How much is missing to the least stock; `–` when the part is not watched or has enough. */
-export function shortWords({ low, leastStock, quantity }: StockItem): string {
+/** How much is missing to the least stock, with its unit; `–` when the part is not watched or has enough. */
+export function shortWords({ low, leastStock, quantity, unit }: StockItem): string {
   if (!low || leastStock === null) return NOTHING;
-  return figureWords(leastStock - quantity);
+  return quantityWords(leastStock - quantity, unit);
 }
 
 /** `Rack A: 12, Rack B: 3`; places with none left only where there is no other: that is where it belongs. */

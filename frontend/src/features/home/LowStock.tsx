@@ -2,8 +2,9 @@ import { useMe } from '../../api/hooks/useMe';
 import { useStock } from '../../api/hooks/useStock';
 import type { StockItem } from '../../api/types';
 import { EmptyState } from '../../components/EmptyState';
+import { NOTHING } from '../../components/figures';
 import { Sheet } from '../../components/Sheet';
-import { figureWords, quantityWords, shortWords } from '../../components/stock/stockWords';
+import { quantityWords, shortWords } from '../../components/stock/stockWords';
 import { CodeLink } from './CodeLink';
 import { MoreLink } from './MoreLink';
 import { RowTable, type RowColumn } from './RowTable';
@@ -16,7 +17,12 @@ const COLUMNS: RowColumn<StockItem>[] = [
   { name: 'Number', cell: (item) => <CodeLink to={pathOf(item)} code={item.number} /> },
   { name: 'Description', cell: (item) => item.description },
   { name: 'On shelf', figure: true, cell: (item) => quantityWords(item.quantity, item.unit) },
-  { name: 'Least', figure: true, wideOnly: true, cell: (item) => figureWords(item.leastStock) },
+  {
+    name: 'Least',
+    figure: true,
+    wideOnly: true,
+    cell: ({ leastStock, unit }) => (leastStock === null ? NOTHING : quantityWords(leastStock, unit)),
+  },
   { name: 'Short by', figure: true, cell: shortWords },
 ];
 

@@ -11,6 +11,7 @@ import { CloseOrOpen } from '../../components/CloseOrOpen';
 import { ErrorState } from '../../components/ErrorState';
 import { formatWhen } from '../../components/figures';
 import { LoadingRows } from '../../components/LoadingRows';
+import { NoPermission } from '../../components/NoPermission';
 import { useNotices } from '../../components/Notices';
 import { PageHeader } from '../../components/PageHeader';
 import { Sheet } from '../../components/Sheet';
@@ -31,6 +32,7 @@ export default function OfferPage() {
   const showEdit = (on: boolean) => setParams(on ? { edit: '1' } : {}, { replace: !on });
 
   if (offer === undefined) {
+    const hidden = problem?.statusCode === 403;
     const back = (
       <MuiLink component={Link} to="/offers">
         All offers
@@ -38,9 +40,11 @@ export default function OfferPage() {
     );
     return (
       <>
-        <PageHeader title="Offer" actions={problem === null ? undefined : back} />
+        <PageHeader title="Offer" actions={problem === null || hidden ? undefined : back} />
         {problem === null ? (
           <LoadingRows rows={10} label="Loading the offer" />
+        ) : hidden ? (
+          <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />
         ) : (
           <ErrorState problem={problem} onRetry={() => void mutate()} what="the offer" />
         )}

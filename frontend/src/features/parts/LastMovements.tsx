@@ -39,7 +39,7 @@ export function LastMovements({ number }: { number: string }) {
               <TableCell>When</TableCell>
               <TableCell>What</TableCell>
               <TableCell align="right">Change</TableCell>
-              <TableCell align="right" sx={WIDE}>
+              <TableCell align="right" sx={{ ...WIDE, ...ONE_LINE }}>
                 Then there
               </TableCell>
               <TableCell>Place</TableCell>

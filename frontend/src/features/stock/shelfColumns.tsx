@@ -4,7 +4,7 @@ import { Link } from 'react-router-dom';
 import type { StockItem } from '../../api/types';
 import { formatDay, NOTHING } from '../../components/figures';
 import type { CopiedCell, DataColumn } from '../../components/gridText';
-import { figureWords, placesWords, quantityWords, shortWords } from '../../components/stock/stockWords';
+import { placesWords, quantityWords, shortWords } from '../../components/stock/stockWords';
 
 type Column = DataColumn<StockItem>;
 
@@ -63,11 +63,12 @@ const COLUMNS: Column[] = [
     valueGetter: (_, { quantity, unit }) => quantityWords(quantity, unit),
   },
   {
-    ...figure('leastStock', 'Least', 76),
-    valueFormatter: (value: number | null) => figureWords(value),
+    ...figure('leastStock', 'Least', 90),
+    valueGetter: (_, { leastStock, unit }) =>
+      leastStock === null ? NOTHING : quantityWords(leastStock, unit),
   },
   {
-    ...figure('shortBy', 'Short by', 88),
+    ...figure('shortBy', 'Short by', 92),
     valueGetter: (_, item) => shortWords(item),
     renderCell: ({ row }) => (row.low ? <Low>{shortWords(row)}</Low> : NOTHING),
   },

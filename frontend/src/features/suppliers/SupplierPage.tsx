@@ -10,6 +10,7 @@ import { CloseOrOpen } from '../../components/CloseOrOpen';
 import { ErrorState } from '../../components/ErrorState';
 import { formatWhen } from '../../components/figures';
 import { LoadingRows } from '../../components/LoadingRows';
+import { NoPermission } from '../../components/NoPermission';
 import { useNotices } from '../../components/Notices';
 import { OffersTable } from '../../components/offers/OffersTable';
 import { PageHeader } from '../../components/PageHeader';
@@ -31,6 +32,7 @@ export default function SupplierPage() {
   const showEdit = (on: boolean) => setParams(on ? { edit: '1' } : {}, { replace: !on });
 
   if (supplier === undefined) {
+    const hidden = problem?.statusCode === 403;
     const back = (
       <MuiLink component={Link} to="/suppliers">
         All suppliers
@@ -38,9 +40,11 @@ export default function SupplierPage() {
     );
     return (
       <>
-        <PageHeader title={code} actions={problem === null ? undefined : back} />
+        <PageHeader title={code} actions={problem === null || hidden ? undefined : back} />
         {problem === null ? (
           <LoadingRows rows={10} label="Loading the supplier" />
+        ) : hidden ? (
+          <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />
         ) : (
           <ErrorState problem={problem} onRetry={() => void mutate()} what={`supplier ${code}`} />
         )}
