@@ -23,7 +23,15 @@ export const OFFER_COLUMNS: readonly ColumnSpec<OfferColumn>[] = [
   {
     key: 'supplierPartNumber',
     label: 'Supplier part number',
-    synonyms: ['supplier number', 'supplier part no', 'your number', 'order number', 'order no'],
+    synonyms: [
+      'their number',
+      'their part number',
+      'supplier number',
+      'supplier part no',
+      'your number',
+      'order number',
+      'order no',
+    ],
   },
   { key: 'from', label: 'From quantity', synonyms: ['from', 'quantity', 'qty', 'break', 'from qty'] },
   { key: 'price', label: 'Price', synonyms: ['unit price', 'price each', 'net price'] },
