@@ -5,7 +5,7 @@ import { ageWords } from './offerWords';
 
 interface PriceAgeProps {
   offer: Pick<Offer, 'ageDays' | 'tooOld' | 'pricedOn'>;
-  /** In a column of ages: "40 days" rather than "40 days old". */
+  /** In a column of ages: "40 days" rather than "40 days old", "today" rather than "of today". */
   short?: boolean;
 }
 
@@ -17,7 +17,7 @@ export function PriceAge({ offer: { ageDays, tooOld, pricedOn }, short = false }
       title={`Priced on ${formatDay(pricedOn)}`}
       sx={{ whiteSpace: 'nowrap', ...(tooOld ? { color: 'warning.main', fontWeight: 600 } : {}) }}
     >
-      {short ? ageWords(ageDays).replace(/ old$/, '') : ageWords(ageDays)}
+      {short ? ageWords(ageDays).replace(/^of | old$/, '') : ageWords(ageDays)}
       {tooOld && ', too old'}
     </Box>
   );
