@@ -36,7 +36,8 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
   const form = useForm<MovementForm>({
     defaultValues: { number: number ?? '', kind, quantity: '', place: '', reason: '' },
   });
-  const { control, handleSubmit, formState, setError } = form;
+  const { control, handleSubmit, setError } = form;
+  const { isDirty, isSubmitting } = form.formState;
   const typed = useWatch({ control });
   const settled = useSettled((typed.number ?? '').trim());
   const { item, problem } = useStockItem(number ?? settled);
@@ -66,7 +67,7 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
       open
       onClose={(_, reason) => {
         // A click beside the dialog must not throw away what was typed.
-        if (reason !== 'backdropClick' || !formState.isDirty) onClose();
+        if (reason !== 'backdropClick' || !isDirty) onClose();
       }}
       fullWidth
       maxWidth="xs"
@@ -123,7 +124,7 @@ export function MovementDialog({ number, kind, onClose }: MovementDialogProps) {
         </DialogContent>
         <DialogActions>
           <Button onClick={onClose}>Cancel</Button>
-          <Button type="submit" variant="contained" disabled={formState.isSubmitting}>
+          <Button type="submit" variant="contained" disabled={isSubmitting}>
             {ACT_NAMES[act]}
           </Button>
         </DialogActions>
