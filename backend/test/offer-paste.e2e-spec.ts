@@ -94,7 +94,7 @@ describe('500 pasted rows of which 3 are wrong', () => {
       '12',
     ]);
     Object.assign(rows[99] ?? [], { 0: 'KW-99999' });
-    Object.assign(rows[249] ?? [], { 3: '12,50' });
+    Object.assign(rows[249] ?? [], { 3: '12,500' });
     Object.assign(rows[499] ?? [], { 3: '-4.00' });
     const head = ['Part number', 'Supplier part number', 'From quantity', 'Price', 'Lead time days'];
     text = [head, ...rows].map((cells) => cells.join('\t')).join('\r\n');
@@ -117,7 +117,7 @@ describe('500 pasted rows of which 3 are wrong', () => {
           },
         ],
       ],
-      [251, [{ column: 'Price', value: '12,50', message: expect.stringContaining('comma') as string }]],
+      [251, [{ column: 'Price', value: '12,500', message: expect.stringContaining('two ways') as string }]],
       [501, [{ column: 'Price', value: '-4.00', message: expect.stringContaining('below 0') as string }]],
     ]);
     expect(await countOf(supplierCode)).toBe(0);
@@ -362,7 +362,7 @@ describe('what a pasted row changes', () => {
 
 describe('a pasted row is wrong', () => {
   it.each([
-    ['with a comma before the decimals', 'X\t\t1\t3,50', 'Price'],
+    ['that can be read two ways', 'X\t\t1\t3,500', 'Price'],
     ['with text in place of a price', 'X\t\t1\ton request', 'Price'],
     ['without a price', 'X\t\t1', 'Price'],
     ['with a price of nothing', 'X\t\t1\t0.00', 'Price'],

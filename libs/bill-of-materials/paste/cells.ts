@@ -15,12 +15,14 @@ const PLAIN = /^[-\u2212+]?\d+(\.\d+)?$/;
 const GROUPED = /^[-\u2212+]?[1-9]\d{0,2}(,\d{3})+(\.\d+)?$/;
 /** `1,500` is one and a half in one country and fifteen hundred in the next. */
 const EITHER_WAY = /^[-\u2212+]?[1-9]\d{0,2},\d{3}$/;
+/** `5,40` and `1.234,5` have a comma before their decimals and nothing else: two digits group no thousands. */
+const COMMA_DECIMALS = /^([-\u2212+]?(?:\d{1,3}(?:\.\d{3})+|\d+)),(\d{1,2})$/;
 const SLASHED = /^(\d{1,2})\/(\d{1,2})\/(\d{4})$/;
 const DOTTED = /^(\d{1,2})\.(\d{1,2})\.(\d{4})$/;
 
-/** A figure with a point before its decimals, at most three unless told otherwise. `1,5` and `1,500` are refused. */
+/** A figure with at most three decimals unless told otherwise. `1,5` is read as 1.5; `1,500` is refused. */
 export function cellDecimal(text: string, bounds: CellBounds, decimals = 3): Cell<number> {
-  const clean = text.trim();
+  const clean = withPoint(text.trim());
   if (clean === '') return blank();
   const problem = figureProblem(clean);
   if (problem !== null) return wrong(problem);
@@ -61,14 +63,15 @@ export function cellMoney(text: string, currency: string | null): Cell<Money> {
   if (clean === '') return blank();
   const [code] = /^[A-Za-z]{3}(?=\s)|(?<=\s)[A-Za-z]{3}$/.exec(clean) ?? [];
   const figure = (code === undefined ? clean : clean.replace(code, '')).trim();
+  const pointed = withPoint(figure);
   const decimals = currencyDecimals(code?.toUpperCase() ?? currency ?? '');
   // Without decimals the comma can only group thousands.
-  if (decimals !== 0 || !EITHER_WAY.test(figure)) {
-    const problem = figureProblem(figure);
+  if (decimals !== 0 || !EITHER_WAY.test(pointed)) {
+    const problem = figureProblem(pointed);
     if (problem !== null) return wrong(problem);
   }
   try {
-    const value = parseMoney(clean, currency ?? undefined);
+    const value = parseMoney(clean.replace(figure, pointed), currency ?? undefined);
     return value.minor < 0
       ? wrong(`${quoted(clean)} is below 0. A price cannot be negative.`)
       : { value, problem: null };
@@ -76,6 +79,12 @@ export function cellMoney(text: string, currency: string | null): Cell<Money> {
     if (!(error instanceof DomainError)) throw error;
     return wrong(error.message);
   }
+}
+
+/** The figure with a point before its decimals, where a comma can be nothing else. */
+function withPoint(figure: string): string {
+  const [, whole, tail] = COMMA_DECIMALS.exec(figure) ?? [];
+  return whole === undefined || tail === undefined ? figure : `${whole.replaceAll('.', '')}.${tail}`;
 }
 
 function figureProblem(figure: string): string | null {

@@ -162,6 +162,10 @@ describe('figures in cells', () => {
     ['12', 12],
     ['+3', 3],
     ['1,234.5', 1234.5],
+    // A comma before one or two digits groups no thousands.
+    ['1,5', 1.5],
+    ['12,50', 12.5],
+    ['1.234,5', 1234.5],
     ['999,999.25', 999_999.25],
     [' 7 ', 7],
     ['', null],
@@ -170,9 +174,8 @@ describe('figures in cells', () => {
   });
 
   it.each([
-    ['1,5', /comma before its decimals\. Write 1\.5\./],
-    ['0,125', /Write 0\.125\./],
-    ['1.234,5', /Write 1234\.5\./],
+    ['0,125', /comma before its decimals\. Write 0\.125\./],
+    ['1.234,567', /Write 1234\.567\./],
     ['1,500', /two ways\. Write 1500, or 1\.500\./],
     ['1.5.2', /not a figure/],
     ['1 500', /not a figure/],
@@ -197,7 +200,7 @@ describe('figures in cells', () => {
     expect(cellWhole('10', bounds).value).toBe(10);
     expect(cellWhole('10.0', bounds).value).toBe(10);
     expect(cellWhole('10.5', bounds).problem).toMatch(/not a whole number/);
-    expect(cellWhole('1,5', bounds).problem).toMatch(/comma/);
+    expect(cellWhole('1,5', bounds).problem).toMatch(/not a whole number/);
     expect(cellWhole('0', { min: 0, max: 9 }).value).toBe(0);
     expect(cellWhole('-1', { min: 0, max: 9 }).problem).toMatch(/At least 0/);
   });
@@ -237,6 +240,10 @@ describe('amounts in cells', () => {
     ['12.5', 'EUR', money(1250, 'EUR')],
     ['12.50 EUR', null, money(1250, 'EUR')],
     ['1,234.50', 'EUR', money(123_450, 'EUR')],
+    ['5,40', 'EUR', money(540, 'EUR')],
+    ['12,50 EUR', null, money(1250, 'EUR')],
+    ['1.234,50', 'EUR', money(123_450, 'EUR')],
+    ['1,5', 'KWD', money(1500, 'KWD')],
     // Without decimals a comma can only group thousands.
     ['1,250', 'JPY', money(1250, 'JPY')],
     ['jpy 1,250', null, money(1250, 'JPY')],
@@ -247,9 +254,8 @@ describe('amounts in cells', () => {
   });
 
   it.each([
-    ['1,5', 'EUR', /comma before its decimals\. Write 1\.5\./],
-    ['12,50 EUR', null, /Write 12\.50\./],
-    ['1.234,50', 'EUR', /Write 1234\.50\./],
+    ['1,5', 'JPY', /decimals/],
+    ['0,125', 'KWD', /comma before its decimals\. Write 0\.125\./],
     ['1,250', 'EUR', /two ways/],
     ['1,250', 'KWD', /two ways/],
     ['-1.00', 'EUR', /cannot be negative/],
