@@ -32,6 +32,8 @@ test.describe('a librarian with a phone', () => {
     await receive(page, gear, 20, 'Journey rack 1');
     await page.goto('/stock/count');
     await page.getByLabel('Place').fill('journey RACK 1');
+    // The places of the books are offered once they are read.
+    await expect(page.getByRole('button', { name: 'Journey rack 1' })).toBeVisible();
     await page.keyboard.press('Enter');
     await expect(page.getByRole('heading', { level: 1 })).toHaveText('Count Journey rack 1');
 
