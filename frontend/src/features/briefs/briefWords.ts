@@ -20,7 +20,8 @@ export function briefWords(requirement: Requirement): string[] {
   if (helixAngleDeg) parts.push(`helix ${formatTrimmed(helixAngleDeg, 3)}°`);
   if (direction === 'same') parts.push('output with the input');
   if (direction === 'opposite') parts.push('output against the input');
-  if (requirement.buildQuantity !== undefined) parts.push(`${formatCount(requirement.buildQuantity)} to build`);
+  if (requirement.buildQuantity !== undefined)
+    parts.push(`${formatCount(requirement.buildQuantity)} to build`);
   return parts;
 }
 
