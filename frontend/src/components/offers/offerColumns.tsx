@@ -55,7 +55,7 @@ const COLUMNS: Column[] = [
   {
     field: 'state',
     headerName: 'State',
-    width: 80,
+    width: 92,
     sortable: false,
     renderCell: ({ row }) => <OfferStateWord state={row.state} />,
   },
