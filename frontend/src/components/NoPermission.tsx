@@ -14,3 +14,8 @@ export function NoPermission({ message }: { message?: string }) {
     </Box>
   );
 }
+
+/** The same for pages of suppliers, offers and prices. */
+export function NoPrices() {
+  return <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />;
+}

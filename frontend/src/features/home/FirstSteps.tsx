@@ -14,6 +14,11 @@ const STEPS = [
     why: 'A search prefers them; bearings, keys and seals fill the bill of materials.',
   },
   {
+    to: '/add-supplier',
+    name: 'Add your suppliers, then their price lists',
+    why: 'Paste them from a spreadsheet; trains then show what they cost.',
+  },
+  {
     to: '/briefs/new',
     name: 'Write the first brief',
     why: 'The ratio, the room and the duty; its search shows every sensible train.',

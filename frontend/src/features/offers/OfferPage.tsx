@@ -11,7 +11,7 @@ import { CloseOrOpen } from '../../components/CloseOrOpen';
 import { ErrorState } from '../../components/ErrorState';
 import { formatWhen } from '../../components/figures';
 import { LoadingRows } from '../../components/LoadingRows';
-import { NoPermission } from '../../components/NoPermission';
+import { NoPrices } from '../../components/NoPermission';
 import { useNotices } from '../../components/Notices';
 import { PageHeader } from '../../components/PageHeader';
 import { Sheet } from '../../components/Sheet';
@@ -44,7 +44,7 @@ export default function OfferPage() {
         {problem === null ? (
           <LoadingRows rows={10} label="Loading the offer" />
         ) : hidden ? (
-          <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />
+          <NoPrices />
         ) : (
           <ErrorState problem={problem} onRetry={() => void mutate()} what="the offer" />
         )}

@@ -1,7 +1,7 @@
 import Button from '@mui/material/Button';
 import { Link, useSearchParams } from 'react-router-dom';
 import { useMe } from '../../api/hooks/useMe';
-import { NoPermission } from '../../components/NoPermission';
+import { NoPrices } from '../../components/NoPermission';
 import { OffersTable } from '../../components/offers/OffersTable';
 import { PageHeader } from '../../components/PageHeader';
 import { PasteOffers } from './PasteOffers';
@@ -28,7 +28,7 @@ export default function OffersPage() {
     return (
       <>
         <PageHeader title="Offers" />
-        <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />
+        <NoPrices />
       </>
     );
   }

@@ -10,7 +10,7 @@ import { formatCount } from '../../components/figures';
 import { FilterBar } from '../../components/FilterBar';
 import { ChoiceFilter } from '../../components/FilterFields';
 import { FilterText } from '../../components/FilterText';
-import { NoPermission } from '../../components/NoPermission';
+import { NoPrices } from '../../components/NoPermission';
 import { PageHeader } from '../../components/PageHeader';
 import { useListState, writeSort, type ListState } from '../../components/useListState';
 import { LAPTOP_HIDDEN, NARROW_HIDDEN, supplierColumns, WIDE_HIDDEN } from './supplierColumns';
@@ -49,7 +49,7 @@ export default function SuppliersPage() {
     return (
       <>
         <PageHeader title="Suppliers" />
-        <NoPermission message="Suppliers and prices are for designers, librarians and purchasers." />
+        <NoPrices />
       </>
     );
   }
